@@ -1,0 +1,1 @@
+export { toSi, type Si } from './si'

@@ -1,0 +1,419 @@
+import type { Layout } from '@wedgeline/engine'
+import { z } from 'zod'
+import { toSi } from './si'
+
+/**
+ * The layout of a job: everything that a pour's checks and bars are made from. The layout file and the API share it.
+ * Lengths mm, forces kN, stresses MPa, angles degrees; each name ends in its unit.
+ */
+
+export const LAYOUT_FORMAT = 'wedgeline.layout'
+export const LAYOUT_VERSION = 1
+
+/** Sizes that a layout may have; docs/layout-format.md names them. */
+export const LIMITS = { anchors: 20_000, pours: 200, edges: 2_000, corners: 200, steel: 60_000 } as const
+
+const HUGE = 1e7
+export const idSchema = z
+  .string()
+  .regex(/^[A-Za-z0-9][A-Za-z0-9._:-]{0,63}$/, 'must be 1 to 64 letters, digits, dots, colons or dashes')
+export const text = (max: number) => z.string().trim().max(max)
+export const label = (max: number) => z.string().trim().min(1, 'must not be empty').max(max)
+const anywhere = z.number().min(-HUGE).max(HUGE)
+const positive = z.number().positive('must be more than 0').max(HUGE)
+const notNegative = z.number().min(0, 'must be 0 or more').max(HUGE)
+const share = z.number().gt(0, 'must be more than 0').max(1, 'must be at most 1')
+const azimuth = z.number().min(-360).max(360)
+const count = z.number().int('must be a whole number').min(0).max(1000)
+const barDiameter = z.union(
+  [6, 8, 10, 12, 16, 20, 25, 32, 40].map((d) => z.literal(d)),
+  'must be a bar size: 6, 8, 10, 12, 16, 20, 25, 32 or 40',
+)
+
+export const pointSchema = z.strictObject({ xMm: anywhere, yMm: anywhere })
+const outline = z.array(pointSchema).min(3, 'needs three points or more').max(LIMITS.corners)
+
+export const jobSettingsSchema = z.strictObject({
+  pocketToFaceMinMm: notNegative.default(25),
+  pocketToPocketMinMm: notNegative.default(25),
+  clearGapMinMm: notNegative.default(20),
+  nearFrom: z.number().min(0.9, 'must be 0.90 or more').max(1).default(0.95),
+  fykMPa: z.number().min(200).max(700).default(500),
+  stockLengthMm: z.number().min(3000).max(18000).default(12000),
+  barStandard: z.enum(['bs-8666-2020']).default('bs-8666-2020'),
+  reinforcementGrade: label(12).default('B500B'),
+  wedgeSpreadDeg: z.number().min(15).max(60).nullable().default(null),
+})
+
+export const acceptedReadingSchema = z.strictObject({
+  readingId: label(64),
+  acceptedBy: label(120),
+  acceptedAtMs: z.number().int(),
+  reason: label(2000),
+})
+
+export const factorSchema = z.strictObject({ name: label(40), value: z.number().positive().max(100), reason: label(500) })
+
+export const BASES = ['en-1992'] as const
+export const jobSchema = z.strictObject({
+  id: idSchema,
+  number: label(40),
+  title: label(120),
+  timeZone: label(60).default('Europe/London'),
+  basis: z.enum(BASES).default('en-1992'),
+  factors: z.array(factorSchema).max(40).default([]),
+  readings: z.array(acceptedReadingSchema).max(40).default([]),
+  settings: jobSettingsSchema.prefault({}),
+})
+
+export const levelSchema = z.strictObject({ id: idSchema, mark: label(12), title: text(120).default('') })
+
+export const gridLineSchema = z.strictObject({
+  id: idSchema,
+  name: label(12),
+  xMm: anywhere,
+  yMm: anywhere,
+  azimuthDeg: azimuth,
+})
+
+export const strandTypeSchema = z.strictObject({
+  id: idSchema,
+  name: label(60),
+  diameterMm: positive,
+  areaMm2: positive,
+  breakingLoadKN: positive,
+  proofLoadKN: positive,
+})
+
+export const jackSchema = z.strictObject({
+  id: idSchema,
+  name: label(60),
+  description: text(200).default(''),
+  closedLengthMm: positive,
+  strokeMm: notNegative,
+  strandTailMm: notNegative,
+  handRoomMm: notNegative,
+  bodyDiameterMm: positive,
+  noseDiameterMm: positive,
+  noseLengthMm: notNegative,
+  bentNoseMaxDeg: z.number().min(0).max(45),
+  sideRoomMm: notNegative,
+  roomAboveMm: notNegative,
+})
+
+const rectangle = { widthMm: positive, heightMm: positive }
+const opening = z.strictObject({ ...rectangle, isRound: z.boolean() })
+
+const spiral = {
+  kind: z.literal('spiral'),
+  diameterMm: barDiameter,
+  outsideMm: positive,
+  pitchMm: positive,
+  turns: z.number().min(1).max(40),
+  flatTurns: z.number().min(0).max(4).default(0),
+  firstMm: anywhere.default(0),
+}
+const links = {
+  kind: z.literal('links'),
+  diameterMm: barDiameter,
+  widthMm: positive,
+  heightMm: positive,
+  hookMm: positive,
+  count: count.min(1),
+  firstMm: anywhere,
+  pitchMm: positive,
+}
+const hairpins = {
+  kind: z.literal('hairpins'),
+  diameterMm: barDiameter,
+  legMm: positive,
+  bendMm: positive,
+  count: count.min(1),
+  lies: z.enum(['upright', 'flat']).default('upright'),
+  firstMm: anywhere.default(0),
+  pitchMm: notNegative.default(0),
+}
+const layers = z.enum(['top', 'bottom', 'both'])
+
+export const steelShapeSchema = z.discriminatedUnion('kind', [
+  z.strictObject(spiral),
+  z.strictObject(links),
+  z.strictObject(hairpins),
+  z.strictObject({
+    kind: z.literal('edge-bars'),
+    diameterMm: barDiameter,
+    countTop: count,
+    countBottom: count,
+    firstMm: positive,
+    pitchMm: positive,
+    fromMm: anywhere,
+    toMm: anywhere,
+  }),
+  z.strictObject({
+    kind: z.literal('transverse-bars'),
+    diameterMm: barDiameter,
+    lengthMm: positive,
+    count: count.min(1),
+    layers,
+    firstMm: notNegative,
+    pitchMm: positive,
+  }),
+  z.strictObject({ kind: z.literal('wedge-bars'), diameterMm: barDiameter, lengthMm: positive, count: count.min(1), layers }),
+  z.strictObject({
+    kind: z.enum(['trimmers', 'diagonals', 'tie-back-bars', 'lap-bars']),
+    diameterMm: barDiameter,
+    lengthMm: positive,
+    count: count.min(1),
+    layers,
+  }),
+])
+
+const isTested = z.boolean()
+export const localSteelSchema = z.discriminatedUnion('kind', [
+  z.strictObject({ isTested, ...spiral }),
+  z.strictObject({ isTested, ...links }),
+  z.strictObject({ isTested, ...hairpins }),
+])
+
+const distances = {
+  spacingAlongMinMm: positive,
+  spacingHeightMinMm: positive,
+  edgeAlongMinMm: positive,
+  edgeHeightMinMm: positive,
+}
+
+export const approvalSchema = z.strictObject({
+  reference: label(120),
+  strengths: z
+    .array(z.strictObject({ share, strengthMinMPa: positive.max(120), ...distances }))
+    .min(1, 'needs at least one smallest strength')
+    .max(12),
+})
+
+export const hardwareSchema = z.strictObject({
+  id: idSchema,
+  name: label(60),
+  description: text(200).default(''),
+  kind: z.enum(['plate', 'bonded-splay']),
+  ends: z.enum(['live', 'dead', 'both']),
+  strandsMax: z.number().int().min(1).max(61),
+  approval: approvalSchema.nullable().default(null),
+  plate: z.strictObject(rectangle),
+  hole: opening.nullable(),
+  duct: opening,
+  pocket: z.strictObject({ ...rectangle, depthMm: positive }).nullable(),
+  deviceLengthMm: notNegative.default(0),
+  splayLengthMm: positive.nullable().default(null),
+  transmissionLengthMm: positive.nullable().default(null),
+  ...distances,
+  straightBehindMinMm: notNegative,
+  strandTailMinMm: notNegative,
+  drawInMm: notNegative,
+  localSteel: localSteelSchema.nullable().default(null),
+  jackId: idSchema.nullable().default(null),
+})
+
+export const edgeLineSchema = z.strictObject({
+  id: idSchema,
+  levelId: idSchema,
+  mark: label(12),
+  xMm: anywhere,
+  yMm: anywhere,
+  azimuthDeg: azimuth,
+})
+
+export const jointSchema = z.strictObject({
+  id: idSchema,
+  edgeLineId: idSchema,
+  kind: z.enum(['construction', 'movement']),
+  firstPourId: idSchema,
+})
+
+export const obstructionSchema = z.strictObject({
+  id: idSchema,
+  levelId: idSchema,
+  kind: z.enum(['column', 'wall', 'opening', 'sleeve', 'upstand']),
+  mark: label(20),
+  note: text(200).default(''),
+  outline,
+  cageCoverMm: notNegative.nullable().default(null),
+  cageBars: text(60).default(''),
+})
+
+export const stageSchema = z.strictObject({
+  id: idSchema,
+  name: label(40),
+  share,
+  strengthMPa: positive.max(120),
+})
+
+export const regionSchema = z.strictObject({
+  id: idSchema,
+  mark: label(20),
+  kind: z.enum(['edge-beam', 'band', 'drop', 'fold']),
+  outline,
+  topMm: anywhere,
+  soffitMm: anywhere,
+  coverMm: notNegative,
+  linkDiameterMm: notNegative.max(40),
+})
+
+export const matLayerSchema = z.strictObject({
+  id: idSchema,
+  face: z.enum(['top', 'bottom']),
+  azimuthDeg: azimuth,
+  diameterMm: barDiameter,
+  spacingMm: positive,
+  isOuter: z.boolean(),
+  spareShare: z.number().min(0).max(1).default(0),
+  spareBy: label(120).nullable().default(null),
+})
+
+export const cornerSchema = z.strictObject({ id: idSchema, xMm: anywhere, yMm: anywhere })
+
+export const pourSchema = z.strictObject({
+  id: idSchema,
+  levelId: idSchema,
+  mark: label(12),
+  title: text(120).default(''),
+  thicknessMm: positive,
+  concrete: label(20),
+  fckMPa: positive.max(120),
+  aggregateMm: positive.max(80).default(20),
+  coverTopMm: notNegative,
+  coverSoffitMm: notNegative,
+  coverEdgeMm: notNegative,
+  outline: z.array(cornerSchema).min(3, 'needs three corners or more').max(LIMITS.corners),
+  regions: z.array(regionSchema).max(100).default([]),
+  mats: z.array(matLayerSchema).max(12).default([]),
+  stages: z.array(stageSchema).min(1, 'needs at least one stage').max(6),
+})
+
+export const edgeLengthSchema = z.strictObject({
+  id: idSchema,
+  fromMm: anywhere,
+  toMm: anywhere,
+  kind: z.enum(['free', 'construction-joint', 'movement-joint', 'against-wall']),
+  topMm: anywhere,
+  soffitMm: anywhere,
+  jackClearMm: notNegative.nullable().default(null),
+  access: text(200).default(''),
+})
+
+export const edgeSchema = z.strictObject({
+  id: idSchema,
+  pourId: idSchema,
+  edgeLineId: idSchema,
+  mark: label(12),
+  cornerId: idSchema,
+  isChord: z.boolean().default(false),
+  lengths: z.array(edgeLengthSchema).min(1, 'needs at least one length').max(60),
+})
+
+export const panSchema = z.strictObject({
+  id: idSchema,
+  pourId: idSchema,
+  mark: label(12),
+  xMm: anywhere,
+  yMm: anywhere,
+  azimuthDeg: azimuth,
+  alongMm: positive,
+  acrossMm: positive,
+  depthMm: positive,
+  jackId: idSchema.nullable().default(null),
+  jackTiltDeg: z.number().min(0).max(45).default(12),
+  bentNoseDeg: z.number().min(0).max(45).default(0),
+  headroomMm: notNegative.nullable().default(null),
+})
+
+export const tendonSchema = z.strictObject({
+  id: idSchema,
+  pourId: idSchema,
+  mark: label(20),
+  strandTypeId: idSchema,
+  strands: z.number().int('must be a whole number').min(1, 'must be 1 or more').max(61),
+  jackingRatio: z.number().gt(0, 'must be more than 0').max(0.95),
+  stressedFrom: z.enum(['one-end', 'both-ends']).default('one-end'),
+  path: z.array(pointSchema).max(40).default([]),
+  lengthMm: positive.nullable().default(null),
+  drapeDeg: notNegative.max(360).nullable().default(null),
+})
+
+export const anchorSchema = z.strictObject({
+  id: idSchema,
+  tendonId: idSchema,
+  edgeId: idSchema.nullable(),
+  panId: idSchema.nullable(),
+  number: z.number().int().min(1).max(9999),
+  end: z.enum(['live', 'dead']),
+  hardwareId: idSchema,
+  castWithPourId: idSchema,
+  stressedWithPourId: idSchema,
+  chainageMm: anywhere,
+  heightMm: anywhere,
+  setBackMm: notNegative,
+  skewDeg: z.number().min(-60).max(60).default(0),
+  elevationDeg: z.number().min(-45).max(45).default(0),
+  straightBehindMm: notNegative.nullable().default(null),
+})
+
+export const steelZoneSchema = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('anchor'), anchorId: idSchema }),
+  z.strictObject({
+    kind: z.literal('gap'),
+    edgeId: idSchema,
+    afterAnchorId: idSchema.nullable(),
+    beforeAnchorId: idSchema.nullable(),
+  }),
+  z.strictObject({ kind: z.literal('edge'), edgeId: idSchema }),
+  z.strictObject({ kind: z.literal('pan'), panId: idSchema }),
+  z.strictObject({ kind: z.literal('joint'), jointId: idSchema }),
+])
+
+export const steelSchema = z.strictObject({
+  id: idSchema,
+  pourId: idSchema,
+  zone: steelZoneSchema,
+  shape: steelShapeSchema,
+  source: z.enum(['by-hand', 'proposed', 'hardware']).default('by-hand'),
+  isLocked: z.boolean().default(false),
+})
+
+export const layoutSchema = z.strictObject({
+  format: z.literal(LAYOUT_FORMAT, `must be "${LAYOUT_FORMAT}"`),
+  version: z.literal(LAYOUT_VERSION, `must be ${LAYOUT_VERSION}, the only version that this build reads`),
+  job: jobSchema,
+  levels: z.array(levelSchema).min(1, 'needs at least one level').max(100),
+  gridLines: z.array(gridLineSchema).max(400).default([]),
+  strandTypes: z.array(strandTypeSchema).max(100).default([]),
+  jacks: z.array(jackSchema).max(100).default([]),
+  hardware: z.array(hardwareSchema).max(200).default([]),
+  edgeLines: z.array(edgeLineSchema).max(LIMITS.edges).default([]),
+  joints: z.array(jointSchema).max(200).default([]),
+  obstructions: z.array(obstructionSchema).max(5000).default([]),
+  pours: z.array(pourSchema).max(LIMITS.pours),
+  edges: z.array(edgeSchema).max(LIMITS.edges).default([]),
+  pans: z.array(panSchema).max(5000).default([]),
+  tendons: z.array(tendonSchema).max(LIMITS.anchors).default([]),
+  anchors: z.array(anchorSchema).max(LIMITS.anchors).default([]),
+  steel: z.array(steelSchema).max(LIMITS.steel).default([]),
+})
+
+export type LayoutFile = z.output<typeof layoutSchema>
+export type LayoutInput = z.input<typeof layoutSchema>
+export type JobData = z.output<typeof jobSchema>
+export type PourData = z.output<typeof pourSchema>
+export type EdgeData = z.output<typeof edgeSchema>
+export type EdgeLineData = z.output<typeof edgeLineSchema>
+export type PanData = z.output<typeof panSchema>
+export type TendonData = z.output<typeof tendonSchema>
+export type AnchorData = z.output<typeof anchorSchema>
+export type SteelData = z.output<typeof steelSchema>
+export type SteelShapeData = z.output<typeof steelShapeSchema>
+export type SteelZoneData = z.output<typeof steelZoneSchema>
+export type HardwareData = z.output<typeof hardwareSchema>
+export type StrandTypeData = z.output<typeof strandTypeSchema>
+export type JackData = z.output<typeof jackSchema>
+
+/** A layout file in the engine's units and names. */
+export const toEngine = (file: LayoutFile): Layout => toSi(file)
