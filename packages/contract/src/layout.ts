@@ -52,7 +52,11 @@ export const acceptedReadingSchema = z.strictObject({
   reason: label(2000),
 })
 
-export const factorSchema = z.strictObject({ name: label(40), value: z.number().positive().max(100), reason: label(500) })
+export const factorSchema = z.strictObject({
+  name: label(40),
+  value: z.number().positive().max(100),
+  reason: label(500),
+})
 
 export const BASES = ['en-1992'] as const
 export const jobSchema = z.strictObject({
@@ -158,7 +162,13 @@ export const steelShapeSchema = z.discriminatedUnion('kind', [
     firstMm: notNegative,
     pitchMm: positive,
   }),
-  z.strictObject({ kind: z.literal('wedge-bars'), diameterMm: barDiameter, lengthMm: positive, count: count.min(1), layers }),
+  z.strictObject({
+    kind: z.literal('wedge-bars'),
+    diameterMm: barDiameter,
+    lengthMm: positive,
+    count: count.min(1),
+    layers,
+  }),
   z.strictObject({
     kind: z.enum(['trimmers', 'diagonals', 'tie-back-bars', 'lap-bars']),
     diameterMm: barDiameter,

@@ -437,19 +437,18 @@ export interface PlacedBarsShape {
 }
 
 export type SteelShape =
-  | SpiralShape
-  | LinksShape
-  | HairpinShape
-  | EdgeBarsShape
-  | TransverseBarsShape
-  | WedgeBarsShape
-  | PlacedBarsShape
+  SpiralShape | LinksShape | HairpinShape | EdgeBarsShape | TransverseBarsShape | WedgeBarsShape | PlacedBarsShape
 export type SteelKind = SteelShape['kind']
 
 /** Where a set of bars belongs. A gap names the anchors beside it; null is the end of the edge. */
 export type SteelZone =
   | { readonly kind: 'anchor'; readonly anchorId: string }
-  | { readonly kind: 'gap'; readonly edgeId: string; readonly afterAnchorId: string | null; readonly beforeAnchorId: string | null }
+  | {
+      readonly kind: 'gap'
+      readonly edgeId: string
+      readonly afterAnchorId: string | null
+      readonly beforeAnchorId: string | null
+    }
   | { readonly kind: 'edge'; readonly edgeId: string }
   | { readonly kind: 'pan'; readonly panId: string }
   | { readonly kind: 'joint'; readonly jointId: string }
