@@ -389,6 +389,22 @@ export const steelSchema = z.strictObject({
   isLocked: z.boolean().default(false),
 })
 
+export const barMarkSchema = z.strictObject({
+  id: idSchema,
+  pourId: idSchema,
+  mark: z.number().int().min(1).max(9999),
+  key: label(200),
+})
+
+export const concreteResultSchema = z.strictObject({
+  id: idSchema,
+  pourId: idSchema,
+  ageHours: positive,
+  cured: text(120),
+  certificate: text(120),
+  specimensMPa: z.array(positive.max(200)).min(1, 'needs at least one specimen').max(60),
+})
+
 export const layoutSchema = z.strictObject({
   format: z.literal(LAYOUT_FORMAT, `must be "${LAYOUT_FORMAT}"`),
   version: z.literal(LAYOUT_VERSION, `must be ${LAYOUT_VERSION}, the only version that this build reads`),
@@ -407,6 +423,8 @@ export const layoutSchema = z.strictObject({
   tendons: z.array(tendonSchema).max(LIMITS.anchors).default([]),
   anchors: z.array(anchorSchema).max(LIMITS.anchors).default([]),
   steel: z.array(steelSchema).max(LIMITS.steel).default([]),
+  barMarks: z.array(barMarkSchema).max(LIMITS.steel).default([]),
+  concreteResults: z.array(concreteResultSchema).max(5000).default([]),
 })
 
 export type LayoutFile = z.output<typeof layoutSchema>

@@ -26,6 +26,26 @@ export interface Layout {
   readonly tendons: readonly Tendon[]
   readonly anchors: readonly Anchor[]
   readonly steel: readonly Steel[]
+  readonly barMarks: readonly BarMark[]
+  readonly concreteResults: readonly ConcreteResult[]
+}
+
+/** A mark once given to a bar keeps its bar: `key` holds type, size, shape and dimensions. Marks are never reused. */
+export interface BarMark {
+  readonly id: string
+  readonly pourId: string
+  readonly mark: number
+  readonly key: string
+}
+
+/** A set of specimens from one pour, cured beside it or elsewhere. */
+export interface ConcreteResult {
+  readonly id: string
+  readonly pourId: string
+  readonly ageHours: number
+  readonly cured: string
+  readonly certificate: string
+  readonly specimens: readonly number[]
 }
 
 export interface Job {
