@@ -1,0 +1,46 @@
+import type { Clause } from '../step'
+import type { Anchorage, AnchorageInput } from './basis'
+
+/** EN 1992-1-1:2004, 8.4 and 8.7: how far a bar must run on before it carries its stress. */
+const ANCHORAGE: Clause = { source: 'EN 1992-1-1:2004', section: '8.4.2 to 8.4.4', tag: 'digest' }
+
+export interface BondFactors {
+  readonly gammaC: number
+  readonly alphaCt: number
+}
+
+/** The bond rule may not count on more than a C60/75 concrete (8.4.2(2)). */
+const STRENGTH_FOR_BOND_MAX = 60
+
+/** Mean tensile strength, MPa (Table 3.1). */
+const meanTensile = (fck: number): number =>
+  fck <= 50 ? 0.3 * Math.cbrt(fck) ** 2 : 2.12 * Math.log(1 + (fck + 8) / 10)
+
+const between = (least: number, value: number, most: number): number => Math.min(Math.max(value, least), most)
+
+/** Table 8.2, bars in tension; no credit where cd is not known. From memory. */
+function shapeFactors({ diameter, cd, isBent }: AnchorageInput): number {
+  if (cd === null) return 1
+  const alpha1 = isBent && cd > 3 * diameter ? 0.7 : 1
+  const alpha2 = between(0.7, 1 - (0.15 * (cd - (isBent ? 3 : 1) * diameter)) / diameter, 1)
+  return alpha1 * alpha2
+}
+
+/** Length beyond a line that a bar needs to carry `stress` there: Eq. 8.2, 8.3, 8.4, 8.6. */
+export function anchorage(input: AnchorageInput, { gammaC, alphaCt }: BondFactors): Anchorage {
+  const { diameter, strength, stress, isGoodBond } = input
+  const fctk = 0.7 * meanTensile(Math.min(strength, STRENGTH_FOR_BOND_MAX))
+  const eta1 = isGoodBond ? 1 : 0.7
+  const eta2 = diameter <= 32 ? 1 : (132 - diameter) / 100
+  const bond = (2.25 * eta1 * eta2 * alphaCt * fctk) / gammaC
+  const required = (diameter / 4) * (stress / bond)
+  const least = Math.max(0.3 * required, 10 * diameter, 100)
+  return { bond, required, least, length: Math.max(shapeFactors(input) * required, least), clause: ANCHORAGE }
+}
+
+/** Lap length, Eq. 8.10 and 8.11; alpha6 from the share of bars lapped at one section. From memory. */
+export function lap(input: AnchorageInput, share: number, factors: BondFactors): number {
+  const alpha6 = between(1, Math.sqrt((share * 100) / 25), 1.5)
+  const { required } = anchorage(input, factors)
+  return Math.max(shapeFactors(input) * alpha6 * required, 0.3 * alpha6 * required, 15 * input.diameter, 200)
+}

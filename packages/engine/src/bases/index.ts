@@ -1,0 +1,28 @@
+import type { Job } from '../model'
+import type { Basis, BasisSource } from './basis'
+import { EN_1992 } from './en-1992'
+
+/** The list of bases; a new one is one file and one line here. */
+export const BASIS_SOURCES: readonly BasisSource[] = [EN_1992]
+
+/** The job's basis with its factors and accepted readings; throws where the job names a basis that is not in the list. */
+export function basisOf(job: Pick<Job, 'basis' | 'factors' | 'readings' | 'settings'>): Basis {
+  const source = BASIS_SOURCES.find(({ id }) => id === job.basis)
+  if (!source) throw new Error(`Basis "${job.basis}" is not one of ${BASIS_SOURCES.map(({ id }) => id).join(', ')}.`)
+  return source.make({ factors: job.factors, readings: job.readings, fyk: job.settings.fyk })
+}
+
+/** What is wrong with the factors that a job sets: each with the field and what would be right. Empty where all are right. */
+export function factorProblems(job: Pick<Job, 'basis' | 'factors'>): readonly { field: string; message: string }[] {
+  const known = BASIS_SOURCES.find(({ id }) => id === job.basis)?.factors ?? []
+  return job.factors.flatMap(({ name, value }, at) => {
+    const factor = known.find((one) => one.name === name)
+    if (!factor) {
+      const names = known.map((one) => one.name).join(', ')
+      return [{ field: `job.factors[${at}].name`, message: `"${name}" is not a factor of this basis: ${names}.` }]
+    }
+    if (value >= factor.least && value <= factor.most) return []
+    const range = `${factor.least} to ${factor.most}`
+    return [{ field: `job.factors[${at}].value`, message: `${factor.title} is ${value}; it must lie in ${range}.` }]
+  })
+}
