@@ -16,3 +16,16 @@ export type {
   ZoneKind,
   ZoneResult,
 } from './result'
+export { BAR_STANDARDS, BS_8666_2005, BS_8666_2020, barStandardById } from './schedule/bs-8666'
+export { DIMENSION_NAMES } from './schedule/bar-standards'
+export type {
+  BarShape,
+  BarSize,
+  BarStandard,
+  DimensionName,
+  Dimensions,
+  ShapeProblem,
+  ShapeRule,
+} from './schedule/bar-standards'
+export { cutLength, roundedShape, shapeProblems } from './schedule/cut-length'
+export type { CutLength } from './schedule/cut-length'
