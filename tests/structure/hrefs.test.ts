@@ -16,11 +16,13 @@ beforeAll(async () => {
 function complaints(source: string): readonly string[] {
   const { config } = ts.readConfigFile(at('tsconfig.json'), (path) => ts.sys.readFile(path))
   const { options } = ts.parseJsonConfigFileContent({ ...config, include: [], files: [] }, ts.sys, at('.'))
-  const host = ts.createCompilerHost(options)
-  const { getSourceFile, fileExists } = host
-  host.fileExists = (path) => path === PAGE || fileExists(path)
-  host.getSourceFile = (path, languageVersion) =>
-    path === PAGE ? ts.createSourceFile(path, source, languageVersion) : getSourceFile(path, languageVersion)
+  const disk = ts.createCompilerHost(options)
+  const host: ts.CompilerHost = {
+    ...disk,
+    fileExists: (path) => path === PAGE || disk.fileExists(path),
+    getSourceFile: (path, version) =>
+      path === PAGE ? ts.createSourceFile(path, source, version) : disk.getSourceFile(path, version),
+  }
   const program = ts.createProgram([PAGE, ROUTES], options, host)
   const file = program.getSourceFile(PAGE)
   return program
