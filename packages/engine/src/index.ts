@@ -29,3 +29,23 @@ export type {
 } from './schedule/bar-standards'
 export { cutLength, roundedShape, shapeProblems } from './schedule/cut-length'
 export type { CutLength } from './schedule/cut-length'
+export {
+  azimuthOf,
+  alongAzimuth,
+  distance,
+  distanceToSegment,
+  isInside,
+  ROUNDING,
+  selfCrossing,
+  sidesOf,
+  signedArea,
+} from './geometry'
+export { edgeFrame, leanOf } from './frame'
+export type { EdgeFrame, LocalPoint } from './frame'
+export { found, gapId, layoutIndex, steelKey } from './layout-index'
+export type { LayoutIndex } from './layout-index'
+export { edgeFacedBy, gapsOfEdge, tendonEndsOfEdge } from './gaps'
+export type { Gap, TendonEnd } from './gaps'
+export { anchorMark, gapName, zonesOfPour } from './zones'
+export { gridOffsets, gridReference } from './grid-reference'
+export type { GridOffset } from './grid-reference'
