@@ -58,21 +58,17 @@ export function errorShape({ shape, error }: { shape: TRPCDefaultErrorShape; err
   return { code: shape.code, message: sentenceOf(error, fields), data }
 }
 
+const SENTENCES: Partial<Record<TRPCError['code'], string>> = {
+  INTERNAL_SERVER_ERROR: 'Something went wrong on the server. It was noted there; nothing of this step was stored.',
+  PARSE_ERROR: 'This cannot be read: it is not JSON.',
+  PAYLOAD_TOO_LARGE: 'This is too large to be sent in one piece. The limit is 8 MB.',
+}
+
 function sentenceOf({ code, message }: TRPCError, fields: ErrorData['fields']): string {
-  if (fields) {
-    const [field = '', messages = []] = Object.entries(fields)[0] ?? []
-    return field === '' ? `This cannot be read: ${messages[0]}.` : `This cannot be read: ${field} ${messages[0]}.`
-  }
-  switch (code) {
-    case 'INTERNAL_SERVER_ERROR':
-      return 'Something went wrong on the server. It was noted there; nothing of this step was stored.'
-    case 'PARSE_ERROR':
-      return 'This cannot be read: it is not JSON.'
-    case 'PAYLOAD_TOO_LARGE':
-      return 'This is too large to be sent in one piece. The limit is 8 MB.'
-    default:
-      return message
-  }
+  const [first] = fields ? Object.entries(fields) : []
+  if (!first) return SENTENCES[code] ?? message
+  const [field, messages] = first
+  return `This cannot be read: ${field === '' ? '' : `${field} `}${messages.join(', ')}.`
 }
 
 function fieldsOf(error: z.ZodError): Record<string, string[]> {
