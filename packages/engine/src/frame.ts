@@ -29,6 +29,8 @@ export interface EdgeFrame {
   readonly lengthAt: (chainage: number) => EdgeLength
   readonly topAt: (chainage: number) => number
   readonly soffitAt: (chainage: number) => number
+  /** Chainages at which top or soffit steps, growing. */
+  readonly steps: readonly number[]
 }
 
 /**
@@ -60,6 +62,10 @@ export function frameOfSide(of: { readonly edge: Edge; readonly line: EdgeLine; 
     lengthAt,
     topAt: (chainage) => lengthAt(chainage).top,
     soffitAt: (chainage) => lengthAt(chainage).soffit,
+    steps: lengths.flatMap((length, i) => {
+      const before = lengths[i - 1]
+      return before && (before.top !== length.top || before.soffit !== length.soffit) ? [length.from] : []
+    }),
   }
 }
 
