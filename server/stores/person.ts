@@ -118,7 +118,7 @@ export function setMember(
 ): void {
   tx.insert(membership).values({ companyId, personId, createdAtMs: nowMs }).onConflictDoNothing().run()
   clearRoles(tx, { companyId, personId })
-  for (const role of new Set(roles)) db.insert(membershipRole).values({ companyId, personId, role }).run()
+  for (const role of new Set(roles)) tx.insert(membershipRole).values({ companyId, personId, role }).run()
 }
 
 /** Takes somebody out of a company and off its jobs; what they did stays recorded under their name. */

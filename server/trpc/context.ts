@@ -12,8 +12,8 @@ export interface ServerDeps {
   readonly log: Logger
   /** Instant in epoch milliseconds. */
   readonly now: () => number
-  /** Address under which people reach the product, without a slash at the end; null on this machine alone. */
-  readonly publicUrl: string | null
+  /** Address under which people reach the product, without a slash at the end; links begin with it. */
+  readonly appUrl: string
 }
 
 export interface Person {

@@ -31,11 +31,16 @@ export const invitationSchema = z.strictObject({
   name: label(120),
   roles: z.array(roleSchema).min(1, 'needs at least one role').max(ROLES.length),
 })
+export const invitationTokenSchema = z.strictObject({ token: z.string().min(20).max(200) })
 export const acceptInvitationSchema = z.strictObject({
-  token: z.string().min(20).max(200),
+  token: invitationTokenSchema.shape.token,
+  /** Only for an invitation that names no address: the first person of an empty database. */
+  email: emailSchema.optional(),
   name: label(120),
   password: passwordSchema,
 })
+export const withdrawInvitationSchema = z.strictObject({ companyId: idSchema, invitationId: idSchema })
+export const memberSchema = z.strictObject({ companyId: idSchema, personId: idSchema })
 export const setRolesSchema = z.strictObject({
   companyId: idSchema,
   personId: idSchema,
