@@ -1,7 +1,6 @@
-import { existsSync, readFileSync } from 'node:fs'
+import { existsSync, readFileSync, statSync } from 'node:fs'
 import { basename } from 'node:path'
 import { pathToFileURL } from 'node:url'
-import { gzipSync, brotliCompressSync } from 'node:zlib'
 import { DIST } from './build.mjs'
 import { at, filesUnder } from './project.mjs'
 
@@ -29,12 +28,12 @@ const KEPT_OUT = {
 
 /** @typedef {{ name: string, gz: number, br: number }} Sized */
 
-/** @param {string} name from the root @returns {Sized} */
+/** What the server sends: the compressed copy that the build made, otherwise (fonts, pictures) the file as it is.
+ * @param {string} name from the root
+ * @returns {Sized} */
 function sized(name) {
-  const content = readFileSync(at(name))
-  const size = (/** @type {string} */ end, /** @type {(content: Buffer) => Buffer} */ compress) =>
-    existsSync(at(name + end)) ? readFileSync(at(name + end)).length : compress(content).length
-  return { name, gz: size('.gz', gzipSync), br: size('.br', brotliCompressSync) }
+  const sizeOf = (/** @type {string} */ copy) => statSync(at(existsSync(at(copy)) ? copy : name)).size
+  return { name, gz: sizeOf(`${name}.gz`), br: sizeOf(`${name}.br`) }
 }
 
 /** @param {readonly Sized[]} files */
