@@ -70,7 +70,10 @@ export interface Compared extends CheckHead {
    * difference: demand is what is there, limit what is asked for; `at-least` and `at-most` say which side is within.
    */
   readonly compares: 'ratio' | 'at-least' | 'at-most'
-  /** Demand over limit, for ratios; null for distances. */
+  /**
+   * Demand over limit, for ratios; null for distances, and for a demand above 0 with a limit of 0 (no steel at all),
+   * which is over by more than any number says and comes before every other ratio.
+   */
   readonly utilisation: number | null
   /** What is left over, for distances: positive is spare, negative is short; null for ratios. */
   readonly spare: number | null

@@ -1,0 +1,157 @@
+/** Everything round one anchor at an edge that its checks ask for, gathered once. */
+
+import { jackingForce } from './force'
+import type { EdgeFrame } from './frame'
+import { cross, ROUNDING, subtract } from './geometry'
+import { found, type LayoutIndex } from './layout-index'
+import type { Anchor, Edge, Hardware, Pour, StrandType, Tendon } from './model'
+
+/** Another anchor of the same edge, with the distances between the two centres. */
+export interface Neighbour {
+  readonly anchor: Anchor
+  readonly hardware: Hardware
+  readonly along: number
+  readonly inHeight: number
+}
+
+export interface AnchorSite {
+  readonly anchor: Anchor
+  readonly hardware: Hardware
+  readonly tendon: Tendon
+  readonly strand: StrandType
+  readonly pour: Pour
+  readonly edge: Edge
+  readonly frame: EdgeFrame
+  readonly top: number
+  readonly soffit: number
+  /** From the anchor's centre to the concrete above and below. */
+  readonly toTop: number
+  readonly toSoffit: number
+  /** From the centre to the ends of the edge; null where the slab goes on past that end. */
+  readonly toStart: number | null
+  readonly toEnd: number | null
+  /** Half the gap to the next anchor along the edge on either side; null where there is none. */
+  readonly halfGapBefore: number | null
+  readonly halfGapAfter: number | null
+  /** Stands inside a near-equal row: five or more anchors of one force, no gap over 1.2 of the smallest, not the outermost. */
+  readonly isInEqualRow: boolean
+  /** Anchors near enough for spread or spacing to matter, nearest along the edge first. */
+  readonly neighbours: readonly Neighbour[]
+}
+
+/** The sites of all anchors of an edge, by anchor id. */
+export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<string, AnchorSite> {
+  const edge = found(index.edges, edgeId, 'edge')
+  const frame = found(index.frames, edgeId, 'edge')
+  const pour = found(index.pours, edge.pourId, 'pour')
+  const anchors = index.anchorsOfEdge.get(edgeId) ?? []
+  const goesOn = openEnds(edge, pour, frame)
+  const reach = reachOf(index, anchors)
+  const isEqual = isEqualRow(index, anchors)
+  return new Map(
+    anchors.map((anchor, at): [string, AnchorSite] => {
+      const tendon = found(index.tendons, anchor.tendonId, 'tendon')
+      const { topAt, soffitAt } = frame
+      const [top, soffit] = [topAt(anchor.chainage), soffitAt(anchor.chainage)]
+      const site: AnchorSite = {
+        anchor,
+        hardware: found(index.hardware, anchor.hardwareId, 'hardware'),
+        tendon,
+        strand: found(index.strandTypes, tendon.strandTypeId, 'strand type'),
+        pour,
+        edge,
+        frame,
+        top,
+        soffit,
+        toTop: top - anchor.height,
+        toSoffit: anchor.height - soffit,
+        toStart: goesOn.start ? null : anchor.chainage - frame.from,
+        toEnd: goesOn.end ? null : frame.to - anchor.chainage,
+        halfGapBefore: halfGap(anchors, at, -1),
+        halfGapAfter: halfGap(anchors, at, 1),
+        isInEqualRow: isEqual && at > 0 && at < anchors.length - 1,
+        neighbours: neighboursOf(index, { anchors, at, reach }),
+      }
+      return [anchor.id, site]
+    }),
+  )
+}
+
+/** Distance to the nearer of soffit and top. */
+export const nearerFace = ({ toTop, toSoffit }: AnchorSite): number => Math.min(toTop, toSoffit)
+
+/** Distance to the nearer end of the edge that is a face of concrete; null where neither is. */
+export function nearerEnd({ toStart, toEnd }: AnchorSite): number | null {
+  const ends = [toStart, toEnd].filter((end) => end !== null)
+  return ends.length > 0 ? Math.min(...ends) : null
+}
+
+/** At a re-entrant or straight corner of the outline the slab goes on past the end of the edge. */
+function openEnds(edge: Edge, pour: Pour, frame: EdgeFrame): { start: boolean; end: boolean } {
+  const at = pour.outline.findIndex(({ id }) => id === edge.cornerId)
+  const first = isOpen(pour, at)
+  const second = isOpen(pour, at + 1)
+  return frame.runsLeftToRight ? { start: first, end: second } : { start: second, end: first }
+}
+
+function isOpen({ outline }: Pour, at: number): boolean {
+  const count = outline.length
+  const [before, corner, after] = [outline[(at - 1 + count) % count], outline[at % count], outline[(at + 1) % count]]
+  if (!before || !corner || !after) return false
+  return cross(subtract(corner, before), subtract(after, corner)) <= ROUNDING
+}
+
+const EQUAL_ROW_ANCHORS_MIN = 5
+const EQUAL_ROW_GAPS_MAX = 1.2
+
+function isEqualRow(index: LayoutIndex, anchors: readonly Anchor[]): boolean {
+  if (anchors.length < EQUAL_ROW_ANCHORS_MIN) return false
+  const gaps = anchors.slice(1).map((anchor, i) => anchor.chainage - (anchors[i]?.chainage ?? 0))
+  const forces = anchors.map(({ tendonId }) => {
+    const tendon = found(index.tendons, tendonId, 'tendon')
+    return jackingForce(tendon, found(index.strandTypes, tendon.strandTypeId, 'strand type')).value
+  })
+  const isEqualForce = Math.max(...forces) - Math.min(...forces) <= ROUNDING * Math.max(...forces)
+  return isEqualForce && Math.max(...gaps) <= EQUAL_ROW_GAPS_MAX * Math.min(...gaps)
+}
+
+/** Farther than this along the edge no spread and no smallest spacing reaches. */
+function reachOf(index: LayoutIndex, anchors: readonly Anchor[]): number {
+  const types = [...new Set(anchors.map(({ hardwareId }) => hardwareId))].map((id) =>
+    found(index.hardware, id, 'hardware'),
+  )
+  return Math.max(0, ...types.flatMap((one) => [3 * one.plate.width, one.spacingAlongMin, ...approvalSpacings(one)]))
+}
+
+const approvalSpacings = ({ approval }: Hardware): number[] =>
+  (approval?.strengths ?? []).map(({ spacingAlongMin }) => spacingAlongMin)
+
+/** Anchors one above the other have no gap between them: the next one beside counts. */
+function halfGap(anchors: readonly Anchor[], at: number, way: 1 | -1): number | null {
+  const own = anchors[at]
+  for (let i = at + way; own && i >= 0 && i < anchors.length; i += way) {
+    const gap = Math.abs((anchors[i]?.chainage ?? own.chainage) - own.chainage)
+    if (gap > ROUNDING) return gap / 2
+  }
+  return null
+}
+
+function neighboursOf(
+  index: LayoutIndex,
+  of: { readonly anchors: readonly Anchor[]; readonly at: number; readonly reach: number },
+): readonly Neighbour[] {
+  const own = of.anchors[of.at]
+  if (!own) return []
+  const near: Neighbour[] = []
+  for (const way of [-1, 1]) {
+    for (let i = of.at + way; i >= 0 && i < of.anchors.length; i += way) {
+      const anchor = of.anchors[i]
+      if (!anchor) break
+      const along = Math.abs(anchor.chainage - own.chainage)
+      if (along > of.reach) break
+      const hardware = found(index.hardware, anchor.hardwareId, 'hardware')
+      near.push({ anchor, hardware, along, inHeight: Math.abs(anchor.height - own.height) })
+    }
+  }
+  return near.sort((one, other) => one.along - other.along)
+}

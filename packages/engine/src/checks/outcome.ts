@@ -1,0 +1,75 @@
+/** The parts of a result that every family fills in the same way. */
+
+import type { Basis } from '../bases/basis'
+import type { LayoutIndex } from '../layout-index'
+import type { Compared, Refused } from '../result'
+import { statusOfDistance, statusOfRatio } from '../status'
+import type { Step } from '../step'
+
+/** What every check of a job needs beside its place. */
+export interface CheckContext {
+  readonly index: LayoutIndex
+  readonly basis: Basis
+  /** Share of a limit from which a result is called near. */
+  readonly nearFrom: number
+}
+
+export type Head = Pick<Compared, 'zoneId' | 'family' | 'name' | 'plane' | 'stage' | 'limitKind' | 'clause' | 'notes'>
+
+interface Answer {
+  readonly demand: number
+  readonly limit: number
+  readonly unit: string
+  readonly steps: readonly Step[]
+}
+
+/** A demand against a limit of strength or steel. `readings` are those that it rests on. */
+export function byRatio(
+  context: CheckContext,
+  head: Head,
+  answer: Answer & { readonly readings: readonly string[] },
+): Compared {
+  const { readings, ...numbers } = answer
+  const accepted = statusOfRatio({ demand: answer.demand, limit: answer.limit, nearFrom: context.nearFrom })
+  const open = readings.find((id) => !context.basis.isAccepted(id))
+  return {
+    ...head,
+    ...numbers,
+    kind: 'compared',
+    compares: 'ratio',
+    status: open === undefined ? accepted : 'needs-judgement',
+    statusOnceAccepted: accepted,
+    utilisation: utilisationOf(answer),
+    spare: null,
+    readingId: open ?? readings[0] ?? null,
+    mend: null,
+  }
+}
+
+/** What is there against the least that is asked for, by difference. */
+export function atLeast(head: Head, answer: Answer): Compared {
+  const spare = answer.demand - answer.limit
+  const status = statusOfDistance(spare)
+  return {
+    ...head,
+    ...answer,
+    kind: 'compared',
+    compares: 'at-least',
+    status,
+    statusOnceAccepted: status,
+    utilisation: null,
+    spare,
+    readingId: null,
+    mend: null,
+  }
+}
+
+export function refusal(head: Head, why: Pick<Refused, 'code' | 'field' | 'message'>): Refused {
+  return { ...head, ...why, kind: 'refused', status: 'not-covered' }
+}
+
+/** Null where there is nothing to compare with: a demand above 0 is then over, with no number that says by how much. */
+function utilisationOf({ demand, limit }: Answer): number | null {
+  if (limit > 0) return demand / limit
+  return demand > 0 ? null : 0
+}
