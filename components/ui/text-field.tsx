@@ -42,7 +42,7 @@ function TextBox({ wiring, isUnreadable, onEnter, secret, disabled, multiline, r
   return (
     <TextInput
       {...wiring}
-      {...(rest)}
+      {...rest}
       {...(multiline ? { multiline, numberOfLines: rows } : { submitBehavior: 'submit' as const })}
       {...(onEnter && !multiline ? { onSubmitEditing: onEnter } : {})}
       secureTextEntry={secret ?? false}
