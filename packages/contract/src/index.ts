@@ -96,3 +96,13 @@ export {
   withdrawReadingSchema,
   type Role,
 } from './api'
+export {
+  LENGTH_GAP_MAX_MM,
+  OFF_LINE_MAX_MM,
+  fieldOf,
+  layoutProblems,
+  type Path,
+  type Problem,
+  type Severity,
+} from './problems'
+export { PROBLEMS_MAX, readLayout, readLayoutText, type ReadLayout } from './read-layout'

@@ -1,0 +1,30 @@
+import type { LayoutFile } from './layout'
+import { anchorProblems } from './problems/anchors'
+import { edgeProblems } from './problems/edges'
+import { hardwareProblems } from './problems/hardware'
+import { nameProblems } from './problems/names'
+import { pourProblems } from './problems/pours'
+import type { Problem } from './problems/problem'
+import { referenceProblems } from './problems/references'
+import { steelProblems } from './problems/steel'
+import { stopProblems } from './problems/stops'
+
+export { fieldOf, type Path, type Problem, type Severity } from './problems/problem'
+export { LENGTH_GAP_MAX_MM, OFF_LINE_MAX_MM } from './problems/edges'
+
+/**
+ * Everything that a layout of the right shape may still have wrong. A problem that is `refused` contradicts the
+ * layout itself and nothing may be stored; a `stop` is kept as typed.
+ */
+export function layoutProblems(layout: LayoutFile): Problem[] {
+  return [
+    ...nameProblems(layout),
+    ...referenceProblems(layout),
+    ...pourProblems(layout),
+    ...edgeProblems(layout),
+    ...hardwareProblems(layout),
+    ...anchorProblems(layout),
+    ...steelProblems(layout),
+    ...stopProblems(layout),
+  ]
+}
