@@ -9,13 +9,13 @@ const FROM_RADIUS: Clause = { source: 'BS 8666:2005', section: 'Table 2, from th
 
 type Bound = ShapeLimit['bound']
 
-export const atLeast = (field: DimensionName, bound: Bound, because: string, clause = TABLE_3): ShapeLimit => ({
+export const atLeast = (field: DimensionName, bound: Bound, because: string): ShapeLimit => ({
   field,
   side: 'at-least',
   bound,
   because,
   otherwise: '',
-  clause,
+  clause: TABLE_3,
 })
 
 export const atMost = (field: DimensionName, bound: Bound, because: string): ShapeLimit => ({
@@ -27,16 +27,24 @@ export const atMost = (field: DimensionName, bound: Bound, because: string): Sha
   clause: TABLE_3,
 })
 
+const by = (clause: Clause, limit: ShapeLimit): ShapeLimit => ({ ...limit, clause })
+
 export const endAtLeast = (field: DimensionName): ShapeLimit =>
-  atLeast(field, (v) => v.size.endMin, 'the shortest end past a bend', TABLE_2)
+  by(
+    TABLE_2,
+    atLeast(field, (v) => v.size.endMin, 'the shortest end past a bend'),
+  )
 
 export const betweenBends = (field: DimensionName): ShapeLimit =>
-  atLeast(field, (v) => v.size.betweenBendsMin, 'the shortest overall dimension between two bends', TABLE_2)
+  by(
+    TABLE_2,
+    atLeast(field, (v) => v.size.betweenBendsMin, 'the shortest overall dimension between two bends'),
+  )
 
 const twoBends = (v: ShapeValues): number => 2 * (v.size.bendRadius + v.size.diameter)
 
 const FULL_CIRCLE = 'twice the bend radius and bar'
-export const ringOutside = atLeast('A', twoBends, FULL_CIRCLE, FROM_RADIUS)
+export const ringOutside = by(FROM_RADIUS, atLeast('A', twoBends, FULL_CIRCLE))
 
 /** A semicircle's width and the end that runs on from it. */
 export const semicircle = (width: DimensionName, end: DimensionName): readonly ShapeLimit[] => [
@@ -63,7 +71,10 @@ export const equalHooks: readonly ShapeLimit[] = [
 export const closedLinkLimits: readonly ShapeLimit[] = [
   linkSide('A'),
   linkSide('B'),
-  atLeast('C', (v) => v.size.linkEndMin, 'the shortest hook of a link', TABLE_2),
+  by(
+    TABLE_2,
+    atLeast('C', (v) => v.size.linkEndMin, 'the shortest hook of a link'),
+  ),
   atMost(
     'C',
     (v) => Math.max(v.size.linkEndMin, Math.min(v.dimensions.A ?? 0, v.dimensions.B ?? 0)),
@@ -75,13 +86,22 @@ export const closedLinkLimits: readonly ShapeLimit[] = [
 export const largeRadiusLimits: readonly ShapeLimit[] = [
   atLeast('A', (v) => (v.dimensions.R ?? 0) + 6 * v.size.diameter, 'the radius and 6 d'),
   atLeast('B', (v) => (v.dimensions.R ?? 0) + 6 * v.size.diameter, 'the radius and 6 d'),
-  atLeast('R', (v) => v.size.bendRadius, 'the smallest bend radius', TABLE_2),
+  by(
+    TABLE_2,
+    atLeast('R', (v) => v.size.bendRadius, 'the smallest bend radius'),
+  ),
 ]
 
 export const helixLimits: readonly ShapeLimit[] = [
   ringOutside,
-  atLeast('B', (v) => v.size.diameter, 'turns at a smaller pitch would lie in one another', FROM_RADIUS),
-  atLeast('C', () => 1, 'a helix has a turn or more', FROM_RADIUS),
+  by(
+    FROM_RADIUS,
+    atLeast('B', (v) => v.size.diameter, 'turns at a smaller pitch would lie in one another'),
+  ),
+  by(
+    FROM_RADIUS,
+    atLeast('C', () => 1, 'a helix has a turn or more'),
+  ),
 ]
 
 /** A crank's sloping length is longer than the offset that it makes. */
