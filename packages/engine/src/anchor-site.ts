@@ -1,12 +1,14 @@
 /** Everything round one anchor at an edge that its checks ask for, gathered once. */
 
+import { facesFromCentre, type NearFace } from './faces'
 import { jackingForce } from './force'
 import type { EdgeFrame } from './frame'
 import { cross, ROUNDING, subtract } from './geometry'
 import { found, type LayoutIndex } from './layout-index'
+import { neighboursOf } from './neighbours'
 import type { Anchor, Edge, Hardware, Pour, StrandType, Tendon } from './model'
 
-/** Another anchor of the same edge, with the distances between the two centres. */
+/** Another anchor of the same row, with the distances between the two centres. */
 export interface Neighbour {
   readonly anchor: Anchor
   readonly hardware: Hardware
@@ -30,6 +32,8 @@ export interface AnchorSite {
   /** From the centre to the ends of the edge; null where the slab goes on past that end. */
   readonly toStart: number | null
   readonly toEnd: number | null
+  /** The nearest other face of concrete in plan: the end of the edge, an opening, a deeper length. */
+  readonly sideFace: NearFace | null
   /** Half the gap to the next anchor along the edge on either side; null where there is none. */
   readonly halfGapBefore: number | null
   readonly halfGapAfter: number | null
@@ -46,7 +50,7 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
   const pour = found(index.pours, edge.pourId, 'pour')
   const anchors = index.anchorsOfEdge.get(edgeId) ?? []
   const goesOn = openEnds(edge, pour, frame)
-  const reach = reachOf(index, anchors)
+  const reach = reachOf(index, index.rowOfEdge.get(edgeId) ?? anchors)
   const isEqual = isEqualRow(index, anchors)
   return new Map(
     anchors.map((anchor, at): [string, AnchorSite] => {
@@ -67,10 +71,11 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
         toSoffit: anchor.height - soffit,
         toStart: goesOn.start ? null : anchor.chainage - frame.from,
         toEnd: goesOn.end ? null : frame.to - anchor.chainage,
+        sideFace: facesFromCentre(index, anchor)[0] ?? null,
         halfGapBefore: halfGap(anchors, at, -1),
         halfGapAfter: halfGap(anchors, at, 1),
         isInEqualRow: isEqual && at > 0 && at < anchors.length - 1,
-        neighbours: neighboursOf(index, { anchors, at, reach }),
+        neighbours: nearRow(index, anchor, reach),
       }
       return [anchor.id, site]
     }),
@@ -79,12 +84,6 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
 
 /** Distance to the nearer of soffit and top. */
 export const nearerFace = ({ toTop, toSoffit }: AnchorSite): number => Math.min(toTop, toSoffit)
-
-/** Distance to the nearer end of the edge that is a face of concrete; null where neither is. */
-export function nearerEnd({ toStart, toEnd }: AnchorSite): number | null {
-  const ends = [toStart, toEnd].filter((end) => end !== null)
-  return ends.length > 0 ? Math.min(...ends) : null
-}
 
 /** At a re-entrant or straight corner of the outline the slab goes on past the end of the edge. */
 function openEnds(edge: Edge, pour: Pour, frame: EdgeFrame): { start: boolean; end: boolean } {
@@ -136,22 +135,13 @@ function halfGap(anchors: readonly Anchor[], at: number, way: 1 | -1): number | 
   return null
 }
 
-function neighboursOf(
-  index: LayoutIndex,
-  of: { readonly anchors: readonly Anchor[]; readonly at: number; readonly reach: number },
-): readonly Neighbour[] {
-  const own = of.anchors[of.at]
-  if (!own) return []
-  const near: Neighbour[] = []
-  for (const way of [-1, 1]) {
-    for (let i = of.at + way; i >= 0 && i < of.anchors.length; i += way) {
-      const anchor = of.anchors[i]
-      if (!anchor) break
-      const along = Math.abs(anchor.chainage - own.chainage)
-      if (along > of.reach) break
-      const hardware = found(index.hardware, anchor.hardwareId, 'hardware')
-      near.push({ anchor, hardware, along, inHeight: Math.abs(anchor.height - own.height) })
-    }
-  }
-  return near.sort((one, other) => one.along - other.along)
+function nearRow(index: LayoutIndex, own: Anchor, reach: number): readonly Neighbour[] {
+  return neighboursOf(index, own, reach)
+    .within.map((anchor) => ({
+      anchor,
+      hardware: found(index.hardware, anchor.hardwareId, 'hardware'),
+      along: Math.abs(anchor.chainage - own.chainage),
+      inHeight: Math.abs(anchor.height - own.height),
+    }))
+    .sort((one, other) => one.along - other.along)
 }

@@ -1,9 +1,10 @@
 /** Bearing behind the plate of a live anchor, at every stage of stressing. */
 
-import { nearerEnd, nearerFace, type AnchorSite } from '../anchor-site'
+import { nearerFace, type AnchorSite } from '../anchor-site'
 import type { BearingRule } from '../bases/basis'
 import { jackingForce, stageForce } from '../force'
-import type { ApprovalStrength, Hardware, Stage, SteelShape } from '../model'
+import { approvalLine, hardwareClause } from '../hardware-distances'
+import type { Approval, ApprovalStrength, Hardware, Stage, SteelShape } from '../model'
 import type { Check } from '../result'
 import type { Clause, Step } from '../step'
 import { handSteelOf } from '../steel/steel-of-anchor'
@@ -15,7 +16,7 @@ export function checkBearing(site: AnchorSite, context: CheckContext): Check[] {
     const { approval } = site.hardware
     return approval === null
       ? bearingByFormula(site, stage, context)
-      : bearingByApproval({ site, stage, context, reference: approval.reference, strengths: approval.strengths })
+      : bearingByApproval({ site, stage, context, approval })
   })
 }
 
@@ -76,13 +77,13 @@ function holeArea({ hole }: Hardware): number {
 }
 
 /**
- * Width and height that the supporting area may take up round the plate's centre: the section, the ends of the edge,
+ * Width and height that the supporting area may take up round the plate's centre: the section, other faces,
  * and a fair share of the distance to each neighbour, beside or above, whichever of the two leaves more.
  */
 export function freeSpread(site: AnchorSite): { readonly width: number; readonly height: number } {
   const { plate } = site.hardware
-  const end = nearerEnd(site)
-  let width = end === null ? 3 * plate.width : 2 * end
+  const side = site.sideFace
+  let width = side ? 2 * side.distance : 3 * plate.width
   let height = 2 * nearerFace(site)
   for (const { hardware, along, inHeight } of site.neighbours) {
     const beside = along / ((plate.width + hardware.plate.width) / 2)
@@ -99,32 +100,22 @@ interface Approved {
   readonly site: AnchorSite
   readonly stage: Stage
   readonly context: CheckContext
-  readonly reference: string
-  readonly strengths: readonly ApprovalStrength[]
+  readonly approval: Approval
 }
 
-function bearingByApproval({ site, stage, context, reference, strengths }: Approved): Check {
-  const clause: Clause = { source: reference, section: 'smallest concrete strength', tag: 'read' }
+function bearingByApproval({ site, stage, context, approval }: Approved): Check {
+  const clause = hardwareClause(site.hardware, 'smallest concrete strength')
   const head: Head = { ...headOf(site, stage, clause), limitKind: 'H', notes: [forInformation(site, stage, context)] }
   const outside = (field: string, condition: string) =>
     refusal(head, { code: 'OUTSIDE_APPROVAL', field, message: `not covered: outside its approval (${condition})` })
   if (site.tendon.strands > site.hardware.strandsMax) {
     return outside('tendon.strands', `${site.tendon.strands} strands, ${site.hardware.strandsMax} at most`)
   }
-  const lines = strengths.filter(({ share }) => share >= stage.share)
-  if (lines.length === 0) return outside('stage.share', `no strength is given for ${percent(stage.share)} of the force`)
-  const line = lineFor(lines, stage.strength)
+  const line = approvalLine(approval, stage)
+  if (!line) return outside('stage.share', `no strength is given for ${percent(stage.share)} of the force`)
   const [broken] = line.strengthMin <= stage.strength ? brokenConditions(site, line, context) : []
   if (broken) return outside(broken.field, broken.condition)
   return atLeast(head, { demand: stage.strength, limit: line.strengthMin, unit: 'MPa', steps: [] })
-}
-
-/** Of the lines for this share the highest strength not above the stage's; where there is none, the lowest of all. */
-function lineFor(lines: readonly ApprovalStrength[], strength: number): ApprovalStrength {
-  const rising = [...lines].sort((one, other) => one.strengthMin - other.strengthMin)
-  const line = rising.findLast(({ strengthMin }) => strengthMin <= strength) ?? rising[0]
-  if (!line) throw new Error('An approval has at least one line.')
-  return line
 }
 
 const percent = (share: number): string => `${Math.round(share * 100)} %`
@@ -149,12 +140,10 @@ export function brokenConditions(site: AnchorSite, line: ApprovalStrength, conte
       break
     }
   }
-  const end = nearerEnd(site)
-  if (end !== null && end < line.edgeAlongMin) {
-    broken.push({
-      field: 'anchor.chainage',
-      condition: `${mm(end)} to the end of the edge, ${mm(line.edgeAlongMin)} or more`,
-    })
+  const side = site.sideFace
+  if (side && side.distance < line.edgeAlongMin) {
+    const condition = `${mm(side.distance)} to ${side.name}, ${mm(line.edgeAlongMin)} or more`
+    broken.push({ field: 'anchor.chainage', condition })
   }
   const face = nearerFace(site)
   if (face < line.edgeHeightMin) {
