@@ -44,17 +44,20 @@ const sum = (files) => ({
 
 const kb = (/** @type {number} */ bytes) => `${(bytes / KB).toFixed(0)} kB`
 
-/** The page itself and every script, style and font that it names. */
-function named() {
-  const page = `${DIST}/index.html`
+/** The page itself and every script, style and font that it names.
+ * @param {string} dist */
+function named(dist) {
+  const page = `${dist}/index.html`
   const text = readFileSync(at(page), 'utf8')
-  const names = [...text.matchAll(/(?:src|href)="\/([^"]+)"/g)].flatMap(([, name]) => (name ? [`${DIST}/${name}`] : []))
+  const names = [...text.matchAll(/(?:src|href)="\/([^"]+)"/g)].flatMap(([, name]) => (name ? [`${dist}/${name}`] : []))
   return [page, ...new Set(names)].filter((name) => existsSync(at(name)))
 }
 
-/** Bundled scripts of one route, by the name in front of the hash. */
-const chunksOf = (/** @type {string} */ route) =>
-  filesUnder(`${DIST}/_expo/static/js/web`).filter((file) => basename(file).replace(/-[0-9a-f]{8,}\.js$/, '') === route)
+/** Bundled scripts of one route, by the name in front of the hash.
+ * @param {string} dist
+ * @param {string} route */
+const chunksOf = (dist, route) =>
+  filesUnder(`${dist}/_expo/static/js/web`).filter((file) => basename(file).replace(/-[0-9a-f]{8,}\.js$/, '') === route)
 
 /** @param {string} title @param {readonly string[]} names */
 function firstScreen(title, names) {
@@ -72,9 +75,10 @@ function firstScreen(title, names) {
   return { line: `${title.padEnd(22)} ${kb(gz).padStart(8)} gz ${kb(br).padStart(8)} br`, problems }
 }
 
-/** @param {readonly string[]} first what every page loads */
-function behindJob(first) {
-  const work = chunksOf(WORK)
+/** @param {string} dist
+ * @param {readonly string[]} first what every page loads */
+function behindJob(dist, first) {
+  const work = chunksOf(dist, WORK)
   if (work.length !== 1) {
     return { line: '', problems: [`There must be one chunk behind a job (features/work.ts); found ${work.length}.`] }
   }
@@ -89,17 +93,21 @@ function behindJob(first) {
   return { line: `${line('behind a job', own)}\n${line('deep link', deep)}`, problems }
 }
 
-/** @returns {{ lines: string[], problems: string[] }} sizes, and what is over its budget */
-export function budget() {
-  if (!existsSync(at(`${DIST}/index.html`)))
-    return { lines: [], problems: ['dist/ is missing: build the web client first.'] }
-  const page = [...new Set([...named(), ...chunksOf(SHELL)])]
+/**
+ * @param {string} [dist] folder of the built client, from the root
+ * @returns {{ lines: string[], problems: string[] }} sizes, and what is over its budget
+ */
+export function budget(dist = DIST) {
+  if (!existsSync(at(`${dist}/index.html`))) {
+    return { lines: [], problems: [`${dist}/ holds no index.html: build the web client first.`] }
+  }
+  const page = [...new Set([...named(dist), ...chunksOf(dist, SHELL)])]
   const routes = Object.entries(FIRST_ROUTES).map(([title, route]) => {
-    const chunks = chunksOf(route)
+    const chunks = chunksOf(dist, route)
     if (chunks.length === 0) return { line: '', problems: [`${title}: no chunk is called ${route}`] }
     return firstScreen(title, [...new Set([...page, ...chunks])])
   })
-  const all = [...routes, behindJob(page)]
+  const all = [...routes, behindJob(dist, page)]
   return { lines: all.map(({ line }) => line).filter(Boolean), problems: all.flatMap(({ problems }) => problems) }
 }
 
