@@ -1,0 +1,79 @@
+import { basisOf } from '@wedgeline/engine'
+import { describe, expect, test } from 'vitest'
+import { layout } from '../engine/sample-layout'
+
+/**
+ * EN 1992-1-1 8.4.2 to 8.4.4 and 8.7.3 with recommended values, gamma C 1.5, alpha ct 1.0, fyd 500 / 1.15 = 434.8 MPa.
+ * Formulas from a digest; Table 8.2 (alpha 1, alpha 2) and alpha 6 from memory; numbers recomputed. Lengths mm.
+ */
+const basis = basisOf(layout().job)
+const FYD = 500 / 1.15
+
+const CASES = [
+  { id: 'E01', diameter: 12, strength: 32, cd: 30, bond: 3.175, required: 410.8, length: 318.4, lap: 477.6 },
+  { id: 'E02', diameter: 16, strength: 32, cd: 30, bond: 3.175, required: 547.8, length: 475.9, lap: 713.8 },
+  {
+    id: 'E03',
+    diameter: 10,
+    strength: 32,
+    cd: 30,
+    isGoodBond: false,
+    bond: 2.223,
+    required: 489.1,
+    length: 342.3,
+    lap: 513.5,
+  },
+  { id: 'E04', diameter: 12, strength: 25, cd: 25, bond: 2.693, required: 484.3, length: 405.6, lap: 608.4 },
+  { id: 'E05', diameter: 12, strength: 32, cd: 40, isBent: true, bond: 3.175, required: 410.8, length: 273.2 },
+  {
+    id: 'E06',
+    diameter: 20,
+    strength: 40,
+    cd: 40,
+    share: 0.5,
+    bond: 3.684,
+    required: 590.1,
+    length: 501.5,
+    lap: 709.3,
+  },
+  { id: 'E07', diameter: 8, strength: 32, cd: 30, bond: 3.175, required: 273.9, length: 191.7, lap: 287.6 },
+]
+
+describe('EN 1992-1-1 8.4 and 8.7, anchorage and laps (digest; Table 8.2 from memory)', () => {
+  test.each(CASES)('$id: $diameter mm in $strength MPa, cd $cd', (one) => {
+    const { diameter, strength, cd, isGoodBond = true, isBent = false } = one
+    const input = { diameter, strength, cd, isGoodBond, isBent, stress: FYD }
+    const found = basis.anchorage(input)
+    expect(found.bond).toBeCloseTo(one.bond, 2)
+    expect(Math.abs(found.required - one.required)).toBeLessThan(0.5)
+    expect(Math.abs(found.length - one.length)).toBeLessThan(0.5)
+    if (one.lap !== undefined) expect(Math.abs(basis.lap(input, one.share ?? 1) - one.lap)).toBeLessThan(0.5)
+  })
+
+  test('the least length holds where little stress is asked for: max(0.3 lb,rqd, 10 d, 100)', () => {
+    // 10 MPa in a 12 mm bar: lb,rqd = 3 * 10 / 3.175 = 9.4 mm; 10 d = 120 governs over 100.
+    const input = { diameter: 12, strength: 32, cd: null, isGoodBond: true, isBent: false, stress: 10 }
+    expect(basis.anchorage(input).length).toBe(120)
+    expect(basis.anchorage({ ...input, diameter: 8 }).length).toBe(100)
+  })
+
+  test('without cd no credit is taken: the length is lb,rqd', () => {
+    const found = basis.anchorage({
+      diameter: 12,
+      strength: 32,
+      cd: null,
+      isGoodBond: true,
+      isBent: false,
+      stress: FYD,
+    })
+    expect(found.length).toBe(found.required)
+  })
+
+  test('bond counts on no more than C60/75 (8.4.2(2), from memory)', () => {
+    const input = { diameter: 12, cd: null, isGoodBond: true, isBent: false, stress: FYD }
+    expect(basis.anchorage({ ...input, strength: 61 }).bond).toBe(basis.anchorage({ ...input, strength: 60 }).bond)
+    expect(basis.anchorage({ ...input, strength: 59 }).bond).toBeLessThan(
+      basis.anchorage({ ...input, strength: 60 }).bond,
+    )
+  })
+})
