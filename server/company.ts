@@ -1,10 +1,10 @@
-import { write, type Reader } from '../db/client'
+import { write, type Connection } from '../db/client'
 import { recordAudit } from './stores/audit'
 import { companyById, updateCompany, type CompanyRow } from './stores/company'
 import type { CompanyOfCall, Context, Person } from './trpc/context'
 
 /** A company that the caller was found to be in. */
-export function theCompany(db: Reader, id: string): CompanyRow {
+export function theCompany(db: Connection, id: string): CompanyRow {
   const found = companyById(db, id)
   if (!found) throw new Error(`Company ${id} has members and no row.`)
   return found

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto'
-import { write, type Db, type Reader } from '../db/client'
+import { write, type Db, type Connection } from '../db/client'
 import { throttled } from './failure'
 import { countBack, countOf, countUp, forget, forgetOld } from './stores/rate-limit'
 
@@ -64,7 +64,7 @@ export function noteSuccess(db: Db, attempt: Attempt): void {
 }
 
 /** Waits of 1, 2, 4 ... 60 s once the free attempts are used up, from the last attempt on. */
-function waitOf(db: Reader, limit: Limit, attempt: Attempt): number {
+function waitOf(db: Connection, limit: Limit, attempt: Attempt): number {
   const found = countOf(db, keyOf(limit.kind, attempt), attempt.nowMs)
   if (!found || found.count < limit.freeAttempts) return 0
   const lastAtMs = found.windowEndAtMs - limit.windowMs

@@ -1,6 +1,6 @@
 import type { Role } from '@wedgeline/contract'
 import { and, eq } from 'drizzle-orm'
-import type { Reader } from '../../db/client'
+import type { Connection } from '../../db/client'
 import { job, jobMember } from '../../db/schema/job'
 import { membership, membershipRole } from '../../db/schema/membership'
 
@@ -8,7 +8,7 @@ import { membership, membershipRole } from '../../db/schema/membership'
 
 /** Roles of a member, possibly none; null for somebody who is not in the company. */
 export function companyAccess(
-  db: Reader,
+  db: Connection,
   { personId, companyId }: { personId: string; companyId: string },
 ): readonly Role[] | null {
   const rows = db
@@ -30,7 +30,7 @@ export interface JobAccess {
 }
 
 /** Null for a job that does not exist and for one whose company the person is not in. */
-export function jobAccess(db: Reader, { personId, jobId }: { personId: string; jobId: string }): JobAccess | null {
+export function jobAccess(db: Connection, { personId, jobId }: { personId: string; jobId: string }): JobAccess | null {
   const found = db
     .select({ companyId: job.companyId, memberId: jobMember.personId })
     .from(job)

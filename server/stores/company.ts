@@ -1,5 +1,5 @@
 import { eq } from 'drizzle-orm'
-import type { Reader, Tx } from '../../db/client'
+import type { Connection, Tx } from '../../db/client'
 import { company } from '../../db/schema/person'
 
 export interface CompanyRow {
@@ -8,10 +8,10 @@ export interface CompanyRow {
   readonly note: string
 }
 
-export const companyById = (db: Reader, id: string): CompanyRow | undefined =>
+export const companyById = (db: Connection, id: string): CompanyRow | undefined =>
   db.select({ id: company.id, name: company.name, note: company.note }).from(company).where(eq(company.id, id)).get()
 
-export const firstCompanyId = (db: Reader): string | undefined =>
+export const firstCompanyId = (db: Connection): string | undefined =>
   db.select({ id: company.id }).from(company).limit(1).get()?.id
 
 export function insertCompany(tx: Tx, { nowMs, ...row }: CompanyRow & { nowMs: number }): void {

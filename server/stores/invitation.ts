@@ -1,6 +1,6 @@
 import type { Role } from '@wedgeline/contract'
 import { and, asc, eq, gt, isNull } from 'drizzle-orm'
-import type { Reader, Tx } from '../../db/client'
+import type { Connection, Tx } from '../../db/client'
 import { invitation } from '../../db/schema/membership'
 import { company } from '../../db/schema/person'
 
@@ -52,7 +52,7 @@ export function insertInvitation(tx: Tx, { roles, ...row }: NewInvitation): void
 }
 
 export const openInvitationByToken = (
-  db: Reader,
+  db: Connection,
   { tokenHash, nowMs }: { tokenHash: string; nowMs: number },
 ): OpenInvitation | undefined =>
   db
@@ -63,7 +63,7 @@ export const openInvitationByToken = (
     .get()
 
 export const openInvitationsOf = (
-  db: Reader,
+  db: Connection,
   { companyId, nowMs }: { companyId: string; nowMs: number },
 ): OpenInvitation[] =>
   db

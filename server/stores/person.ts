@@ -1,6 +1,6 @@
 import type { Role } from '@wedgeline/contract'
 import { and, asc, eq, ne } from 'drizzle-orm'
-import type { Reader, Tx } from '../../db/client'
+import type { Connection, Tx } from '../../db/client'
 import { jobMember } from '../../db/schema/job'
 import { membership, membershipRole } from '../../db/schema/membership'
 import { company, person } from '../../db/schema/person'
@@ -29,18 +29,18 @@ export interface MemberKey {
 
 const columns = { id: person.id, name: person.name, email: person.email }
 
-export const personById = (db: Reader, id: string): PersonRow | undefined =>
+export const personById = (db: Connection, id: string): PersonRow | undefined =>
   db.select(columns).from(person).where(eq(person.id, id)).get()
 
 /** The person and the password's hash, for checking it and for nothing else. */
-export const credentialsByEmail = (db: Reader, email: string) =>
+export const credentialsByEmail = (db: Connection, email: string) =>
   db
     .select({ ...columns, passwordHash: person.passwordHash })
     .from(person)
     .where(eq(person.email, email))
     .get()
 
-export const hasAnyPerson = (db: Reader): boolean =>
+export const hasAnyPerson = (db: Connection): boolean =>
   db.select({ id: person.id }).from(person).limit(1).get() !== undefined
 
 export function insertPerson(
@@ -53,7 +53,7 @@ export function insertPerson(
 }
 
 /** Everybody in a company with their roles, by name. */
-export function membersOf(db: Reader, companyId: string): Member[] {
+export function membersOf(db: Connection, companyId: string): Member[] {
   const rows = db
     .select({ ...columns, role: membershipRole.role })
     .from(membership)
@@ -75,7 +75,7 @@ export function membersOf(db: Reader, companyId: string): Member[] {
 }
 
 /** Companies that a person is in, by name, with the roles there. */
-export function companiesOf(db: Reader, personId: string): CompanyOfPerson[] {
+export function companiesOf(db: Connection, personId: string): CompanyOfPerson[] {
   const rows = db
     .select({ id: company.id, name: company.name, role: membershipRole.role })
     .from(membership)
@@ -97,7 +97,7 @@ export function companiesOf(db: Reader, personId: string): CompanyOfPerson[] {
 }
 
 /** Whether anybody but this person is an admin of the company. */
-export const hasOtherAdmin = (db: Reader, { companyId, personId }: MemberKey): boolean =>
+export const hasOtherAdmin = (db: Connection, { companyId, personId }: MemberKey): boolean =>
   db
     .select({ personId: membershipRole.personId })
     .from(membershipRole)

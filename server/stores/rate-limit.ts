@@ -1,5 +1,5 @@
 import { and, eq, gt, lte, sql } from 'drizzle-orm'
-import type { Reader, Tx } from '../../db/client'
+import type { Connection, Tx } from '../../db/client'
 import { rateLimit } from '../../db/schema/session'
 
 export interface Count {
@@ -9,7 +9,7 @@ export interface Count {
 }
 
 /** The count under a key; nothing once its window is over. */
-export function countOf(db: Reader, key: string, nowMs: number): Count | null {
+export function countOf(db: Connection, key: string, nowMs: number): Count | null {
   const row = db.select().from(rateLimit).where(eq(rateLimit.key, key)).get()
   return row && row.windowEndAtMs > nowMs ? row : null
 }
