@@ -16,6 +16,9 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/e2e/**'],
+          // Lint and type-check run inside some tests, and two cores are shared with others.
+          testTimeout: 30_000,
+          hookTimeout: 30_000,
           benchmark: { include: ['tests/bench/**/*.bench.ts'] },
         },
       },
@@ -53,6 +56,7 @@ export default defineConfig({
         test: {
           name: 'ui',
           environment: 'jsdom',
+          testTimeout: 30_000,
           globals: true, // lets @testing-library/react clean up after each test
           include: ['tests/**/*.test.tsx'],
           server: { deps: { inline: [/@testing-library/, /react-native/, /@expo\//, /expo-/] } },
