@@ -1,4 +1,5 @@
 import 'react-native'
+import type { WebKeyEvent } from './ui/web-key-event'
 
 /** What react-native-web passes on to the page and react-native's own types leave out. */
 declare module 'react-native' {
@@ -17,14 +18,9 @@ declare module 'react-native' {
     'aria-pressed'?: boolean | undefined
     'aria-required'?: boolean | undefined
     dataSet?: Record<string, string> | undefined
+    onClick?: ((event: WebKeyEvent) => void) | undefined
     onKeyDown?: ((event: WebKeyEvent) => void) | undefined
     onKeyUp?: ((event: WebKeyEvent) => void) | undefined
-  }
-  interface WebKeyEvent {
-    key: string
-    shiftKey: boolean
-    preventDefault: () => void
-    stopPropagation: () => void
   }
   interface ViewProps extends WebProps {}
   interface TextProps extends WebProps {}

@@ -1,0 +1,4 @@
+/** Native screens have no tab order to skip. */
+export function SkipLink() {
+  return null
+}
