@@ -1,7 +1,7 @@
 import { write, type Connection } from '../db/client'
 import { recordAudit } from './stores/audit'
 import { companyById, updateCompany, type CompanyRow } from './stores/company'
-import type { CompanyOfCall, Context, Person } from './trpc/context'
+import type { CompanyCall } from './trpc/context'
 
 /** A company that the caller was found to be in. */
 export function theCompany(db: Connection, id: string): CompanyRow {
@@ -12,7 +12,7 @@ export function theCompany(db: Connection, id: string): CompanyRow {
 
 /** Stores the company's name and note. */
 export function renameCompany(
-  { db, company, person, now }: Context & { readonly person: Person; readonly company: CompanyOfCall },
+  { db, company, person, now }: CompanyCall,
   { name, note }: { name: string; note: string },
 ): void {
   const nowMs = now()

@@ -17,7 +17,7 @@ import {
 } from './stores/invitation'
 import { companyAccess } from './stores/access'
 import { credentialsByEmail, hasAnyPerson, insertPerson, membersOf, setMember } from './stores/person'
-import type { CompanyOfCall, Context, Person, ServerDeps } from './trpc/context'
+import type { CompanyCall, Context, Person, ServerDeps } from './trpc/context'
 
 const OPEN_FOR_MS = 7 * 24 * 60 * 60_000
 const FIRST_ROLES: readonly Role[] = ['admin', 'detailer']
@@ -29,12 +29,10 @@ export interface InviteInput {
   readonly roles: readonly Role[]
 }
 
-type MemberCall = Context & { readonly person: Person; readonly company: CompanyOfCall }
-
 const linkOf = ({ appUrl }: Pick<ServerDeps, 'appUrl'>, token: string): string => `${appUrl}/invite/${token}`
 
 /** Stores an invitation and mails its link, which is given back as well: the table keeps the token's hash alone. */
-export async function invite(ctx: MemberCall, input: InviteInput): Promise<{ id: string; link: string }> {
+export async function invite(ctx: CompanyCall, input: InviteInput): Promise<{ id: string; link: string }> {
   const { db, company, person } = ctx
   const id = uuidv7()
   const token = newToken()
@@ -56,7 +54,7 @@ export async function invite(ctx: MemberCall, input: InviteInput): Promise<{ id:
   return { id, link }
 }
 
-async function mailLink(ctx: MemberCall, { to, name, link }: { to: string; name: string; link: string }) {
+async function mailLink(ctx: CompanyCall, { to, name, link }: { to: string; name: string; link: string }) {
   const companyName = companyById(ctx.db, ctx.company.id)?.name ?? ''
   const text = [
     `${name},`,
@@ -143,7 +141,7 @@ function join(tx: Tx, { found, person, nowMs }: { found: OpenInvitation; person:
 }
 
 /** @throws Failure when there is no such open invitation in the company. */
-export function withdraw({ db, company, person, now }: MemberCall, invitationId: string): void {
+export function withdraw({ db, company, person, now }: CompanyCall, invitationId: string): void {
   const nowMs = now()
   write(db, (tx) => {
     if (!withdrawInvitation(tx, { companyId: company.id, id: invitationId, nowMs })) throw missing(NOT_OPEN)

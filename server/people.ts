@@ -4,15 +4,13 @@ import { conflict, missing } from './failure'
 import { companyAccess } from './stores/access'
 import { recordAudit } from './stores/audit'
 import { hasOtherAdmin, removeMember, setMember, type MemberKey } from './stores/person'
-import type { CompanyOfCall, Context, Person } from './trpc/context'
-
-type AdminCall = Context & { readonly person: Person; readonly company: CompanyOfCall }
+import type { CompanyCall } from './trpc/context'
 
 const NOBODY = 'There is nobody like that in this company.'
 const LAST_ADMIN = 'Somebody has to be admin: make another person admin first.'
 
 /** @throws Failure for somebody who is not in the company, and when nobody would be left as admin. */
-export function setRoles(ctx: AdminCall, { personId, roles }: { personId: string; roles: readonly Role[] }): void {
+export function setRoles(ctx: CompanyCall, { personId, roles }: { personId: string; roles: readonly Role[] }): void {
   const { db, company, person } = ctx
   const key: MemberKey = { companyId: company.id, personId }
   const nowMs = ctx.now()
@@ -27,7 +25,7 @@ export function setRoles(ctx: AdminCall, { personId, roles }: { personId: string
 }
 
 /** @throws Failure for somebody who is not in the company, and when nobody would be left as admin. */
-export function removePerson(ctx: AdminCall, { personId }: { personId: string }): void {
+export function removePerson(ctx: CompanyCall, { personId }: { personId: string }): void {
   const { db, company, person } = ctx
   const key: MemberKey = { companyId: company.id, personId }
   write(db, (tx) => {

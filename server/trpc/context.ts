@@ -46,3 +46,14 @@ export interface JobOfCall {
   readonly id: string
   readonly companyId: string
 }
+
+/** A call by somebody who is in the company that it names. */
+export interface CompanyCall extends Context {
+  readonly person: Person
+  readonly company: CompanyOfCall
+}
+
+/** A call by somebody on the job that it names. */
+export interface JobCall extends CompanyCall {
+  readonly job: JobOfCall
+}
