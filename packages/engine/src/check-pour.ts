@@ -4,8 +4,12 @@ import { sitesOfEdge, type AnchorSite } from './anchor-site'
 import { basisOf } from './bases'
 import { checkBearing } from './checks/bearing'
 import { checkBurstingPlan, checkBurstingThickness } from './checks/bursting'
+import { closeAnchors, type CloseGroup } from './close-anchors'
+import { coverChecks } from './checks/cover'
 import { notYetChecked } from './checks/not-yet'
 import type { CheckContext } from './checks/outcome'
+import { spacingChecks } from './checks/spacing'
+import { straightLengthChecks } from './checks/straight-length'
 import { checkJackingForce } from './checks/tendon'
 import { found, layoutIndex, type LayoutIndex } from './layout-index'
 import type { Anchor, Layout } from './model'
@@ -47,10 +51,11 @@ export const FAMILIES_OF_ZONE: Readonly<Record<ZoneKind, readonly Family[]>> = {
   strip: ['precompression'],
 }
 
-/** What the zones of one run have in common; the sites of an edge are gathered when its first anchor asks. */
+/** What the zones of one run have in common; what an edge needs is worked out when its first anchor asks. */
 interface Run {
   readonly context: CheckContext
   readonly siteOf: (edgeId: string, anchorId: string) => AnchorSite
+  readonly closeOf: (edgeId: string) => readonly CloseGroup[]
 }
 
 /**
@@ -69,13 +74,22 @@ export function checkPour(layout: Layout, { pourId, edgeId, withSteps = false }:
 
 function runOf(index: LayoutIndex): Run {
   const { job } = index.layout
-  const sites = new Map<string, ReadonlyMap<string, AnchorSite>>()
-  const siteOf = (edgeId: string, anchorId: string) => {
-    const known = sites.get(edgeId) ?? sitesOfEdge(index, edgeId)
-    sites.set(edgeId, known)
-    return found(known, anchorId, 'anchor')
+  const sites = perEdge((edgeId) => sitesOfEdge(index, edgeId))
+  return {
+    context: { index, basis: basisOf(job), nearFrom: job.settings.nearFrom },
+    siteOf: (edgeId, anchorId) => found(sites(edgeId), anchorId, 'anchor'),
+    closeOf: perEdge((edgeId) => closeAnchors(index, edgeId)),
   }
-  return { context: { index, basis: basisOf(job), nearFrom: job.settings.nearFrom }, siteOf }
+}
+
+/** Works something out once for each edge that asks. */
+function perEdge<T>(make: (edgeId: string) => T): (edgeId: string) => T {
+  const made = new Map<string, { readonly value: T }>()
+  return (edgeId) => {
+    const known = made.get(edgeId) ?? { value: make(edgeId) }
+    made.set(edgeId, known)
+    return known.value
+  }
 }
 
 function checkZone(run: Run, zone: Zone, withSteps: boolean): ZoneResult {
@@ -105,23 +119,26 @@ function checksOf(run: Run, zone: Zone, family: Family): readonly Check[] | null
 }
 
 function anchorChecks(run: Run, zone: Zone, family: Family): readonly Check[] | null {
-  const { context, siteOf } = run
+  const { context, siteOf, closeOf } = run
   const anchor = found(context.index.anchors, zone.id.slice('anchor:'.length), 'anchor')
   const site = anchor.edgeId !== null && anchor.end === 'live' ? siteOf(anchor.edgeId, anchor.id) : null
   switch (family) {
     case 'bearing':
       return site ? checkBearing(site, context) : behindPan(zone, anchor)
     case 'bursting-thickness':
-      return site ? [checkBurstingThickness(site, context, false)] : null
+      return site ? [checkBurstingThickness(site, context, closeOf(site.edge.id))] : null
     case 'bursting-plan':
-      return site ? [checkBurstingPlan(site, context, false)] : null
+      return site ? [checkBurstingPlan(site, context, closeOf(site.edge.id))] : null
     case 'tendon':
       return forceChecks(context, zone, anchor)
     case 'dead-end':
       return deadEnd(zone, anchor)
     case 'cover':
+      return anchor.edgeId === null ? null : coverChecks(context.index, anchor)
     case 'spacing':
+      return anchor.edgeId === null ? null : spacingChecks(context.index, anchor)
     case 'straight-length':
+      return straightLengthChecks(context.index, anchor)
     case 'spalling':
     case 'depth-change':
     case 'edge-wedge':

@@ -8,9 +8,9 @@ const STATICS: Clause = { source: 'Statics', section: 'strands times force', tag
 /** Force of the whole tendon at the end of stressing, N. */
 export function jackingForce(tendon: Tendon, strand: StrandType): Step {
   return step(
-    { symbol: 'Pjack', meaning: 'Force while jacking', formula: 'n * r * Fpk', unit: 'N', clause: STATICS },
+    { symbol: 'Pjack', meaning: 'Force while jacking', formula: 'n * (r * Fpk)', unit: 'N', clause: STATICS },
     { n: tendon.strands, r: tendon.jackingRatio, Fpk: strand.breakingLoad },
-    (v) => v.n * v.r * v.Fpk,
+    (v) => v.n * (v.r * v.Fpk),
   )
 }
 

@@ -2,7 +2,9 @@
 
 import type { AnchorSite } from '../anchor-site'
 import type { TieRule } from '../bases/basis'
+import type { CloseGroup } from '../close-anchors'
 import { jackingForce, stageForce } from '../force'
+import { found } from '../layout-index'
 import type { Stage } from '../model'
 import type { Check, Compared } from '../result'
 import { sectionStepNear, type SectionStep } from '../section-step'
@@ -10,6 +12,7 @@ import type { Step } from '../step'
 import { countSteel, type Counted } from '../steel/count'
 import type { CountPlace, Plane } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
+import { anchorMark } from '../zones'
 import { byRatio, refusal, type CheckContext, type Head } from './outcome'
 import { planNotes, planPrism, thicknessPrisms, type Prism } from './prism'
 
@@ -28,10 +31,11 @@ interface Asked {
 }
 
 /** Bursting through the thickness; refused beside a step in depth and where anchors act as one. */
-export function checkBurstingThickness(site: AnchorSite, context: CheckContext, isClose: boolean): Check {
+export function checkBurstingThickness(site: AnchorSite, context: CheckContext, close: readonly CloseGroup[]): Check {
   const head = headOf(site, 'thickness', context)
   const depth = site.top - site.soffit
-  if (isClose) return actAsOne(head)
+  const group = groupOf(site, head, close)
+  if (group) return actsAsOne(site, { head, group, context })
   const change = sectionStepNear(site, depth)
   if (change)
     return refusal(head, { code: 'DEPTH_CHANGE', field: 'anchor.chainage', message: changeMessage(change, depth) })
@@ -48,9 +52,10 @@ export function checkBurstingThickness(site: AnchorSite, context: CheckContext, 
 }
 
 /** Bursting in plan; refused where anchors act as one. */
-export function checkBurstingPlan(site: AnchorSite, context: CheckContext, isClose: boolean): Check {
+export function checkBurstingPlan(site: AnchorSite, context: CheckContext, close: readonly CloseGroup[]): Check {
   const head = headOf(site, 'plan', context)
-  if (isClose) return actAsOne(head)
+  const group = groupOf(site, head, close)
+  if (group) return actsAsOne(site, { head, group, context })
   if (Math.abs(site.anchor.skew) > context.basis.inclinationMax.value) {
     return tooInclined(head, 'anchor.skew', site.anchor.skew)
   }
@@ -221,13 +226,21 @@ function faceNote({ rule, counted }: Answer, { from, to }: { from: number; to: n
   return `The steel does not go on to the face with the same intensity: ${numbers}.`
 }
 
-const actAsOne = (head: Head) =>
-  refusal(head, {
+const groupOf = ({ anchor }: AnchorSite, { plane }: Head, close: readonly CloseGroup[]): CloseGroup | undefined =>
+  close.find((group) => group.plane === plane && group.anchorIds.includes(anchor.id))
+
+function actsAsOne(site: AnchorSite, of: { head: Head; group: CloseGroup; context: CheckContext }): Check {
+  const { index } = of.context
+  const others = of.group.anchorIds.filter((id) => id !== site.anchor.id)
+  const marks = others.map((id) => anchorMark(index, found(index.anchors, id, 'anchor'))).join(', ')
+  const below = of.group.steps.at(-1)?.value
+  const distance = below === undefined ? '' : ` (closer than ${whole(below)})`
+  return refusal(of.head, {
     code: 'ANCHORS_ACT_AS_ONE',
-    field: 'anchor.chainage',
-    message:
-      'This anchor and a neighbour stand so close that they act as one; groups are not yet checked. Set them further apart or check the group by hand.',
+    field: of.group.plane === 'plan' ? 'anchor.chainage' : 'anchor.height',
+    message: `Acts as one with ${marks}${distance}: the rule for a single anchor does not hold, and groups are not yet checked.`,
   })
+}
 
 const noPrism = (head: Head, { a, b }: Prism, field: string) =>
   refusal(head, {
