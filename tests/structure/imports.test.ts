@@ -77,6 +77,7 @@ const ALLOWED: readonly [string, string][] = [
   ['features/edge/edge-screen.tsx', '@wedgeline/contract'],
   ['features/edge/edge-screen.tsx', '@wedgeline/engine/geometry'],
   ['features/edge/edge-screen.tsx', '@wedgeline/engine/result'],
+  ['features/job/job-screen.tsx', '@wedgeline/engine/bases'],
   ['lib/engine.worker.ts', '@wedgeline/engine'],
   ['lib/engine-client.ts', '@wedgeline/engine'],
   ['server/routers/job.ts', '../stores/job'],
