@@ -10,6 +10,7 @@ import type {
   Joint,
   Layout,
   Level,
+  Obstruction,
   Pan,
   Pour,
   Steel,
@@ -37,10 +38,13 @@ export interface LayoutIndex {
   readonly strandTypes: ById<StrandType>
   readonly edgesOfPour: Lists<Edge>
   readonly edgesOfLine: Lists<Edge>
+  readonly openingsOfLevel: Lists<Obstruction>
   readonly pansOfPour: Lists<Pan>
   readonly tendonsOfPour: Lists<Tendon>
   /** By chainage, then height, then id. */
   readonly anchorsOfEdge: Lists<Anchor>
+  /** The anchors of all edges on the same side of the same edge line, whatever their pour; ordered likewise. */
+  readonly rowOfEdge: Lists<Anchor>
   readonly anchorsOfPan: Lists<Anchor>
   readonly anchorsOfTendon: Lists<Anchor>
   /** By the key of `steelKey`. */
@@ -63,13 +67,15 @@ export function layoutIndex(layout: Layout): LayoutIndex {
       pour: found(pours, edge.pourId, 'pour'),
     }),
   ])
+  const framesById = new Map(frames)
+  const anchorsOfEdge = grouped([...layout.anchors].sort(alongEdge), (anchor) => anchor.edgeId)
   return {
     layout,
     levels: byId(layout.levels),
     pours,
     edgeLines,
     edges: byId(layout.edges),
-    frames: new Map(frames),
+    frames: framesById,
     joints: byId(layout.joints),
     pans: byId(layout.pans),
     tendons: byId(layout.tendons),
@@ -79,9 +85,11 @@ export function layoutIndex(layout: Layout): LayoutIndex {
     strandTypes: byId(layout.strandTypes),
     edgesOfPour: grouped(layout.edges, (edge) => edge.pourId),
     edgesOfLine: grouped(layout.edges, (edge) => edge.edgeLineId),
+    openingsOfLevel: grouped(layout.obstructions, ({ kind, levelId }) => (kind === 'opening' ? levelId : null)),
     pansOfPour: grouped(layout.pans, (pan) => pan.pourId),
     tendonsOfPour: grouped(layout.tendons, (tendon) => tendon.pourId),
-    anchorsOfEdge: grouped([...layout.anchors].sort(alongEdge), (anchor) => anchor.edgeId),
+    anchorsOfEdge,
+    rowOfEdge: rows(layout.edges, framesById, anchorsOfEdge),
     anchorsOfPan: grouped(layout.anchors, (anchor) => anchor.panId),
     anchorsOfTendon: grouped(layout.anchors, (anchor) => anchor.tendonId),
     steelOfZone: grouped(layout.steel, (steel) => steelKey(steel.zone)),
@@ -114,6 +122,21 @@ export function found<T>(map: ById<T>, id: string, what: string): T {
   const record = map.get(id)
   if (record === undefined) throw new Error(`No ${what} has the id "${id}".`)
   return record
+}
+
+/** Edges on the two sides of one line, as at a joint, face each other: their anchors stand in two rows. */
+function rows(edges: readonly Edge[], frames: ById<EdgeFrame>, anchorsOfEdge: Lists<Anchor>): Lists<Anchor> {
+  const sideOf = (edge: Edge) => {
+    const frame = found(frames, edge.id, 'edge')
+    return `${edge.edgeLineId}:${frame.runsLeftToRight ? 'left to right' : 'right to left'}`
+  }
+  const edgesOfSide = grouped(edges, sideOf)
+  const rowOfSide = new Map<string, readonly Anchor[]>()
+  for (const [side, members] of edgesOfSide) {
+    const anchors = members.flatMap((edge) => anchorsOfEdge.get(edge.id) ?? [])
+    rowOfSide.set(side, members.length > 1 ? anchors.sort(alongEdge) : anchors)
+  }
+  return new Map(edges.map((edge) => [edge.id, rowOfSide.get(sideOf(edge)) ?? []]))
 }
 
 function byId<T extends { readonly id: string }>(records: readonly T[]): Map<string, T> {
