@@ -24,7 +24,7 @@ const e4 = placeOf('edges', 'E4-P1')
 const s4 = placeOf('hardware', 'S4')
 const d4 = placeOf('hardware', 'D4')
 const b7 = placeOf('hardware', 'B7')
-const bars = placeOf('steel', 'edge-bars-E1')
+const bars = placeOf('steel', 'edge-bars-E1-1')
 const bow = square([0, 0], [10, 10], [10, 0], [0, 10])
 
 const e1 = placeOf('anchors', 'L1P1-E01W')

@@ -85,7 +85,7 @@ describe('layouts that contradict themselves are refused', () => {
   test('a gap may end at an anchor in a pan of its pour', () => {
     const zone = { kind: 'gap', edgeId: 'E4-P1', afterAnchorId: 'L1P1-N03N', beforeAnchorId: 'L1P1-N04P' }
     const shape = { kind: 'wedge-bars', diameterMm: 12, lengthMm: 3000, count: 4, layers: 'both' }
-    const steel = demoRow('steel', 'edge-bars-E4-P1', { id: 'wedge-bars', zone, shape })
+    const steel = demoRow('steel', 'edge-bars-E4-P1-1', { id: 'wedge-bars', zone, shape })
     expect(readLayout(demoWith('steel.0', steel)).ok).toBe(true)
   })
 })
