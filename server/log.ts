@@ -25,6 +25,12 @@ export const requestLog = (log: Logger) =>
     serializers: { req: requestOf, res: ({ statusCode }: { statusCode: number }) => ({ statusCode }) },
     wrapSerializers: false,
     customLogLevel: (_request, { statusCode }) => (statusCode >= 500 ? 'error' : 'info'),
+    // What went wrong was logged where it was caught.
+    customErrorObject: (request, response, _error, { responseTime }: { responseTime?: number }) => ({
+      req: request,
+      res: response,
+      responseTime,
+    }),
     autoLogging: { ignore: ({ url }) => url === '/healthz' || url === '/readyz' },
   })
 
