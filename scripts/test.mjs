@@ -1,5 +1,6 @@
-import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs'
+import { mkdirSync, rmSync } from 'node:fs'
 import { build, writeRouteTypes } from './build.mjs'
+import { countOf } from './count.mjs'
 import { writeEngineVersion } from './engine-version.mjs'
 import { install } from './install.mjs'
 import { at, runNode, seconds } from './project.mjs'
@@ -8,7 +9,7 @@ const RESULTS = 'test-results'
 const bin = (/** @type {string} */ path) => `node_modules/${path}`
 
 /**
- * @typedef {{ passed: number, failed: number }} Count
+ * @typedef {import('./count.mjs').Count} Count
  * @typedef {{ title: string, work: () => Promise<Count> }} Part
  */
 
@@ -25,21 +26,6 @@ const single = (title, commands) => ({
   },
 })
 
-/** Reads vitest's own count; a file that could not be loaded, and an exit code without a failed test, count as one.
- * @param {string} file
- * @param {number} code
- * @returns {Count} */
-function countOf(file, code) {
-  if (!existsSync(at(file))) return { passed: 0, failed: 1 }
-  const report = JSON.parse(readFileSync(at(file), 'utf8'))
-  const unloaded = report.testResults.filter(
-    (/** @type {{ status: string, assertionResults: unknown[] }} */ result) =>
-      result.status === 'failed' && result.assertionResults.length === 0,
-  ).length
-  const failed = report.numFailedTests + unloaded
-  return { passed: report.numPassedTests, failed: code !== 0 && failed === 0 ? 1 : failed }
-}
-
 /** @param {string} title
  * @param {readonly string[]} args
  * @returns {Part} */
@@ -49,7 +35,7 @@ const vitest = (title, args) => ({
     const file = `${RESULTS}/${title.replaceAll(/\W+/g, '-')}.json`
     rmSync(at(file), { force: true })
     const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${file}`]
-    return countOf(file, await runNode([bin('vitest/vitest.mjs'), 'run', ...args, ...reporters]))
+    return countOf(at(file), await runNode([bin('vitest/vitest.mjs'), 'run', ...args, ...reporters]))
   },
 })
 
@@ -68,6 +54,16 @@ const parts = [
   vitest('browser', ['--project', 'e2e', '--no-file-parallelism']),
 ]
 
+/** @param {Part} part @returns {Promise<Count>} one failure where the part itself broke */
+async function counted({ title, work }) {
+  try {
+    return await work()
+  } catch (error) {
+    console.error(`${title}:`, error)
+    return { passed: 0, failed: 1 }
+  }
+}
+
 async function main() {
   const startedAt = performance.now()
   await install()
@@ -75,13 +71,13 @@ async function main() {
   mkdirSync(at(RESULTS), { recursive: true })
   const lines = []
   const total = { passed: 0, failed: 0 }
-  for (const { title, work } of parts) {
-    console.log(`\n== ${title}`)
+  for (const part of parts) {
+    console.log(`\n== ${part.title}`)
     const partAt = performance.now()
-    const { passed, failed } = await work()
+    const { passed, failed } = await counted(part)
     total.passed += passed
     total.failed += failed
-    lines.push(`${title.padEnd(26)} ${seconds(partAt).padStart(8)}   ${passed} passed, ${failed} failed`)
+    lines.push(`${part.title.padEnd(26)} ${seconds(partAt).padStart(8)}   ${passed} passed, ${failed} failed`)
   }
   console.log(`\n${lines.join('\n')}\n${'all'.padEnd(26)} ${seconds(startedAt).padStart(8)}\n`)
   console.log(`${total.passed} passed, ${total.failed} failed`)
