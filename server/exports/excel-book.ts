@@ -1,0 +1,85 @@
+import ExcelJS from 'exceljs'
+import type { BookProperties, BookWriter, CellStyle, CellValue, SheetWriter, TableBlock } from './book-writer'
+
+const FONT = 'Calibri'
+const A4 = 9
+const FILL = 'FFE7E2D6'
+const RULE = 'FFD2CCBD'
+
+/** An Excel workbook in memory. The same calls give the same cells. */
+export function excelBook(properties: BookProperties): BookWriter {
+  const book = new ExcelJS.Workbook()
+  const at = new Date(properties.atMs)
+  book.title = properties.title
+  book.subject = properties.subject
+  book.creator = properties.author
+  book.lastModifiedBy = properties.author
+  book.created = at
+  book.modified = at
+  return {
+    sheet: (name) => sheetWriter(book.addWorksheet(name)),
+    name: (name, range) => book.definedNames.add(range, name),
+    finish: async () => Buffer.from(await book.xlsx.writeBuffer()),
+  }
+}
+
+function sheetWriter(sheet: ExcelJS.Worksheet): SheetWriter {
+  return {
+    put(row, column, { value, style }) {
+      const cell = sheet.getCell(row, column)
+      cell.value = cellValue(value)
+      styled(cell, style)
+    },
+    table: (block) => writeTable(sheet, block),
+    widths: (widths) =>
+      widths.forEach((width, k) => {
+        sheet.getColumn(k + 1).width = width
+      }),
+    freeze(rows) {
+      sheet.views = [{ state: 'frozen', xSplit: 0, ySplit: rows }]
+    },
+    page({ area, titleRows, footer }) {
+      const pageSetup = {
+        paperSize: A4,
+        orientation: 'landscape',
+        fitToPage: true,
+        fitToWidth: 1,
+        fitToHeight: 0,
+      } as const
+      Object.assign(sheet.pageSetup, pageSetup, { printArea: area, printTitlesRow: titleRows })
+      // An ampersand begins a code in a footer; two of them print one.
+      sheet.headerFooter.oddFooter = `&L${footer.replaceAll('&', '&&')}&RPage &P of &N`
+    },
+  }
+}
+
+function writeTable(sheet: ExcelJS.Worksheet, { name, row, columns, rows }: TableBlock): void {
+  sheet.addTable({
+    name,
+    ref: `A${row}`,
+    headerRow: true,
+    style: { showRowStripes: false },
+    columns: columns.map(({ title }) => ({ name: title })),
+    rows: rows.map((cells) => cells.map(cellValue)),
+  })
+  columns.forEach(({ style }, k) => {
+    styled(sheet.getCell(row, k + 1), { isHead: true, isBold: true, isWrapped: true, align: 'center' })
+    rows.forEach((_, below) => styled(sheet.getCell(row + 1 + below, k + 1), style))
+  })
+}
+
+function cellValue(value: CellValue): ExcelJS.CellValue {
+  if (value === null || typeof value !== 'object') return value
+  return { formula: value.formula, result: value.result }
+}
+
+/** A style of its own for every cell: the library shares style objects between cells, and a change would leak. */
+function styled(cell: ExcelJS.Cell, style: CellStyle = {}): void {
+  const { isBold = false, isWrapped = false, isHead = false, align, format, size = 10 } = style
+  cell.font = { name: FONT, size, bold: isBold }
+  cell.alignment = { vertical: isHead ? 'middle' : 'top', wrapText: isWrapped, ...(align && { horizontal: align }) }
+  if (format !== undefined) cell.numFmt = format
+  if (!isHead) return
+  cell.fill = { type: 'pattern', pattern: 'solid', fgColor: { argb: FILL } }
+  cell.border = { bottom: { style: 'thin', color: { argb: RULE } } }
+}

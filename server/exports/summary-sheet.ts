@@ -1,0 +1,49 @@
+import type { BookWriter, CellValue, Column } from './book-writer'
+import { statusLine } from './wording'
+import type { ScheduleWorkbookInput } from './workbook'
+
+const COLUMNS: readonly Column[] = [
+  { title: 'Type and size', width: 16 },
+  { title: 'No. of bars', width: 12, style: { format: '0' } },
+  { title: 'Length (m)', width: 14, style: { format: '0.00' } },
+  { title: 'Mass per metre (kg/m)', width: 14, style: { format: '0.000' } },
+  { title: 'Mass (kg)', width: 14, style: { format: '0.00' } },
+]
+const HEAD_ROW = 4
+
+export function writeSummary(book: BookWriter, input: ScheduleWorkbookInput): void {
+  const { totals, metres, mass } = input.schedule
+  const sheet = book.sheet('Summary')
+  sheet.widths(COLUMNS.map((column) => column.width))
+  sheet.put(1, 1, { value: `Bars by type and size, schedule ${input.reference}`, style: { isBold: true, size: 14 } })
+  sheet.put(2, 1, { value: statusLine(input) })
+  const rows = totals.map((total, k): readonly CellValue[] => {
+    const at = HEAD_ROW + 1 + k
+    return [
+      total.typeAndSize,
+      { formula: `SUMIFS(BarTotals,BarTypes,A${at})`, result: total.bars },
+      { formula: `SUMPRODUCT((BarTypes=A${at})*BarTotals*BarLengths)/1000`, result: total.metres },
+      total.massPerMetre,
+      { formula: `C${at}*D${at}`, result: total.mass },
+    ]
+  })
+  if (rows.length > 0) sheet.table({ name: 'BarSummary', row: HEAD_ROW, columns: COLUMNS, rows })
+  const [first, last, sumRow] = [HEAD_ROW + 1, HEAD_ROW + rows.length, HEAD_ROW + rows.length + 1]
+  const sums: readonly (readonly [number, CellValue, string])[] = [
+    [1, 'All bars', '@'],
+    [2, { formula: `SUM(B${first}:B${last})`, result: totals.reduce((all, total) => all + total.bars, 0) }, '0'],
+    [3, { formula: `SUM(C${first}:C${last})`, result: metres }, '0.00'],
+    [5, { formula: `SUM(E${first}:E${last})`, result: mass }, '0.00'],
+  ]
+  if (rows.length > 0) {
+    for (const [column, value, format] of sums) sheet.put(sumRow, column, { value, style: { isBold: true, format } })
+    book.name('AllMetres', `Summary!$C$${sumRow}`)
+    book.name('AllMass', `Summary!$E$${sumRow}`)
+  }
+  sheet.freeze(HEAD_ROW)
+  sheet.page({
+    area: `A1:E${sumRow}`,
+    titleRows: `${HEAD_ROW}:${HEAD_ROW}`,
+    footer: `${input.reference} ${statusLine(input)}`,
+  })
+}
