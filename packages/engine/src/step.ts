@@ -30,5 +30,6 @@ export function step<V extends Record<string, number>>(
   values: V,
   compute: (v: V) => number,
 ): Step {
-  return { ...line, values, value: compute(values) }
+  const { symbol, meaning, formula, unit, clause } = line
+  return { symbol, meaning, formula, values, value: compute(values), unit, clause }
 }

@@ -29,12 +29,15 @@ export function byRatio(
   head: Head,
   answer: Answer & { readonly readings: readonly string[] },
 ): Compared {
-  const { readings, ...numbers } = answer
-  const accepted = statusOfRatio({ demand: answer.demand, limit: answer.limit, nearFrom: context.nearFrom })
+  const { demand, limit, unit, steps, readings } = answer
+  const accepted = statusOfRatio({ demand, limit, nearFrom: context.nearFrom })
   const open = readings.find((id) => !context.basis.isAccepted(id))
   return {
     ...head,
-    ...numbers,
+    demand,
+    limit,
+    unit,
+    steps,
     kind: 'compared',
     compares: 'ratio',
     status: open === undefined ? accepted : 'needs-judgement',
