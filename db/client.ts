@@ -1,14 +1,15 @@
 import { fileURLToPath } from 'node:url'
 import Database from 'better-sqlite3'
 import { drizzle, type BetterSQLite3Database } from 'drizzle-orm/better-sqlite3'
+import type { BaseSQLiteDatabase } from 'drizzle-orm/sqlite-core'
 import { migrateGuarded } from './migrate'
 import * as schema from './schema'
 
 export type Db = BetterSQLite3Database<typeof schema> & { readonly $client: Database.Database }
 /** The database inside a transaction. */
 export type Tx = Parameters<Parameters<Db['transaction']>[0]>[0]
-/** Whatever can be read from: the database or a transaction on it. */
-export type Reader = Db | Tx
+/** The database, inside or outside a transaction. */
+export type Connection = BaseSQLiteDatabase<'sync', Database.RunResult, typeof schema>
 
 const MIGRATIONS = fileURLToPath(new URL('../drizzle', import.meta.url))
 const BUSY_TIMEOUT_MS = 5000

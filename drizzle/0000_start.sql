@@ -608,13 +608,15 @@ CREATE TABLE `pour_result` (
 	`pour_id` text NOT NULL,
 	`results` text NOT NULL,
 	`counts` text NOT NULL,
+	`reading_ids` text NOT NULL,
 	`engine_version` text NOT NULL,
 	`change_number` integer NOT NULL,
 	`at_ms` integer NOT NULL,
 	PRIMARY KEY(`company_id`, `job_id`, `pour_id`),
 	FOREIGN KEY (`company_id`,`job_id`,`pour_id`) REFERENCES `pour`(`company_id`,`job_id`,`id`) ON UPDATE no action ON DELETE no action,
 	CONSTRAINT "pour_result_results_json" CHECK(json_valid("pour_result"."results")),
-	CONSTRAINT "pour_result_counts_json" CHECK(json_valid("pour_result"."counts"))
+	CONSTRAINT "pour_result_counts_json" CHECK(json_valid("pour_result"."counts")),
+	CONSTRAINT "pour_result_reading_ids_json" CHECK(json_valid("pour_result"."reading_ids"))
 );
 --> statement-breakpoint
 CREATE TABLE `rate_limit` (

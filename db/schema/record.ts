@@ -61,6 +61,8 @@ export const pourResult = sqliteTable(
     pourId: text('pour_id').notNull(),
     results: text('results', { mode: 'json' }).$type<ZoneResult[]>().notNull(),
     counts: text('counts', { mode: 'json' }).$type<PourResult['counts']>().notNull(),
+    /** Readings that the results rest on, accepted or not. */
+    readingIds: text('reading_ids', { mode: 'json' }).$type<string[]>().notNull(),
     engineVersion: text('engine_version').notNull(),
     changeNumber: integer('change_number').notNull(),
     atMs: integer('at_ms').notNull(),
@@ -73,6 +75,7 @@ export const pourResult = sqliteTable(
     }),
     isJson('pour_result_results_json', t.results),
     isJson('pour_result_counts_json', t.counts),
+    isJson('pour_result_reading_ids_json', t.readingIds),
   ],
 )
 

@@ -1,6 +1,9 @@
+import { and, asc, desc, eq, gt, isNotNull, lt } from 'drizzle-orm'
 import { v7 as uuidv7 } from 'uuid'
-import type { Tx } from '../../db/client'
+import type { Connection } from '../../db/client'
 import { audit } from '../../db/schema/record'
+import { person } from '../../db/schema/person'
+import type { JobKey } from './job-key'
 
 export interface AuditEntry {
   readonly companyId: string
@@ -8,17 +11,59 @@ export interface AuditEntry {
   readonly jobId: string | null
   readonly personId: string
   readonly atMs: number
-  /** Name of the procedure. */
+  /** Name of the procedure: layout.apply. */
   readonly what: string
+  /** What changed, as it was and as it is; plain JSON, null where there was or is nothing. */
   readonly before: unknown
   readonly after: unknown
-  /** The job's change count, where the layout changed. */
   readonly changeNumber?: number
 }
 
-/** Notes who changed what, in the transaction that changes it. */
-export function recordAudit(tx: Tx, entry: AuditEntry): void {
-  tx.insert(audit)
-    .values({ id: uuidv7(), ...entry })
+/** Adds to the record of who did what; to be called in the transaction that does it. */
+export function recordAudit(db: Connection, entry: AuditEntry): void {
+  db.insert(audit)
+    .values({ id: uuidv7(), ...entry, changeNumber: entry.changeNumber ?? null })
     .run()
 }
+
+/** The latest entries of a job, newest first; with `beforeMs` those before that instant. */
+export function auditOf(db: Connection, { companyId, jobId }: JobKey, page: { limit: number; beforeMs?: number | undefined }) {
+  return db
+    .select({
+      id: audit.id,
+      atMs: audit.atMs,
+      personName: person.name,
+      what: audit.what,
+      before: audit.before,
+      after: audit.after,
+    })
+    .from(audit)
+    .innerJoin(person, eq(person.id, audit.personId))
+    .where(
+      and(
+        eq(audit.companyId, companyId),
+        eq(audit.jobId, jobId),
+        page.beforeMs === undefined ? undefined : lt(audit.atMs, page.beforeMs),
+      ),
+    )
+    .orderBy(desc(audit.atMs), desc(audit.id))
+    .limit(page.limit)
+    .all()
+}
+
+/** What was there after each change of the layout since `changeNumber`, oldest first. */
+export const changesSince = (db: Connection, { companyId, jobId }: JobKey, changeNumber: number): unknown[] =>
+  db
+    .select({ after: audit.after })
+    .from(audit)
+    .where(
+      and(
+        eq(audit.companyId, companyId),
+        eq(audit.jobId, jobId),
+        isNotNull(audit.changeNumber),
+        gt(audit.changeNumber, changeNumber),
+      ),
+    )
+    .orderBy(asc(audit.changeNumber))
+    .all()
+    .map(({ after }) => after)

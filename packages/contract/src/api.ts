@@ -7,6 +7,7 @@ import {
   jackSchema,
   jobSettingsSchema,
   label,
+  layoutSchema,
   strandTypeSchema,
   text,
 } from './layout'
@@ -81,3 +82,10 @@ export const byCompanySchema = z.strictObject({ companyId: idSchema })
 export const byJobSchema = z.strictObject({ jobId: idSchema })
 export const byPourSchema = z.strictObject({ jobId: idSchema, pourId: idSchema })
 export const companyNameSchema = z.strictObject({ companyId: idSchema, name: label(120), note: text(500).default('') })
+export const importLayoutSchema = z.strictObject({ companyId: idSchema, layout: layoutSchema })
+/** A page of what was done on a job, newest first; `beforeMs` is the instant of the last entry that was seen. */
+export const auditListSchema = z.strictObject({
+  jobId: idSchema,
+  limit: z.number().int().min(1).max(200).default(50),
+  beforeMs: z.number().int().optional(),
+})

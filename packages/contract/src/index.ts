@@ -73,11 +73,13 @@ export {
   ROLES,
   acceptInvitationSchema,
   acceptReadingSchema,
+  auditListSchema,
   byCompanySchema,
   byJobSchema,
   byPourSchema,
   companyNameSchema,
   emailSchema,
+  importLayoutSchema,
   invitationSchema,
   invitationTokenSchema,
   jobBasisSchema,
@@ -106,3 +108,4 @@ export {
   type Severity,
 } from './problems'
 export { PROBLEMS_MAX, readLayout, readLayoutText, type ReadLayout } from './read-layout'
+export { ENGINE_VERSION } from './engine-version'

@@ -1,0 +1,72 @@
+import type { HardwareData, JackData, StrandTypeData } from '@wedgeline/contract'
+import { write, type Connection } from '../db/client'
+import { recheckJob } from './checking'
+import { refused } from './failure'
+import { stampOf, type CompanyCall } from './job-call'
+import { recordAudit } from './stores/audit'
+import {
+  hardwareOf,
+  putHardware,
+  putJack,
+  putStrandType,
+  type CompanyHardware,
+  type CompanyStamp,
+} from './stores/hardware'
+import { jobsUsing } from './stores/result'
+import { storing } from './storing'
+
+/** Storing what the company presses and bears on; every job that uses it is checked again. */
+
+export function saveHardware(ctx: CompanyCall, hardware: HardwareData): void {
+  save(ctx, {
+    what: 'hardware.save',
+    after: hardware,
+    find: (company) => company.hardware.find(({ id }) => id === hardware.id),
+    put: (tx, stamp) => {
+      const { jacks } = hardwareOf(tx, ctx.company.id)
+      if (hardware.jackId !== null && !jacks.some(({ id }) => id === hardware.jackId)) {
+        throw refused('This jack is not among the company\u2019s; choose one of those or none.', 'hardware.jackId')
+      }
+      putHardware(tx, hardware, stamp)
+    },
+  })
+}
+
+export function saveJack(ctx: CompanyCall, jack: JackData): void {
+  save(ctx, {
+    what: 'hardware.saveJack',
+    after: jack,
+    find: (company) => company.jacks.find(({ id }) => id === jack.id),
+    put: (tx, stamp) => putJack(tx, jack, stamp),
+  })
+}
+
+export function saveStrandType(ctx: CompanyCall, strandType: StrandTypeData): void {
+  save(ctx, {
+    what: 'hardware.saveStrandType',
+    after: strandType,
+    find: (company) => company.strandTypes.find(({ id }) => id === strandType.id),
+    put: (tx, stamp) => putStrandType(tx, strandType, stamp),
+  })
+}
+
+interface Saving {
+  readonly what: string
+  readonly after: { readonly id: string }
+  readonly find: (company: CompanyHardware) => unknown
+  readonly put: (tx: Connection, stamp: CompanyStamp) => void
+}
+
+function save(ctx: CompanyCall, { what, after, find, put }: Saving): void {
+  const { db, company } = ctx
+  const companyId = company.id
+  storing(() =>
+    write(db, (tx) => {
+      const stamp = stampOf(ctx)
+      const before = find(hardwareOf(tx, companyId)) ?? null
+      put(tx, { companyId, ...stamp })
+      recordAudit(tx, { companyId, jobId: null, ...stamp, what, before, after })
+      for (const jobId of jobsUsing(tx, companyId, after.id)) recheckJob(tx, { companyId, jobId }, stamp.atMs)
+    }),
+  )
+}

@@ -1,0 +1,184 @@
+import type { JobData, Role } from '@wedgeline/contract'
+import { STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
+import { write, type Connection } from '../db/client'
+import { recheckJob } from './checking'
+import { conflict, missing, refused } from './failure'
+import { keyOf, stampOf, type CompanyCall, type JobCall } from './job-call'
+import { companyAccess } from './stores/access'
+import { recordAudit } from './stores/audit'
+import { companyById } from './stores/company'
+import {
+  deleteJobMember,
+  insertJob,
+  insertJobMember,
+  jobById,
+  jobData,
+  jobPeople,
+  jobRow,
+  jobsOf,
+  updateJobBasis,
+  updateJobTitle,
+} from './stores/job'
+import type { JobKey } from './stores/job-key'
+import { membersOf } from './stores/person'
+import { acceptedReadingIds, anchorCounts, pourSummaries } from './stores/result'
+
+type Counts = PourResult['counts']
+
+export interface PourSummary {
+  readonly id: string
+  readonly mark: string
+  readonly title: string
+  readonly state: 'draft'
+  readonly anchors: number
+  readonly counts: Counts
+}
+
+const NO_COUNTS = Object.fromEntries(STATUSES.map((status) => [status, 0])) as Counts
+
+/** Jobs that have the person among their people, with how their pours stand. */
+export function listJobs(db: Connection, personId: string) {
+  const anchors = anchorCounts(db, personId)
+  const accepted = acceptedReadingIds(db, personId)
+  const pours = pourSummaries(db, personId)
+  return jobsOf(db, personId).map((job) => {
+    const own = pours.filter(({ jobId }) => jobId === job.id)
+    const proposed = new Set(
+      own.flatMap(({ readingIds }) => readingIds ?? []).filter((id) => !accepted.has(`${job.id} ${id}`)),
+    )
+    return {
+      ...job,
+      readingsProposed: proposed.size,
+      pours: own.map(({ id, mark, title, counts }): PourSummary => ({
+        id,
+        mark,
+        title,
+        state: 'draft',
+        anchors: anchors.get(`${job.id} ${id}`) ?? 0,
+        counts: counts ?? NO_COUNTS,
+      })),
+    }
+  })
+}
+
+/** A job with its people and what the caller is in its company. */
+export function describeJob(ctx: JobCall) {
+  const { db, company } = ctx
+  const key = keyOf(ctx)
+  return {
+    ...jobData(db, key),
+    companyId: key.companyId,
+    companyName: companyById(db, key.companyId)?.name ?? '',
+    members: peopleOf(db, key),
+    myRoles: company.roles,
+  }
+}
+
+function peopleOf(db: Connection, key: JobKey): { id: string; name: string; roles: readonly Role[] }[] {
+  const roles = new Map(membersOf(db, key.companyId).map((member) => [member.id, member.roles]))
+  return jobPeople(db, key).map((person) => ({ ...person, roles: roles.get(person.id) ?? [] }))
+}
+
+export type NewJob = Pick<JobData, 'id' | 'number' | 'title' | 'timeZone' | 'basis'>
+
+/**
+ * Stores a new job; whoever makes it is on it.
+ * @throws Failure when the id is in use for something else; the same call again changes nothing.
+ */
+export function createJob(
+  ctx: CompanyCall,
+  { job, settings }: { job: NewJob; settings: JobData['settings'] },
+): { id: string } {
+  const { db, company, person } = ctx
+  const key: JobKey = { companyId: company.id, jobId: job.id }
+  assertTimeZone(job.timeZone)
+  write(db, (tx) => {
+    if (isRepeat(ctx, tx, job)) return
+    const stamp = stampOf(ctx)
+    insertJob(tx, { companyId: company.id, data: { ...job, settings, factors: [], readings: [] }, stamp })
+    insertJobMember(tx, key, { personId: person.id, stamp })
+    recordAudit(tx, { ...key, ...stamp, what: 'job.create', before: null, after: job })
+  })
+  return { id: job.id }
+}
+
+function isRepeat({ company, person }: CompanyCall, db: Connection, job: NewJob): boolean {
+  const row = jobById(db, job.id)
+  if (!row) return false
+  const isSame =
+    row.companyId === company.id &&
+    row.createdBy === person.id &&
+    row.number === job.number &&
+    row.title === job.title &&
+    row.timeZone === job.timeZone &&
+    row.basis === job.basis
+  if (!isSame) throw conflict('This id is in use already. Make a new one.')
+  return true
+}
+
+/** @throws Failure for a name that is no IANA time zone. */
+export function assertTimeZone(timeZone: string): void {
+  try {
+    new Intl.DateTimeFormat('en', { timeZone })
+  } catch {
+    throw refused(`"${timeZone}" is no time zone; write one as Europe/London.`, 'timeZone')
+  }
+}
+
+export function renameJob(ctx: JobCall, change: { number: string; title: string }): void {
+  const key = keyOf(ctx)
+  write(ctx.db, (tx) => {
+    const stamp = stampOf(ctx)
+    const { number, title } = jobRow(tx, key)
+    updateJobTitle(tx, key, { ...change, stamp })
+    recordAudit(tx, { ...key, ...stamp, what: 'job.update', before: { number, title }, after: change })
+  })
+}
+
+/**
+ * Stores the job's basis with its factors and settings, and checks every pour again.
+ * @throws Failure for a factor that the basis does not have or whose value lies outside its range.
+ */
+export function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'settings' | 'factors'>): void {
+  const key = keyOf(ctx)
+  assertFactors(change)
+  write(ctx.db, (tx) => {
+    const stamp = stampOf(ctx)
+    const { basis, settings, factors } = jobData(tx, key)
+    updateJobBasis(tx, key, { ...change, stamp })
+    recordAudit(tx, { ...key, ...stamp, what: 'job.setBasis', before: { basis, settings, factors }, after: change })
+    recheckJob(tx, key, stamp.atMs)
+  })
+}
+
+export function assertFactors(job: Pick<JobData, 'basis' | 'factors'>): void {
+  const [problem] = factorProblems(job)
+  if (problem) throw refused(problem.message, problem.field.replace(/^job\./, ''))
+  const names = job.factors.map(({ name }) => name)
+  const twice = names.find((name, at) => names.indexOf(name) !== at)
+  if (twice !== undefined) throw refused(`The factor ${twice} is given twice; give it once.`, 'factors')
+}
+
+/** @throws Failure for somebody who is not in the job's company. */
+export function addJobMember(ctx: JobCall, personId: string): void {
+  const key = keyOf(ctx)
+  write(ctx.db, (tx) => {
+    if (!companyAccess(tx, { companyId: key.companyId, personId }))
+      throw missing('There is nobody like that in this company.')
+    const stamp = stampOf(ctx)
+    insertJobMember(tx, key, { personId, stamp })
+    recordAudit(tx, { ...key, ...stamp, what: 'job.addMember', before: null, after: { personId } })
+  })
+}
+
+/** @throws Failure for somebody who is not on the job, and for the last one who is. */
+export function removeJobMember(ctx: JobCall, personId: string): void {
+  const key = keyOf(ctx)
+  write(ctx.db, (tx) => {
+    const people = jobPeople(tx, key)
+    if (!people.some(({ id }) => id === personId)) throw missing('There is nobody like that on this job.')
+    if (people.length === 1) throw conflict('Somebody has to be on the job: add another person first.')
+    deleteJobMember(tx, key, personId)
+    recordAudit(tx, { ...key, ...stampOf(ctx), what: 'job.removeMember', before: { personId }, after: null })
+  })
+}

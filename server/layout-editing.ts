@@ -1,0 +1,165 @@
+import { createHash } from 'node:crypto'
+import {
+  CommandError,
+  EDITABLE_TABLES,
+  LIMITS,
+  applyCommands,
+  layoutProblems,
+  type Applied,
+  type Batch,
+  type Conflict,
+  type LayoutFile,
+  type Problem,
+} from '@wedgeline/contract'
+import { write, type Connection } from '../db/client'
+import { checkPours, type Checked } from './checking'
+import { conflict, forbidden, refused } from './failure'
+import { changesOf, conflictsOf, type RowChange } from './layout-changes'
+import { changesSince, recordAudit } from './stores/audit'
+import { batchById, insertBatch } from './stores/batch'
+import { jobRow } from './stores/job'
+import type { JobKey } from './stores/job-key'
+import { loadLayout, loadVersions, type Versions } from './stores/layout'
+import { storeChange } from './stores/layout-write'
+import { storing } from './storing'
+import { keyOf, stampOf, type JobCall } from './job-call'
+
+export interface BatchAnswer extends Checked {
+  /** Today's version of each unit that the batch touched; 0 for one that is gone. */
+  readonly versions: Versions
+}
+
+/**
+ * Applies a batch whole or not at all, checks the pours that it touches and says who did it. The same batch sent again
+ * by the same person gets the same answer and changes nothing.
+ * @throws Failure when the batch is stale (with both values), its id was used for something else, or the change is
+ * not the person's to make; CommandError when a row cannot be taken.
+ */
+export function applyBatch(ctx: JobCall, batch: Batch): BatchAnswer {
+  const { db, person } = ctx
+  const key = keyOf(ctx)
+  const payloadHash = createHash('sha256').update(JSON.stringify(batch)).digest('hex')
+  return storing(() =>
+    write(db, (tx) => {
+      const known = batchById(tx, { companyId: key.companyId, id: batch.id })
+      if (known) {
+        if (known.personId === person.id && known.payloadHash === payloadHash) return JSON.parse(known.answer) as BatchAnswer
+        throw conflict(
+          'A change with this id was stored before and it was another one. Give each change an id of its own.',
+        )
+      }
+      const stamp = stampOf(ctx)
+      const { before, applied } = applyToday(tx, key, batch)
+      assertSpareShare(ctx, before, applied.layout)
+      assertNoNewProblem(before, applied.layout)
+      const changeNumber = jobRow(tx, key).changeCount + 1
+      const { layout: after, units } = applied
+      storeChange(tx, { ...key, before, after, units, changeNumber, stamp })
+      const changes = changesOf(before, after)
+      recordAudit(tx, { ...key, ...stamp, what: 'layout.apply', ...changes, changeNumber })
+      const pourIds = touchedPours(before, after, units)
+      const checked = checkPours(tx, key, { layout: after, pourIds, atMs: stamp.atMs })
+      const today = loadVersions(tx, key)
+      const versions = Object.fromEntries(units.map((unit) => [unit, today[unit] ?? 0]))
+      const answer: BatchAnswer = { versions, ...checked }
+      insertBatch(tx, { ...key, ...stamp, id: batch.id, payloadHash, answer: JSON.stringify(answer), changeNumber })
+      return answer
+    }),
+  )
+}
+
+/** The batch on today's layout, when its sender saw today's version of everything that it touches. */
+function applyToday(db: Connection, key: JobKey, batch: Batch): { before: LayoutFile; applied: Applied } {
+  const before = loadLayout(db, key)
+  const today = loadVersions(db, key)
+  const isStale = (unit: string) => (batch.bases[unit] ?? 0) !== (today[unit] ?? 0)
+  const refuseStale = (units: readonly string[]) => {
+    const stale = units.filter(isStale)
+    if (stale.length === 0) return
+    const since = Math.min(...stale.map((unit) => batch.bases[unit] ?? 0))
+    const theirs = changesSince(db, key, since).flatMap((after) => after as RowChange[])
+    throw staleBatch(
+      conflictsOf(before, batch.commands, theirs),
+      Object.fromEntries(stale.map((unit) => [unit, today[unit] ?? 0])),
+    )
+  }
+  // First what the sender names: a command that fails because somebody removed its row is a conflict, no mistake.
+  refuseStale(Object.keys(batch.bases))
+  const applied = applyCommands(before, batch.commands)
+  refuseStale(applied.units)
+  return { before, applied }
+}
+
+const staleBatch = (conflicts: readonly Conflict[], versions: Versions) =>
+  conflict('Somebody else changed this meanwhile. Nothing of your change was stored; look at both values and choose.', {
+    conflicts,
+    versions,
+  })
+
+/** That steel of a mat is spare is for an engineer to say. */
+function assertSpareShare({ company }: JobCall, before: LayoutFile, after: LayoutFile): void {
+  if (company.roles.includes('engineer') || before.pours === after.pours) return
+  const known = new Map(before.pours.flatMap((pour) => pour.mats).map((mat) => [mat.id, mat]))
+  const isNew = after.pours
+    .flatMap((pour) => pour.mats)
+    .some((mat) => {
+      const old = known.get(mat.id) ?? { spareShare: 0, spareBy: null }
+      return mat.spareShare !== old.spareShare || mat.spareBy !== old.spareBy
+    })
+  if (isNew) throw forbidden('The spare share of a mat is set by an engineer.')
+}
+
+const TABLE_LIMITS = {
+  pours: LIMITS.pours,
+  edges: LIMITS.edges,
+  anchors: LIMITS.anchors,
+  tendons: LIMITS.anchors,
+  steel: LIMITS.steel,
+} as const
+
+/** @throws for what would make the layout contradict itself; what was so before stays to be mended. */
+function assertNoNewProblem(before: LayoutFile, after: LayoutFile): void {
+  for (const [table, limit] of Object.entries(TABLE_LIMITS)) {
+    const count = after[table as keyof typeof TABLE_LIMITS].length
+    if (count > limit)
+      throw refused(`A job has at most ${limit} ${table}; with this change it would have ${count}.`, table)
+  }
+  const isRefused = ({ severity }: Problem) => severity === 'refused'
+  const problems = layoutProblems(after).filter(isRefused)
+  if (problems.length === 0) return
+  const old = new Set(
+    layoutProblems(before)
+      .filter(isRefused)
+      .map((problem) => problem.message),
+  )
+  const fresh = problems.find((problem) => !old.has(problem.message))
+  if (fresh) throw problemError(after, fresh)
+}
+
+function problemError(layout: LayoutFile, { path, field, message }: Problem): Error {
+  const [tableName, index, ...rest] = path
+  const table = EDITABLE_TABLES.find((each) => each === tableName)
+  const row = table && typeof index === 'number' ? layout[table][index] : undefined
+  return table && row ? new CommandError(message, table, row.id, rest.join('.') || null) : refused(message, field)
+}
+
+/**
+ * Pours whose checks a change of these units can move: those of the units, and those that share an edge line with one
+ * of them, because anchors and gaps are checked along the whole line.
+ */
+function touchedPours(before: LayoutFile, after: LayoutFile, units: readonly string[]): string[] {
+  if (units.includes('job')) return after.pours.map(({ id }) => id)
+  const isTouched = (kind: string, id: string) => units.includes(`${kind}:${id}`)
+  const pourIds = new Set<string>()
+  for (const layout of [before, after]) {
+    for (const { id } of layout.pours) if (isTouched('pour', id)) pourIds.add(id)
+    for (const { id, pourId } of layout.edges) if (isTouched('edge', id)) pourIds.add(pourId)
+    for (const { id, pourId } of layout.pans) if (isTouched('pan', id)) pourIds.add(pourId)
+    for (const { id, pourId } of layout.tendons) if (isTouched('tendon', id)) pourIds.add(pourId)
+    for (const { tendonId, castWithPourId } of layout.anchors)
+      if (isTouched('tendon', tendonId)) pourIds.add(castWithPourId)
+  }
+  const lines = new Set(after.edges.filter(({ pourId }) => pourIds.has(pourId)).map(({ edgeLineId }) => edgeLineId))
+  for (const { edgeLineId, pourId } of after.edges) if (lines.has(edgeLineId)) pourIds.add(pourId)
+  return after.pours.map(({ id }) => id).filter((id) => pourIds.has(id))
+}

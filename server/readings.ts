@@ -1,0 +1,47 @@
+import { BASIS_SOURCES } from '@wedgeline/engine'
+import { write } from '../db/client'
+import { recheckJob } from './checking'
+import { conflict, missing, refused } from './failure'
+import { keyOf, stampOf, type JobCall } from './job-call'
+import { recordAudit } from './stores/audit'
+import { deleteReading, insertReading, jobRow, readingsOf } from './stores/job'
+
+/**
+ * Accepts a reading of the job's basis in the caller's name and checks every pour again.
+ * @throws Failure for a reading that the basis does not offer or that is accepted already.
+ */
+export function acceptReading(ctx: JobCall, { readingId, reason }: { readingId: string; reason: string }): void {
+  const { db, person } = ctx
+  const key = keyOf(ctx)
+  write(db, (tx) => {
+    const { basis } = jobRow(tx, key)
+    const offered = BASIS_SOURCES.find(({ id }) => id === basis)?.readings ?? []
+    if (!offered.some(({ id }) => id === readingId)) {
+      throw refused(
+        `"${readingId}" is no reading of this job's basis: ${offered.map(({ id }) => id).join(', ')}.`,
+        'readingId',
+      )
+    }
+    if (readingsOf(tx, key).some((each) => each.readingId === readingId)) {
+      throw conflict('This reading is accepted already. Withdraw it first to give another reason.')
+    }
+    const stamp = stampOf(ctx)
+    const reading = { readingId, acceptedBy: person.name, acceptedAtMs: stamp.atMs, reason }
+    insertReading(tx, key, { ...reading, personId: person.id })
+    recordAudit(tx, { ...key, ...stamp, what: 'reading.accept', before: null, after: reading })
+    recheckJob(tx, key, stamp.atMs)
+  })
+}
+
+/** @throws Failure for a reading that is not accepted. */
+export function withdrawReading(ctx: JobCall, readingId: string): void {
+  const key = keyOf(ctx)
+  write(ctx.db, (tx) => {
+    const before = readingsOf(tx, key).find((each) => each.readingId === readingId)
+    if (!before) throw missing('This reading is not accepted for this job.')
+    const stamp = stampOf(ctx)
+    deleteReading(tx, key, readingId)
+    recordAudit(tx, { ...key, ...stamp, what: 'reading.withdraw', before, after: null })
+    recheckJob(tx, key, stamp.atMs)
+  })
+}

@@ -1,0 +1,10 @@
+import { auditListSchema } from '@wedgeline/contract'
+import { keyOf } from '../job-call'
+import { auditOf } from '../stores/audit'
+import { jobProcedure, router } from '../trpc/builders'
+
+export const auditRouter = router({
+  list: jobProcedure()
+    .input(auditListSchema)
+    .query(({ ctx, input: { limit, beforeMs } }) => auditOf(ctx.db, keyOf(ctx), { limit, beforeMs })),
+})

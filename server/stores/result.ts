@@ -1,0 +1,103 @@
+import { and, count, eq } from 'drizzle-orm'
+import type { PourResult } from '@wedgeline/engine'
+import type { Connection } from '../../db/client'
+import { acceptedReading, anchor, hardware, jobMember, pan, pour, pourResult, tendon } from '../../db/schema'
+import type { JobKey } from './job-key'
+
+export interface StoredResult extends JobKey {
+  /** Without steps: they are computed when somebody opens a calculation. */
+  readonly result: PourResult
+  readonly engineVersion: string
+  readonly changeNumber: number
+  readonly atMs: number
+}
+
+/** Stores the latest results of a pour in place of what was there. */
+export function putResult(db: Connection, { companyId, jobId, result, ...rest }: StoredResult): void {
+  const row = { results: [...result.zones], counts: result.counts, readingIds: readingIdsOf(result), ...rest }
+  db.insert(pourResult)
+    .values({ companyId, jobId, pourId: result.pourId, ...row })
+    .onConflictDoUpdate({ target: [pourResult.companyId, pourResult.jobId, pourResult.pourId], set: row })
+    .run()
+}
+
+function readingIdsOf({ zones }: PourResult): string[] {
+  const checks = zones.flatMap((zone) => zone.checks)
+  return [...new Set(checks.flatMap((check) => (check.kind === 'compared' ? (check.readingId ?? []) : [])))].sort()
+}
+
+/** Pours of the jobs that have the person among their people, with the counts of their latest results. */
+export const pourSummaries = (db: Connection, personId: string) =>
+  db
+    .select({
+      jobId: pour.jobId,
+      id: pour.id,
+      mark: pour.mark,
+      title: pour.title,
+      counts: pourResult.counts,
+      readingIds: pourResult.readingIds,
+    })
+    .from(jobMember)
+    .innerJoin(pour, and(eq(pour.companyId, jobMember.companyId), eq(pour.jobId, jobMember.jobId)))
+    .leftJoin(
+      pourResult,
+      and(eq(pourResult.companyId, pour.companyId), eq(pourResult.jobId, pour.jobId), eq(pourResult.pourId, pour.id)),
+    )
+    .where(eq(jobMember.personId, personId))
+    .all()
+
+/** Anchors by the pour that they are cast with, in the jobs that have the person among their people. */
+export const anchorCounts = (db: Connection, personId: string): ReadonlyMap<string, number> =>
+  new Map(
+    db
+      .select({ jobId: anchor.jobId, pourId: anchor.castWithPourId, count: count() })
+      .from(jobMember)
+      .innerJoin(anchor, and(eq(anchor.companyId, jobMember.companyId), eq(anchor.jobId, jobMember.jobId)))
+      .where(eq(jobMember.personId, personId))
+      .groupBy(anchor.companyId, anchor.jobId, anchor.castWithPourId)
+      .all()
+      .map(({ jobId, pourId, count }) => [`${jobId} ${pourId}`, count]),
+  )
+
+/** Readings accepted in the jobs that have the person among their people, as `job reading`. */
+export const acceptedReadingIds = (db: Connection, personId: string): ReadonlySet<string> =>
+  new Set(
+    db
+      .select({ jobId: acceptedReading.jobId, readingId: acceptedReading.readingId })
+      .from(jobMember)
+      .innerJoin(
+        acceptedReading,
+        and(eq(acceptedReading.companyId, jobMember.companyId), eq(acceptedReading.jobId, jobMember.jobId)),
+      )
+      .where(eq(jobMember.personId, personId))
+      .all()
+      .map(({ jobId, readingId }) => `${jobId} ${readingId}`),
+  )
+
+/** Jobs of a company that press or bear on one of its hardware, jacks or strand types. */
+export function jobsUsing(db: Connection, companyId: string, id: string): string[] {
+  const uses = [
+    db
+      .select({ jobId: anchor.jobId })
+      .from(anchor)
+      .where(and(eq(anchor.companyId, companyId), eq(anchor.hardwareId, id)))
+      .all(),
+    db
+      .select({ jobId: pan.jobId })
+      .from(pan)
+      .where(and(eq(pan.companyId, companyId), eq(pan.jackId, id)))
+      .all(),
+    db
+      .select({ jobId: tendon.jobId })
+      .from(tendon)
+      .where(and(eq(tendon.companyId, companyId), eq(tendon.strandTypeId, id)))
+      .all(),
+    db
+      .select({ jobId: anchor.jobId })
+      .from(anchor)
+      .innerJoin(hardware, and(eq(hardware.companyId, anchor.companyId), eq(hardware.id, anchor.hardwareId)))
+      .where(and(eq(anchor.companyId, companyId), eq(hardware.jackId, id)))
+      .all(),
+  ]
+  return [...new Set(uses.flat().map(({ jobId }) => jobId))].sort()
+}
