@@ -56,7 +56,7 @@ export function applyBatch(ctx: JobCall, batch: Batch): BatchAnswer {
       const { layout: after, units } = applied
       storeChange(tx, { ...key, before, after, units, changeNumber, stamp })
       const changes = changesOf(before, after)
-      recordAudit(tx, { ...key, ...stamp, what: 'layout.apply', ...changes, changeNumber })
+      recordAudit(tx, { ...key, ...stamp, what: 'layout.applyBatch', ...changes, changeNumber })
       const pourIds = touchedPours(before, after, units)
       const checked = checkPours(tx, key, { layout: after, pourIds, atMs: stamp.atMs })
       const today = loadVersions(tx, key)

@@ -12,7 +12,7 @@ export const layoutRouter = router({
       versions: loadVersions(ctx.db, keyOf(ctx)),
       engineVersion: ENGINE_VERSION,
     })),
-  apply: jobProcedure(['detailer', 'engineer'])
+  applyBatch: jobProcedure(['detailer', 'engineer'])
     .input(batchSchema)
     .mutation(({ ctx, input }) => applyBatch(ctx, input)),
 })

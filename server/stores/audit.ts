@@ -11,7 +11,7 @@ export interface AuditEntry {
   readonly jobId: string | null
   readonly personId: string
   readonly atMs: number
-  /** Name of the procedure: layout.apply. */
+  /** Name of the procedure: layout.applyBatch. */
   readonly what: string
   /** What changed, as it was and as it is; plain JSON, null where there was or is nothing. */
   readonly before: unknown
