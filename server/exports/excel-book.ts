@@ -73,11 +73,16 @@ function cellValue(value: CellValue): ExcelJS.CellValue {
   return { formula: value.formula, result: value.result }
 }
 
-/** A style of its own for every cell: the library shares style objects between cells, and a change would leak. */
+/**
+ * A style of its own for every cell that needs one: the library shares style objects between cells, and a change would
+ * leak. Plain cells get none, which keeps long schedules quick.
+ */
 function styled(cell: ExcelJS.Cell, style: CellStyle = {}): void {
-  const { isBold = false, isWrapped = false, isHead = false, align, format, size = 10 } = style
-  cell.font = { name: FONT, size, bold: isBold }
-  cell.alignment = { vertical: isHead ? 'middle' : 'top', wrapText: isWrapped, ...(align && { horizontal: align }) }
+  const { isBold = false, isWrapped = false, isHead = false, align, format, size } = style
+  if (isBold || size !== undefined) cell.font = { name: FONT, size: size ?? 11, bold: isBold }
+  if (isWrapped || isHead || align !== undefined) {
+    cell.alignment = { vertical: isHead ? 'middle' : 'top', wrapText: isWrapped, ...(align && { horizontal: align }) }
+  }
   if (format !== undefined) cell.numFmt = format
   if (!isHead) return
   cell.fill = { type: 'pattern', pattern: 'solid', fgColor: { argb: FILL } }

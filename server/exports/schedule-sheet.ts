@@ -8,10 +8,10 @@ const COLUMNS: readonly Column[] = [
   { title: 'Member', width: 12 },
   { title: 'Bar mark', width: 9, style: { align: 'center', format: '@' } },
   { title: 'Type and size', width: 9, style: { align: 'center' } },
-  { title: 'No. of members', width: 10, style: { format: '0' } },
-  { title: 'No. in each', width: 9, style: { format: '0' } },
-  { title: 'Total no.', width: 9, style: { format: '0' } },
-  { title: 'Length of each bar (mm)', width: 13, style: { format: '0' } },
+  { title: 'No. of members', width: 10 },
+  { title: 'No. in each', width: 9 },
+  { title: 'Total no.', width: 9 },
+  { title: 'Length of each bar (mm)', width: 13 },
   { title: 'Shape code', width: 9, style: { align: 'center', format: '@' } },
   ...['A', 'B', 'C', 'D', 'E/R'].map((title): Column => ({ title, width: 8 })),
   { title: 'Rev letter', width: 8, style: { align: 'center' } },
@@ -114,7 +114,7 @@ function writeBeside(sheet: SheetWriter, row: ScheduleRow, at: number): void {
     mass === null ? null : { formula: `F${at}*G${at}/1000*${kgPerMetre}`, result: mass },
     row.notes.length > 0 ? row.notes.join('; ') : null,
   ]
-  const formats = ['0', '0.00', '0.00', undefined]
+  const formats = [undefined, '0.00', '0.00', undefined]
   cells.forEach((value, k) => {
     const format = formats[k]
     sheet.put(at, BESIDE_FROM + k, { value, style: format === undefined ? {} : { format } })

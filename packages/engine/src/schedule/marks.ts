@@ -154,7 +154,9 @@ function groupsOf(bars: readonly ZoneBars[], standard: BarStandard, letter: Type
   const groups = new Map<string, ZoneGroup[]>()
   for (const zone of perZone.values()) {
     const id = `${zone.member.id}|${zone.key}|${zone.inEach}`
-    groups.set(id, [...(groups.get(id) ?? []), zone])
+    const group = groups.get(id)
+    if (group) group.push(zone)
+    else groups.set(id, [zone])
   }
   return [...groups.values()].flatMap(([first, ...more]) => {
     if (!first) return []
