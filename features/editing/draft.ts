@@ -1,12 +1,4 @@
-import {
-  applyCommands,
-  type AnchorData,
-  type Batch,
-  type Command,
-  type Conflict,
-  type EditableTable,
-  type LayoutFile,
-} from '@wedgeline/contract'
+import { applyCommands, type Batch, type Command, type Conflict, type LayoutFile } from '@wedgeline/contract'
 
 /**
  * The client's side of editing: what the server last said, the batches that it has not answered yet, and the way back.

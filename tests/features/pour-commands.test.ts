@@ -32,7 +32,7 @@ const start: LayoutFile = layoutSchema.parse({
   pours: [],
 })
 
-const box = (x0: number, y0: number, x1: number, y1: number): PlanPoint[] => [
+const box = ([x0, y0]: [number, number], [x1, y1]: [number, number]): PlanPoint[] => [
   { xMm: x0, yMm: y0 },
   { xMm: x1, yMm: y0 },
   { xMm: x1, yMm: y1 },
@@ -55,7 +55,10 @@ let ids = 0
 const newId = () => `id-${++ids}`
 
 test('each side of the outline becomes an edge, chainage running east or north', () => {
-  const { layout } = applyCommands(start, insertPour(start, typed('P1', box(0, 0, 12000, 9000)), newId).change.commands)
+  const { layout } = applyCommands(
+    start,
+    insertPour(start, typed('P1', box([0, 0], [12000, 9000])), newId).change.commands,
+  )
   expect(layout.edges.map(({ mark }) => mark)).toEqual(['E1', 'E2', 'E3', 'E4'])
   expect(layout.edges.map(({ lengths }) => [lengths[0]?.fromMm, lengths[0]?.toMm])).toEqual([
     [0, 12000],
@@ -70,7 +73,7 @@ test('each side of the outline becomes an edge, chainage running east or north',
 test('a clockwise outline is turned round, so that the slab lies left of each side', () => {
   const { layout } = applyCommands(
     start,
-    insertPour(start, typed('P1', [...box(0, 0, 12000, 9000)].reverse()), newId).change.commands,
+    insertPour(start, typed('P1', [...box([0, 0], [12000, 9000])].reverse()), newId).change.commands,
   )
   const points = layout.pours[0]?.outline ?? []
   const twiceArea = points.reduce((sum, a, i) => {
@@ -83,11 +86,11 @@ test('a clockwise outline is turned round, so that the slab lies left of each si
 test('a pour beside another shares its lines: chainage goes on along them', () => {
   const first = applyCommands(
     start,
-    insertPour(start, typed('P1', box(0, 0, 12000, 9000)), newId).change.commands,
+    insertPour(start, typed('P1', box([0, 0], [12000, 9000])), newId).change.commands,
   ).layout
   const both = applyCommands(
     first,
-    insertPour(first, typed('P2', box(12000, 0, 20000, 9000)), newId).change.commands,
+    insertPour(first, typed('P2', box([12000, 0], [20000, 9000])), newId).change.commands,
   ).layout
   expect(both.edgeLines).toHaveLength(5)
   const south = both.edges.find(({ mark }) => mark === 'E1-P2')
@@ -95,7 +98,10 @@ test('a pour beside another shares its lines: chainage goes on along them', () =
 })
 
 test('a typed anchor makes a tendon with its other end open; marks follow the chainage and then hold still', () => {
-  const { layout } = applyCommands(start, insertPour(start, typed('P1', box(0, 0, 12000, 9000)), newId).change.commands)
+  const { layout } = applyCommands(
+    start,
+    insertPour(start, typed('P1', box([0, 0], [12000, 9000])), newId).change.commands,
+  )
   const edge = layout.edges[0]
   if (!edge) throw new Error('no edge')
   const place = { layout, edge, newId }

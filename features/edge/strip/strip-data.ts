@@ -1,0 +1,175 @@
+import { basisOf } from '@wedgeline/engine/bases'
+import { anchorMark, edgeWedge, found, gapsOfEdge, placedBars, tendonEndsOfEdge } from '@wedgeline/engine/geometry'
+import type {
+  AnchorEnd,
+  EdgeFrame,
+  HairpinShape,
+  LayoutIndex,
+  LinksShape,
+  PlacedBar,
+  SpiralShape,
+  TendonEnd,
+} from '@wedgeline/engine'
+
+/** What the bands of a strip draw, in mm and the edge's own coordinates. Nothing here knows of px. */
+export interface StripData {
+  readonly frame: EdgeFrame
+  readonly ends: readonly StripEnd[]
+  readonly lengths: readonly StripLength[]
+  readonly bars: readonly PlacedBar[]
+  readonly wedges: readonly StripWedge[]
+  readonly pans: readonly Outline[]
+  readonly obstructions: readonly Outline[]
+  readonly gridCrossings: readonly { readonly name: string; readonly chainage: number }[]
+  readonly highest: number
+  readonly lowest: number
+}
+
+type Outline = readonly { readonly chainage: number; readonly depth: number }[]
+
+export interface StripEnd {
+  readonly id: string
+  readonly mark: string
+  readonly end: AnchorEnd
+  readonly isInPan: boolean
+  readonly chainage: number
+  readonly setBack: number
+  readonly heightAbove: number
+  /** Plate or splay. */
+  readonly width: number
+  readonly height: number
+  readonly pocketWidth: number | null
+  readonly lean: number
+  readonly local: LocalOnFace | null
+}
+
+/** Area at the edge between two spreads, without precompression square to the edge. */
+export interface StripWedge {
+  readonly zoneId: string
+  readonly depth: number
+  readonly middle: number
+  readonly outline: Outline
+}
+
+/** Local steel as it is seen on the face. */
+export interface LocalOnFace {
+  readonly width: number
+  readonly height: number
+  readonly diameter: number
+  readonly isRound: boolean
+}
+
+export interface StripLength {
+  readonly id: string
+  readonly from: number
+  readonly to: number
+  readonly top: number
+  readonly soffit: number
+  readonly coverTop: number
+  readonly coverSoffit: number
+  readonly isAgainst: boolean
+}
+
+/** Grid lines that run within this of square to the edge are marked on its axis. */
+const SQUARE_ENOUGH = Math.cos(Math.PI / 6)
+
+export function stripData(index: LayoutIndex, edgeId: string): StripData {
+  const frame = found(index.frames, edgeId, 'edge')
+  const edge = found(index.edges, edgeId, 'edge')
+  const pour = found(index.pours, edge.pourId, 'pour')
+  const lengths = edge.lengths.map((length): StripLength => ({
+    ...length,
+    coverTop: pour.coverTop,
+    coverSoffit: pour.coverSoffit,
+    isAgainst: length.kind === 'against-wall',
+  }))
+  return {
+    frame,
+    lengths,
+    ends: tendonEndsOfEdge(index, edgeId).map((end) => stripEnd(index, end)),
+    bars: placedBars(index, edgeId),
+    wedges: wedgesOf(index, edgeId),
+    pans: (index.pansOfPour.get(pour.id) ?? []).map((pan) => panOutline(pan, frame)),
+    obstructions: index.layout.obstructions
+      .filter(({ levelId }) => levelId === pour.levelId)
+      .map(({ outline }) => outline.map((point) => frame.local(point))),
+    gridCrossings: gridCrossings(index, frame),
+    highest: Math.max(...lengths.map(({ top }) => top)),
+    lowest: Math.min(...lengths.map(({ soffit }) => soffit)),
+  }
+}
+
+function wedgesOf(index: LayoutIndex, edgeId: string): readonly StripWedge[] {
+  const { job } = index.layout
+  const frame = found(index.frames, edgeId, 'edge')
+  const angle = job.settings.wedgeSpread ?? basisOf(job).spread.value
+  return gapsOfEdge(index, edgeId).flatMap((gap): StripWedge[] => {
+    const wedge = edgeWedge(frame, gap, { angle, startsAt: 'bearing-face' })
+    if (!wedge) return []
+    return [{ zoneId: gap.id, depth: wedge.depth, middle: (gap.from + gap.to) / 2, outline: wedge.outline }]
+  })
+}
+
+function stripEnd(
+  index: LayoutIndex,
+  { anchor, hardware, panId, chainage, setBack, width, lean }: TendonEnd,
+): StripEnd {
+  const own = (index.steelOfZone.get(`anchor:${anchor.id}`) ?? []).map(({ shape }) => shape).find(isLocal)
+  return {
+    id: anchor.id,
+    mark: anchorMark(index, anchor),
+    end: anchor.end,
+    isInPan: panId !== null,
+    chainage,
+    setBack,
+    heightAbove: anchor.height,
+    width,
+    height: hardware.plate.height,
+    pocketWidth: hardware.pocket?.width ?? null,
+    lean,
+    local: localOnFace(own ?? hardware.localSteel),
+  }
+}
+
+type LocalShape = SpiralShape | LinksShape | HairpinShape
+const isLocal = (shape: { readonly kind: string }): shape is LocalShape =>
+  shape.kind === 'spiral' || shape.kind === 'links'
+
+function localOnFace(shape: LocalShape | null): LocalOnFace | null {
+  if (shape?.kind === 'spiral') {
+    return { width: shape.outside, height: shape.outside, diameter: shape.diameter, isRound: true }
+  }
+  if (shape?.kind === 'links') {
+    return { width: shape.width, height: shape.height, diameter: shape.diameter, isRound: false }
+  }
+  return null
+}
+
+/** The recess reaches from the bearing face outwards along the jack's axis. */
+function panOutline(
+  pan: {
+    readonly x: number
+    readonly y: number
+    readonly azimuth: number
+    readonly along: number
+    readonly across: number
+  },
+  frame: EdgeFrame,
+): Outline {
+  const [ax, ay] = [Math.sin(pan.azimuth), Math.cos(pan.azimuth)]
+  const corner = (along: number, across: number) =>
+    frame.local({ x: pan.x + along * ax + across * ay, y: pan.y + along * ay - across * ax })
+  const half = pan.across / 2
+  return [corner(0, -half), corner(pan.along, -half), corner(pan.along, half), corner(0, half)]
+}
+
+function gridCrossings(index: LayoutIndex, frame: EdgeFrame): StripData['gridCrossings'] {
+  return index.layout.gridLines.flatMap(({ name, x, y, azimuth }) => {
+    const direction = { x: Math.sin(azimuth), y: Math.cos(azimuth) }
+    const square = direction.x * frame.inward.x + direction.y * frame.inward.y
+    if (Math.abs(square) < SQUARE_ENOUGH) return []
+    const { chainage, depth } = frame.local({ x, y })
+    const lean = (direction.x * frame.along.x + direction.y * frame.along.y) / square
+    return [{ name, chainage: chainage - depth * lean }]
+  })
+}

@@ -1,0 +1,11 @@
+/** The geometry that screens draw from. The checks themselves run in a worker, through the package's main entry. */
+export { boxRound, placedBars, turnsOf } from './placed'
+export { faceClearance, plateBox, pocketBox } from './bodies'
+export { edgeFrame, leanOf } from './frame'
+export { edgeFacedBy, gapsOfEdge, tendonEndsOfEdge } from './gaps'
+export { alongAzimuth, azimuthOf, distance, isInside, selfCrossing, sidesOf, signedArea } from './geometry'
+export { gridOffsets, gridReference } from './grid-reference'
+export { found, gapId, layoutIndex, steelKey } from './layout-index'
+export { sectionBehind } from './section'
+export { anchorMark, gapName, zonesOfPour } from './zones'
+export { edgeWedge, USUAL_SPREAD } from './wedge'
