@@ -1,0 +1,265 @@
+import {
+  bySeverity,
+  checkPour,
+  FAMILIES,
+  FAMILIES_OF_ZONE,
+  STATUSES,
+  worstOf,
+  type Check,
+  type Compared,
+  type Hardware,
+  type Layout,
+  type PourResult,
+  type SteelShape,
+} from '@wedgeline/engine'
+import { describe, expect, test } from 'vitest'
+import { accepted, checksAt, K4, row, S4_APPROVED } from './anchor-checks'
+import { anchor, B7, D4, deadEnd, inPan, layout, pan, S4 } from './sample-layout'
+import { evaluated } from './step-text'
+
+/** Every kind of anchor: approved, plain, off centre, skew, beam plate, too close, dead, in a pan. */
+function everyKind(): Layout {
+  const anchors = [
+    anchor('E4', 1, { chainage: 900 }),
+    anchor('E4', 2, { chainage: 2650, hardwareId: 'K4' }),
+    anchor('E4', 3, { chainage: 4400, hardwareId: 'S4A', height: 90 }),
+    anchor('E4', 4, { chainage: 6150, skew: 0.05, elevation: 0.05 }),
+    anchor('E4', 5, { chainage: 9000, hardwareId: 'B7' }),
+    anchor('E4', 6, { chainage: 12_000 }),
+    anchor('E4', 7, { chainage: 12_300 }),
+    deadEnd('E4', 8, { chainage: 15_000 }),
+  ]
+  const bars: SteelShape = {
+    kind: 'transverse-bars',
+    diameter: 12,
+    length: 500,
+    count: 8,
+    layers: 'both',
+    first: 150,
+    pitch: 200,
+  }
+  return layout({
+    hardware: [S4, S4_APPROVED, K4, B7, D4],
+    anchors: [...anchors, inPan('PN1')],
+    pans: [pan('PN1', { x: 9000, y: 9000 })],
+    steel: [
+      {
+        id: 'st',
+        pourId: 'P1',
+        zone: { kind: 'anchor', anchorId: 'E4-1' },
+        shape: bars,
+        source: 'by-hand',
+        isLocked: false,
+      },
+    ],
+  })
+}
+
+const run = (of: Layout, edgeId?: string): PourResult =>
+  checkPour(of, { pourId: 'P1', withSteps: true, ...(edgeId === undefined ? {} : { edgeId }) })
+const zoneOf = (result: PourResult, id: string) => {
+  const zone = result.zones.find((one) => one.zone.id === id)
+  if (!zone) throw new Error(`No zone ${id}`)
+  return zone
+}
+const comparedIn = (result: PourResult): Compared[] =>
+  result.zones.flatMap(({ checks }) => checks.filter((check) => check.kind === 'compared'))
+
+describe('Every step of every check', () => {
+  const lines = comparedIn(run(everyKind())).flatMap(({ steps }) => steps)
+
+  test('is there to walk', () => {
+    expect(lines.length).toBeGreaterThan(100)
+  })
+
+  test('has a text that evaluates to the value printed beside it', () => {
+    for (const line of lines) {
+      const difference = Math.abs(evaluated(line) - line.value)
+      expect(difference, `${line.symbol} = ${line.formula}`).toBeLessThanOrEqual(
+        1e-9 * Math.max(1, Math.abs(line.value)),
+      )
+    }
+  })
+
+  test('carries its source, its section and how sure we are of it', () => {
+    for (const { clause } of lines) {
+      expect(clause.source).not.toBe('')
+      expect(clause.section).not.toBe('')
+    }
+  })
+
+  test('is left out when not asked for, and nothing else changes', () => {
+    const without = checkPour(everyKind(), { pourId: 'P1' })
+    expect(comparedIn(without).every(({ steps }) => steps.length === 0)).toBe(true)
+    expect(comparedIn(without).map(({ utilisation }) => utilisation)).toEqual(
+      comparedIn(run(everyKind())).map(({ utilisation }) => utilisation),
+    )
+  })
+})
+
+describe('Nothing reads within that was not checked', () => {
+  const result = run(accepted(everyKind()))
+
+  test('the families of a zone are checked or named, never silent', () => {
+    for (const { zone, checks, notYetChecked } of result.zones) {
+      const made = new Set(checks.map(({ family }) => family))
+      const silent = FAMILIES_OF_ZONE[zone.kind].filter(
+        (family) => !made.has(family) && !notYetChecked.includes(family),
+      )
+      // A live anchor has nothing to say under dead ends, a dead one nothing under force while jacking.
+      const without = zone.id === 'anchor:E4-8' ? 'tendon' : zone.kind === 'anchor' ? 'dead-end' : null
+      expect(
+        silent.filter((family) => family !== without),
+        zone.name,
+      ).toEqual([])
+    }
+  })
+
+  test('a live anchor names the families that are still to come', () => {
+    expect(zoneOf(result, 'anchor:E4-1').notYetChecked).toEqual(['spalling', 'depth-change', 'fit', 'anchorage'])
+  })
+
+  test('a dead end is not covered, and bearing and bursting are named as not checked', () => {
+    const { status, checks, notYetChecked } = zoneOf(result, 'anchor:E4-8')
+    expect(status).toBe('not-covered')
+    expect(checks).toContainEqual(expect.objectContaining({ family: 'dead-end', code: 'NOT_YET_CHECKED' }))
+    expect(notYetChecked).toEqual(
+      expect.arrayContaining(['bearing', 'bursting-thickness', 'bursting-plan', 'dead-end']),
+    )
+  })
+
+  test('a pan and the anchor in it are not covered', () => {
+    expect(zoneOf(result, 'pan:PN1').status).toBe('not-covered')
+    expect(zoneOf(result, 'anchor:PN1-anchor')).toMatchObject({ status: 'not-covered' })
+  })
+
+  test('close anchors are not covered in plan', () => {
+    const check = zoneOf(result, 'anchor:E4-6').checks.find(({ family }) => family === 'bursting-plan')
+    expect(check).toMatchObject({ status: 'not-covered', code: 'ANCHORS_ACT_AS_ONE' })
+  })
+
+  test('a gap has no status and names its families', () => {
+    const gap = result.zones.find(({ zone }) => zone.kind === 'gap')
+    expect(gap).toMatchObject({ status: null, notYetChecked: ['spalling', 'edge-wedge', 'fit', 'anchorage'] })
+  })
+
+  test('every family belongs to some kind of zone', () => {
+    const used = new Set(Object.values(FAMILIES_OF_ZONE).flat())
+    expect(FAMILIES.filter((family) => !used.has(family))).toEqual([])
+  })
+})
+
+describe('Force while jacking: at most min(0.8 Fpk, 0.9 Fp0.1k) (EN 1992-1-1 5.10.2.1, from memory)', () => {
+  const force = (jackingRatio: number) => {
+    const given = row('S4')
+    const tendons = given.tendons.map((tendon) => ({ ...tendon, jackingRatio }))
+    return checksAt({ ...given, tendons }).find(({ family }) => family === 'tendon')
+  }
+
+  // Limit 0.8 * 184 = 147.2 kN a strand (0.9 * 165.5 = 148.95): 0.8 is on it, 0.76 is 0.95 of it.
+  test.each([
+    { ratio: 0.75, status: 'within' },
+    { ratio: 0.761, status: 'near' },
+    { ratio: 0.8, status: 'near' },
+    { ratio: 0.801, status: 'over' },
+  ])('jacked at $ratio of the breaking load: $status', ({ ratio, status }) => {
+    expect(force(ratio)).toMatchObject({ kind: 'compared', status, limit: 588_800 })
+  })
+})
+
+describe('Order and counts', () => {
+  test('checks of a zone stand worst first and the zone has the worst status', () => {
+    for (const { checks, status } of run(everyKind()).zones) {
+      const ranks = checks.map((check) => (check.kind === 'advice' ? STATUSES.length : STATUSES.indexOf(check.status)))
+      expect(ranks).toEqual([...ranks].sort((a, b) => a - b))
+      expect(status).toBe(worstOf(checks))
+    }
+  })
+
+  test('counts are the checks by status, advice left out', () => {
+    const result = run(everyKind())
+    const checks = result.zones.flatMap((zone) => zone.checks).filter(({ kind }) => kind !== 'advice')
+    expect(Object.values(result.counts).reduce((sum, count) => sum + count, 0)).toBe(checks.length)
+  })
+
+  const over = comparedIn(run(accepted(row('K4')))).filter(({ status }) => status === 'over')[0]
+  const like = (change: Partial<Compared>): Check => {
+    if (!over) throw new Error('The row of plain plates has a check that is over.')
+    return { ...over, ...change }
+  }
+
+  test('ratios by ratio with no steel first, distances by what is short', () => {
+    const none = like({ utilisation: null })
+    const high = like({ utilisation: 1.4 })
+    const low = like({ utilisation: 1.1 })
+    const short = like({ compares: 'at-least', utilisation: null, spare: -20 })
+    const shorter = like({ compares: 'at-least', utilisation: null, spare: -5 })
+    const stop = like({ status: 'stop', statusOnceAccepted: 'stop', utilisation: 1.01 })
+    expect([shorter, low, short, none, stop, high].sort(bySeverity)).toEqual([stop, none, high, low, short, shorter])
+  })
+
+  test('nothing but advice has no status', () => {
+    expect(worstOf([])).toBeNull()
+  })
+})
+
+describe('One edge of a pour', () => {
+  test('gives the same as that edge within the whole pour', () => {
+    const whole = run(everyKind()).zones.filter(({ zone }) => zone.edgeId === 'E4')
+    expect(run(everyKind(), 'E4').zones).toEqual(whole)
+  })
+})
+
+describe('Scaling: lengths x k and forces x k^2 leave every ratio unchanged', () => {
+  const grown = (value: unknown, by: Readonly<Record<string, number>>, name = ''): unknown => {
+    if (typeof value === 'number') return value * (by[name] ?? 1)
+    if (Array.isArray(value)) return value.map((item) => grown(item, by, name))
+    if (value === null || typeof value !== 'object') return value
+    return Object.fromEntries(Object.entries(value).map(([key, item]) => [key, grown(item, by, key)]))
+  }
+  const LENGTHS =
+    'x y thickness coverTop coverSoffit coverEdge from to top soffit chainage height setBack straightBehind width ' +
+    'depth diameter hook first pitch outside length leg bend spacingAlongMin spacingHeightMin edgeAlongMin ' +
+    'edgeHeightMin straightBehindMin cover pocketToFaceMin pocketToPocketMin clearGapMin'
+  const scaled = (of: Layout, k: number): Layout =>
+    grown(of, {
+      ...Object.fromEntries(LENGTHS.split(' ').map((name) => [name, k])),
+      breakingLoad: k ** 2,
+      proofLoad: k ** 2,
+      area: k ** 2,
+    }) as Layout
+
+  test.each([0.37, 3.7])('k = %s', (k) => {
+    // Transverse bars long enough that the least lengths of EN 8.4, which are in mm, do not enter.
+    const bars: SteelShape = {
+      kind: 'transverse-bars',
+      diameter: 12,
+      length: 6000,
+      count: 8,
+      layers: 'both',
+      first: 150,
+      pitch: 200,
+    }
+    const hardware: readonly Hardware[] = [S4, K4, S4_APPROVED]
+    const of = row('K4', {
+      hardware,
+      steel: [
+        {
+          id: 's',
+          pourId: 'P1',
+          zone: { kind: 'anchor', anchorId: 'E4-4' },
+          shape: bars,
+          source: 'by-hand',
+          isLocked: false,
+        },
+      ],
+      middle: { height: 95 },
+    })
+    const ratios = (one: Layout) =>
+      comparedIn(run(one))
+        .filter(({ compares }) => compares === 'ratio')
+        .map((check) => [check.zoneId, check.family, check.stage, check.utilisation?.toFixed(9)].join(' '))
+    expect(ratios(of).length).toBeGreaterThan(20)
+    expect(ratios(scaled(of, k)).sort()).toEqual(ratios(of).sort())
+  })
+})
