@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest'
 import { coverChecks, layoutIndex, type Anchor, type Check, type Compared } from '../../packages/engine/src'
 import { anchor, deadEnd, edge, EAST, inPan, layout, length, pan, S4, WEST, type Parts } from './sample-layout'
+import { evaluated } from './step-text'
 
 const checks = (parts: Parts, id: string): Check[] => {
   const index = layoutIndex(layout(parts))
@@ -266,10 +267,7 @@ test('every printed line evaluates to the value beside it', () => {
     checks(parts, 'E1-3').flatMap((check) => (check.kind === 'compared' ? check.steps : [])),
   )
   expect(steps).toHaveLength(6)
-  for (const { formula, values, value } of steps) {
-    const evaluate = new Function(...Object.keys(values), `return ${formula}`) as (...v: number[]) => number
-    expect(evaluate(...Object.values(values))).toBeCloseTo(value, 9)
-  }
+  for (const line of steps) expect(evaluated(line)).toBeCloseTo(line.value, 9)
 })
 
 test('a turned anchor says that its pocket is measured square to the edge', () => {

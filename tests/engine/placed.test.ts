@@ -185,12 +185,12 @@ describe('bars along and across', () => {
     const placed = bars({ hardware: [plain], edges, steel: [steel('s', atEdge, shape)] })
     // Top 220 - 30 - 8 = 182; bottom -480 + 30 + 8 = -442 up to 600, then 38
     expect(placed.map((bar) => bar.path)).toEqual([
-      line(100, 600, 60, 182),
-      line(600, 19000, 60, 182),
-      line(100, 600, 60, -442),
-      line(600, 19000, 60, 38),
-      line(100, 600, 140, -442),
-      line(600, 19000, 140, 38),
+      line([100, 600], { depth: 60, height: 182 }),
+      line([600, 19000], { depth: 60, height: 182 }),
+      line([100, 600], { depth: 60, height: -442 }),
+      line([600, 19000], { depth: 60, height: 38 }),
+      line([100, 600], { depth: 140, height: -442 }),
+      line([600, 19000], { depth: 140, height: 38 }),
     ])
   })
 
@@ -228,7 +228,10 @@ describe('bars along and across', () => {
       steel: [steel('s', atAnchor, shape)],
     })
     // 110 + 390 = 500: -480 + 40 + 10 + 6 = -424; 700, behind the beam: 30 + 6 = 36
-    expect(placed.map((bar) => bar.path)).toEqual([line(4400, 5600, 500, -424), line(4400, 5600, 700, 36)])
+    expect(placed.map((bar) => bar.path)).toEqual([
+      line([4400, 5600], { depth: 500, height: -424 }),
+      line([4400, 5600], { depth: 700, height: 36 }),
+    ])
   })
 
   test('transverse bars in both layers, counted from the bearing face', () => {
@@ -242,7 +245,10 @@ describe('bars along and across', () => {
       pitch: 0,
     }
     const placed = bars({ hardware: [plain], anchors: one, steel: [steel('s', atAnchor, shape)] })
-    expect(placed.map((bar) => bar.path)).toEqual([line(4500, 5500, 460, 184), line(4500, 5500, 460, 36)])
+    expect(placed.map((bar) => bar.path)).toEqual([
+      line([4500, 5500], { depth: 460, height: 184 }),
+      line([4500, 5500], { depth: 460, height: 36 }),
+    ])
   })
 
   test('wedge bars are spread evenly over their gap, from the cover inward', () => {
@@ -276,8 +282,8 @@ describe('bars along and across', () => {
   })
 })
 
-function line(from: number, to: number, depth: number, height: number) {
-  return [from, to].map((chainage) => ({ chainage, depth, height }))
+function line([from, to]: readonly [number, number], place: { depth: number; height: number }) {
+  return [from, to].map((chainage) => ({ chainage, ...place }))
 }
 
 function fail(): never {

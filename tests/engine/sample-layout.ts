@@ -191,11 +191,15 @@ export function pan(id: string, change: Partial<Pan>): Pan {
 export const inPan = (panId: string): Anchor =>
   anchor(panId, 1, { id: `${panId}-anchor`, edgeId: null, panId, setBack: 0 })
 
-const gridLine = (name: string, x: number, y: number, azimuth: number): GridLine => ({ id: name, name, x, y, azimuth })
+const gridLine = (name: string, place: Pick<GridLine, 'x' | 'y' | 'azimuth'>): GridLine => ({
+  id: name,
+  name,
+  ...place,
+})
 
 export const GRID: readonly GridLine[] = [
-  ...[300, 8700, 17100, 25500, 33300].map((x, i) => gridLine('ABCDE'.charAt(i), x, 0, 0)),
-  ...[900, 8700, 17100].map((y, i) => gridLine(String(i + 1), 0, y, Math.PI / 2)),
+  ...[300, 8700, 17100, 25500, 33300].map((x, i) => gridLine('ABCDE'.charAt(i), { x, y: 0, azimuth: 0 })),
+  ...[900, 8700, 17100].map((y, i) => gridLine(String(i + 1), { x: 0, y, azimuth: Math.PI / 2 })),
 ]
 
 export interface Parts {

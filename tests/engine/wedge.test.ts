@@ -8,6 +8,7 @@ import {
   type EdgeWedge,
 } from '../../packages/engine/src'
 import { anchor, B7, D4, deadEnd, inPan, layout, pan, S4, SOUTH, edge, length, type Parts } from './sample-layout'
+import { evaluated } from './step-text'
 
 /** EN 1992-1-1 8.10.3(5), from memory: tan(beta) = 2/3. */
 const EN = Math.atan(2 / 3)
@@ -40,11 +41,9 @@ describe('closed form between two plates with set-back 0 (checks-scheduling Z05,
   })
 
   test('its printed line evaluates to its depth', () => {
-    for (const { formula, values, value } of wedgeAt(1, pair, EN).steps) {
-      const names = Object.keys(values)
-      const evaluate = new Function('min', 'max', ...names, `return ${formula}`) as (...v: unknown[]) => number
-      expect(evaluate(Math.min, Math.max, ...Object.values(values))).toBeCloseTo(value, 9)
-      expect(value).toBeCloseTo(1147.5, 9)
+    for (const line of wedgeAt(1, pair, EN).steps) {
+      expect(evaluated(line)).toBeCloseTo(line.value, 9)
+      expect(line.value).toBeCloseTo(1147.5, 9)
     }
     expect(wedgeAt(1, pair, EN).steps).toHaveLength(1)
   })
@@ -121,11 +120,20 @@ test('an edge that no tendon points at has no wedge of this form', () => {
 test('a skewed tendon opens its spread on the side that it leans to', () => {
   // South edge, chainage to the right: positive skew leans right, so the gap on the right closes sooner.
   const skewed = (skew: number) => [anchor('E2', 1, { chainage: 5000, skew }), anchor('E2', 2, { chainage: 6750 })]
+  // Its plate's side stands 110 cos along and, turned with the tendon, 110 sin nearer to the edge.
   const t = Math.tan(Math.PI / 4 + 0.05)
-  // (1750 - 220 + 110 t + 110) / (t + 1)
-  expect(wedgeAt(1, skewed(0.05)).depth).toBeCloseTo((1530 + 110 * t + 110) / (t + 1), 9)
+  const clear = 1750 - 110 * Math.cos(0.05) - 110
+  const start = 110 - 110 * Math.sin(0.05)
+  expect(wedgeAt(1, skewed(0.05)).depth).toBeCloseTo((clear + start * t + 110) / (t + 1), 9)
   expect(wedgeAt(1, skewed(0.05)).depth).toBeLessThan(wedgeAt(1, skewed(0)).depth)
   expect(wedgeAt(1, skewed(-0.05)).depth).toBeGreaterThan(wedgeAt(1, skewed(0)).depth)
+})
+
+test('a skewed anchor before the end of its edge: 3 deg away from it, plate 220 at 110', () => {
+  // Plate side 110 cos 3 = 109.85 along and 110 + 110 sin 3 = 115.76 in; 2050 to the end:
+  // 115.76 + (2050 - 109.85) / tan 42 = 115.76 + 1940.15 / 0.90040 = 2270.5
+  const anchors = [anchor('E2', 1, { chainage: 19200 - 2050, skew: (-3 * Math.PI) / 180 })]
+  expect(wedgeAt(1, anchors).depth).toBeCloseTo(2270.5, 1)
 })
 
 test('a lean beyond the spread leaves no closed form', () => {

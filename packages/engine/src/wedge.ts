@@ -47,7 +47,7 @@ export interface EdgeWedge {
 /** One side of a wedge: the spread of a tendon end, as far as it opens into the gap. */
 interface Side {
   readonly chainage: number
-  /** Plate edge towards the gap, from the tendon. */
+  /** From the tendon's end to the side of its plate or splay towards the gap, along the edge. */
   readonly half: number
   readonly start: number
   /** Tangent of the angle that the side of the spread makes with the normal of the edge. */
@@ -72,15 +72,18 @@ export function edgeWedge(frame: EdgeFrame, gap: Gap, spread: WedgeSpread): Edge
 
 const bondOf = (end: TendonEnd | null): number => end?.hardware.transmissionLength ?? 0
 
+/** A skewed tendon carries its plate round and the start of its bond aside. */
 function sideOf(
   end: TendonEnd,
   { spread, isFromBond, towards }: { spread: WedgeSpread; isFromBond: boolean; towards: 1 | -1 },
 ): Side {
   const device = spread.startsAt === 'device-end' ? end.hardware.deviceLength : 0
+  const behind = device + (isFromBond ? bondOf(end) : 0)
+  const [sin, cos] = [towards * Math.sin(end.lean), Math.cos(end.lean)]
   return {
     chainage: end.chainage,
-    half: end.width / 2,
-    start: end.setBack + device + (isFromBond ? bondOf(end) : 0),
+    half: (end.width / 2) * cos + behind * sin,
+    start: end.setBack + behind * cos - (end.width / 2) * sin,
     slope: Math.tan(spread.angle + towards * end.lean),
   }
 }
