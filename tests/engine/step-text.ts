@@ -1,10 +1,18 @@
+import { runInNewContext } from 'node:vm'
 import type { Step } from '@wedgeline/engine'
 
-const FUNCTIONS = ['min', 'max', 'sqrt', 'tan', 'sin', 'cos', 'abs'] as const
+/** What the text of a step may use beside + - * / ( ), numbers and its own values. */
+const FUNCTIONS = {
+  min: (...values: number[]) => Math.min(...values),
+  max: (...values: number[]) => Math.max(...values),
+  sqrt: (value: number) => Math.sqrt(value),
+  tan: (value: number) => Math.tan(value),
+  sin: (value: number) => Math.sin(value),
+  cos: (value: number) => Math.cos(value),
+  abs: (value: number) => Math.abs(value),
+}
 
 /** Evaluates the printed text of a step with the values printed beside it. */
 export function evaluated({ formula, values }: Step): number {
-  const names = [...FUNCTIONS, ...Object.keys(values)]
-  const given = [...FUNCTIONS.map((name) => Math[name]), ...Object.values(values)]
-  return new Function(...names, `return ${formula}`)(...given) as number
+  return Number(runInNewContext(formula, { ...FUNCTIONS, ...values }))
 }
