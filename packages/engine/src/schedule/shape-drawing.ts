@@ -49,7 +49,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       [8, 30],
       [112, 30],
     ],
-    [['A', 60, 24]],
+    [['A', 60, 22]],
   ),
   '11': drawing(
     [
@@ -59,21 +59,21 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
     ],
     [
       ['A', 12, 30],
-      ['B', 64, 44],
+      ['B', 64, 42],
     ],
   ),
   '12': drawing(
     [[20, 6], ...arc({ centre: [46, 26], radius: 26, from: 180, to: 90 }), [110, 52]],
     [
       ['A', 12, 28],
-      ['B', 78, 46],
+      ['B', 78, 44],
       ['R', 46, 30],
     ],
   ),
   '13': drawing(
     [[104, 14], ...arc({ centre: [32, 30], radius: 16, from: 270, to: 90 }), [84, 46]],
     [
-      ['A', 68, 10],
+      ['A', 68, 6],
       ['B', 8, 32],
       ['C', 62, 56],
     ],
@@ -85,7 +85,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       [110, 14],
     ],
     [
-      ['A', 36, 40],
+      ['A', 36, 37],
       ['C', 82, 24],
       ['D', 114, 32],
       ['B', 88, 56],
@@ -99,7 +99,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       [104, 48],
     ],
     [
-      ['A', 62, 8],
+      ['A', 62, 4],
       ['B', 12, 32],
       ['C', 62, 58],
     ],
@@ -110,7 +110,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       ['A', 12, 28],
       ['B', 50, 58],
       ['C', 104, 36],
-      ['D', 66, 14],
+      ['D', 66, 10],
     ],
   ),
   '25': drawing(
@@ -125,7 +125,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       ['B', 96, 26],
       ['C', 4, 34],
       ['D', 116, 34],
-      ['E', 60, 42],
+      ['E', 60, 37],
     ],
   ),
   '26': drawing(
@@ -136,9 +136,9 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       [114, 18],
     ],
     [
-      ['A', 24, 40],
+      ['A', 24, 35],
       ['B', 54, 28],
-      ['C', 94, 14],
+      ['C', 94, 9],
       ['D', 80, 36],
     ],
   ),
@@ -151,9 +151,9 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       [100, 18],
     ],
     [
-      ['A', 30, 7],
+      ['A', 30, 3],
       ['B', 12, 32],
-      ['C', 60, 46],
+      ['C', 60, 42],
       ['D', 108, 34],
     ],
   ),
@@ -180,11 +180,11 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
       [114, 50],
     ],
     [
-      ['A', 18, 46],
+      ['A', 18, 41],
       ['B', 26, 30],
-      ['C', 60, 8],
+      ['C', 60, 4],
       ['D', 94, 30],
-      ['E', 102, 46],
+      ['E', 102, 41],
     ],
   ),
   '44': drawing(
@@ -198,9 +198,9 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
     ],
     [
       ['A', 8, 20],
-      ['B', 28, 26],
+      ['B', 28, 21],
       ['C', 36, 42],
-      ['D', 66, 46],
+      ['D', 66, 41],
       ['E', 97, 36],
     ],
   ),
@@ -217,7 +217,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
     ],
     [
       ['A', 22, 32],
-      ['B', 60, 48],
+      ['B', 60, 43],
       ['C', 46, 17],
       ['D', 72, 17],
     ],
@@ -234,7 +234,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
     ],
     [
       ['A', 22, 32],
-      ['B', 62, 48],
+      ['B', 62, 43],
       ['C', 50, 28],
       ['D', 40, 34],
     ],
@@ -252,7 +252,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
     ],
     [
       ['A', 18, 32],
-      ['B', 60, 48],
+      ['B', 60, 43],
       ['C', 46, 24],
       ['D', 76, 24],
     ],
@@ -263,7 +263,7 @@ const DRAWINGS: Readonly<Record<string, ShapeDrawing>> = {
   ]),
   '77': drawing(helixLine, [
     ['A', 8, 32],
-    ['B', 38, 7],
+    ['B', 38, 3],
     ['C', 112, 32],
   ]),
   '99': drawing(
