@@ -128,7 +128,7 @@ function portsOf(
   return {
     load: () => client.layout.byJob.query({ jobId }),
     send: (batch) =>
-      client.layout.apply.mutate(batch).then(({ versions }): Sent => ({ kind: 'stored', versions }), refusal),
+      client.layout.applyBatch.mutate(batch).then(({ versions }): Sent => ({ kind: 'stored', versions }), refusal),
     keep: (unsaved) => set(key, unsaved, unsentStore),
     kept: () => get<Unsaved>(key, unsentStore).then((kept) => kept ?? null),
     newId: () => newId(),

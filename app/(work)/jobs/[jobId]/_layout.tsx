@@ -1,0 +1,13 @@
+import { Slot, useLocalSearchParams } from 'expo-router'
+import { lazy } from 'react'
+
+const OpenJob = lazy(() => import('@/features/work').then((work) => ({ default: work.OpenJob })))
+
+export default function JobLayout() {
+  const { jobId } = useLocalSearchParams<{ jobId: string }>()
+  return (
+    <OpenJob jobId={jobId}>
+      <Slot />
+    </OpenJob>
+  )
+}

@@ -1,0 +1,9 @@
+import { useLocalSearchParams } from 'expo-router'
+import { lazy } from 'react'
+
+const JobPeopleScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.JobPeopleScreen })))
+
+export default function JobPeopleRoute() {
+  const { jobId } = useLocalSearchParams<{ jobId: string }>()
+  return <JobPeopleScreen jobId={jobId} />
+}

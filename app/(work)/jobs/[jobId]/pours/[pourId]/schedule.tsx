@@ -1,0 +1,9 @@
+import { useLocalSearchParams } from 'expo-router'
+import { lazy } from 'react'
+
+const ScheduleScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.ScheduleScreen })))
+
+export default function ScheduleRoute() {
+  const { jobId, pourId } = useLocalSearchParams<{ jobId: string; pourId: string }>()
+  return <ScheduleScreen jobId={jobId} pourId={pourId} />
+}

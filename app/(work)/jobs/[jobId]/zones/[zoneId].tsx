@@ -1,0 +1,9 @@
+import { useLocalSearchParams } from 'expo-router'
+import { lazy } from 'react'
+
+const CalculationScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.CalculationScreen })))
+
+export default function CalculationRoute() {
+  const { jobId, zoneId } = useLocalSearchParams<{ jobId: string; zoneId: string }>()
+  return <CalculationScreen jobId={jobId} zoneId={zoneId} />
+}

@@ -1,0 +1,5 @@
+import { SignInScreen } from '@/features/sign-in/sign-in-screen'
+
+export default function SignInRoute() {
+  return <SignInScreen />
+}
