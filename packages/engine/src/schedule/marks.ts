@@ -319,7 +319,8 @@ function totalsOf(rows: readonly ScheduleRow[], standard: BarStandard): readonly
     if (total === 0 || length === null) continue
     const massPerMetre = sizeOf(standard, diameter)?.massPerMetre ?? 0
     const before = totals.get(typeAndSize)
-    const metres = (before?.metres ?? 0) + (total * length) / 1000
+    // Whole millimetres are added, so that no fraction creeps in and a spreadsheet's sum agrees to the last digit.
+    const metres = (Math.round((before?.metres ?? 0) * 1000) + total * length) / 1000
     const bars = (before?.bars ?? 0) + total
     totals.set(typeAndSize, { typeAndSize, letter, diameter, massPerMetre, bars, metres, mass: metres * massPerMetre })
   }
