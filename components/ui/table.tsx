@@ -9,6 +9,8 @@ export interface Column<Row> {
   /** Figures stand at the end, words at the start. */
   readonly align?: 'start' | 'end'
   readonly width?: number
+  /** Long words may take several lines; without it the row stays one line high and the table scrolls. */
+  readonly wraps?: boolean
   /** The column that names the row; exactly one has it. */
   readonly isRowHead?: boolean
   readonly cell: (row: Row, index: number) => ReactNode

@@ -72,7 +72,7 @@ function RowButton({ children }: { children: ReactNode }) {
 }
 
 function placed<Row>(column: Column<Row>): CSSProperties {
-  return { textAlign: column.align ?? 'start', width: column.width }
+  return { textAlign: column.align ?? 'start', width: column.width, whiteSpace: column.wraps ? 'normal' : 'nowrap' }
 }
 
 const styles = {
@@ -99,7 +99,6 @@ const styles = {
     fontWeight: 500,
     padding: '6px 8px',
     borderBottom: `1px solid ${colour.ink}`,
-    whiteSpace: 'nowrap',
   },
   cell: { padding: '1px 8px', borderBottom: `1px solid ${colour.rule}`, fontWeight: 400, verticalAlign: 'middle' },
   foot: { borderTop: `1px solid ${colour.ink}`, borderBottom: 'none', fontWeight: 600 },
