@@ -57,6 +57,16 @@ describe('Bursting in the thickness, EN 1992-1-1 Eq. 6.58', () => {
     )
   })
 
+  test('an accepted reading lets the own prism count alone, up to a plate of 0.6 of it', () => {
+    const ids = ['en-window', 'en-steel-300', 'en-own-prism']
+    const at = (height: number) => checkAt(accepting(row('S4', { middle: { height } }), ...ids), 'bursting-thickness')
+    // Height 90, prism 180: 0.25 * 706 560 * 100 / 180 / 300 = 327.1 mm2
+    expect(asked(at(90))).toBeCloseTo((0.25 * 706_560 * 100) / 180 / 300, 6)
+    // 80 / (2 * 66) = 0.606 is outside the reading's range: mid-thickness counts again.
+    expect(asked(at(67))).toBeCloseTo((0.25 * 706_560 * 54) / 134 / 300, 6)
+    expect(asked(at(66))).toBeCloseTo((0.25 * 706_560 * 140) / 220 / 300, 6)
+  })
+
   test('off centre with a plate over 0.6 of its prism warns that the rule is low', () => {
     // 80 / (2 * 66) = 0.606; 80 / (2 * 67) = 0.597
     const said = (height: number) => thickness('S4', { middle: { height } }).notes.join(' ')
@@ -134,6 +144,26 @@ describe('A step in depth', () => {
       one.id === 'E4' ? { ...one, lengths: [length(0, at), length(at, 19_200, { soffit: -480 })] } : one,
     )
     expect(thickness('S4', { edges }).kind).toBe(kind)
+  })
+
+  test.each([
+    { aside: 219, kind: 'refused' },
+    { aside: 220, kind: 'compared' },
+  ])('a fold whose side runs $aside beside the plate, section 220: $kind', ({ aside, kind }) => {
+    // Plate from 7790 to 8010; the fold starts 50 behind the bearing face, at 17 240.
+    const x = 8010 + aside
+    const outline = [
+      { x, y: 14_000 },
+      { x: x + 2000, y: 14_000 },
+      { x: x + 2000, y: 17_240 },
+      { x, y: 17_240 },
+    ]
+    const fold: Region = { ...beam(0), id: 'fold', kind: 'fold', outline, top: 320, soffit: 100 }
+    expect(thickness('S4', { pour: { regions: [fold] } }).kind).toBe(kind)
+  })
+
+  test('a side of a region that lies on the outline is no step', () => {
+    expect(inBeam(5000).kind).toBe('compared')
   })
 
   test('in plan the step does not refuse', () => {

@@ -107,6 +107,8 @@ export interface Basis {
   /** The reading by which bursting steel is sized, and the one that says where steel counts. */
   readonly steelReading: string
   readonly windowReading: string
+  /** By which an anchor off centre is checked in its own prism alone, up to this plate over prism. */
+  readonly ownPrismReading: { readonly id: string; readonly ratioMax: number }
   /** Largest force while jacking; the last step holds the limit, N. */
   readonly jackingLimit: (strand: StrandType, strands: number) => readonly Step[]
   /** Largest force after lock-off; the last step holds the limit, N. */

@@ -4,6 +4,7 @@ import type { Reading } from './basis'
 export const EN_WINDOW = 'en-window'
 export const EN_STEEL_300 = 'en-steel-300'
 export const EN_STEEL_ALT = 'en-steel-alt'
+export const EN_OWN_PRISM = 'en-own-prism'
 
 const RANGE =
   'One anchor, or each anchor of a row on its own, at a face square to its tendon within 20 degrees, in a section ' +
@@ -39,6 +40,17 @@ export const EN_READINGS: readonly Reading[] = [
       'unfactored force. It asks for 0.83 of the steel of the other reading where the second governs.',
     range: RANGE,
     clause: { source: 'EN 1992-1-1:2004', section: '8.10.3(4), 6.5.3', tag: 'memory' },
+    proposed: false,
+  },
+  {
+    id: EN_OWN_PRISM,
+    title: 'Off centre, the own prism of the anchor alone',
+    text:
+      'An anchor off the middle of the thickness is checked in its own prism alone, twice the distance to the nearer ' +
+      'face. Without this reading the prism at mid-thickness is checked too and the worse of the two counts, so that ' +
+      'moving towards a face never looks like a gain.',
+    range: 'Plate up to 0.6 of its own prism; above it the rule is low by 16 % at 0.70 and 40 % at 0.90 (computed).',
+    clause: { source: 'EN 1992-1-1:2004', section: '6.5.3, silent on anchors off centre', tag: 'computed' },
     proposed: false,
   },
 ]

@@ -12,7 +12,7 @@ import type {
   TieRule,
 } from './basis'
 import { anchorage, lap } from './en-1992-anchorage'
-import { EN_READINGS, EN_STEEL_300, EN_STEEL_ALT, EN_WINDOW } from './en-1992-readings'
+import { EN_OWN_PRISM, EN_READINGS, EN_STEEL_300, EN_STEEL_ALT, EN_WINDOW } from './en-1992-readings'
 
 const SOURCE = 'EN 1992-1-1:2004'
 const clause = (section: string, tag: Clause['tag']): Clause => ({ source: SOURCE, section, tag })
@@ -154,6 +154,7 @@ function make(input: BasisInput): Basis {
     isAccepted: (readingId) => accepted.has(readingId),
     steelReading,
     windowReading: EN_WINDOW,
+    ownPrismReading: { id: EN_OWN_PRISM, ratioMax: 0.6 },
     jackingLimit: (strand, strands) =>
       strandLimit({ strand, strands, kBreaking: values.kBreaking, kProof: values.kProof, clause: JACKING }),
     lockOffLimit: (strand, strands) =>

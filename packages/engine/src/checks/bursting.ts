@@ -28,6 +28,8 @@ interface Asked {
   readonly plane: Plane
   readonly prisms: readonly Prism[]
   readonly notes: readonly string[]
+  /** Beside those that every bursting check rests on. */
+  readonly readings: readonly string[]
 }
 
 /** Bursting through the thickness; refused beside a step in depth and where anchors act as one. */
@@ -42,13 +44,13 @@ export function checkBurstingThickness(site: AnchorSite, context: CheckContext, 
   if (Math.abs(site.anchor.elevation) > context.basis.inclinationMax.value) {
     return tooInclined(head, 'anchor.elevation', site.anchor.elevation)
   }
-  const prisms = thicknessPrisms(site)
-  const [own] = prisms
-  if (own && own.a >= own.b.value) return noPrism(head, own, 'anchor.height')
-  return burst(
-    { site, context, plane: 'thickness', prisms, notes: inclinedNotes(site.anchor.elevation, 'in height') },
-    head,
-  )
+  const { own, middle } = thicknessPrisms(site)
+  if (own.a >= own.b.value) return noPrism(head, own, 'anchor.height')
+  const isAlone = middle !== null && countsAlone(own, context)
+  const prisms = middle === null || isAlone ? [own] : [own, middle]
+  const notes = [...ratioNotes(own, middle !== null), ...inclinedNotes(site.anchor.elevation, 'in height')]
+  const readings = isAlone ? [context.basis.ownPrismReading.id] : []
+  return burst({ site, context, plane: 'thickness', prisms, notes, readings }, head)
 }
 
 /** Bursting in plan; refused where anchors act as one. */
@@ -61,8 +63,8 @@ export function checkBurstingPlan(site: AnchorSite, context: CheckContext, close
   }
   const prism = planPrism(site)
   if (prism.a >= prism.b.value) return noPrism(head, prism, 'anchor.chainage')
-  const notes = [...inclinedNotes(site.anchor.skew, 'in plan'), ...planNotes(site, prism)]
-  return burst({ site, context, plane: 'plan', prisms: [prism], notes }, head)
+  const notes = [...ratioNotes(prism, false), ...inclinedNotes(site.anchor.skew, 'in plan'), ...planNotes(site, prism)]
+  return burst({ site, context, plane: 'plan', prisms: [prism], notes, readings: [] }, head)
 }
 
 function headOf(site: AnchorSite, plane: Plane, { basis }: CheckContext): Head {
@@ -77,6 +79,10 @@ function headOf(site: AnchorSite, plane: Plane, { basis }: CheckContext): Head {
     notes: [],
   }
 }
+
+/** Whether an accepted reading lets the own prism count alone, within that reading's range. */
+const countsAlone = ({ a, b }: Prism, { basis }: CheckContext): boolean =>
+  basis.isAccepted(basis.ownPrismReading.id) && a <= basis.ownPrismReading.ratioMax * b.value
 
 // Demand against steel ----------------------------------------------------------------------------------------------
 
@@ -100,7 +106,7 @@ function burst(asked: Asked, head: Head): Compared {
   const governing = worst(answers)
   const others = answers.filter((answer) => answer !== governing).map((answer) => otherNote(answer, governing))
   const face = faceNote(governing, basis.window(governing.prism.b.value))
-  const readings = [basis.windowReading, basis.steelReading]
+  const readings = [basis.windowReading, basis.steelReading, ...asked.readings]
   const result = byRatio(
     context,
     {
@@ -108,9 +114,8 @@ function burst(asked: Asked, head: Head): Compared {
       stage: governing.stage.name,
       clause: governing.rule.clause,
       notes: [
-        `Rests on two readings: ${readings.join(' and ')}.`,
+        `Rests on these readings: ${readings.join(', ')}.`,
         ...others,
-        ...ratioNotes(prisms[0] ?? governing.prism, prisms.length > 1),
         ...notes,
         ...steel.notes,
         ...governing.counted.notes,

@@ -24,8 +24,12 @@ export interface Prism {
   readonly b: Step
 }
 
-/** Off centre the anchor's own prism is smaller than the section and asks for less; the section's own middle prism is taken too. */
-export function thicknessPrisms({ toTop, toSoffit, top, soffit, hardware }: AnchorSite): readonly Prism[] {
+/** Off centre the anchor's own prism is smaller than the section and asks for less; the prism at mid-thickness is there for comparison. */
+export function thicknessPrisms({ toTop, toSoffit, top, soffit, hardware }: AnchorSite): {
+  readonly own: Prism
+  /** Null where the anchor stands at mid-thickness. */
+  readonly middle: Prism | null
+} {
   const a = hardware.plate.height
   const b = step(
     {
@@ -39,13 +43,13 @@ export function thicknessPrisms({ toTop, toSoffit, top, soffit, hardware }: Anch
     (v) => 2 * Math.min(v.cTop, v.cSoffit),
   )
   const own: Prism = { title: 'own prism', a, b }
-  if (Math.abs(toTop - toSoffit) <= ROUNDING) return [own]
+  if (Math.abs(toTop - toSoffit) <= ROUNDING) return { own, middle: null }
   const whole = step(
     { symbol: 'b', meaning: 'Prism at mid-thickness', formula: 'top - soffit', unit: 'mm', clause: GEOMETRY },
     { top, soffit },
     (v) => v.top - v.soffit,
   )
-  return [own, { title: 'mid-thickness', a, b: whole }]
+  return { own, middle: { title: 'mid-thickness', a, b: whole } }
 }
 
 interface Sides {
