@@ -17,21 +17,31 @@ export interface DistanceCheck extends Pick<
 }
 
 /** Compares in mm: `demand` is what is there, `limit` the least. Never near, and decided on the full number. */
-export function distanceCheck({ isClearance, demand, limit, ...rest }: DistanceCheck): Compared {
+export function distanceCheck(check: DistanceCheck): Compared {
+  const { demand, limit } = check
   const spare = demand - limit
-  const status = statusOfDistance(spare, isClearance ? demand : undefined)
+  const status = statusOfDistance(spare, check.isClearance ? demand : undefined)
+  // Written out, since spreading a check thousands of times in a pour costs more than the check.
   return {
-    ...rest,
     kind: 'compared',
+    zoneId: check.zoneId,
+    family: check.family,
+    name: check.name,
     plane: null,
+    stage: check.stage,
+    limitKind: check.limitKind,
+    clause: check.clause,
+    notes: check.notes,
+    status,
     demand,
     limit,
     unit: 'mm',
     compares: 'at-least',
-    status,
-    statusOnceAccepted: status,
     utilisation: null,
     spare,
+    steps: check.steps,
     readingId: null,
+    statusOnceAccepted: status,
+    mend: check.mend,
   }
 }

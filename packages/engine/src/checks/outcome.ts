@@ -29,40 +29,57 @@ export function byRatio(
   head: Head,
   answer: Answer & { readonly readings: readonly string[] },
 ): Compared {
-  const { demand, limit, unit, steps, readings } = answer
+  const { demand, limit, readings } = answer
   const accepted = statusOfRatio({ demand, limit, nearFrom: context.nearFrom })
   const open = readings.find((id) => !context.basis.isAccepted(id))
-  return {
-    ...head,
-    demand,
-    limit,
-    unit,
-    steps,
-    kind: 'compared',
+  return comparison(head, answer, {
     compares: 'ratio',
     status: open === undefined ? accepted : 'needs-judgement',
     statusOnceAccepted: accepted,
     utilisation: utilisationOf(answer),
     spare: null,
     readingId: open ?? readings[0] ?? null,
-    mend: null,
-  }
+  })
 }
 
 /** What is there against the least that is asked for, by difference. */
 export function atLeast(head: Head, answer: Answer): Compared {
   const spare = answer.demand - answer.limit
   const status = statusOfDistance(spare)
-  return {
-    ...head,
-    ...answer,
-    kind: 'compared',
+  return comparison(head, answer, {
     compares: 'at-least',
     status,
     statusOnceAccepted: status,
     utilisation: null,
     spare,
     readingId: null,
+  })
+}
+
+type Verdict = Pick<Compared, 'compares' | 'status' | 'statusOnceAccepted' | 'utilisation' | 'spare' | 'readingId'>
+
+/** Written out, since spreading a check thousands of times in a pour costs more than the check. */
+function comparison(head: Head, answer: Answer, verdict: Verdict): Compared {
+  return {
+    kind: 'compared',
+    zoneId: head.zoneId,
+    family: head.family,
+    name: head.name,
+    plane: head.plane,
+    stage: head.stage,
+    limitKind: head.limitKind,
+    clause: head.clause,
+    notes: head.notes,
+    status: verdict.status,
+    demand: answer.demand,
+    limit: answer.limit,
+    unit: answer.unit,
+    compares: verdict.compares,
+    utilisation: verdict.utilisation,
+    spare: verdict.spare,
+    steps: answer.steps,
+    readingId: verdict.readingId,
+    statusOnceAccepted: verdict.statusOnceAccepted,
     mend: null,
   }
 }
