@@ -17,27 +17,36 @@ export function Checkbox({ label, hint, checked, onChange, disabled }: CheckboxP
   const minHeight = useTargetHeight()
   const id = useId()
   return (
-    <Pressable
-      role="checkbox"
-      aria-checked={checked}
-      aria-labelledby={`${id}-label`}
-      aria-describedby={hint ? `${id}-hint` : undefined}
-      disabled={disabled ?? false}
-      onPress={() => onChange(!checked)}
-      style={[styles.row, { minHeight }]}
+    // react-native-web presses a checkbox on Enter alone; the space bar is the key for it, and must not scroll the page.
+    <View
+      onKeyDown={(event) => {
+        if (event.key !== ' ' || disabled) return
+        event.preventDefault()
+        onChange(!checked)
+      }}
     >
-      <View style={[styles.box, disabled && styles.off]}>{checked ? <Icon name="check" size={14} /> : null}</View>
-      <View style={styles.words}>
-        <Text id={`${id}-label`} tone={disabled ? 'soft' : 'ink'}>
-          {label}
-        </Text>
-        {hint ? (
-          <Text kind="small" tone="soft" id={`${id}-hint`}>
-            {hint}
+      <Pressable
+        role="checkbox"
+        aria-checked={checked}
+        aria-labelledby={`${id}-label`}
+        aria-describedby={hint ? `${id}-hint` : undefined}
+        disabled={disabled ?? false}
+        onPress={() => onChange(!checked)}
+        style={[styles.row, { minHeight }]}
+      >
+        <View style={[styles.box, disabled && styles.off]}>{checked ? <Icon name="check" size={14} /> : null}</View>
+        <View style={styles.words}>
+          <Text id={`${id}-label`} tone={disabled ? 'soft' : 'ink'}>
+            {label}
           </Text>
-        ) : null}
-      </View>
-    </Pressable>
+          {hint ? (
+            <Text kind="small" tone="soft" id={`${id}-hint`}>
+              {hint}
+            </Text>
+          ) : null}
+        </View>
+      </Pressable>
+    </View>
   )
 }
 

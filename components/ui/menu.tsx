@@ -1,3 +1,4 @@
+import { router } from 'expo-router'
 import type { ReactNode } from 'react'
 import { useRef, useState } from 'react'
 import type { WebKeyEvent } from './web-key-event'
@@ -78,6 +79,15 @@ function MenuList({ label, items, onClose, corner }: MenuListProps) {
     rows.current[at.current]?.focus()
   }
   const onKeyDown = (event: WebKeyEvent) => {
+    // Enter presses by itself; react-native-web leaves the space bar to buttons alone.
+    const here = items[at.current]
+    if (event.key === ' ' && here && !here.disabled) {
+      event.preventDefault()
+      onClose()
+      here.onPress?.()
+      if (here.href) router.push(here.href)
+      return
+    }
     const next = targetOf(event.key, at.current, items)
     if (next === null) return
     event.preventDefault()

@@ -73,6 +73,14 @@ test('menu: arrows, End, first letter, Enter; then the message is in the one liv
   expect(live[0]?.textContent).toBe('5 anchors copied.')
 })
 
+test('menu: the space bar chooses, an item that is off stays off', async () => {
+  await userEvent.click(button('More'))
+  await waitFor(() => expect(document.activeElement?.textContent).toBe('Copy anchors'))
+  await userEvent.keyboard('w ')
+  expect(push.mock.calls).toEqual([['/']])
+  expect(screen.queryByRole('menu')).toBeNull()
+})
+
 test('a message with an action stays until it is put away', async () => {
   await userEvent.click(button('Say'))
   expect(screen.getByText('Anchor removed.')).toBeTruthy()
