@@ -9,6 +9,7 @@ import request from 'supertest'
 import { write, type Db } from '@/db/client'
 import { buildApp } from '@/server/app'
 import { serverLog } from '@/server/log'
+import type { FileStore } from '@/server/files/file-store'
 import type { Message } from '@/server/mail/mailer'
 import { SESSION_COOKIE, sessionReader } from '@/server/session'
 import { insertPerson, setMember } from '@/server/stores/person'
@@ -25,6 +26,7 @@ export interface TestServer {
   readonly app: Express
   readonly db: Db
   readonly company: TestCompany
+  readonly files: FileStore
   readonly mails: Message[]
   /** Everything that was logged, as it was written. */
   log(): string
@@ -43,20 +45,10 @@ export function openTestServer({ appUrl, dist, now = () => Date.now() }: Options
   const { db } = company
   const lines: string[] = []
   const mails: Message[] = []
-  const contents = new Map<string, Uint8Array>()
+  const files = filesInMemory()
   const app = buildApp({
     db,
-    files: {
-      save(companyId, bytes) {
-        const sha256 = createHash('sha256').update(bytes).digest('hex')
-        contents.set(`${companyId}/${sha256}`, bytes)
-        return Promise.resolve({ sha256, sizeBytes: bytes.byteLength })
-      },
-      open(companyId, sha256) {
-        const bytes = contents.get(`${companyId}/${sha256}`)
-        return bytes ? Promise.resolve(Readable.from([bytes])) : Promise.reject(new Error('There is no such file.'))
-      },
-    },
+    files,
     mail: { send: (message) => Promise.resolve(void mails.push(message)) },
     log: serverLog({ level: 'debug', stream: { write: (line) => void lines.push(line) } }),
     now,
@@ -69,6 +61,7 @@ export function openTestServer({ appUrl, dist, now = () => Date.now() }: Options
     app,
     db,
     company,
+    files,
     mails,
     log: () => lines.join(''),
     async cookieOf(personId) {
@@ -76,6 +69,21 @@ export function openTestServer({ appUrl, dist, now = () => Date.now() }: Options
       const { session } = await readSession({ header: undefined, set: (value) => (cookie = value) })
       await session.start(personId)
       return cookie.split(';')[0] ?? ''
+    },
+  }
+}
+
+function filesInMemory(): FileStore {
+  const contents = new Map<string, Uint8Array>()
+  return {
+    save(companyId, bytes) {
+      const sha256 = createHash('sha256').update(bytes).digest('hex')
+      contents.set(`${companyId}/${sha256}`, bytes)
+      return Promise.resolve({ sha256, sizeBytes: bytes.byteLength })
+    },
+    open(companyId, sha256) {
+      const bytes = contents.get(`${companyId}/${sha256}`)
+      return bytes ? Promise.resolve(Readable.from([bytes])) : Promise.reject(new Error('There is no such file.'))
     },
   }
 }
