@@ -1,5 +1,5 @@
 import type { JobData, Role } from '@wedgeline/contract'
-import { STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
+import { BASIS_SOURCES, STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
 import { write, type Connection } from '../db/client'
 import { recheckJob } from './checking'
 import { conflict, missing, refused } from './failure'
@@ -43,12 +43,11 @@ export function listJobs(db: Connection, personId: string) {
   const pours = pourSummaries(db, personId)
   return jobsOf(db, personId).map((job) => {
     const own = pours.filter(({ jobId }) => jobId === job.id)
-    const proposed = new Set(
-      own.flatMap(({ readingIds }) => readingIds ?? []).filter((id) => !accepted.has(`${job.id} ${id}`)),
-    )
+    const isOpen = (readingId: string) => !accepted.has(`${job.id} ${readingId}`)
+    const isWaiting = own.some(({ readingIds }) => readingIds?.some(isOpen))
     return {
       ...job,
-      readingsProposed: proposed.size,
+      readingsProposed: isWaiting ? proposedReadings(job.basis).filter(isOpen).length : 0,
       pours: own.map(({ id, mark, title, counts }): PourSummary => ({
         id,
         mark,
@@ -60,6 +59,10 @@ export function listJobs(db: Connection, personId: string) {
     }
   })
 }
+
+/** A result names the first reading only that it waits for, so the basis says which there are. */
+const proposedReadings = (basis: string): string[] =>
+  (BASIS_SOURCES.find(({ id }) => id === basis)?.readings ?? []).filter(({ proposed }) => proposed).map(({ id }) => id)
 
 /** A job with its people and what the caller is in its company. */
 export function describeJob(ctx: JobCall) {

@@ -29,19 +29,43 @@ export function renewIds(file: LayoutFile, known: KnownIds): LayoutFile {
     tendon: freshIds(file.tendons),
     anchor: freshIds(file.anchors),
   }
-  const at = (kind: keyof typeof maps, id: string) => idIn(maps[kind], id)
-  const maybe = (kind: keyof typeof maps, id: string | null) => (id === null ? null : at(kind, id))
+  const at: At = (kind, id) => idIn(maps[kind], id)
   const corners = new Map(file.pours.map((pour) => [pour.id, freshIds(pour.outline)]))
+  const renewed = { at, corners, known }
   return {
     ...file,
     job: { ...file.job, id: known.jobId },
+    ...renewHardware(file, known),
+    ...renewPlaces(file, renewed),
+    ...renewTendons(file, renewed),
+  }
+}
+
+type Kind = 'level' | 'edgeLine' | 'joint' | 'pour' | 'edge' | 'pan' | 'tendon' | 'anchor'
+type At = (kind: Kind, id: string) => string
+
+interface Renewed {
+  readonly at: At
+  /** Ids of the corners of each pour, by the pour's old id. */
+  readonly corners: ReadonlyMap<string, Ids>
+  readonly known: KnownIds
+}
+
+function renewHardware(file: LayoutFile, known: KnownIds) {
+  return {
     strandTypes: file.strandTypes.map((row) => ({ ...row, id: idIn(known.strandTypes, row.id) })),
     jacks: file.jacks.map((row) => ({ ...row, id: idIn(known.jacks, row.id) })),
     hardware: file.hardware.map((row) => ({
       ...row,
       id: idIn(known.hardware, row.id),
-      jackId: row.jackId === null ? null : idIn(known.jacks, row.jackId),
+      jackId: orNull(row.jackId, (id) => idIn(known.jacks, id)),
     })),
+  }
+}
+
+function renewPlaces(file: LayoutFile, renewed: Renewed) {
+  const { at, known } = renewed
+  return {
     levels: file.levels.map((row) => ({ ...row, id: at('level', row.id) })),
     gridLines: file.gridLines.map(withFreshId),
     edgeLines: file.edgeLines.map((row) => ({ ...row, id: at('edgeLine', row.id), levelId: at('level', row.levelId) })),
@@ -52,14 +76,23 @@ export function renewIds(file: LayoutFile, known: KnownIds): LayoutFile {
       firstPourId: at('pour', row.firstPourId),
     })),
     obstructions: file.obstructions.map((row) => ({ ...withFreshId(row), levelId: at('level', row.levelId) })),
-    pours: file.pours.map((row) => renewPour(row, { at, corners })),
-    edges: file.edges.map((row) => renewEdge(row, { at, corners })),
+    pours: file.pours.map((row) => renewPour(row, renewed)),
+    edges: file.edges.map((row) => renewEdge(row, renewed)),
     pans: file.pans.map((row) => ({
       ...row,
       id: at('pan', row.id),
       pourId: at('pour', row.pourId),
-      jackId: row.jackId === null ? null : idIn(known.jacks, row.jackId),
+      jackId: orNull(row.jackId, (id) => idIn(known.jacks, id)),
     })),
+  }
+}
+
+function renewTendons(file: LayoutFile, { at, known }: Renewed) {
+  const inPour = <T extends { readonly id: string; readonly pourId: string }>(row: T): T => ({
+    ...withFreshId(row),
+    pourId: at('pour', row.pourId),
+  })
+  return {
     tendons: file.tendons.map((row) => ({
       ...row,
       id: at('tendon', row.id),
@@ -70,29 +103,19 @@ export function renewIds(file: LayoutFile, known: KnownIds): LayoutFile {
       ...row,
       id: at('anchor', row.id),
       tendonId: at('tendon', row.tendonId),
-      edgeId: maybe('edge', row.edgeId),
-      panId: maybe('pan', row.panId),
+      edgeId: orNull(row.edgeId, (id) => at('edge', id)),
+      panId: orNull(row.panId, (id) => at('pan', id)),
       hardwareId: idIn(known.hardware, row.hardwareId),
       castWithPourId: at('pour', row.castWithPourId),
       stressedWithPourId: at('pour', row.stressedWithPourId),
     })),
-    steel: file.steel.map((row) => ({
-      ...withFreshId(row),
-      pourId: at('pour', row.pourId),
-      zone: renewZone(row.zone, at),
-    })),
-    barMarks: file.barMarks.map((row) => ({ ...withFreshId(row), pourId: at('pour', row.pourId) })),
-    concreteResults: file.concreteResults.map((row) => ({ ...withFreshId(row), pourId: at('pour', row.pourId) })),
+    steel: file.steel.map((row) => ({ ...inPour(row), zone: renewZone(row.zone, at) })),
+    barMarks: file.barMarks.map(inPour),
+    concreteResults: file.concreteResults.map(inPour),
   }
 }
 
-type At = (kind: 'level' | 'edgeLine' | 'joint' | 'pour' | 'edge' | 'pan' | 'anchor', id: string) => string
-
-interface Renewed {
-  readonly at: At
-  /** Ids of the corners of each pour, by the pour's old id. */
-  readonly corners: ReadonlyMap<string, Ids>
-}
+const orNull = (id: string | null, renew: (id: string) => string): string | null => (id === null ? null : renew(id))
 
 function renewPour(pour: PourData, { at, corners }: Renewed): PourData {
   const own = corners.get(pour.id) ?? new Map()
@@ -124,8 +147,8 @@ function renewZone(zone: SteelZoneData, at: At): SteelZoneData {
       return {
         ...zone,
         edgeId: at('edge', zone.edgeId),
-        afterAnchorId: zone.afterAnchorId === null ? null : at('anchor', zone.afterAnchorId),
-        beforeAnchorId: zone.beforeAnchorId === null ? null : at('anchor', zone.beforeAnchorId),
+        afterAnchorId: orNull(zone.afterAnchorId, (id) => at('anchor', id)),
+        beforeAnchorId: orNull(zone.beforeAnchorId, (id) => at('anchor', id)),
       }
     case 'edge':
       return { ...zone, edgeId: at('edge', zone.edgeId) }
@@ -136,7 +159,7 @@ function renewZone(zone: SteelZoneData, at: At): SteelZoneData {
   }
 }
 
-export const freshIds = (rows: readonly { readonly id: string }[]): Ids => new Map(rows.map(({ id }) => [id, uuidv7()]))
+const freshIds = (rows: readonly { readonly id: string }[]): Ids => new Map(rows.map(({ id }) => [id, uuidv7()]))
 
 const withFreshId = <T extends { readonly id: string }>(row: T): T => ({ ...row, id: uuidv7() })
 

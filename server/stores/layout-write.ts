@@ -144,6 +144,6 @@ function ownerColumn(table: LayoutTable, owner: string): SQLiteColumn {
 }
 
 function listOf(row: Row, list: string): readonly Record<string, unknown>[] {
-  const found: unknown = Object.entries(row).find(([key]) => key === list)?.[1]
-  return Array.isArray(found) ? found : []
+  const found = new Map<string, unknown>(Object.entries(row)).get(list)
+  return Array.isArray(found) ? (found as Record<string, unknown>[]) : []
 }
