@@ -46,7 +46,9 @@ describe('public/theme.css', () => {
     const at = css.indexOf(`${selector} {`)
     expect(at, selector).toBeGreaterThanOrEqual(0)
     const body = css.slice(at, css.indexOf('}', at))
-    return Object.fromEntries([...body.matchAll(/--(\w+): (#\w+);/g)].map(([, name, value]) => [name, value]))
+    return Object.fromEntries<string | undefined>(
+      [...body.matchAll(/--(\w+): (#\w+);/g)].map(([, name, value]) => [name, value]),
+    )
   }
   test.each([
     ['light', ':root'],
