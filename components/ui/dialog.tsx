@@ -37,7 +37,7 @@ export function Dialog({ title, isOpen, onClose, children, actions }: DialogProp
 }
 
 export const overlayStyle = StyleSheet.create({
-  backdrop: { position: 'absolute', top: 0, right: 0, bottom: 0, left: 0, backgroundColor: colour.ink, opacity: 0.35 },
+  backdrop: { position: 'absolute', top: 0, right: 0, bottom: 0, left: 0, backgroundColor: '#000', opacity: 0.45 },
 })
 
 const styles = StyleSheet.create({
