@@ -1,0 +1,51 @@
+import { BASIS_SOURCES } from '@wedgeline/engine/bases'
+import type { Family, Zone } from '@wedgeline/engine'
+
+/** Families of checks as people say them. */
+export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
+  bearing: 'bearing',
+  'bursting-thickness': 'bursting in the thickness',
+  'bursting-plan': 'bursting in plan',
+  spalling: 'spalling',
+  'depth-change': 'change of depth',
+  cover: 'cover',
+  spacing: 'spacing',
+  'straight-length': 'straight length',
+  'edge-wedge': 'edge wedge',
+  joint: 'joint',
+  'pan-access': 'access to the pan',
+  'pan-bars': 'bars round the pan',
+  tendon: 'tendon',
+  'dead-end': 'dead end',
+  precompression: 'precompression',
+  fit: 'fit of the bars',
+  anchorage: 'anchorage of the bars',
+}
+
+/** `Not yet checked here: spalling, edge wedge.`; null where nothing is missing. */
+export function notYetCheckedText(families: readonly Family[], where = 'here'): string | null {
+  if (families.length === 0) return null
+  return `Not yet checked ${where}: ${families.map((family) => FAMILY_WORDS[family]).join(', ')}.`
+}
+
+/** A reading by the title under which it is accepted. */
+export function readingTitle(readingId: string): string {
+  const readings = BASIS_SOURCES.flatMap((basis) => basis.readings)
+  return readings.find(({ id }) => id === readingId)?.title ?? 'a reading of this basis'
+}
+
+/** A note with the readings that it names by id named by their titles. */
+export function noteText(note: string): string {
+  const list = /^(Rests on these readings: )(.+)\.$/.exec(note)
+  if (!list) return note
+  return `${list[1] ?? ''}${(list[2] ?? '').split(', ').map(readingTitle).join('; ')}.`
+}
+
+/** Where a zone lies, as a path of the product: its edge with the zone picked; null for a zone at no edge. */
+export function edgePathOf(jobId: string, zone: Pick<Zone, 'id' | 'edgeId'>): `/jobs/${string}/edges/${string}` | null {
+  return zone.edgeId === null ? null : `/jobs/${jobId}/edges/${zone.edgeId}?zone=${encodeURIComponent(zone.id)}`
+}
+
+export function calculationPathOf(jobId: string, zoneId: string): `/jobs/${string}/zones/${string}` {
+  return `/jobs/${jobId}/zones/${encodeURIComponent(zoneId)}`
+}
