@@ -88,9 +88,9 @@ describe('Hardware with an approval', () => {
   })
 
   test.each([
-    { why: 'spacing', middle: { chainage: 6150 + 349 }, field: 'anchor.chainage', says: 'spacing 349' },
-    { why: 'height', middle: { height: 74 }, field: 'anchor.height', says: '74 to the soffit' },
-    { why: 'height from the top', middle: { height: 146 }, field: 'anchor.height', says: '74 to the top' },
+    { why: 'spacing', middle: { chainage: 6150 + 349 }, field: 'chainage', says: 'spacing 349' },
+    { why: 'height', middle: { height: 74 }, field: 'height', says: '74 to the soffit' },
+    { why: 'height from the top', middle: { height: 146 }, field: 'height', says: '74 to the top' },
   ])('a condition not met makes bearing not covered: $why', ({ middle, field, says }) => {
     const check = checkAt(row('S4A', { middle }), 'bearing', 'Full')
     expect(check).toMatchObject({ status: 'not-covered', code: 'OUTSIDE_APPROVAL', field })

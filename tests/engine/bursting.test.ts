@@ -87,7 +87,7 @@ describe('Bursting in the thickness, EN 1992-1-1 Eq. 6.58', () => {
   test('a plate as deep as its prism is refused', () => {
     expect(thickness('S4', { middle: { height: 40 } })).toMatchObject({
       code: 'OUTSIDE_METHOD',
-      field: 'anchor.height',
+      field: 'height',
     })
   })
 
@@ -167,7 +167,9 @@ describe('A step in depth', () => {
   })
 
   test('in plan the step does not refuse', () => {
-    expect(plan('S4', { edges: deep, pour: { regions: [beam(600)] } }).kind).toBe('compared')
+    const check = plan('S4', { edges: deep, pour: { regions: [beam(600)] } })
+    expect(check.kind).toBe('compared')
+    expect(check.notes.join(' ')).toContain('A step in depth stands 490 from the anchor')
   })
 })
 
@@ -204,6 +206,20 @@ describe('Bursting in plan', () => {
     expect(check.notes.join(' ')).toContain('129 mm2 over the first 350, 0 mm2 there')
     // With the links, 4 * 2 * 78.54 = 628 mm2 stand there.
     expect(checkAt(accepted(given), 'bursting-plan')).toMatchObject({ status: 'within' })
+  })
+
+  test('bars in a section deeper than 250 count with poor bond (EN 1992-1-1 8.4.2, from memory)', () => {
+    // 22 MPa, 300 MPa: fctm = 0.3 * 22^(2/3) = 2.355; fbd = 2.25 * 0.7 * 2.355 / 1.5 = 2.473 MPa; lb,rqd of 12 mm
+    // = 3 * 300 / 2.473 = 363.9 mm, in poor bond 363.9 / 0.7 = 519.9 mm. Bars reach 400 past the line.
+    const given = (thickness: number) => {
+      const edges = EDGES.map((one) =>
+        one.id === 'E4' ? { ...one, lengths: [length(0, 19_200, { top: thickness })] } : one,
+      )
+      const steel = [steelAt({ ...TRANSVERSE, length: 800 })]
+      return compared(plan('S4', { edges, pour: { thickness }, steel })).limit
+    }
+    expect(given(250)).toBeCloseTo(5 * A12, 6)
+    expect(given(251) / (5 * A12)).toBeCloseTo(400 / 519.9, 3)
   })
 
   test('the nearer half-gap sets the prism, and a wide gap beside it is said', () => {
@@ -256,7 +272,7 @@ describe('Bursting in plan', () => {
   })
 
   test('skew beyond 20 degrees is refused (common practice)', () => {
-    expect(plan('S4', { middle: { skew: 0.36 } })).toMatchObject({ code: 'OUTSIDE_METHOD', field: 'anchor.skew' })
+    expect(plan('S4', { middle: { skew: 0.36 } })).toMatchObject({ code: 'OUTSIDE_METHOD', field: 'skew' })
   })
 
   test('two anchors that act as one are not covered, and their mark is said', () => {

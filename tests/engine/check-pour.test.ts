@@ -167,6 +167,13 @@ describe('Force while jacking: at most min(0.8 Fpk, 0.9 Fp0.1k) (EN 1992-1-1 5.1
   })
 })
 
+test('a tendon jacked too high is mended by the ratio that would just do', () => {
+  const given = row('S4')
+  const tendons = given.tendons.map((tendon) => ({ ...tendon, jackingRatio: 0.85 }))
+  const check = checksAt({ ...given, tendons }).find(({ family }) => family === 'tendon')
+  expect(check).toMatchObject({ status: 'over', mend: { field: 'tendon.jackingRatio', value: 0.8 } })
+})
+
 describe('Order and counts', () => {
   test('checks of a zone stand worst first and the zone has the worst status', () => {
     for (const { checks, status } of run(everyKind()).zones) {

@@ -82,7 +82,7 @@ export interface Compared extends CheckHead {
   readonly readingId: string | null
   /** What the status is once the reading is accepted; equal to status otherwise. */
   readonly statusOnceAccepted: Exclude<Status, 'not-covered'>
-  /** The layout field that mends it, where one does, with the value that would just do. */
+  /** The layout field that mends it, where one does, with the value that would just do; named as in a refusal. */
   readonly mend: { readonly field: string; readonly value: number } | null
 }
 
@@ -91,6 +91,7 @@ export interface Refused extends CheckHead {
   readonly kind: 'refused'
   readonly status: 'not-covered'
   readonly code: RefusalCode
+  /** The anchor's own field by its name, another record's as `tendon.strands`. */
   readonly field: string
   readonly message: string
 }

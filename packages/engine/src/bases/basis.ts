@@ -117,6 +117,8 @@ export interface Basis {
   readonly tie: (input: TieInput) => TieRule
   readonly window: (b: number) => Window
   readonly anchorage: (input: AnchorageInput) => Anchorage
+  /** Whether every bar of a section this deep lies in good bond, whatever its height in it. */
+  readonly isGoodBond: (depth: number) => boolean
   /** Lap length, mm; `share` is the part of the bars lapped at one section, above 0 to 1. */
   readonly lap: (input: AnchorageInput, share: number) => number
   /** Angle of spread behind an anchor, rad. */

@@ -12,6 +12,11 @@ export interface BondFactors {
 /** The bond rule may not count on more than a C60/75 concrete (8.4.2(2)). */
 const STRENGTH_FOR_BOND_MAX = 60
 
+/** In sections up to this depth all bars lie in good bond (8.4.2(2), Fig. 8.2; from memory), mm. */
+const GOOD_BOND_DEPTH_MAX = 250
+
+export const isGoodBond = (depth: number): boolean => depth <= GOOD_BOND_DEPTH_MAX
+
 /** Mean tensile strength, MPa (Table 3.1). */
 const meanTensile = (fck: number): number =>
   fck <= 50 ? 0.3 * Math.cbrt(fck) ** 2 : 2.12 * Math.log(1 + (fck + 8) / 10)
@@ -28,9 +33,9 @@ function shapeFactors({ diameter, cd, isBent }: AnchorageInput): number {
 
 /** Length beyond a line that a bar needs to carry `stress` there: Eq. 8.2, 8.3, 8.4, 8.6. */
 export function anchorage(input: AnchorageInput, { gammaC, alphaCt }: BondFactors): Anchorage {
-  const { diameter, strength, stress, isGoodBond } = input
+  const { diameter, strength, stress } = input
   const fctk = 0.7 * meanTensile(Math.min(strength, STRENGTH_FOR_BOND_MAX))
-  const eta1 = isGoodBond ? 1 : 0.7
+  const eta1 = input.isGoodBond ? 1 : 0.7
   const eta2 = diameter <= 32 ? 1 : (132 - diameter) / 100
   const bond = (2.25 * eta1 * eta2 * alphaCt * fctk) / gammaC
   const required = (diameter / 4) * (stress / bond)

@@ -11,7 +11,7 @@ import type {
   TieInput,
   TieRule,
 } from './basis'
-import { anchorage, lap } from './en-1992-anchorage'
+import { anchorage, isGoodBond, lap } from './en-1992-anchorage'
 import { EN_OWN_PRISM, EN_READINGS, EN_STEEL_300, EN_STEEL_ALT, EN_WINDOW } from './en-1992-readings'
 
 const SOURCE = 'EN 1992-1-1:2004'
@@ -163,6 +163,7 @@ function make(input: BasisInput): Basis {
     tie: (one) => tie(one, { values, fyk: input.fyk, steelReading }),
     window: (b) => ({ from: 0.2 * b, to: b }),
     anchorage: (one) => anchorage(one, values),
+    isGoodBond,
     lap: (one, share) => lap(one, share, values),
     spread: { value: Math.atan(2 / 3), clause: SPREAD },
     inclinationMax: { value: (20 * Math.PI) / 180, clause: INCLINATION },

@@ -134,7 +134,7 @@ export function brokenConditions(site: AnchorSite, line: ApprovalStrength, conte
     const heightMin = Math.max(line.spacingHeightMin, hardware.spacingHeightMin)
     if (along < alongMin && inHeight < heightMin) {
       broken.push({
-        field: 'anchor.chainage',
+        field: 'chainage',
         condition: `spacing ${mm(along)} along the edge, ${mm(alongMin)} or more`,
       })
       break
@@ -143,12 +143,12 @@ export function brokenConditions(site: AnchorSite, line: ApprovalStrength, conte
   const side = site.sideFace
   if (side && side.distance < line.edgeAlongMin) {
     const condition = `${mm(side.distance)} to ${side.name}, ${mm(line.edgeAlongMin)} or more`
-    broken.push({ field: 'anchor.chainage', condition })
+    broken.push({ field: 'chainage', condition })
   }
   const face = nearerFace(site)
   if (face < line.edgeHeightMin) {
     const which = site.toSoffit <= site.toTop ? 'soffit' : 'top'
-    broken.push({ field: 'anchor.height', condition: `${mm(face)} to the ${which}, ${mm(line.edgeHeightMin)} or more` })
+    broken.push({ field: 'height', condition: `${mm(face)} to the ${which}, ${mm(line.edgeHeightMin)} or more` })
   }
   if (!hasTestedSteel(site, context)) {
     broken.push({ field: 'steel', condition: 'its local steel is not as tested' })

@@ -39,13 +39,12 @@ export function checkBurstingThickness(site: AnchorSite, context: CheckContext, 
   const group = groupOf(site, head, close)
   if (group) return actsAsOne(site, { head, group, context })
   const change = sectionStepNear(site, depth)
-  if (change)
-    return refusal(head, { code: 'DEPTH_CHANGE', field: 'anchor.chainage', message: changeMessage(change, depth) })
+  if (change) return refusal(head, { code: 'DEPTH_CHANGE', field: 'chainage', message: changeMessage(change, depth) })
   if (Math.abs(site.anchor.elevation) > context.basis.inclinationMax.value) {
-    return tooInclined(head, 'anchor.elevation', site.anchor.elevation)
+    return tooInclined(head, 'elevation', site.anchor.elevation)
   }
   const { own, middle } = thicknessPrisms(site)
-  if (own.a >= own.b.value) return noPrism(head, own, 'anchor.height')
+  if (own.a >= own.b.value) return noPrism(head, own, 'height')
   const isAlone = middle !== null && countsAlone(own, context)
   const prisms = middle === null || isAlone ? [own] : [own, middle]
   const notes = [...ratioNotes(own, middle !== null), ...inclinedNotes(site.anchor.elevation, 'in height')]
@@ -59,11 +58,16 @@ export function checkBurstingPlan(site: AnchorSite, context: CheckContext, close
   const group = groupOf(site, head, close)
   if (group) return actsAsOne(site, { head, group, context })
   if (Math.abs(site.anchor.skew) > context.basis.inclinationMax.value) {
-    return tooInclined(head, 'anchor.skew', site.anchor.skew)
+    return tooInclined(head, 'skew', site.anchor.skew)
   }
   const prism = planPrism(site)
-  if (prism.a >= prism.b.value) return noPrism(head, prism, 'anchor.chainage')
-  const notes = [...ratioNotes(prism, false), ...inclinedNotes(site.anchor.skew, 'in plan'), ...planNotes(site, prism)]
+  if (prism.a >= prism.b.value) return noPrism(head, prism, 'chainage')
+  const notes = [
+    ...ratioNotes(prism, false),
+    ...inclinedNotes(site.anchor.skew, 'in plan'),
+    ...planNotes(site, prism),
+    ...stepNotes(site),
+  ]
   return burst({ site, context, plane: 'plan', prisms: [prism], notes, readings: [] }, head)
 }
 
@@ -156,7 +160,7 @@ function answerOf(of: {
         strength: stage.strength,
         stress: rule.stress,
         cd: null,
-        isGoodBond: true,
+        isGoodBond: basis.isGoodBond(place.depth),
         isBent: false,
       }),
   })
@@ -218,6 +222,15 @@ function ratioNotes({ a, b }: Prism, isEccentric: boolean): readonly string[] {
   return [`${said}, outside 0.1 to 0.8, where the rule follows elastic theory within about 8 % (computed).`]
 }
 
+/** In plan a step of depth does not refuse the rule, but the reader must know of it. */
+function stepNotes(site: AnchorSite): readonly string[] {
+  const change = sectionStepNear(site, site.top - site.soffit)
+  if (!change) return []
+  return [
+    `A step in depth stands ${whole(change.distance)} from the anchor; the rule in plan takes the section as constant.`,
+  ]
+}
+
 function inclinedNotes(angle: number, how: string): readonly string[] {
   if (angle === 0) return []
   return [`The tendon stands ${degrees(Math.abs(angle))} degrees out of square ${how}; the rule takes it as square.`]
@@ -242,7 +255,7 @@ function actsAsOne(site: AnchorSite, of: { head: Head; group: CloseGroup; contex
   const distance = below === undefined ? '' : ` (closer than ${whole(below)})`
   return refusal(of.head, {
     code: 'ANCHORS_ACT_AS_ONE',
-    field: of.group.plane === 'plan' ? 'anchor.chainage' : 'anchor.height',
+    field: of.group.plane === 'plan' ? 'chainage' : 'height',
     message: `Acts as one with ${marks}${distance}: the rule for a single anchor does not hold, and groups are not yet checked.`,
   })
 }

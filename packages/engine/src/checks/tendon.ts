@@ -13,7 +13,7 @@ export function checkJackingForce(
   const force = jackingForce(of.tendon, of.strand)
   const steps = context.basis.jackingLimit(of.strand, of.tendon.strands)
   const limit = steps.at(-1)?.value ?? 0
-  return byRatio(
+  const check = byRatio(
     context,
     {
       zoneId: of.zoneId,
@@ -27,4 +27,7 @@ export function checkJackingForce(
     },
     { demand: force.value, limit, unit: 'N', steps: [force, ...steps], readings: [] },
   )
+  if (check.status !== 'over') return check
+  const value = limit / (of.tendon.strands * of.strand.breakingLoad)
+  return { ...check, mend: { field: 'tendon.jackingRatio', value } }
 }

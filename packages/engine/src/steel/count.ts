@@ -63,7 +63,7 @@ export function countSteel(input: CountInput): Counted {
     beforeWindow: all.reduce((sum, { beforeWindow }) => sum + beforeWindow, 0),
     isCarriedToFace: all.some(({ isCarriedToFace }) => isCarriedToFace),
     steps: [...lines, total],
-    notes: all.flatMap(({ notes }) => notes),
+    notes: [...new Set(all.flatMap(({ notes }) => notes))],
   }
 }
 
@@ -73,7 +73,7 @@ const planeName = (plane: Plane): string => (plane === 'plan' ? 'in plan' : 'in 
 
 function countSet(shape: SteelShape, input: CountInput, at: number): SetCount {
   const set = crossingsOf(shape, input.plane, input.place)
-  if ('reason' in set) return { ...NOTHING, notes: [set.reason] }
+  if ('reason' in set) return { ...NOTHING, notes: set.reason === null ? [] : [set.reason] }
   const { window } = input
   const inside = set.positions.filter((x) => x >= window.from && x <= window.to)
   const before = set.positions.filter((x) => x >= 0 && x < window.from)

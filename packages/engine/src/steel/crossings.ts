@@ -45,9 +45,9 @@ export interface Crossings {
   readonly notes: readonly string[]
 }
 
-/** The set does not cross the plane: why, in a sentence. */
+/** The set does not cross the plane: why, in a sentence; null where it stands elsewhere and nobody would ask. */
 export interface NoCrossing {
-  readonly reason: string
+  readonly reason: string | null
 }
 
 /** Where the bars of a set cross a longitudinal plane through the anchor's axis. */
@@ -139,7 +139,7 @@ function hairpinCrossings(shape: HairpinShape, plane: Plane, place: CountPlace):
 function edgeBarCrossings(shape: EdgeBarsShape, { chainage, setBack, breaks }: CountPlace): Crossings | NoCrossing {
   const from = Math.max(shape.from, ...breaks.filter((at) => at <= chainage))
   const to = Math.min(shape.to, ...breaks.filter((at) => at > chainage))
-  if (chainage <= from || chainage >= to) return { reason: 'These edge bars do not pass the anchor.' }
+  if (chainage <= from || chainage >= to) return { reason: null }
   const at = (k: number) => shape.first + k * shape.pitch - setBack
   return {
     noun: ['edge bar', 'edge bars'],
