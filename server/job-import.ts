@@ -3,7 +3,7 @@ import { EDITABLE_TABLES, layoutProblems, type LayoutFile } from '@wedgeline/con
 import { write, type Connection } from '../db/client'
 import { checkPours } from './checking'
 import { forbidden, refused } from './failure'
-import { stampOf, type CompanyCall } from './job-call'
+import { stampOf, type StoringCall } from './job-call'
 import { assertFactors, assertTimeZone } from './jobs'
 import { renewIds, type KnownIds } from './layout-ids'
 import { recordAudit } from './stores/audit'
@@ -33,7 +33,7 @@ export interface Imported {
  * name and content are used; others are added to it.
  * @throws Failure for a layout that contradicts itself, and for factors that are not the caller's to set.
  */
-export function importLayout(ctx: CompanyCall, file: LayoutFile): Imported {
+export function importLayout(ctx: StoringCall, file: LayoutFile): Imported {
   const { db, company, person } = ctx
   const problem = layoutProblems(file).find(({ severity }) => severity === 'refused')
   if (problem) throw refused(`${problem.field}: ${problem.message}.`, problem.field)
@@ -66,7 +66,7 @@ export function importLayout(ctx: CompanyCall, file: LayoutFile): Imported {
 }
 
 /** What only an engineer may say of a job comes in with an engineer alone. */
-function permitted({ company }: CompanyCall, file: LayoutFile): { layout: LayoutFile; leftOut: string[] } {
+function permitted({ company }: StoringCall, file: LayoutFile): { layout: LayoutFile; leftOut: string[] } {
   const { job, pours } = file
   if (company.roles.includes('engineer')) return { layout: file, leftOut: [] }
   if (job.factors.length > 0 || job.settings.wedgeSpreadDeg !== null) {
