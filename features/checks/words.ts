@@ -1,4 +1,4 @@
-import type { Check, Compared, Status, ZoneResult } from '@wedgeline/engine'
+import type { Check, Clause, Compared, Family, Status, ZoneResult } from '@wedgeline/engine'
 
 /** How checks read on screen; the same words everywhere. */
 
@@ -62,8 +62,6 @@ export function checkWords(check: Exclude<Check, { readonly kind: 'advice' }>): 
   return check.compares === 'ratio' ? `${check.name} ${outcome}` : `${check.name}, ${outcome}`
 }
 
-export const LIMIT_WORDS = { C: 'code', H: 'hardware', P: 'common practice' } as const
-
 export const TAG_WORDS = {
   read: '',
   digest: 'read in a digest',
@@ -74,3 +72,36 @@ export const TAG_WORDS = {
   computed: 'computed',
   practice: 'common practice',
 } as const
+
+/** A clause with how sure we are of it, where that has to be said: EN 1992-1-1, 6.5.3 (read in a digest). */
+export function clauseText({ source, section, tag }: Clause): string {
+  const sure = TAG_WORDS[tag]
+  return `${source}, ${section}${sure ? ` (${sure})` : ''}`
+}
+
+/** Families of checks as people call them. */
+export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
+  bearing: 'bearing',
+  'bursting-thickness': 'bursting in the thickness',
+  'bursting-plan': 'bursting in plan',
+  spalling: 'spalling and edge tension',
+  'depth-change': 'depth change',
+  cover: 'cover to the anchor',
+  spacing: 'spacing and edge distance',
+  'straight-length': 'straight length',
+  'edge-wedge': 'edge wedge',
+  joint: 'construction joint',
+  'pan-access': 'pan access',
+  'pan-bars': 'pan bars',
+  tendon: 'tendon',
+  'dead-end': 'dead end',
+  precompression: 'precompression',
+  fit: 'steel fits',
+  anchorage: 'anchorage and laps',
+}
+
+/** What this version does not check at a zone, as one sentence; null where nothing is left. */
+export function notYetText(families: readonly Family[]): string | null {
+  if (families.length === 0) return null
+  return `Not yet checked here: ${families.map((family) => FAMILY_WORDS[family]).join(', ')}.`
+}
