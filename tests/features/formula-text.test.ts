@@ -2,9 +2,7 @@ import { expect, test } from 'vitest'
 import { figureText, formulaParts, putIn, symbolPart } from '@/features/calculation/formula-text'
 
 test('numbers stand where the names stood', () => {
-  expect(putIn('0.25 * F * (b - a) / b', { F: 706560, a: 220, b: 1500 })).toBe(
-    '0.25 × 706560 × (1500 − 220) / 1500',
-  )
+  expect(putIn('0.25 * F * (b - a) / b', { F: 706560, a: 220, b: 1500 })).toBe('0.25 × 706560 × (1500 − 220) / 1500')
 })
 
 test('a name is replaced whole, not where it is part of another', () => {

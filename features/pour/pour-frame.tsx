@@ -1,0 +1,103 @@
+import type { PourData } from '@wedgeline/contract'
+import type { Status } from '@wedgeline/engine'
+import type { ReactNode } from 'react'
+import { Failed } from '@/components/ui/states'
+import { NavBar } from '@/components/ui/nav-bar'
+import { Screen } from '@/components/ui/screen'
+import { StatusMark } from '@/components/ui/status-mark'
+import { Text } from '@/components/ui/text'
+import { useJobDraft, type JobDraft } from '../editing/job-draft'
+import { SHOWN_COUNTS } from './counts'
+
+export type PourPage = 'plan' | 'zones' | 'schedule'
+
+export interface PourFrameProps {
+  readonly pourId: string
+  readonly page: PourPage
+  readonly counts?: Readonly<Record<Status, number>> | undefined
+  readonly actions?: ReactNode
+  readonly children: (pour: PourData) => ReactNode
+}
+
+const PAGE_WORDS: Readonly<Record<PourPage, string>> = { plan: '', zones: ', zones', schedule: ', bar schedule' }
+
+/** What the pages of one pour have in common: its name, how it stands, its own bar, and that it is there at all. */
+export function PourFrame({ pourId, page, counts, actions, children }: PourFrameProps) {
+  const job = useJobDraft()
+  const { jobId, layout } = job
+  const pour = layout.pours.find(({ id }) => id === pourId)
+  const parents = jobParents(job)
+  if (!pour) {
+    return (
+      <Screen title="Pour" parents={parents}>
+        <Failed
+          what="This pour is not in the job."
+          advice="It may have been removed, or an undo took it back. Go to the job and pick another."
+        />
+      </Screen>
+    )
+  }
+  const base = `/jobs/${jobId}/pours/${pourId}` as const
+  return (
+    <Screen
+      title={`Pour ${pour.mark}${PAGE_WORDS[page]}`}
+      parents={page === 'plan' ? parents : [...parents, { label: `Pour ${pour.mark}`, href: base }]}
+      summary={<Summary counts={counts} save={saveText(job)} />}
+      actions={actions}
+      nav={
+        <NavBar
+          label={`Pages of pour ${pour.mark}`}
+          items={[
+            { href: base, label: 'Plan', isHere: page === 'plan' },
+            { href: `${base}/zones`, label: 'Zones', isHere: page === 'zones' },
+            { href: `${base}/schedule`, label: 'Schedule', isHere: page === 'schedule' },
+          ]}
+        />
+      }
+    >
+      {children(pour)}
+    </Screen>
+  )
+}
+
+/** The pages above every page of a job's pours. */
+export const jobParents = ({ jobId, layout }: Pick<JobDraft, 'jobId' | 'layout'>) =>
+  [{ label: layout.job.title, href: `/jobs/${jobId}` }] as const
+
+function Summary(props: { readonly counts: Readonly<Record<Status, number>> | undefined; readonly save: string }) {
+  const { counts, save } = props
+  return (
+    <>
+      {counts
+        ? SHOWN_COUNTS.filter((status) => counts[status] > 0).map((status) => (
+            <StatusMark key={status} status={status} words={`${counts[status]} ${STATUS_AFTER_COUNT[status]}`} />
+          ))
+        : null}
+      <Text kind="small" tone="soft">
+        {save}
+      </Text>
+    </>
+  )
+}
+
+/** How a status reads after a number: 2 over, 1 to judge. */
+export const STATUS_AFTER_COUNT: Readonly<Record<Status, string>> = {
+  stop: 'to stop for',
+  'not-covered': 'not covered',
+  over: 'over',
+  'needs-judgement': 'needs judgement',
+  near: 'near',
+  within: 'within',
+}
+
+const SAVE_WORDS: Readonly<Record<JobDraft['save'], string>> = {
+  saved: 'Draft, saved',
+  saving: 'Draft, saving …',
+  unsaved: 'Draft, not saved yet',
+  'not-sent': 'Draft, kept on this device until the server answers',
+  conflict: 'Draft, changed by somebody else as well',
+  refused: 'Draft, not saved',
+}
+
+const saveText = ({ save, problem }: JobDraft): string =>
+  save === 'refused' && problem !== null ? `${SAVE_WORDS.refused}: ${problem}` : SAVE_WORDS[save]
