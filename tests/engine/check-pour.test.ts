@@ -167,6 +167,30 @@ describe('Force while jacking: at most min(0.8 Fpk, 0.9 Fp0.1k) (EN 1992-1-1 5.1
   })
 })
 
+describe('An anchor whose centre is outside the concrete', () => {
+  test.each([
+    { where: 'below the soffit', middle: { height: -1 }, field: 'height' },
+    { where: 'on the soffit', middle: { height: 0 }, field: 'height' },
+    { where: 'above the top', middle: { height: 300 }, field: 'height' },
+    { where: 'before the edge', middle: { chainage: -900 }, field: 'chainage' },
+    { where: 'beyond the edge', middle: { chainage: 25_000 }, field: 'chainage' },
+  ])('$where: no rule gives a result', ({ middle, field }) => {
+    for (const hardwareId of ['K4', 'S4A']) {
+      const checks = checksAt(row(hardwareId, { middle })).filter(({ family }) =>
+        ['bearing', 'bursting-thickness', 'bursting-plan'].includes(family),
+      )
+      expect(checks).toHaveLength(4)
+      for (const check of checks) expect(check).toMatchObject({ status: 'not-covered', code: 'OUTSIDE_METHOD', field })
+    }
+  })
+})
+
+test('a live anchor on a bonded dead end gets no result by rules for plates', () => {
+  const checks = checksAt(row('D4')).filter(({ family }) => family === 'bearing' || family === 'bursting-plan')
+  expect(checks).toHaveLength(3)
+  for (const check of checks) expect(check).toMatchObject({ code: 'OUTSIDE_METHOD', field: 'hardwareId' })
+})
+
 test('a tendon jacked too high is mended by the ratio that would just do', () => {
   const given = row('S4')
   const tendons = given.tendons.map((tendon) => ({ ...tendon, jackingRatio: 0.85 }))

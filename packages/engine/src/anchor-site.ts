@@ -85,6 +85,21 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
 /** Distance to the nearer of soffit and top. */
 export const nearerFace = ({ toTop, toSoffit }: AnchorSite): number => Math.min(toTop, toSoffit)
 
+/** Why no rule for a plate holds: another kind of hardware, or a centre that is not in the concrete; null where one may. */
+export function whyNoRule(site: AnchorSite): { readonly field: string; readonly message: string } | null {
+  const { anchor, frame, hardware, top, soffit } = site
+  if (hardware.kind !== 'plate') {
+    return { field: 'hardwareId', message: `${hardware.name} is a bonded dead end; a live anchor needs a plate.` }
+  }
+  if (nearerFace(site) <= 0) {
+    const message = `The centre at height ${anchor.height} is not between soffit (${soffit}) and top (${top}).`
+    return { field: 'height', message }
+  }
+  if (anchor.chainage > frame.from && anchor.chainage < frame.to) return null
+  const message = `Chainage ${anchor.chainage} is not on the edge, which runs from ${frame.from} to ${frame.to}.`
+  return { field: 'chainage', message }
+}
+
 /** At a re-entrant or straight corner of the outline the slab goes on past the end of the edge. */
 function openEnds(edge: Edge, pour: Pour, frame: EdgeFrame): { start: boolean; end: boolean } {
   const at = pour.outline.findIndex(({ id }) => id === edge.cornerId)

@@ -1,6 +1,6 @@
 /** Bearing behind the plate of a live anchor, at every stage of stressing. */
 
-import { nearerFace, type AnchorSite } from '../anchor-site'
+import { nearerFace, whyNoRule, type AnchorSite } from '../anchor-site'
 import type { BearingRule } from '../bases/basis'
 import { jackingForce, stageForce } from '../force'
 import { approvalLine, hardwareClause } from '../hardware-distances'
@@ -12,8 +12,11 @@ import { atLeast, byRatio, refusal, type CheckContext, type Head } from './outco
 
 /** One check a stage. Hardware with an approval answers to the approval alone; a plate without one to the basis. */
 export function checkBearing(site: AnchorSite, context: CheckContext): Check[] {
+  const outside = whyNoRule(site)
   return site.pour.stages.map((stage) => {
     const { approval } = site.hardware
+    if (outside)
+      return refusal(headOf(site, stage, context.basis.clauses.bearing), { code: 'OUTSIDE_METHOD', ...outside })
     return approval === null
       ? bearingByFormula(site, stage, context)
       : bearingByApproval({ site, stage, context, approval })

@@ -1,6 +1,6 @@
 /** Bursting behind a live anchor, in the thickness and in plan: steel asked for against steel counted in the window. */
 
-import type { AnchorSite } from '../anchor-site'
+import { whyNoRule, type AnchorSite } from '../anchor-site'
 import type { TieRule } from '../bases/basis'
 import type { CloseGroup } from '../close-anchors'
 import { jackingForce, stageForce } from '../force'
@@ -36,6 +36,8 @@ interface Asked {
 export function checkBurstingThickness(site: AnchorSite, context: CheckContext, close: readonly CloseGroup[]): Check {
   const head = headOf(site, 'thickness', context)
   const depth = site.top - site.soffit
+  const outside = whyNoRule(site)
+  if (outside) return refusal(head, { code: 'OUTSIDE_METHOD', ...outside })
   const group = groupOf(site, head, close)
   if (group) return actsAsOne(site, { head, group, context })
   const change = sectionStepNear(site, depth)
@@ -55,6 +57,8 @@ export function checkBurstingThickness(site: AnchorSite, context: CheckContext, 
 /** Bursting in plan; refused where anchors act as one. */
 export function checkBurstingPlan(site: AnchorSite, context: CheckContext, close: readonly CloseGroup[]): Check {
   const head = headOf(site, 'plan', context)
+  const outside = whyNoRule(site)
+  if (outside) return refusal(head, { code: 'OUTSIDE_METHOD', ...outside })
   const group = groupOf(site, head, close)
   if (group) return actsAsOne(site, { head, group, context })
   if (Math.abs(site.anchor.skew) > context.basis.inclinationMax.value) {
