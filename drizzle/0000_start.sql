@@ -112,13 +112,15 @@ CREATE TABLE `batch` (
 	`id` text NOT NULL,
 	`person_id` text NOT NULL,
 	`payload_hash` text NOT NULL,
-	`answer` text NOT NULL,
+	`versions` text NOT NULL,
+	`pour_ids` text NOT NULL,
 	`change_number` integer NOT NULL,
 	`at_ms` integer NOT NULL,
 	PRIMARY KEY(`company_id`, `id`),
 	FOREIGN KEY (`person_id`) REFERENCES `person`(`id`) ON UPDATE no action ON DELETE restrict,
 	FOREIGN KEY (`company_id`,`job_id`) REFERENCES `job`(`company_id`,`id`) ON UPDATE no action ON DELETE no action,
-	CONSTRAINT "batch_answer_json" CHECK(json_valid("batch"."answer"))
+	CONSTRAINT "batch_versions_json" CHECK(json_valid("batch"."versions")),
+	CONSTRAINT "batch_pour_ids_json" CHECK(json_valid("batch"."pour_ids"))
 );
 --> statement-breakpoint
 CREATE UNIQUE INDEX `batch_of_job` ON `batch` (`company_id`,`job_id`,`id`);--> statement-breakpoint

@@ -4,7 +4,7 @@ import type { Connection } from '../db/client'
 import { jobRow } from './stores/job'
 import type { JobKey } from './stores/job-key'
 import { loadLayout } from './stores/layout'
-import { putResult } from './stores/result'
+import { putResult, resultsOf } from './stores/result'
 
 /** What the server found in some pours: what it stores is what counts. */
 export interface Checked {
@@ -24,11 +24,17 @@ export function checkPours(
   const { changeCount: changeNumber } = jobRow(db, key)
   const found = pourIds.map((pourId) => checkPour(input, { pourId, withSteps: false }))
   for (const result of found) putResult(db, { ...key, result, engineVersion: ENGINE_VERSION, changeNumber, atMs })
-  return {
-    results: found.flatMap((result) => result.zones),
-    counts: Object.fromEntries(found.map((result) => [result.pourId, result.counts])),
-  }
+  return toChecked(found)
 }
+
+/** What was found last in some pours. */
+export const latestResults = (db: Connection, key: JobKey, pourIds: readonly string[]): Checked =>
+  toChecked(resultsOf(db, key, pourIds))
+
+const toChecked = (found: readonly Pick<PourResult, 'pourId' | 'zones' | 'counts'>[]): Checked => ({
+  results: found.flatMap((result) => result.zones),
+  counts: Object.fromEntries(found.map((result) => [result.pourId, result.counts])),
+})
 
 /** Checks a whole job again: after a change of its basis, its readings or its company's hardware. */
 export function recheckJob(db: Connection, key: JobKey, atMs: number): void {

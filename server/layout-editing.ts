@@ -12,11 +12,11 @@ import {
   type Problem,
 } from '@wedgeline/contract'
 import { write, type Connection } from '../db/client'
-import { checkPours, type Checked } from './checking'
+import { checkPours, latestResults, type Checked } from './checking'
 import { conflict, forbidden, refused } from './failure'
 import { changesOf, conflictsOf, type RowChange } from './layout-changes'
 import { changesSince, recordAudit } from './stores/audit'
-import { batchById, insertBatch } from './stores/batch'
+import { batchById, insertBatch, type StoredBatch } from './stores/batch'
 import { jobRow } from './stores/job'
 import type { JobKey } from './stores/job-key'
 import { loadLayout, loadVersions, type Versions } from './stores/layout'
@@ -42,12 +42,8 @@ export function applyBatch(ctx: JobCall, batch: Batch): BatchAnswer {
   return storing(() =>
     write(db, (tx) => {
       const known = batchById(tx, { companyId: key.companyId, id: batch.id })
-      if (known) {
-        if (known.personId === person.id && known.payloadHash === payloadHash) return JSON.parse(known.answer) as BatchAnswer
-        throw conflict(
-          'A change with this id was stored before and it was another one. Give each change an id of its own.',
-        )
-      }
+      if (known)
+        return answerAgain(tx, { known, isSame: known.personId === person.id && known.payloadHash === payloadHash })
       const stamp = stampOf(ctx)
       const { before, applied } = applyToday(tx, key, batch)
       assertSpareShare(ctx, before, applied.layout)
@@ -55,17 +51,23 @@ export function applyBatch(ctx: JobCall, batch: Batch): BatchAnswer {
       const changeNumber = jobRow(tx, key).changeCount + 1
       const { layout: after, units } = applied
       storeChange(tx, { ...key, before, after, units, changeNumber, stamp })
-      const changes = changesOf(before, after)
-      recordAudit(tx, { ...key, ...stamp, what: 'layout.applyBatch', ...changes, changeNumber })
+      recordAudit(tx, { ...key, ...stamp, what: 'layout.applyBatch', ...changesOf(before, after), changeNumber })
       const pourIds = touchedPours(before, after, units)
       const checked = checkPours(tx, key, { layout: after, pourIds, atMs: stamp.atMs })
       const today = loadVersions(tx, key)
       const versions = Object.fromEntries(units.map((unit) => [unit, today[unit] ?? 0]))
-      const answer: BatchAnswer = { versions, ...checked }
-      insertBatch(tx, { ...key, ...stamp, id: batch.id, payloadHash, answer: JSON.stringify(answer), changeNumber })
-      return answer
+      insertBatch(tx, { ...key, ...stamp, id: batch.id, payloadHash, versions, pourIds, changeNumber })
+      return { versions, ...checked }
     }),
   )
+}
+
+/** A reply that got lost on its way is asked for again: the versions of then, and the latest results. */
+function answerAgain(db: Connection, { known, isSame }: { known: StoredBatch; isSame: boolean }): BatchAnswer {
+  if (!isSame) {
+    throw conflict('A change with this id was stored before and it was another one. Give each change an id of its own.')
+  }
+  return { versions: known.versions, ...latestResults(db, known, known.pourIds) }
 }
 
 /** The batch on today's layout, when its sender saw today's version of everything that it touches. */

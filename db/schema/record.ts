@@ -7,7 +7,10 @@ import { jobKeys, layoutKeys } from './job-rows'
 import { company, person } from './person'
 import { pour } from './pour'
 
-/** A batch of commands that was stored, with the answer that its sender got, so that a repeat gets the same one. */
+/**
+ * A batch of commands that was stored, with what its sender was answered, so that a repeat gets the same. Results are
+ * not kept with it: they would be most of the database, and the latest ones of each pour are what counts.
+ */
 export const batch = sqliteTable(
   'batch',
   {
@@ -16,11 +19,16 @@ export const batch = sqliteTable(
       .notNull()
       .references(() => person.id, { onDelete: 'restrict' }),
     payloadHash: text('payload_hash').notNull(),
-    answer: text('answer').notNull(),
+    versions: text('versions', { mode: 'json' }).$type<Record<string, number>>().notNull(),
+    pourIds: text('pour_ids', { mode: 'json' }).$type<string[]>().notNull(),
     changeNumber: integer('change_number').notNull(),
     atMs: integer('at_ms').notNull(),
   },
-  (t) => [...layoutKeys('batch', t), isJson('batch_answer_json', t.answer)],
+  (t) => [
+    ...layoutKeys('batch', t),
+    isJson('batch_versions_json', t.versions),
+    isJson('batch_pour_ids_json', t.pourIds),
+  ],
 )
 
 /** Who did what and when, with what was there before and after. Rows are added, never changed or deleted. */

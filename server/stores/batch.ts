@@ -8,8 +8,10 @@ export interface StoredBatch extends JobKey {
   readonly personId: string
   /** SHA-256 of the batch as it was sent. */
   readonly payloadHash: string
-  /** The answer as JSON text. */
-  readonly answer: string
+  /** Version of each unit that it touched, once it was stored. */
+  readonly versions: Readonly<Record<string, number>>
+  /** Pours that were checked again for it. */
+  readonly pourIds: readonly string[]
   readonly changeNumber: number
   readonly atMs: number
 }
@@ -25,5 +27,7 @@ export const batchById = (
     .get()
 
 export function insertBatch(db: Connection, row: StoredBatch): void {
-  db.insert(batch).values(row).run()
+  db.insert(batch)
+    .values({ ...row, pourIds: [...row.pourIds] })
+    .run()
 }

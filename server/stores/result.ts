@@ -1,8 +1,8 @@
-import { and, count, eq } from 'drizzle-orm'
+import { and, count, eq, inArray } from 'drizzle-orm'
 import type { PourResult } from '@wedgeline/engine'
 import type { Connection } from '../../db/client'
 import { acceptedReading, anchor, hardware, jobMember, pan, pour, pourResult, tendon } from '../../db/schema'
-import type { JobKey } from './job-key'
+import { ofJob, type JobKey } from './job-key'
 
 export interface StoredResult extends JobKey {
   /** Without steps: they are computed when somebody opens a calculation. */
@@ -19,6 +19,16 @@ export function putResult(db: Connection, { companyId, jobId, result, ...rest }:
     .values({ companyId, jobId, pourId: result.pourId, ...row })
     .onConflictDoUpdate({ target: [pourResult.companyId, pourResult.jobId, pourResult.pourId], set: row })
     .run()
+}
+
+/** Latest results of some pours of a job, in the order in which the pours are named; a pour without any is left out. */
+export function resultsOf(db: Connection, key: JobKey, pourIds: readonly string[]) {
+  const rows = db
+    .select({ pourId: pourResult.pourId, zones: pourResult.results, counts: pourResult.counts })
+    .from(pourResult)
+    .where(and(ofJob(pourResult, key), inArray(pourResult.pourId, [...pourIds])))
+    .all()
+  return pourIds.flatMap((pourId) => rows.find((row) => row.pourId === pourId) ?? [])
 }
 
 function readingIdsOf({ zones }: PourResult): string[] {
