@@ -22,18 +22,14 @@ export const serverLog = ({ level, stream }: { level: string; stream?: Destinati
 export const requestLog = (log: Logger) =>
   pinoHttp<IncomingMessage, ServerResponse>({
     logger: log,
-    serializers: { req: requestOf, res: ({ statusCode }: { statusCode: number }) => ({ statusCode }) },
+    // What went wrong was logged where it was caught.
+    serializers: { req: requestOf, res: responseOf, err: () => undefined },
     wrapSerializers: false,
     customLogLevel: (_request, { statusCode }) => (statusCode >= 500 ? 'error' : 'info'),
-    // What went wrong was logged where it was caught.
-    customErrorObject: (request, response, _error, { responseTime }: { responseTime?: number }) => ({
-      req: request,
-      res: response,
-      responseTime,
-    }),
     autoLogging: { ignore: ({ url }) => url === '/healthz' || url === '/readyz' },
   })
 
+const responseOf = ({ statusCode }: { statusCode: number }) => ({ statusCode })
 const requestOf = ({ id, method, url = '' }: IncomingMessage) => ({ id, method, path: pathOf(url) })
 
 /** Without the query, which holds a procedure's input, and without the token of an invitation. */

@@ -1,12 +1,11 @@
 import { beforeEach, describe, expect, test } from 'vitest'
 import { COMMON_PASSWORDS } from '@/server/common-passwords-table'
-import { firstInvitationLink } from '@/server/invite'
 import { isObvious } from '@/server/password'
 import { companiesOf, credentialsByEmail } from '@/server/stores/person'
 import { invitation } from '@/db/schema/membership'
 import { audit } from '@/db/schema/record'
 import { openDatabase } from '@/db/client'
-import { acceptInvitation, invitationByToken } from '@/server/invite'
+import { acceptInvitation, firstInvitationLink, invitationByToken } from '@/server/invite'
 import { contextFor } from './context'
 import { PASSWORD, addPerson, get, openTestServer, post, query, setCookieOf, type TestServer } from './server'
 
@@ -25,8 +24,8 @@ const INVITED = { email: 'new@north.example', name: 'New Person', roles: ['draft
 async function invite(changes: Record<string, unknown> = {}): Promise<{ id: string; link: string; token: string }> {
   const input = { companyId: 'north', ...INVITED, ...changes }
   const { body } = await post(server, 'invitation.create', { cookie: admin }).send(input).expect(200)
-  const { id, link } = body.result.data
-  return { id, link, token: link.split('/').at(-1) }
+  const { id, link } = body.result.data as { id: string; link: string }
+  return { id, link, token: link.split('/').at(-1) ?? '' }
 }
 const accept = (token: string, password = PASSWORD) =>
   post(server, 'invitation.accept').send({ token, name: 'New Person', password })
