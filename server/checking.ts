@@ -1,10 +1,10 @@
 import { ENGINE_VERSION, toEngine, type LayoutFile } from '@wedgeline/contract'
 import { checkPour, type PourResult, type ZoneResult } from '@wedgeline/engine'
-import type { Connection } from '../db/client'
+import { write, type Connection, type Db } from '../db/client'
 import { jobRow } from './stores/job'
 import type { JobKey } from './stores/job-key'
 import { loadLayout } from './stores/layout'
-import { putResult, resultsOf } from './stores/result'
+import { jobsNotCheckedBy, putResult, resultsOf } from './stores/result'
 
 /** What the server found in some pours: what it stores is what counts. */
 export interface Checked {
@@ -40,4 +40,18 @@ const toChecked = (found: readonly Pick<PourResult, 'pourId' | 'zones' | 'counts
 export function recheckJob(db: Connection, key: JobKey, atMs: number): void {
   const layout = loadLayout(db, key)
   checkPours(db, key, { layout, pourIds: layout.pours.map(({ id }) => id), atMs })
+}
+
+/**
+ * Checks every job again that holds results of another engine than this one, each in a transaction of its own.
+ * @param onFailure told of a job that could not be checked; its old results stay, with the version that made them.
+ */
+export function recheckOutdated(db: Db, atMs: number, onFailure: (key: JobKey, error: unknown) => void): void {
+  for (const key of jobsNotCheckedBy(db, ENGINE_VERSION)) {
+    try {
+      write(db, (tx) => recheckJob(tx, key, atMs))
+    } catch (error) {
+      onFailure(key, error)
+    }
+  }
 }

@@ -1,4 +1,4 @@
-import type { HardwareData, JackData, StrandTypeData } from '@wedgeline/contract'
+import { fieldOf, hardwareProblems, type HardwareData, type JackData, type StrandTypeData } from '@wedgeline/contract'
 import { write, type Connection } from '../db/client'
 import { recheckJob } from './checking'
 import { refused } from './failure'
@@ -18,6 +18,7 @@ import { storing } from './storing'
 /** Storing what the company presses and bears on; every job that uses it is checked again. */
 
 export function saveHardware(ctx: CompanyCall, hardware: HardwareData): void {
+  assertSound('hardware', { hardware: [hardware], strandTypes: [] })
   save(ctx, {
     what: 'hardware.save',
     after: hardware,
@@ -42,12 +43,21 @@ export function saveJack(ctx: CompanyCall, jack: JackData): void {
 }
 
 export function saveStrandType(ctx: CompanyCall, strandType: StrandTypeData): void {
+  assertSound('strandType', { hardware: [], strandTypes: [strandType] })
   save(ctx, {
     what: 'hardware.saveStrandType',
     after: strandType,
     find: (company) => company.strandTypes.find(({ id }) => id === strandType.id),
     put: (tx, stamp) => putStrandType(tx, strandType, stamp),
   })
+}
+
+/** @throws Failure with the field when sizes contradict one another; `input` is what the form calls the row. */
+function assertSound(input: string, rows: Parameters<typeof hardwareProblems>[0]): void {
+  const problem = hardwareProblems(rows).find(({ severity }) => severity === 'refused')
+  if (!problem) return
+  const field = fieldOf([input, ...problem.path.slice(2)])
+  throw refused(`${field}: ${problem.message}.`, field)
 }
 
 interface Saving {

@@ -4,6 +4,7 @@ import { dirname } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { openDatabase, type Db } from '../db/client'
 import { buildApp } from './app'
+import { recheckOutdated } from './checking'
 import { readSettings, type Settings } from './env'
 import { localFiles } from './files/local-files'
 import { firstInvitationLink } from './invite'
@@ -29,6 +30,9 @@ const settings = (() => {
 const log = serverLog({ level: settings.logLevel })
 mkdirSync(dirname(settings.databasePath), { recursive: true, mode: 0o700 })
 const db = openDatabase(settings.databasePath)
+recheckOutdated(db, Date.now(), (key, error) =>
+  log.error({ event: 'recheck', ...key, err: error }, 'A job was not checked again'),
+)
 const appUrl = settings.publicUrl ?? `http://localhost:${settings.port}`
 const app = buildApp({
   db,

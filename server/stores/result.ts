@@ -1,4 +1,4 @@
-import { and, count, eq, inArray } from 'drizzle-orm'
+import { and, count, eq, inArray, ne } from 'drizzle-orm'
 import type { PourResult } from '@wedgeline/engine'
 import type { Connection } from '../../db/client'
 import { acceptedReading, anchor, hardware, jobMember, pan, pour, pourResult, tendon } from '../../db/schema'
@@ -83,6 +83,14 @@ export const acceptedReadingIds = (db: Connection, personId: string): ReadonlySe
       .all()
       .map(({ jobId, readingId }) => `${jobId} ${readingId}`),
   )
+
+/** Jobs that hold results of another version of the engine. */
+export const jobsNotCheckedBy = (db: Connection, engineVersion: string): JobKey[] =>
+  db
+    .selectDistinct({ companyId: pourResult.companyId, jobId: pourResult.jobId })
+    .from(pourResult)
+    .where(ne(pourResult.engineVersion, engineVersion))
+    .all()
 
 /** Jobs of a company that press or bear on one of its hardware, jacks or strand types. */
 export function jobsUsing(db: Connection, companyId: string, id: string): string[] {

@@ -1,6 +1,7 @@
 import { beforeEach, describe, expect, test } from 'vitest'
 import { v7 as uuidv7 } from 'uuid'
-import { applyCommands, jobSettingsSchema, type Command } from '@wedgeline/contract'
+import { ENGINE_VERSION, applyCommands, jobSettingsSchema, type Command } from '@wedgeline/contract'
+import { recheckOutdated } from '@/server/checking'
 import { addCompany, openTestCompany, type Caller, type TestCompany } from './company'
 import { sampleLayout } from './layout-sample'
 
@@ -108,6 +109,19 @@ describe('a job', () => {
   })
 })
 
+describe('results of an older engine', () => {
+  test('are made again at the start', async () => {
+    await importSample()
+    const sql = company.db.$client
+    sql.exec(`update pour_result set engine_version = '0.0.0+old', counts = '{}'`)
+    const failures: unknown[] = []
+    recheckOutdated(company.db, 1, (_key, error) => failures.push(error))
+    expect(failures).toEqual([])
+    expect(sql.prepare('select engine_version from pour_result').pluck().all()).toEqual([ENGINE_VERSION])
+    expect((await detailer.job.list())[0]?.pours[0]?.counts).toHaveProperty('over')
+  })
+})
+
 describe('a reading', () => {
   test('is accepted once by an engineer in their name, and withdrawn', async () => {
     const jobId = await importSample()
@@ -145,6 +159,24 @@ describe('hardware', () => {
     const changed = { ...plate, approval: null, hole: null, pocket: null, drawInMm: 5 }
     await admin.hardware.save({ companyId, hardware: changed })
     expect((await detailer.hardware.list({ companyId })).hardware).toEqual([changed])
+  })
+
+  test('whose sizes contradict one another is refused with the field', async () => {
+    const { id: companyId } = company
+    const [plate] = sampleLayout().hardware
+    const [strandType] = sampleLayout().strandTypes
+    if (!plate || !strandType) throw new Error('the sample has one of each')
+    const messageOf = (call: Promise<unknown>) =>
+      call.then(
+        () => '',
+        (error: unknown) => (error as Error).message,
+      )
+    // The plate is 220 mm wide: a hole of 220 mm leaves nothing of it.
+    const hole = { widthMm: 220, heightMm: 20, isRound: false }
+    const wide = admin.hardware.save({ companyId, hardware: { ...plate, jackId: null, hole } })
+    expect(await messageOf(wide)).toContain('hardware.hole.widthMm')
+    const weak = admin.hardware.saveStrandType({ companyId, strandType: { ...strandType, proofLoadKN: 279 } })
+    expect(await messageOf(weak)).toContain('strandType.proofLoadKN')
   })
 
   test('that a job uses is checked again when it changes', async () => {

@@ -102,6 +102,7 @@ export {
   LENGTH_GAP_MAX_MM,
   OFF_LINE_MAX_MM,
   fieldOf,
+  hardwareProblems,
   layoutProblems,
   type Path,
   type Problem,

@@ -10,6 +10,7 @@ import { steelProblems } from './problems/steel'
 import { stopProblems } from './problems/stops'
 
 export { fieldOf, type Path, type Problem, type Severity } from './problems/problem'
+export { hardwareProblems } from './problems/hardware'
 export { LENGTH_GAP_MAX_MM, OFF_LINE_MAX_MM } from './problems/edges'
 
 /**

@@ -2,7 +2,7 @@ import type { HardwareData, LayoutFile, SteelShapeData } from '../layout'
 import { mm, refused, type Path, type Problem } from './problem'
 
 /** Sizes of hardware that contradict one another, approvals that do not grow, and strands. */
-export function hardwareProblems(layout: LayoutFile): Problem[] {
+export function hardwareProblems(layout: Pick<LayoutFile, 'hardware' | 'strandTypes'>): Problem[] {
   return [
     ...layout.hardware.flatMap((row, i) => problemsOf(row, ['hardware', i])),
     ...layout.strandTypes.flatMap(({ proofLoadKN, breakingLoadKN }, i) =>
