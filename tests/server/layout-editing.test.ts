@@ -302,14 +302,27 @@ describe('undo', () => {
   }
 })
 
+describe('two servers on one database', () => {
+  test('see what the other stored, and a stale batch is stale on either', async () => {
+    await inFolder(async (path) => {
+      const there = companyOn(openDatabase(path), company.id)
+      try {
+        const seen = await load()
+        const { id, edgeId } = first(seen.layout.anchors)
+        await there.as('detailer').layout.applyBatch(batchOf(seen, [setAnchor(id, { heightMm: 118 })]))
+        const late = await failure(detailer.layout.applyBatch(batchOf(seen, [setAnchor(id, { heightMm: 119 })])))
+        expect(late?.details.conflicts).toEqual([{ table: 'anchors', id, field: 'heightMm', mine: 119, theirs: 118 }])
+        expect((await load()).versions[`edge:${edgeId}`]).toBeGreaterThan(seen.versions[`edge:${edgeId}`] ?? 0)
+      } finally {
+        there.db.$client.close()
+      }
+    })
+  })
+})
+
 describe('a restart', () => {
   test('keeps every row, version and result', async () => {
-    const folder = mkdtempSync(join(tmpdir(), 'wedgeline-'))
-    const path = join(folder, 'data.sqlite')
-    try {
-      company = openTestCompany(path)
-      detailer = company.as('detailer')
-      jobId = (await detailer.job.importLayout({ companyId: company.id, layout: sampleLayout() })).jobId
+    await inFolder(async (path) => {
       const seen = await load()
       await detailer.layout.applyBatch(batchOf(seen, [setAnchor(first(seen.layout.anchors).id, { heightMm: 117 })]))
       const before = [await load(), await detailer.job.list(), await detailer.audit.list({ jobId })]
@@ -317,9 +330,21 @@ describe('a restart', () => {
       company = companyOn(openDatabase(path), company.id)
       detailer = company.as('detailer')
       expect([await load(), await detailer.job.list(), await detailer.audit.list({ jobId })]).toEqual(before)
-    } finally {
-      company.db.$client.close()
-      rmSync(folder, { recursive: true })
-    }
+    })
   })
 })
+
+/** Runs `work` with the sample in a database that lies in a file, and takes the file away afterwards. */
+async function inFolder(work: (path: string) => Promise<void>): Promise<void> {
+  const folder = mkdtempSync(join(tmpdir(), 'wedgeline-'))
+  const path = join(folder, 'data.sqlite')
+  company = openTestCompany(path)
+  detailer = company.as('detailer')
+  jobId = (await detailer.job.importLayout({ companyId: company.id, layout: sampleLayout() })).jobId
+  try {
+    await work(path)
+  } finally {
+    company.db.$client.close()
+    rmSync(folder, { recursive: true })
+  }
+}
