@@ -83,16 +83,22 @@ function heightStops(
 /** Plates of one edge seen square to it: where two cover one another, one tendon would run into the other's plate. */
 function overlaps(placed: readonly PlacedAnchor[]): Problem[] {
   const rows = new Map<string, PlacedAnchor[]>()
-  for (const one of placed) rows.set(one.edge.id, [...(rows.get(one.edge.id) ?? []), one])
+  for (const one of placed) {
+    const row = rows.get(one.edge.id)
+    if (row) row.push(one)
+    else rows.set(one.edge.id, [one])
+  }
   return [...rows.values()].flatMap(overlapsInRow)
 }
 
 function overlapsInRow(row: readonly PlacedAnchor[]): Problem[] {
   const ordered = [...row].sort((a, b) => a.anchor.chainageMm - b.anchor.chainageMm)
-  const widest = Math.max(...ordered.map(({ plate }) => plate.widthMm))
+  const widest = ordered.reduce((width, { plate }) => Math.max(width, plate.widthMm), 0)
   return ordered.flatMap((one, i) => {
     const problems: Problem[] = []
-    for (const other of ordered.slice(i + 1)) {
+    for (let j = i + 1; j < ordered.length; j++) {
+      const other = ordered[j]
+      if (!other) break
       const apart = other.anchor.chainageMm - one.anchor.chainageMm
       if (apart >= widest) break
       const message = overlapMessage(one, other, apart)
