@@ -3,9 +3,9 @@ import { StyleSheet, View } from 'react-native'
 import { colour, space, useWide } from '@/components/theme'
 import { Icon } from '@/components/ui/icon'
 import { LimitKindBox } from '@/components/ui/limit-kind'
-import { StatusMark } from '@/components/ui/status-mark'
+import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
-import { noteText } from '../checks/family-words'
+import { noteText } from '../checks/zone-words'
 import { clauseText, outcomeText, ratioText, shownQuantity, unitText } from '../checks/words'
 import { Formula } from './formula'
 import { figureText, formulaParts, putIn, symbolPart } from './formula-text'
@@ -96,10 +96,12 @@ function comparedText(check: Extract<Check, { kind: 'compared' }>): string {
   const [demand, limit] = [shownQuantity(check.demand, check.unit), shownQuantity(check.limit, check.unit)]
   const sides =
     check.compares === 'ratio'
-      ? `Asked for ${demand}, there is ${limit}: ${check.utilisation === null ? 'no steel counts' : ratioText(check.utilisation)}`
+      ? `Demand ${demand}, limit ${limit}: ${check.utilisation === null ? 'no steel counts' : ratioText(check.utilisation)}`
       : `There is ${demand}, ${check.compares === 'at-least' ? 'needs' : 'at most'} ${limit}: ${outcomeText(check)}`
   const isWaiting = check.status === 'needs-judgement' && check.readingId !== null
-  return isWaiting ? `${sides}. Needs judgement: the reading it rests on is not accepted` : `${sides}, ${check.status}`
+  return isWaiting
+    ? `${sides}. Needs judgement: the reading it rests on is not accepted`
+    : `${sides}, ${STATUS_WORD[check.status]}`
 }
 
 const styles = StyleSheet.create({

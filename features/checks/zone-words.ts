@@ -1,32 +1,5 @@
 import { BASIS_SOURCES } from '@wedgeline/engine/bases'
-import type { Family, Zone } from '@wedgeline/engine'
-
-/** Families of checks as people say them. */
-export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
-  bearing: 'bearing',
-  'bursting-thickness': 'bursting in the thickness',
-  'bursting-plan': 'bursting in plan',
-  spalling: 'spalling',
-  'depth-change': 'change of depth',
-  cover: 'cover',
-  spacing: 'spacing',
-  'straight-length': 'straight length',
-  'edge-wedge': 'edge wedge',
-  joint: 'joint',
-  'pan-access': 'access to the pan',
-  'pan-bars': 'bars round the pan',
-  tendon: 'tendon',
-  'dead-end': 'dead end',
-  precompression: 'precompression',
-  fit: 'fit of the bars',
-  anchorage: 'anchorage of the bars',
-}
-
-/** `Not yet checked here: spalling, edge wedge.`; null where nothing is missing. */
-export function notYetCheckedText(families: readonly Family[], where = 'here'): string | null {
-  if (families.length === 0) return null
-  return `Not yet checked ${where}: ${families.map((family) => FAMILY_WORDS[family]).join(', ')}.`
-}
+import type { Zone } from '@wedgeline/engine'
 
 /** A reading by the title under which it is accepted. */
 export function readingTitle(readingId: string): string {

@@ -1,0 +1,40 @@
+import { layoutIndex, zonesOfPour } from '@wedgeline/engine/geometry'
+import type { LayoutFile } from '@wedgeline/contract'
+import { toEngine } from '@wedgeline/contract'
+import type { Check, Step, Zone } from '@wedgeline/engine'
+
+export interface ZonePlace {
+  readonly zone: Zone
+  /** Zones before and after it on the same edge, or among those of the pour that stand at no edge. */
+  readonly previous: Zone | null
+  readonly next: Zone | null
+}
+
+/** Looks a zone up among those of every pour; null where it is gone. */
+export function zonePlace(layout: LayoutFile, zoneId: string): ZonePlace | null {
+  const index = layoutIndex(toEngine(layout))
+  for (const pour of layout.pours) {
+    const zones = zonesOfPour(index, pour.id)
+    const zone = zones.find(({ id }) => id === zoneId)
+    if (!zone) continue
+    const row = zones.filter(({ edgeId }) => edgeId === zone.edgeId)
+    const at = row.findIndex(({ id }) => id === zoneId)
+    return { zone, previous: row[at - 1] ?? null, next: row[at + 1] ?? null }
+  }
+  return null
+}
+
+/** Steps that stand word for word further up the sheet: their meaning need not be read twice. */
+export function repeatedSteps(checks: readonly Check[]): ReadonlySet<Step> {
+  const seen = new Set<string>()
+  const repeated = new Set<Step>()
+  for (const check of checks) {
+    if (check.kind !== 'compared') continue
+    for (const step of check.steps) {
+      const line = `${step.symbol}|${step.meaning}|${step.formula}|${step.value}`
+      if (seen.has(line)) repeated.add(step)
+      seen.add(line)
+    }
+  }
+  return repeated
+}
