@@ -13,11 +13,12 @@ import { FaceBand } from './face-band'
 import { Overview } from './overview'
 import { PlanBand } from './plan-band'
 import { heightStretch, scrolled, showing, stripScale, zoomed, type View as StripView } from './scale'
-import { stripData } from './strip-data'
+import type { StripData } from './strip-data'
+import { compass } from './view-words'
 
 export interface EdgeStripProps {
   readonly index: LayoutIndex
-  readonly edgeId: string
+  readonly data: StripData
   readonly results: ReadonlyMap<string, ZoneResult>
   /** Zone that is picked: an anchor or a gap. */
   readonly selected: string | null
@@ -33,11 +34,10 @@ const GUTTER_PX = { wide: 176, phone: 12 } as const
 const PHONE_VIEW_MM = 4000
 
 /** Plan, face and figures of one edge on one chainage axis: the picture that people read an edge from. */
-export function EdgeStrip({ index, edgeId, results, selected, onSelect, isTableOpen }: EdgeStripProps) {
+export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpen }: EdgeStripProps) {
   const isWide = useWide()
   const [width, setWidth] = useState(0)
   const [isOnDeck, setOnDeck] = useState(false)
-  const data = useMemo(() => stripData(index, edgeId), [index, edgeId])
   const edge = useMemo((): StripView => ({ from: data.frame.from, to: data.frame.to }), [data.frame])
   const [asked, setView] = useState<StripView | null>(null)
   const [shown, setShown] = useState(selected)
@@ -128,7 +128,7 @@ const centred = (view: StripView, about: number): StripView => {
   return { from: about - half, to: about + half }
 }
 
-type Data = ReturnType<typeof stripData>
+type Data = StripData
 type Scale = ReturnType<typeof stripScale>
 
 function notes({ data, stretch, isOnDeck }: { data: Data; stretch: number; isOnDeck: boolean }): string[] {
@@ -136,13 +136,6 @@ function notes({ data, stretch, isOnDeck }: { data: Data; stretch: number; isOnD
     `${isOnDeck ? 'Seen from the deck' : 'Seen from outside'}, chainage runs ${compass(data.frame.along)}`,
     `face ${data.highest - data.lowest} mm deep, heights × ${stretch}`,
   ]
-}
-
-/** Direction in which chainage runs, in words. */
-export function compass({ x, y }: { readonly x: number; readonly y: number }): string {
-  const names = ['north', 'north-east', 'east', 'south-east', 'south', 'south-west', 'west', 'north-west']
-  const eighths = Math.round(Math.atan2(x, y) / (Math.PI / 4))
-  return names[(eighths + 8) % 8] ?? 'north'
 }
 
 function BandNames(props: {

@@ -1,4 +1,4 @@
-import type { AnchorData, EdgeData, LayoutFile, TendonData } from '@wedgeline/contract'
+import { toSi, type AnchorData, type EdgeData, type LayoutFile, type TendonData } from '@wedgeline/contract'
 import type { ZoneResult } from '@wedgeline/engine'
 import { worstWords, type Worst } from '../../checks/words'
 import { steelWords } from '../steel-words'
@@ -51,7 +51,7 @@ function steelOf(layout: LayoutFile, anchor: AnchorData, localKind: string | nul
   const shapes = layout.steel
     .filter(({ zone }) => zone.kind === 'anchor' && zone.anchorId === anchor.id)
     .map(({ shape }) => shape)
-  const words = shapes.map((shape) => steelWords(shape))
+  const words = shapes.map((shape) => steelWords(toSi(shape)))
   const isLocalMissing = localKind !== null && !shapes.some(({ kind }) => kind === localKind)
   return [...(isLocalMissing ? [`${localKind} of the hardware`] : []), ...words].join(', ')
 }

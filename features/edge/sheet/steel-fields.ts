@@ -1,0 +1,231 @@
+import type { HardwareData, PourData, SteelData, SteelShapeData, SteelZoneData } from '@wedgeline/contract'
+
+/** The kinds of steel that may be entered at each kind of zone of an edge, with their fields and usual values. */
+
+export type SteelKind = SteelShapeData['kind']
+
+export const KINDS_OF_ZONE: Readonly<Record<'anchor' | 'gap' | 'edge', readonly SteelKind[]>> = {
+  anchor: ['links', 'spiral', 'hairpins', 'transverse-bars'],
+  gap: ['wedge-bars'],
+  edge: ['edge-bars'],
+}
+
+export interface SteelField {
+  readonly key: string
+  readonly label: string
+  readonly unit: string | null
+  readonly usual?: { readonly range: string; readonly source: string }
+  /** Words to choose from instead of a number. */
+  readonly choices?: readonly { readonly value: string; readonly label: string }[]
+}
+
+const practice = (range: string) => ({ range, source: 'common practice' })
+
+const SIZES = [6, 8, 10, 12, 16, 20, 25, 32, 40].map((d) => ({ value: String(d), label: String(d) }))
+const size = (usual: string): SteelField => ({
+  key: 'diameterMm',
+  label: 'Bar size',
+  unit: 'mm',
+  usual: practice(usual),
+  choices: SIZES,
+})
+const LAYERS: SteelField = {
+  key: 'layers',
+  label: 'Layers',
+  unit: null,
+  choices: [
+    { value: 'both', label: 'top and bottom' },
+    { value: 'top', label: 'top' },
+    { value: 'bottom', label: 'bottom' },
+  ],
+}
+
+const FIELDS: Readonly<Partial<Record<SteelKind, readonly SteelField[]>>> = {
+  spiral: [
+    size('8 to 16'),
+    { key: 'outsideMm', label: 'Outside diameter', unit: 'mm', usual: practice('plate + 20, inside both covers') },
+    { key: 'pitchMm', label: 'Pitch', unit: 'mm', usual: practice('40 to 60') },
+    { key: 'turns', label: 'Turns in all', unit: null, usual: practice('3 to 7') },
+    { key: 'flatTurns', label: 'Of which flat end turns', unit: null, usual: practice('2') },
+    { key: 'firstMm', label: 'First turn behind the bearing face', unit: 'mm', usual: practice('0 to 20') },
+  ],
+  links: [
+    size('8 to 10'),
+    { key: 'count', label: 'Number', unit: null, usual: practice('3 to 5') },
+    { key: 'widthMm', label: 'Width, outside', unit: 'mm', usual: practice('plate + 80') },
+    { key: 'heightMm', label: 'Height, outside', unit: 'mm', usual: practice('depth less both covers') },
+    { key: 'hookMm', label: 'Hooks', unit: 'mm', usual: { range: '115 for 8, 130 for 10', source: 'BS 8666' } },
+    { key: 'firstMm', label: 'First behind the bearing face', unit: 'mm', usual: practice('30 to 50') },
+    { key: 'pitchMm', label: 'Pitch', unit: 'mm', usual: practice('50') },
+  ],
+  hairpins: [
+    size('10 to 12'),
+    { key: 'count', label: 'Number', unit: null, usual: practice('1 or 2 at each anchor') },
+    { key: 'legMm', label: 'Legs, outside', unit: 'mm', usual: practice('500 to 700') },
+    { key: 'bendMm', label: 'Bend, outside', unit: 'mm', usual: practice('depth less both covers') },
+    { key: 'firstMm', label: 'Bend from the bearing face', unit: 'mm', usual: practice('3/8 to 1/2 of the depth') },
+    { key: 'pitchMm', label: 'Between hairpins', unit: 'mm' },
+    {
+      key: 'lies',
+      label: 'They stand',
+      unit: null,
+      choices: [
+        { value: 'upright', label: 'upright, bend through the thickness' },
+        { value: 'flat', label: 'flat, bend in plan' },
+      ],
+    },
+  ],
+  'transverse-bars': [
+    size('12 to 16'),
+    { key: 'count', label: 'Positions', unit: null, usual: practice('4 to 8') },
+    { key: 'lengthMm', label: 'Length', unit: 'mm', usual: practice('the prism less 2 covers, or continuous') },
+    {
+      key: 'firstMm',
+      label: 'First behind the bearing face',
+      unit: 'mm',
+      usual: { range: '0.2 to 1.0 of the prism', source: 'reading of the window' },
+    },
+    { key: 'pitchMm', label: 'Pitch', unit: 'mm', usual: practice('100 to 200') },
+    LAYERS,
+  ],
+  'wedge-bars': [
+    size('10 to 16'),
+    { key: 'count', label: 'Positions', unit: null },
+    { key: 'lengthMm', label: 'Length', unit: 'mm', usual: practice('wedge depth + anchorage') },
+    LAYERS,
+  ],
+  'edge-bars': [
+    size('12 to 16'),
+    { key: 'countTop', label: 'Top', unit: null, usual: practice('2') },
+    { key: 'countBottom', label: 'Bottom', unit: null, usual: practice('2') },
+    { key: 'firstMm', label: 'First from the slab edge', unit: 'mm', usual: practice('cover + 10 to 20') },
+    { key: 'pitchMm', label: 'Between bars', unit: 'mm', usual: practice('60 to 100') },
+    { key: 'fromMm', label: 'From chainage', unit: 'mm' },
+    { key: 'toMm', label: 'To chainage', unit: 'mm' },
+  ],
+}
+
+export const steelFields = (kind: SteelKind): readonly SteelField[] => FIELDS[kind] ?? []
+
+export interface Place {
+  readonly pour: PourData
+  readonly depthMm: number
+  readonly hardware: HardwareData | null
+  readonly from: number
+  readonly to: number
+  /** Prism of the anchor in plan, mm; the spacing where nothing better is known. */
+  readonly prismMm: number
+  readonly wedgeDepthMm: number
+}
+
+const down5 = (value: number): number => Math.floor(value / 5) * 5
+
+/** A set of bars as somebody would begin with it here; every value is then changed as wished. */
+export function usualSteel(kind: SteelKind, place: Place): SteelShapeData | null {
+  const { pour, hardware } = place
+  const between = down5(place.depthMm - pour.coverTopMm - pour.coverSoffitMm)
+  const plate = hardware?.plate ?? { widthMm: 200, heightMm: 80 }
+  const local = hardware?.localSteel
+  if (local?.kind === kind) {
+    const { isTested: _isTested, ...shape } = local
+    return shape
+  }
+  switch (kind) {
+    case 'spiral':
+      return {
+        kind,
+        diameterMm: 10,
+        outsideMm: Math.min(between, plate.widthMm + 20),
+        pitchMm: 50,
+        turns: 5,
+        flatTurns: 2,
+        firstMm: 0,
+      }
+    case 'links': {
+      const isTall = between >= 130
+      return {
+        kind,
+        diameterMm: isTall ? 10 : 8,
+        widthMm: plate.widthMm + 80,
+        heightMm: between,
+        hookMm: isTall ? 130 : 115,
+        count: 4,
+        firstMm: 30,
+        pitchMm: 50,
+      }
+    }
+    case 'hairpins':
+      return {
+        kind,
+        diameterMm: 10,
+        legMm: 600,
+        bendMm: between,
+        count: 1,
+        lies: 'upright',
+        firstMm: down5(place.depthMm / 2),
+        pitchMm: 0,
+      }
+    case 'transverse-bars': {
+      const first = Math.max(down5(0.25 * place.prismMm), 50)
+      const last = 0.95 * place.prismMm
+      const count = Math.max(1, Math.min(6, Math.floor((last - first) / 150) + 1))
+      return {
+        kind,
+        diameterMm: 12,
+        lengthMm: down5(Math.max(place.prismMm, 600)),
+        count,
+        layers: 'both',
+        firstMm: first,
+        pitchMm: 150,
+      }
+    }
+    case 'wedge-bars':
+      return {
+        kind,
+        diameterMm: 12,
+        lengthMm: Math.ceil((place.wedgeDepthMm + 500) / 25) * 25,
+        count: Math.max(1, Math.ceil((place.to - place.from) / 300)),
+        layers: 'both',
+      }
+    case 'edge-bars':
+      return {
+        kind,
+        diameterMm: 12,
+        countTop: 2,
+        countBottom: 2,
+        firstMm: pour.coverEdgeMm + 20,
+        pitchMm: 80,
+        fromMm: place.from + pour.coverEdgeMm,
+        toMm: place.to - pour.coverEdgeMm,
+      }
+    case 'trimmers':
+    case 'diagonals':
+    case 'tie-back-bars':
+    case 'lap-bars':
+      return null
+  }
+}
+
+/** Shown text of a field's value. */
+export function fieldValue(shape: SteelShapeData, key: string): string | number | null {
+  const value: unknown = Object.entries(shape).find(([name]) => name === key)?.[1]
+  return typeof value === 'string' || typeof value === 'number' ? value : null
+}
+
+export const zoneKey = (zone: SteelZoneData): string => {
+  switch (zone.kind) {
+    case 'anchor':
+      return `anchor:${zone.anchorId}`
+    case 'gap':
+      return `gap:${zone.edgeId}:${zone.afterAnchorId ?? 'start'}:${zone.beforeAnchorId ?? 'end'}`
+    case 'edge':
+      return `edge:${zone.edgeId}`
+    case 'pan':
+      return `pan:${zone.panId}`
+    case 'joint':
+      return `joint:${zone.jointId}`
+  }
+}
+
+export const steelOfZone = (steel: readonly SteelData[], zoneId: string): readonly SteelData[] =>
+  steel.filter(({ zone }) => zoneKey(zone) === zoneId)
