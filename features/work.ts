@@ -13,3 +13,5 @@ export { NewPourScreen } from './pour/new-pour-screen'
 export { PourScreen } from './pour/pour-screen'
 export { PourZonesScreen } from './pour/zones-screen'
 export { ScheduleScreen } from './schedule/schedule-screen'
+/** The reader of layout files goes with them: the list of jobs, which imports files, does without the contract. */
+export { readLayoutText } from '@wedgeline/contract'

@@ -1,10 +1,10 @@
 import { Slot } from 'expo-router'
-import { WorkShell } from '@/features/shell/work-shell'
+import { WorkLayout } from '@/features/shell/work-layout'
 
-export default function WorkLayout() {
+export default function SignedInLayout() {
   return (
-    <WorkShell account={null}>
+    <WorkLayout>
       <Slot />
-    </WorkShell>
+    </WorkLayout>
   )
 }
