@@ -52,7 +52,7 @@ function replaced(value: unknown, path: Path, odd: unknown): unknown {
   const inner = value as Record<string, unknown>
   const after = replaced(inner[key], rest, odd)
   return Array.isArray(value)
-    ? value.map((item, at) => (String(at) === key ? after : item))
+    ? (value as unknown[]).map((item, at) => (String(at) === key ? after : item))
     : { ...inner, [key]: after }
 }
 
