@@ -27,7 +27,11 @@ export function recordAudit(db: Connection, entry: AuditEntry): void {
 }
 
 /** The latest entries of a job, newest first; with `beforeMs` those before that instant. */
-export function auditOf(db: Connection, { companyId, jobId }: JobKey, page: { limit: number; beforeMs?: number | undefined }) {
+export function auditOf(
+  db: Connection,
+  { companyId, jobId }: JobKey,
+  page: { limit: number; beforeMs?: number | undefined },
+) {
   return db
     .select({
       id: audit.id,
