@@ -7,7 +7,8 @@ import { failureOf, isAnswer } from './failure'
 /** What was read from the server, and the part of it that outlives a reload. */
 
 const DAY_MS = 24 * 60 * 60_000
-const KEPT_MS = 30 * DAY_MS
+/** As long as an idle session; a timer cannot run for more than 24 days. */
+const KEPT_MS = 7 * DAY_MS
 const RETRIES = 2
 const kept = createStore('wedgeline-queries', 'answers')
 
