@@ -57,7 +57,10 @@ describe.each(Object.keys(PROCEDURES))('%s', (path) => {
 /** As text that a client could send; what JSON has no word for becomes a word that JSON does not know. */
 function toJson(value: unknown): string {
   try {
-    return JSON.stringify(value, (_key, inner: unknown): unknown => (typeof inner === 'bigint' ? String(inner) : inner)) ?? 'NaN'
+    return (
+      JSON.stringify(value, (_key, inner: unknown): unknown => (typeof inner === 'bigint' ? String(inner) : inner)) ??
+      'NaN'
+    )
   } catch {
     return '{'
   }
