@@ -137,7 +137,7 @@ function LengthFields(props: LengthFieldsProps) {
           <NumberField
             label="Clear room for the jack"
             unit="mm"
-            usual={{ range: '1000 to 1500', source: 'common practice; empty where it is not known' }}
+            hint="Outside the edge. Closed jack, stroke, strand tail and hand room stand there; empty while not known."
             value={length.jackClearMm}
             disabled={!canEdit}
             onCommit={(jackClearMm) => onSet({ jackClearMm }, 'Room for the jack')}

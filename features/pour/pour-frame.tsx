@@ -4,7 +4,7 @@ import type { ReactNode } from 'react'
 import { Failed } from '@/components/ui/states'
 import { NavBar } from '@/components/ui/nav-bar'
 import { Screen } from '@/components/ui/screen'
-import { StatusMark } from '@/components/ui/status-mark'
+import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { useJobDraft, type JobDraft } from '../editing/job-draft'
 import { SHOWN_COUNTS } from './counts'
@@ -70,7 +70,7 @@ function Summary(props: { readonly counts: Readonly<Record<Status, number>> | un
     <>
       {counts
         ? SHOWN_COUNTS.filter((status) => counts[status] > 0).map((status) => (
-            <StatusMark key={status} status={status} words={`${counts[status]} ${STATUS_AFTER_COUNT[status]}`} />
+            <StatusMark key={status} status={status} words={`${counts[status]} ${STATUS_WORD[status]}`} />
           ))
         : null}
       <Text kind="small" tone="soft">
@@ -78,16 +78,6 @@ function Summary(props: { readonly counts: Readonly<Record<Status, number>> | un
       </Text>
     </>
   )
-}
-
-/** How a status reads after a number: 2 over, 1 to judge. */
-export const STATUS_AFTER_COUNT: Readonly<Record<Status, string>> = {
-  stop: 'to stop for',
-  'not-covered': 'not covered',
-  over: 'over',
-  'needs-judgement': 'needs judgement',
-  near: 'near',
-  within: 'within',
 }
 
 const SAVE_WORDS: Readonly<Record<JobDraft['save'], string>> = {

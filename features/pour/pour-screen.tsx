@@ -1,0 +1,95 @@
+import { toEngine, type PourData } from '@wedgeline/contract'
+import { layoutIndex } from '@wedgeline/engine/geometry'
+import type { PourResult } from '@wedgeline/engine'
+import { router } from 'expo-router'
+import { useMemo, useState } from 'react'
+import { StyleSheet, View } from 'react-native'
+import { space } from '@/components/theme'
+import { Button } from '@/components/ui/button'
+import { Icon } from '@/components/ui/icon'
+import { Section } from '@/components/ui/screen'
+import { Empty, Failed } from '@/components/ui/states'
+import { Text } from '@/components/ui/text'
+import { useJobDraft } from '../editing/job-draft'
+import { usePourChecks } from '../editing/pour-checks'
+import { CountLinks } from './count-links'
+import { EdgeLengths } from './edge-lengths'
+import { EdgeList } from './edge-list'
+import { PourDataForm } from './pour-data'
+import { PourFrame } from './pour-frame'
+import { PourPlan } from './pour-plan'
+
+/** A pour from above with its edges, checks counted by status, and what is known of the slab. */
+export function PourScreen({ jobId, pourId }: { readonly jobId: string; readonly pourId: string }) {
+  const job = useJobDraft()
+  return (
+    <PourFrame
+      pourId={pourId}
+      page="plan"
+      actions={
+        job.canUndo ? (
+          <Button
+            label={job.undoLabel ? `Undo: ${job.undoLabel}` : 'Undo'}
+            icon={<Icon name="undo" />}
+            onPress={job.undo}
+          />
+        ) : null
+      }
+    >
+      {(pour) => <PourParts jobId={jobId} pour={pour} />}
+    </PourFrame>
+  )
+}
+
+function PourParts({ jobId, pour }: { readonly jobId: string; readonly pour: PourData }) {
+  const { layout } = useJobDraft()
+  const { result, failure } = usePourChecks(pour.id)
+  const index = useMemo(() => layoutIndex(toEngine(layout)), [layout])
+  const [lengthsOf, setLengthsOf] = useState<string | null>(null)
+  const hasAnchors = (index.tendonsOfPour.get(pour.id) ?? []).length > 0
+  const firstEdge = index.edgesOfPour.get(pour.id)?.[0]
+  return (
+    <>
+      <Checks jobId={jobId} pourId={pour.id} result={result} failure={failure} />
+      {hasAnchors ? null : (
+        <Empty
+          what="This pour has no anchors yet."
+          firstStep="Open an edge and type or paste its anchors: distance along the edge, height, strands."
+          action={
+            firstEdge ? (
+              <Button kind="main" label={`Open edge ${firstEdge.mark}`} href={`/jobs/${jobId}/edges/${firstEdge.id}`} />
+            ) : null
+          }
+        />
+      )}
+      <PourPlan index={index} pourId={pour.id} onEdge={(edgeId) => router.push(`/jobs/${jobId}/edges/${edgeId}`)} />
+      <Section title="Edges">
+        <EdgeList jobId={jobId} pourId={pour.id} index={index} result={result} onLengths={setLengthsOf} />
+      </Section>
+      <PourDataForm pour={pour} />
+      <EdgeLengths edgeId={lengthsOf} onClose={() => setLengthsOf(null)} />
+    </>
+  )
+}
+
+interface ChecksProps {
+  readonly jobId: string
+  readonly pourId: string
+  readonly result: PourResult | null
+  readonly failure: string | null
+}
+
+function Checks({ jobId, pourId, result, failure }: ChecksProps) {
+  if (failure !== null) return <Failed what="The checks of this pour could not be made." advice={failure} />
+  return (
+    <View style={styles.checks} role="status">
+      {result ? (
+        <CountLinks jobId={jobId} pourId={pourId} counts={result.counts} />
+      ) : (
+        <Text tone="soft">Checking the pour …</Text>
+      )}
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({ checks: { minHeight: space.xl } })
