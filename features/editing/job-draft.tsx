@@ -1,10 +1,11 @@
-import type { Conflict, LayoutFile, Role } from '@wedgeline/contract'
+import { CommandError, type Conflict, type LayoutFile, type Role } from '@wedgeline/contract'
 import { useQuery } from '@tanstack/react-query'
 import { TRPCClientError } from '@trpc/client'
 import { createStore, get, set } from 'idb-keyval'
 import type { ReactNode } from 'react'
 import { createContext, useContext, useEffect, useMemo, useSyncExternalStore } from 'react'
 import { v7 as newId } from 'uuid'
+import { useToast } from '@/components/ui/toast'
 import { useTRPC, useTRPCClient, type AppRouter } from '@/lib/trpc'
 import type { Change, Unsaved } from './draft'
 import { DraftStore, type DraftPorts, type DraftView, type SaveState, type Sent } from './draft-store'
@@ -54,6 +55,7 @@ const unsentStore = createStore('wedgeline-unsent', 'batches')
 export function JobDraftProvider({ jobId, children }: { readonly jobId: string; readonly children: ReactNode }) {
   const trpc = useTRPC()
   const client = useTRPCClient()
+  const say = useToast()
   const me = useQuery(trpc.session.me.queryOptions())
   const about = useQuery(trpc.job.byId.queryOptions({ jobId }))
   const personId = me.data?.person.id
@@ -77,12 +79,12 @@ export function JobDraftProvider({ jobId, children }: { readonly jobId: string; 
   const failed = me.error ?? about.error ?? layout.error
   const open = useMemo((): OpenJob => {
     if (store && view.draft && about.data) {
-      return { state: 'open', job: jobOf({ store, view, about: about.data }) }
+      return { state: 'open', job: jobOf({ store, view, about: about.data, say }) }
     }
     if (!failed) return { state: 'waiting' }
     const retry = () => void Promise.all([me.refetch(), about.refetch(), store ? layout.refetch() : null])
     return { state: 'failed', message: failed.message, retry }
-  }, [store, view, about, failed, me, layout])
+  }, [store, view, about, failed, me, layout, say])
   return <JobContext value={open}>{children}</JobContext>
 }
 
@@ -96,7 +98,8 @@ interface About {
   readonly myRoles: readonly Role[]
 }
 
-function jobOf({ store, view, about }: { store: DraftStore; view: DraftView; about: About }): JobDraft {
+function jobOf(of: { store: DraftStore; view: DraftView; about: About; say: (words: string) => void }): JobDraft {
+  const { store, view, about, say } = of
   const { draft, save, problem, dropped } = view
   if (!draft) throw new Error('the draft is open here')
   return {
@@ -112,7 +115,15 @@ function jobOf({ store, view, about }: { store: DraftStore; view: DraftView; abo
     canUndo: draft.undo.length > 0,
     canRedo: draft.redo.length > 0,
     undoLabel: draft.undo.at(-1)?.label ?? null,
-    edit: (change) => store.edit(change),
+    edit: (change) => {
+      try {
+        store.edit(change)
+      } catch (error) {
+        // A value that the layout cannot hold: nothing was changed, and the field keeps what was typed.
+        if (!(error instanceof CommandError)) throw error
+        say(`${change.label}: ${error.message}.`)
+      }
+    },
     undo: () => store.undo(),
     redo: () => store.redo(),
     flush: () => store.flush(),

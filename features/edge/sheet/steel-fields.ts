@@ -122,63 +122,18 @@ const down5 = (value: number): number => Math.floor(value / 5) * 5
 
 /** A set of bars as somebody would begin with it here; every value is then changed as wished. */
 export function usualSteel(kind: SteelKind, place: Place): SteelShapeData | null {
-  const { pour, hardware } = place
-  const between = down5(place.depthMm - pour.coverTopMm - pour.coverSoffitMm)
-  const plate = hardware?.plate ?? { widthMm: 200, heightMm: 80 }
-  const local = hardware?.localSteel
+  const local = place.hardware?.localSteel
   if (local?.kind === kind) {
     const { isTested: _isTested, ...shape } = local
     return shape
   }
   switch (kind) {
     case 'spiral':
-      return {
-        kind,
-        diameterMm: 10,
-        outsideMm: Math.min(between, plate.widthMm + 20),
-        pitchMm: 50,
-        turns: 5,
-        flatTurns: 2,
-        firstMm: 0,
-      }
-    case 'links': {
-      const isTall = between >= 130
-      return {
-        kind,
-        diameterMm: isTall ? 10 : 8,
-        widthMm: plate.widthMm + 80,
-        heightMm: between,
-        hookMm: isTall ? 130 : 115,
-        count: 4,
-        firstMm: 30,
-        pitchMm: 50,
-      }
-    }
+    case 'links':
     case 'hairpins':
-      return {
-        kind,
-        diameterMm: 10,
-        legMm: 600,
-        bendMm: between,
-        count: 1,
-        lies: 'upright',
-        firstMm: down5(place.depthMm / 2),
-        pitchMm: 0,
-      }
-    case 'transverse-bars': {
-      const first = Math.max(down5(0.25 * place.prismMm), 50)
-      const last = 0.95 * place.prismMm
-      const count = Math.max(1, Math.min(6, Math.floor((last - first) / 150) + 1))
-      return {
-        kind,
-        diameterMm: 12,
-        lengthMm: down5(Math.max(place.prismMm, 600)),
-        count,
-        layers: 'both',
-        firstMm: first,
-        pitchMm: 150,
-      }
-    }
+      return usualLocal(kind, place)
+    case 'transverse-bars':
+      return usualTransverse(place)
     case 'wedge-bars':
       return {
         kind,
@@ -193,10 +148,10 @@ export function usualSteel(kind: SteelKind, place: Place): SteelShapeData | null
         diameterMm: 12,
         countTop: 2,
         countBottom: 2,
-        firstMm: pour.coverEdgeMm + 20,
+        firstMm: place.pour.coverEdgeMm + 20,
         pitchMm: 80,
-        fromMm: place.from + pour.coverEdgeMm,
-        toMm: place.to - pour.coverEdgeMm,
+        fromMm: place.from + place.pour.coverEdgeMm,
+        toMm: place.to - place.pour.coverEdgeMm,
       }
     case 'trimmers':
     case 'diagonals':
@@ -204,6 +159,35 @@ export function usualSteel(kind: SteelKind, place: Place): SteelShapeData | null
     case 'lap-bars':
       return null
   }
+}
+
+/** Steel round the tendon just behind the plate, as deep as the covers allow. */
+function usualLocal(kind: 'spiral' | 'links' | 'hairpins', { pour, hardware, depthMm }: Place): SteelShapeData {
+  const between = down5(depthMm - pour.coverTopMm - pour.coverSoffitMm)
+  const plateMm = hardware?.plate.widthMm ?? 200
+  // The hooks of a closed link 10 may not exceed its height: under 130 it has to be an 8 (BS 8666).
+  const link = between >= 130 ? { diameterMm: 10, hookMm: 130 } : { diameterMm: 8, hookMm: 115 }
+  const [pitchMm, firstMm] = [50, 30]
+  switch (kind) {
+    case 'spiral': {
+      const outsideMm = Math.min(between, plateMm + 20)
+      return { kind, diameterMm: 10, outsideMm, pitchMm, turns: 5, flatTurns: 2, firstMm: 0 }
+    }
+    case 'links':
+      return { kind, ...link, widthMm: plateMm + 80, heightMm: between, count: 4, firstMm, pitchMm }
+    case 'hairpins': {
+      const atMm = down5(depthMm / 2)
+      return { kind, diameterMm: 10, legMm: 600, bendMm: between, count: 1, lies: 'upright', firstMm: atMm, pitchMm: 0 }
+    }
+  }
+}
+
+/** Positions over the window, 0.2 to 1.0 of the prism, at 150 where that many fit. */
+function usualTransverse({ prismMm }: Place): SteelShapeData {
+  const firstMm = Math.max(down5(0.25 * prismMm), 50)
+  const count = Math.max(1, Math.min(6, Math.floor((0.95 * prismMm - firstMm) / 150) + 1))
+  const lengthMm = down5(Math.max(prismMm, 600))
+  return { kind: 'transverse-bars', diameterMm: 12, lengthMm, count, layers: 'both', firstMm, pitchMm: 150 }
 }
 
 /** Shown text of a field's value. */

@@ -1,4 +1,4 @@
-import { toSi, type SteelData, type SteelShapeData, type SteelZoneData } from '@wedgeline/contract'
+import { toSi, type Command, type SteelData, type SteelShapeData, type SteelZoneData } from '@wedgeline/contract'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { v7 as newId } from 'uuid'
@@ -84,7 +84,7 @@ function SteelSet(props: {
   const name = STEEL_NAMES[row.shape.kind]
   const set = (key: string, value: string | number | null) => {
     if (value === null) return
-    const shape = { ...row.shape, [key]: value } as SteelShapeData
+    const shape = { ...row.shape, [key]: value }
     edit({
       label: `${zoneName}: ${name}`,
       key: `${row.id}.${key}`,
@@ -94,11 +94,11 @@ function SteelSet(props: {
   const remove = () =>
     edit({ label: `${zoneName}: remove ${name}`, commands: [{ type: 'remove', table: 'steel', id: row.id }] })
   const giveToAll = () => {
-    const commands = likeZones.flatMap((zone) => {
+    const commands = likeZones.flatMap((zone): Command[] => {
       const old = steelOfZone(layout.steel, zoneKey(zone)).filter(({ shape }) => shape.kind === row.shape.kind)
       return [
-        ...old.map(({ id }) => ({ type: 'remove' as const, table: 'steel' as const, id })),
-        { type: 'insert' as const, table: 'steel' as const, row: { ...row, id: newId(), zone } },
+        ...old.map(({ id }): Command => ({ type: 'remove', table: 'steel', id })),
+        { type: 'insert', table: 'steel', row: { ...row, id: newId(), zone } },
       ]
     })
     edit({ label: `Same ${name} at ${likeZones.length + 1} anchors`, commands })

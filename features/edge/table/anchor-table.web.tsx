@@ -1,5 +1,5 @@
 import type { Command } from '@wedgeline/contract'
-import type { ClipboardEvent, CSSProperties, KeyboardEvent } from 'react'
+import type { ClipboardEvent, CSSProperties, KeyboardEvent, RefObject } from 'react'
 import { useEffect, useId, useRef, useState } from 'react'
 import { StatusMark } from '@/components/ui/status-mark'
 import { colour, font } from '@/components/theme'
@@ -26,7 +26,8 @@ interface Editing {
  * Esc brings back; Delete takes the anchor away. The last row takes the next anchor: a distance, or a pasted block.
  */
 export function AnchorTable(props: AnchorTableProps) {
-  const grid = useGrid(props)
+  const tableRef = useRef<HTMLTableElement>(null)
+  const grid = useGrid(props, tableRef)
   const { rows, edge, canEdit } = props
   const id = useId()
   return (
@@ -36,7 +37,7 @@ export function AnchorTable(props: AnchorTableProps) {
         aria-label={`Anchors of edge ${edge.mark}`}
         aria-describedby={`${id}-keys`}
         style={styles.table}
-        ref={grid.tableRef}
+        ref={tableRef}
         onKeyDown={grid.onKeyDown}
         onPaste={grid.onPaste}
       >
@@ -80,9 +81,8 @@ export function AnchorTable(props: AnchorTableProps) {
 
 type Grid = ReturnType<typeof useGrid>
 
-function useGrid(props: AnchorTableProps) {
+function useGrid(props: AnchorTableProps, tableRef: RefObject<HTMLTableElement | null>) {
   const { layout, rows: sorted, canEdit, onSelect, onEdit, onInsert, onRemove } = props
-  const tableRef = useRef<HTMLTableElement>(null)
   const [place, setPlace] = useState<Place>({ row: 0, column: CHAINAGE })
   const [editing, setEditing] = useState<Editing | null>(null)
   const [problem, setProblem] = useState<string | null>(null)
@@ -98,7 +98,7 @@ function useGrid(props: AnchorTableProps) {
   useEffect(() => {
     if (!focused.current || editing) return
     cellAt(tableRef.current, place)?.focus({ preventScroll: false })
-  }, [place, editing, rows.length])
+  }, [place, editing, rows.length, tableRef])
 
   const textAt = ({ row, column }: Place): string | null => {
     const line = rows[row]
@@ -194,7 +194,7 @@ function useGrid(props: AnchorTableProps) {
     if (commands.length > 0) onEdit({ label: 'Paste', commands })
     setProblem(refused)
   }
-  return { rows, place, editing, problem, tableRef, go, begin, type, commit, onKeyDown, onPaste }
+  return { rows, place, editing, problem, go, begin, type, commit, onKeyDown, onPaste }
 }
 
 /** A pasted block laid over existing rows, one change in all. */
