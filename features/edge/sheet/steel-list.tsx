@@ -1,4 +1,4 @@
-import { toSi, type Command, type SteelData, type SteelShapeData, type SteelZoneData } from '@wedgeline/contract'
+import { toSi, type Command, type SteelData, type SteelZoneData } from '@wedgeline/contract'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { v7 as newId } from 'uuid'
