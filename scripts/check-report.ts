@@ -38,8 +38,8 @@ function checkLine(check: Check, basis: string) {
 function outcomeOf(check: Check) {
   switch (check.kind) {
     case 'compared': {
-      const { demand, limit, unit, compares, utilisation, spare, status, statusOnceAccepted, readingId } = check
-      return { demand, limit, unit, compares, utilisation, distance: spare, status, statusOnceAccepted, readingId }
+      const { demand, limit, unit, compares, utilisation, spare, status, statusOnceAccepted, readingIds } = check
+      return { demand, limit, unit, compares, utilisation, distance: spare, status, statusOnceAccepted, readingIds }
     }
     case 'refused': {
       const { status, code, field, message } = check

@@ -157,9 +157,6 @@ export function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'settings
 export function assertFactors(job: Pick<JobData, 'basis' | 'factors'>): void {
   const [problem] = factorProblems(job)
   if (problem) throw refused(problem.message, problem.field.replace(/^job\./, ''))
-  const names = job.factors.map(({ name }) => name)
-  const twice = names.find((name, at) => names.indexOf(name) !== at)
-  if (twice !== undefined) throw refused(`The factor ${twice} is given twice; give it once.`, 'factors')
 }
 
 /** @throws Failure for somebody who is not in the job's company. */

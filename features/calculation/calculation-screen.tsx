@@ -131,9 +131,7 @@ function SheetHead({ zone, pour, basis }: ZoneSheetProps) {
   const { job } = layout
   const level = layout.levels.find(({ id }) => id === pour.levelId)
   const day = new Intl.DateTimeFormat('en-GB', { timeZone: job.timeZone, dateStyle: 'long' }).format(new Date())
-  const readings = [
-    ...new Set(zone.checks.flatMap((check) => (check.kind === 'compared' && check.readingId ? [check.readingId] : []))),
-  ]
+  const readings = [...new Set(zone.checks.flatMap((check) => (check.kind === 'compared' ? check.readingIds : [])))]
   const title = BASIS_SOURCES.find(({ id }) => id === basis)?.title ?? basis
   const facts = [
     ['Job', `${job.number} ${job.title}`],

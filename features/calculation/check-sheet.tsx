@@ -5,7 +5,6 @@ import { Icon } from '@/components/ui/icon'
 import { LimitKindBox } from '@/components/ui/limit-kind'
 import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
-import { noteText } from '../checks/zone-words'
 import { clauseText, outcomeText, ratioText, shownQuantity, unitText } from '../checks/words'
 import { Formula } from './formula'
 import { figureText, formulaParts, putIn, symbolPart } from './formula-text'
@@ -36,7 +35,7 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
       <Outcome check={check} />
       {check.notes.map((note) => (
         <Text key={note} kind="small" tone="soft" style={styles.note}>
-          {noteText(note)}
+          {note}
         </Text>
       ))}
     </View>
@@ -98,7 +97,7 @@ function comparedText(check: Extract<Check, { kind: 'compared' }>): string {
     check.compares === 'ratio'
       ? `Demand ${demand}, limit ${limit}: ${check.utilisation === null ? 'no steel counts' : ratioText(check.utilisation)}`
       : `There is ${demand}, ${check.compares === 'at-least' ? 'needs' : 'at most'} ${limit}: ${outcomeText(check)}`
-  const isWaiting = check.status === 'needs-judgement' && check.readingId !== null
+  const isWaiting = check.status === 'needs-judgement' && check.readingIds.length > 0
   return isWaiting
     ? `${sides}. Needs judgement: the reading it rests on is not accepted`
     : `${sides}, ${STATUS_WORD[check.status]}`

@@ -7,13 +7,6 @@ export function readingTitle(readingId: string): string {
   return readings.find(({ id }) => id === readingId)?.title ?? 'a reading of this basis'
 }
 
-/** A note with the readings that it names by id named by their titles. */
-export function noteText(note: string): string {
-  const list = /^(Rests on these readings: )(.+)\.$/.exec(note)
-  if (!list) return note
-  return `${list[1] ?? ''}${(list[2] ?? '').split(', ').map(readingTitle).join('; ')}.`
-}
-
 /** Where a zone lies, as a path of the product: its edge with the zone picked; null for a zone at no edge. */
 export function edgePathOf(jobId: string, zone: Pick<Zone, 'id' | 'edgeId'>): `/jobs/${string}/edges/${string}` | null {
   return zone.edgeId === null ? null : `/jobs/${jobId}/edges/${zone.edgeId}?zone=${encodeURIComponent(zone.id)}`

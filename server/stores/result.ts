@@ -33,7 +33,7 @@ export function resultsOf(db: Connection, key: JobKey, pourIds: readonly string[
 
 function readingIdsOf({ zones }: PourResult): string[] {
   const checks = zones.flatMap((zone) => zone.checks)
-  return [...new Set(checks.flatMap((check) => (check.kind === 'compared' ? (check.readingId ?? []) : [])))].sort()
+  return [...new Set(checks.flatMap((check) => (check.kind === 'compared' ? check.readingIds : [])))].sort()
 }
 
 /** Pours of the jobs that have the person among their people, with the counts of their latest results. */

@@ -288,13 +288,22 @@ describe('Readings', () => {
     expect(checkAt(row('S4'), 'bursting-thickness')).toMatchObject({
       status: 'needs-judgement',
       statusOnceAccepted: 'within',
-      readingId: 'en-window',
+      readingIds: ['en-window', 'en-steel-300'],
     })
     expect(checkAt(accepting(row('S4'), 'en-window'), 'bursting-thickness')).toMatchObject({
       status: 'needs-judgement',
-      readingId: 'en-steel-300',
+      readingIds: ['en-window', 'en-steel-300'],
     })
-    expect(thickness('S4')).toMatchObject({ status: 'within', readingId: 'en-window' })
+    expect(thickness('S4')).toMatchObject({ status: 'within' })
+  })
+
+  test('the readings are named as people read them', () => {
+    const notes = thickness('S4').notes.join(' ')
+    expect(notes).toContain(
+      'Rests on these readings: Bursting steel counts from 0.2 b to 1.0 b behind the bearing face; ' +
+        'Bursting steel at 300 MPa for 1.2 times the jacking force.',
+    )
+    expect(notes).not.toContain('en-')
   })
 
   test('the alternative asks for 0.83 of the steel: T / 1.2 / 300', () => {

@@ -23,3 +23,8 @@ test.each([
 test('a basis that is not in the list is refused with the list', () => {
   expect(() => basisOf({ ...job, basis: 'none' })).toThrow('en-1992')
 })
+
+test('a factor that is given twice is named at its second place', () => {
+  const twice = [1, 1.1].map((value) => ({ name: 'gammaP', value, reason: 'r' }))
+  expect(factorProblems({ ...job, factors: twice })).toMatchObject([{ at: 1, part: 'name' }])
+})

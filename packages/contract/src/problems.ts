@@ -1,6 +1,7 @@
 import type { LayoutFile } from './layout'
 import { anchorProblems } from './problems/anchors'
 import { edgeProblems } from './problems/edges'
+import { jobFactorProblems } from './problems/factors'
 import { hardwareProblems } from './problems/hardware'
 import { nameProblems } from './problems/names'
 import { pourProblems } from './problems/pours'
@@ -20,6 +21,7 @@ export { LENGTH_GAP_MAX_MM, OFF_LINE_MAX_MM } from './problems/edges'
 export function layoutProblems(layout: LayoutFile): Problem[] {
   return [
     ...nameProblems(layout),
+    ...jobFactorProblems(layout),
     ...referenceProblems(layout),
     ...pourProblems(layout),
     ...edgeProblems(layout),

@@ -78,9 +78,9 @@ export interface Compared extends CheckHead {
   /** What is left over, for distances: positive is spare, negative is short; null for ratios. */
   readonly spare: number | null
   readonly steps: readonly Step[]
-  /** The reading that the result rests on; its status is needs-judgement until an engineer accepts it. */
-  readonly readingId: string | null
-  /** What the status is once the reading is accepted; equal to status otherwise. */
+  /** The readings that the result rests on; its status is needs-judgement until an engineer accepts them all. */
+  readonly readingIds: readonly string[]
+  /** What the status is once the readings are accepted; equal to status otherwise. */
   readonly statusOnceAccepted: Exclude<Status, 'not-covered'>
   /** The layout field that mends it, where one does, with the value that would just do; named as in a refusal. */
   readonly mend: { readonly field: string; readonly value: number } | null

@@ -87,7 +87,7 @@ const OVER: Check = {
   utilisation: 588_800 / 588_200,
   spare: null,
   steps: [],
-  readingId: null,
+  readingIds: [],
   statusOnceAccepted: 'over',
   mend: null,
 }

@@ -12,17 +12,36 @@ export function basisOf(job: Pick<Job, 'basis' | 'factors' | 'readings' | 'setti
   return source.make({ factors: job.factors, readings: job.readings, fyk: job.settings.fyk })
 }
 
-/** What is wrong with the factors that a job sets: each with the field and what would be right. Empty where all are right. */
-export function factorProblems(job: Pick<Job, 'basis' | 'factors'>): readonly { field: string; message: string }[] {
+export interface FactorProblem {
+  /** Place among the job's factors, and which part of it is wrong. */
+  readonly at: number
+  readonly part: 'name' | 'value'
+  readonly field: string
+  /** What is wrong and what would be right. */
+  readonly message: string
+}
+
+/** What is wrong with the factors that a job sets; empty where all are right. */
+export function factorProblems(job: Pick<Job, 'basis' | 'factors'>): readonly FactorProblem[] {
   const known = BASIS_SOURCES.find(({ id }) => id === job.basis)?.factors ?? []
   return job.factors.flatMap(({ name, value }, at) => {
     const factor = known.find((one) => one.name === name)
     if (!factor) {
       const names = known.map((one) => one.name).join(', ')
-      return [{ field: `job.factors[${at}].name`, message: `"${name}" is not a factor of this basis: ${names}.` }]
+      return [problemOf(at, 'name', `"${name}" is not a factor of this basis: ${names}.`)]
+    }
+    if (job.factors.findIndex((one) => one.name === name) < at) {
+      return [problemOf(at, 'name', `${factor.title} is given twice; give it once.`)]
     }
     if (value >= factor.least && value <= factor.most) return []
     const range = `${factor.least} to ${factor.most}`
-    return [{ field: `job.factors[${at}].value`, message: `${factor.title} is ${value}; it must lie in ${range}.` }]
+    return [problemOf(at, 'value', `${factor.title} is ${value}; it must lie in ${range}.`)]
   })
 }
+
+const problemOf = (at: number, part: FactorProblem['part'], message: string): FactorProblem => ({
+  at,
+  part,
+  field: `job.factors[${at}].${part}`,
+  message,
+})

@@ -1,7 +1,7 @@
 /** Bursting behind a live anchor, in the thickness and in plan: steel asked for against steel counted in the window. */
 
 import { whyNoRule, type AnchorSite } from '../anchor-site'
-import type { TieRule } from '../bases/basis'
+import type { Basis, TieRule } from '../bases/basis'
 import type { CloseGroup } from '../close-anchors'
 import { jackingForce, stageForce } from '../force'
 import { found } from '../layout-index'
@@ -122,7 +122,7 @@ function burst(asked: Asked, head: Head): Compared {
       stage: governing.stage.name,
       clause: governing.rule.clause,
       notes: [
-        `Rests on these readings: ${readings.join(', ')}.`,
+        `Rests on these readings: ${readings.map((id) => titleOf(basis, id)).join('; ')}.`,
         ...others,
         ...notes,
         ...steel.notes,
@@ -140,6 +140,9 @@ function burst(asked: Asked, head: Head): Compared {
   )
   return face === null ? result : judged(result)
 }
+
+const titleOf = ({ readings }: Basis, readingId: string): string =>
+  readings.find(({ id }) => id === readingId)?.title ?? readingId
 
 function answerOf(of: {
   readonly asked: Asked

@@ -40,7 +40,7 @@ export function distanceCheck(check: DistanceCheck): Compared {
     utilisation: null,
     spare,
     steps: check.steps,
-    readingId: null,
+    readingIds: [],
     statusOnceAccepted: status,
     mend: check.mend,
   }

@@ -31,14 +31,14 @@ export function byRatio(
 ): Compared {
   const { demand, limit, readings } = answer
   const accepted = statusOfRatio({ demand, limit, nearFrom: context.nearFrom })
-  const open = readings.find((id) => !context.basis.isAccepted(id))
+  const isOpen = readings.some((id) => !context.basis.isAccepted(id))
   return comparison(head, answer, {
     compares: 'ratio',
-    status: open === undefined ? accepted : 'needs-judgement',
+    status: isOpen ? 'needs-judgement' : accepted,
     statusOnceAccepted: accepted,
     utilisation: utilisationOf(answer),
     spare: null,
-    readingId: open ?? readings[0] ?? null,
+    readingIds: readings,
   })
 }
 
@@ -52,11 +52,11 @@ export function atLeast(head: Head, answer: Answer): Compared {
     statusOnceAccepted: status,
     utilisation: null,
     spare,
-    readingId: null,
+    readingIds: [],
   })
 }
 
-type Verdict = Pick<Compared, 'compares' | 'status' | 'statusOnceAccepted' | 'utilisation' | 'spare' | 'readingId'>
+type Verdict = Pick<Compared, 'compares' | 'status' | 'statusOnceAccepted' | 'utilisation' | 'spare' | 'readingIds'>
 
 /** Written out, since spreading a check thousands of times in a pour costs more than the check. */
 function comparison(head: Head, answer: Answer, verdict: Verdict): Compared {
@@ -78,7 +78,7 @@ function comparison(head: Head, answer: Answer, verdict: Verdict): Compared {
     utilisation: verdict.utilisation,
     spare: verdict.spare,
     steps: answer.steps,
-    readingId: verdict.readingId,
+    readingIds: verdict.readingIds,
     statusOnceAccepted: verdict.statusOnceAccepted,
     mend: null,
   }
