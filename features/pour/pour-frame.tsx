@@ -5,8 +5,8 @@ import { Failed } from '@/components/ui/states'
 import { NavBar } from '@/components/ui/nav-bar'
 import { Screen } from '@/components/ui/screen'
 import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
-import { Text } from '@/components/ui/text'
 import { useJobDraft, type JobDraft } from '../editing/job-draft'
+import { SaveState } from '../editing/save-state'
 import { SHOWN_COUNTS } from './counts'
 
 export type PourPage = 'plan' | 'zones' | 'schedule'
@@ -42,7 +42,7 @@ export function PourFrame({ pourId, page, counts, actions, children }: PourFrame
     <Screen
       title={`Pour ${pour.mark}${PAGE_WORDS[page]}`}
       parents={page === 'plan' ? parents : [...parents, { label: `Pour ${pour.mark}`, href: base }]}
-      summary={<Summary counts={counts} save={saveText(job)} />}
+      summary={<Summary counts={counts} />}
       actions={actions}
       nav={
         <NavBar
@@ -62,10 +62,12 @@ export function PourFrame({ pourId, page, counts, actions, children }: PourFrame
 
 /** The pages above every page of a job's pours. */
 export const jobParents = ({ jobId, layout }: Pick<JobDraft, 'jobId' | 'layout'>) =>
-  [{ label: layout.job.title, href: `/jobs/${jobId}` }] as const
+  [
+    { label: 'Jobs', href: '/' },
+    { label: layout.job.title, href: `/jobs/${jobId}` },
+  ] as const
 
-function Summary(props: { readonly counts: Readonly<Record<Status, number>> | undefined; readonly save: string }) {
-  const { counts, save } = props
+function Summary({ counts }: Pick<PourFrameProps, 'counts'>) {
   return (
     <>
       {counts
@@ -73,21 +75,7 @@ function Summary(props: { readonly counts: Readonly<Record<Status, number>> | un
             <StatusMark key={status} status={status} words={`${counts[status]} ${STATUS_WORD[status]}`} />
           ))
         : null}
-      <Text kind="small" tone="soft">
-        {save}
-      </Text>
+      <SaveState />
     </>
   )
 }
-
-const SAVE_WORDS: Readonly<Record<JobDraft['save'], string>> = {
-  saved: 'Draft, saved',
-  saving: 'Draft, saving …',
-  unsaved: 'Draft, not saved yet',
-  'not-sent': 'Draft, kept on this device until the server answers',
-  conflict: 'Draft, changed by somebody else as well',
-  refused: 'Draft, not saved',
-}
-
-const saveText = ({ save, problem }: JobDraft): string =>
-  save === 'refused' && problem !== null ? `${SAVE_WORDS.refused}: ${problem}` : SAVE_WORDS[save]

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest'
 import { joined, movedEnd, split } from '@/features/pour/length-commands'
 
-const length = (id: string, fromMm: number, toMm: number, soffitMm = 0) => ({
+const length = (id: string, [fromMm, toMm]: readonly [number, number], soffitMm = 0) => ({
   id,
   fromMm,
   toMm,
@@ -11,7 +11,7 @@ const length = (id: string, fromMm: number, toMm: number, soffitMm = 0) => ({
   jackClearMm: null,
   access: '',
 })
-const two = [length('a', 0, 6000), length('b', 6000, 18_000, -200)]
+const two = [length('a', [0, 6000]), length('b', [6000, 18_000], -200)]
 const ends = (lengths: readonly { id: string; fromMm: number; toMm: number }[] | null) =>
   lengths?.map(({ id, fromMm, toMm }) => [id, fromMm, toMm])
 
@@ -44,11 +44,11 @@ test('a split parts a length in its middle, and both keep what it was', () => {
 })
 
 test('a length too short for whole millimetres is not split', () => {
-  expect(ends(split([length('a', 0, 1)], 'a', 'b'))).toEqual([['a', 0, 1]])
+  expect(ends(split([length('a', [0, 1])], 'a', 'b'))).toEqual([['a', 0, 1]])
 })
 
 test('the neighbour takes the place of a length that goes', () => {
   expect(ends(joined(two, 'b'))).toEqual([['a', 0, 18_000]])
   expect(ends(joined(two, 'a'))).toEqual([['b', 0, 18_000]])
-  expect(ends(joined([length('a', 0, 6000)], 'a'))).toEqual([['a', 0, 6000]])
+  expect(ends(joined([length('a', [0, 6000])], 'a'))).toEqual([['a', 0, 6000]])
 })

@@ -1,0 +1,191 @@
+import { toEngine } from '@wedgeline/contract'
+import { layoutIndex, zonesOfPour } from '@wedgeline/engine/geometry'
+import type { Schedule } from '@wedgeline/engine'
+import { useMemo } from 'react'
+import { StyleSheet, View } from 'react-native'
+import { colour, space } from '@/components/theme'
+import { Banner } from '@/components/ui/banner'
+import { Button } from '@/components/ui/button'
+import { Icon } from '@/components/ui/icon'
+import { Link } from '@/components/ui/link'
+import { Section } from '@/components/ui/screen'
+import { Empty, Failed, Waiting } from '@/components/ui/states'
+import { Text } from '@/components/ui/text'
+import { failureOf } from '@/lib/failure'
+import { FAMILY_WORDS } from '../checks/words'
+import { edgePathOf } from '../checks/zone-words'
+import { useJobDraft } from '../editing/job-draft'
+import { PourFrame } from '../pour/pour-frame'
+import { problemLines, type ProblemLine } from './schedule-words'
+import { ScheduleTable, TotalsTable } from './schedule-table'
+import { ShapeFigure } from './shape-figure'
+import { useSchedule, useWorkbookExport } from './use-schedule'
+
+/** The bar schedule of a pour, and its workbook. */
+export function ScheduleScreen({ jobId, pourId }: { readonly jobId: string; readonly pourId: string }) {
+  const { roles, save } = useJobDraft()
+  const schedule = useSchedule(pourId)
+  const workbook = useWorkbookExport(pourId)
+  const mayExport = roles.some((role) => role === 'drafter' || role === 'detailer' || role === 'engineer')
+  const errors = schedule.data?.problems.filter(({ severity }) => severity === 'error').length ?? 0
+  return (
+    <PourFrame
+      pourId={pourId}
+      page="schedule"
+      actions={
+        mayExport ? (
+          <Button
+            kind="main"
+            label="Export workbook"
+            icon={<Icon name="download" colour={errors > 0 || workbook.isBusy ? colour.soft : colour.onRust} />}
+            busy={workbook.isBusy}
+            disabled={!schedule.data || errors > 0}
+            onPress={workbook.start}
+          />
+        ) : null
+      }
+    >
+      {() => (
+        <>
+          <Banner tone="near" words="DRAFT: not for construction. No engineer has approved this pour." />
+          {workbook.problem ? <Banner tone="over" words={workbook.problem} isUrgent /> : null}
+          {workbook.file ? <Written {...workbook.file} /> : null}
+          {schedule.data ? (
+            <ScheduleParts jobId={jobId} pourId={pourId} schedule={schedule.data} />
+          ) : schedule.error ? (
+            <Failed
+              what="The schedule could not be had."
+              advice={failureOf(schedule.error).sentence}
+              onRetry={() => void schedule.refetch()}
+            />
+          ) : (
+            <Waiting what={save === 'saved' ? 'the bar schedule' : 'the bar schedule, once the last edits are saved'} />
+          )}
+        </>
+      )}
+    </PourFrame>
+  )
+}
+
+function Written({ fileId, name }: { readonly fileId: string; readonly name: string }) {
+  return (
+    <Banner
+      words={`${name} is written.`}
+      actions={<Button label="Download it again" fileHref={`/exports/${fileId}`} />}
+    />
+  )
+}
+
+interface PartsProps {
+  readonly jobId: string
+  readonly pourId: string
+  readonly schedule: Schedule
+}
+
+function ScheduleParts({ jobId, pourId, schedule }: PartsProps) {
+  const codes = [...new Set(schedule.rows.filter(({ member }) => member).map(({ code }) => code))].sort()
+  if (schedule.rows.length === 0) {
+    return (
+      <Empty
+        what="This pour has no bars yet."
+        firstStep="Give an anchor or an edge its steel; every set of bars becomes a mark here."
+        action={<Button kind="main" label="To the plan" href={`/jobs/${jobId}/pours/${pourId}`} />}
+      />
+    )
+  }
+  return (
+    <>
+      <Problems jobId={jobId} pourId={pourId} schedule={schedule} />
+      <Section title="Bar marks">
+        <ScheduleTable schedule={schedule} />
+      </Section>
+      <View style={styles.halves}>
+        <View style={styles.half}>
+          <Section title="Totals">
+            <TotalsTable schedule={schedule} />
+          </Section>
+        </View>
+        <View style={styles.half}>
+          <Section title="Shapes, not to scale">
+            <View style={styles.shapes}>
+              {codes.map((code) => (
+                <View key={code} style={styles.shape}>
+                  <ShapeFigure code={code} size={1.2} />
+                  <Text kind="small">{`Shape ${code}`}</Text>
+                </View>
+              ))}
+            </View>
+          </Section>
+        </View>
+      </View>
+      <Section title="Notes">
+        <Text>{`Shapes, dimensions and lengths follow ${schedule.edition}; reinforcement ${schedule.grade}.`}</Text>
+        {schedule.notes.map((note) => (
+          <Text key={note} tone="soft">
+            {note}
+          </Text>
+        ))}
+        {schedule.notYetChecked.length > 0 ? (
+          <Text kind="strong">
+            {`Not yet checked in this pour: ${schedule.notYetChecked.map((family) => FAMILY_WORDS[family]).join(', ')}.`}
+          </Text>
+        ) : null}
+        <Text tone="soft">
+          Results assist a qualified engineer and do not replace one. Local codes and licensed practice govern.
+        </Text>
+      </Section>
+    </>
+  )
+}
+
+function Problems({ jobId, pourId, schedule }: PartsProps) {
+  const { layout } = useJobDraft()
+  const { lines, edgeOf } = useMemo(() => {
+    const index = layoutIndex(toEngine(layout))
+    const zones = zonesOfPour(index, pourId)
+    return {
+      lines: problemLines(schedule, index, new Map(zones.map(({ id, name }) => [name, id]))),
+      edgeOf: new Map(zones.map((zone) => [zone.id, edgePathOf(jobId, zone)])),
+    }
+  }, [layout, schedule, pourId, jobId])
+  if (lines.length === 0) return null
+  const errors = lines.filter(({ severity }) => severity === 'error')
+  const warnings = lines.filter(({ severity }) => severity === 'warning')
+  const list = (some: readonly ProblemLine[]) =>
+    some.map((line, at) => (
+      <Problem key={at} line={line} href={line.zoneId === null ? null : (edgeOf.get(line.zoneId) ?? null)} />
+    ))
+  return (
+    <>
+      {errors.length > 0 ? <Section title="What keeps the workbook from being written">{list(errors)}</Section> : null}
+      {warnings.length > 0 ? <Section title="To look at before issue">{list(warnings)}</Section> : null}
+    </>
+  )
+}
+
+interface ProblemProps {
+  readonly line: ProblemLine
+  readonly href: ReturnType<typeof edgePathOf>
+}
+
+function Problem({ line: { severity, about, message }, href }: ProblemProps) {
+  return (
+    <View style={styles.problem}>
+      <Icon name={severity === 'error' ? 'over' : 'near'} colour={severity === 'error' ? colour.over : colour.near} />
+      <View style={styles.words}>
+        <Text kind="strong">{about}</Text>
+        <Text>{message}</Text>
+        {href ? <Link href={href}>Open it on its edge</Link> : null}
+      </View>
+    </View>
+  )
+}
+
+const styles = StyleSheet.create({
+  halves: { flexDirection: 'row', flexWrap: 'wrap', gap: space.xl },
+  half: { flexGrow: 1, flexBasis: 320, minWidth: 0 },
+  shapes: { flexDirection: 'row', flexWrap: 'wrap', gap: space.l },
+  shape: { alignItems: 'center', gap: space.xs },
+  problem: { flexDirection: 'row', gap: space.s, paddingVertical: space.xs },
+  words: { flex: 1, minWidth: 0, gap: 2 },
+})
