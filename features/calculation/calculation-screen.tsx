@@ -174,7 +174,7 @@ function SheetHead({ zone, pour, basis }: ZoneSheetProps) {
 }
 
 const styles = StyleSheet.create({
-  actions: { flexDirection: 'row', flexWrap: 'wrap', gap: space.s },
+  actions: { flexDirection: 'row', flexWrap: 'wrap', gap: space.s, flexShrink: 1 },
   sheet: {
     width: '100%',
     maxWidth: 1000,

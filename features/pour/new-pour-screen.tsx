@@ -220,6 +220,6 @@ const styles = StyleSheet.create({
   form: { flex: 3, gap: space.xl, minWidth: 0 },
   beside: { flex: 2, minWidth: 0 },
   fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m },
-  field: { flexGrow: 1, flexBasis: 170, maxWidth: 340, minWidth: 0 },
+  field: { flexGrow: 1, flexBasis: 150, maxWidth: 340, minWidth: 0 },
   row: { flexDirection: 'row', flexWrap: 'wrap', gap: space.s },
 })

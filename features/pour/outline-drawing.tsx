@@ -5,7 +5,7 @@ import { Dimension } from '@/components/drawing/dimension'
 import { DrawingText } from '@/components/drawing/drawing-text'
 import { colour, space } from '@/components/theme'
 import { Text } from '@/components/ui/text'
-import { boundsOf, pathThrough, planScale } from './plan-scale'
+import { boundsOf, pathThrough, planScale, type PlanScale } from './plan-scale'
 import type { PlanPoint } from './pour-commands'
 
 export interface OutlineDrawingProps {
@@ -34,22 +34,17 @@ export function OutlineDrawing({ corners, others, isSound }: OutlineDrawingProps
           role="img"
           aria-label={`Outline with ${corners.length} corners, north up`}
         >
-          {others.map(({ mark, outline }) => (
-            <Path
-              key={mark}
-              d={pathThrough(scale, outline.map(spot), true)}
-              fill="none"
-              stroke={colour.soft}
-              strokeWidth={1}
-              strokeDasharray="4 3"
-            />
+          {others.map((pour) => (
+            <OtherPour key={pour.mark} {...pour} scale={scale} />
           ))}
-          <Path
-            d={pathThrough(scale, points, isSound)}
-            fill={isSound ? colour.concrete : 'none'}
-            stroke={isSound ? colour.ink : colour.over}
-            strokeWidth={2}
-          />
+          {points.length > 0 ? (
+            <Path
+              d={pathThrough(scale, points, isSound)}
+              fill={isSound ? colour.concrete : 'none'}
+              stroke={isSound ? colour.ink : colour.over}
+              strokeWidth={2}
+            />
+          ) : null}
           {isSound ? <Sizes points={points} at={scale.at} /> : null}
           {points.map((point, i) => {
             const { x, y } = scale.at(point)
@@ -72,6 +67,26 @@ export function OutlineDrawing({ corners, others, isSound }: OutlineDrawingProps
         </Text>
       )}
     </View>
+  )
+}
+
+function OtherPour({ mark, outline, scale }: OutlineDrawingProps['others'][number] & { readonly scale: PlanScale }) {
+  const points = outline.map(spot)
+  const { left, right, bottom, top } = boundsOf(points)
+  const middle = scale.at({ x: (left + right) / 2, y: (bottom + top) / 2 })
+  return (
+    <>
+      <Path
+        d={pathThrough(scale, points, true)}
+        fill="none"
+        stroke={colour.soft}
+        strokeWidth={1}
+        strokeDasharray="4 3"
+      />
+      <DrawingText x={middle.x} y={middle.y} fill={colour.soft} textAnchor="middle">
+        {mark}
+      </DrawingText>
+    </>
   )
 }
 

@@ -61,7 +61,9 @@ export function planData(index: LayoutIndex, pourId: string): PlanData {
   return {
     outline: pour.outline,
     regions: pour.regions,
-    obstructions: index.layout.obstructions.filter(({ levelId }) => levelId === pour.levelId),
+    obstructions: index.layout.obstructions.filter(
+      ({ levelId, outline }) => levelId === pour.levelId && isBeside(outline, pour.outline),
+    ),
     pans: (index.pansOfPour.get(pourId) ?? []).map((pan) => ({ id: pan.id, mark: pan.mark, outline: panOutline(pan) })),
     edges: edges.map((edge) => planEdge(index, edge)),
     tendons: tendons.flatMap((tendon) => planTendon(index, tendon)),
@@ -75,6 +77,16 @@ export function planData(index: LayoutIndex, pourId: string): PlanData {
       direction: alongAzimuth(azimuth),
     })),
   }
+}
+
+/** Things further off than this belong to the drawing of another pour, mm. */
+const BESIDE = 1500
+
+function isBeside(thing: readonly Point[], slab: readonly Point[]): boolean {
+  const [xs, ys] = [slab.map(({ x }) => x), slab.map(({ y }) => y)]
+  const within = (value: number, all: readonly number[]) =>
+    value >= Math.min(...all) - BESIDE && value <= Math.max(...all) + BESIDE
+  return thing.some(({ x, y }) => within(x, xs) && within(y, ys))
 }
 
 function planEdge(index: LayoutIndex, edge: Edge): PlanEdge {

@@ -6,14 +6,24 @@ import { colour } from '@/components/theme'
 import type { PlanAnchor, PlanData, PlanEdge } from './plan-data'
 import { lineAcross, pathThrough, type Bounds, type PlanScale, type Spot } from './plan-scale'
 
+/** A bubble and a little air. */
+const BUBBLE_PX = 25
+
 /** Lines of the grid over the pour, named beyond its north or west side. */
-export function PlanGrid(props: { readonly data: PlanData; readonly bounds: Bounds; readonly scale: PlanScale }) {
-  const { data, bounds, scale } = props
-  const out = 14 / scale.pxPerMm
+export function PlanGrid(props: {
+  readonly data: PlanData
+  readonly bounds: Bounds
+  readonly scale: PlanScale
+  /** Room round the slab, px: bubbles stand at its outside, marks of edges between them and the slab. */
+  readonly margin: number
+}) {
+  const { data, bounds, scale, margin } = props
+  const out = (margin - BUBBLE_PX) / scale.pxPerMm
+  const stub = 10 / scale.pxPerMm
   const room = {
     left: bounds.left - out,
-    right: bounds.right + out,
-    bottom: bounds.bottom - out,
+    right: bounds.right + stub,
+    bottom: bounds.bottom - stub,
     top: bounds.top + out,
   }
   return (

@@ -108,5 +108,5 @@ function concreteOf(name: string, pour: PourData): Partial<PourData> {
 
 const styles = StyleSheet.create({
   fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m },
-  field: { flexGrow: 1, flexBasis: 180, maxWidth: 320, minWidth: 0 },
+  field: { flexGrow: 1, flexBasis: 150, maxWidth: 320, minWidth: 0 },
 })

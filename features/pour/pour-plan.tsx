@@ -1,7 +1,7 @@
 import type { LayoutIndex } from '@wedgeline/engine'
 import { useLayoutEffect, useMemo, useRef, useState } from 'react'
 import { StyleSheet, View } from 'react-native'
-import Svg, { ClipPath, Defs, G, Path } from 'react-native-svg'
+import Svg, { ClipPath, Defs, G, Path, Rect } from 'react-native-svg'
 import { DrawingText } from '@/components/drawing/drawing-text'
 import { Hatch, hatchFill } from '@/components/drawing/hatch'
 import { ScaleBar } from '@/components/drawing/scale-bar'
@@ -15,7 +15,8 @@ import { boundsOf, pathThrough, planScale } from './plan-scale'
 
 const WEDGE = 'pour-wedge'
 const ZOOM = { least: 1, most: 12, step: 1.5 } as const
-const MARGIN = { wide: 64, phone: 40 } as const
+const MARGIN = { wide: 78, phone: 62 } as const
+const HEIGHT = { wide: 720, phone: 420 } as const
 
 export interface PourPlanProps {
   readonly index: LayoutIndex
@@ -31,7 +32,7 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
   const data = useMemo(() => planData(index, pourId), [index, pourId])
   const bounds = useMemo(() => boundsOf(data.outline), [data.outline])
   const margin = isWide ? MARGIN.wide : MARGIN.phone
-  const scale = planScale(bounds, { width, heightMax: isWide ? 540 : 420, margin, zoom })
+  const scale = planScale(bounds, { width, heightMax: isWide ? HEIGHT.wide : HEIGHT.phone, margin, zoom })
   const sheet = useKeptMiddle(zoom)
   const areaOf = ({ outline }: PlanArea) => pathThrough(scale, outline, true)
   const outline = pathThrough(scale, data.outline, true)
@@ -42,7 +43,7 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
           <ZoomTools zoom={zoom} onZoom={setZoom} />
           <View
             ref={sheet}
-            style={[styles.sheet, { maxHeight: isWide ? 600 : 460 }]}
+            style={[styles.sheet, { maxHeight: (isWide ? HEIGHT.wide : HEIGHT.phone) + 16 }]}
             role="region"
             aria-label="Plan of the pour; the table of edges says the same in words"
             tabIndex={0}
@@ -69,7 +70,7 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
                   />
                 ))}
               </G>
-              <PlanGrid data={data} bounds={bounds} scale={scale} />
+              <PlanGrid data={data} bounds={bounds} scale={scale} margin={margin} />
               {data.pans.map((pan) => (
                 <Path key={pan.id} d={areaOf(pan)} fill={colour.sheet} stroke={colour.ink} strokeWidth={1.2} />
               ))}
@@ -137,12 +138,16 @@ function AreaName(props: {
 }) {
   const { area, at } = props
   const points = area.outline.map(at)
-  const x = points.reduce((sum, point) => sum + point.x, 0) / points.length
-  const lowest = Math.max(...points.map(({ y }) => y))
+  const middle = (values: readonly number[]) => (Math.min(...values) + Math.max(...values)) / 2
+  const [x, y] = [middle(points.map((point) => point.x)), middle(points.map((point) => point.y))]
+  const width = area.mark.length * 6 + 6
   return (
-    <DrawingText x={x} y={lowest + 12} size={11} fill={colour.soft} textAnchor="middle">
-      {area.mark}
-    </DrawingText>
+    <G>
+      <Rect x={x - width / 2} y={y - 7} width={width} height={14} fill={colour.sheet} />
+      <DrawingText x={x} y={y + 4} size={11} textAnchor="middle">
+        {area.mark}
+      </DrawingText>
+    </G>
   )
 }
 

@@ -11,9 +11,9 @@ export function ShapeFigure({ code, size = 1 }: { readonly code: string; readonl
   const line = drawing.line.map(({ x, y }) => `${x} ${y}`).join('L')
   return (
     <Svg
-      width={120 * size}
-      height={60 * size}
-      viewBox="0 0 120 60"
+      width={132 * size}
+      height={76 * size}
+      viewBox="-6 -8 132 76"
       role="img"
       aria-label={`Shape ${code}, with ${drawing.labels.map(({ name }) => name).join(', ') || 'no letters'}`}
     >
