@@ -10,7 +10,7 @@ import { TextField } from '@/components/ui/text-field'
 import { ApprovalSection } from './approval-section'
 import { DEPTH_FIELDS, DISTANCE_FIELDS, LENGTH_FIELDS, SIZE_FIELDS, SPLAY_FIELDS } from './fields'
 import { LocalSteelSection } from './local-steel-section'
-import { gridStyle, NumberGrid } from './number-grid'
+import { gridStyle, NumberGrid, useCellStyle } from './number-grid'
 import { asKind, type Errors, type TypedHardware } from './typed'
 
 export interface PartProps {
@@ -51,10 +51,11 @@ export function HardwareForm({ jacks, ...part }: PartProps & { readonly jacks: r
 const NO_JACK = ''
 
 function NameSection({ typed, onChange, errors, disabled }: PartProps) {
+  const cell = useCellStyle()
   return (
     <Section title="What it is">
       <View style={gridStyle.grid}>
-        <View style={gridStyle.cell}>
+        <View style={cell}>
           <TextField
             label="Name"
             hint="As the supplier calls it."
@@ -66,7 +67,7 @@ function NameSection({ typed, onChange, errors, disabled }: PartProps) {
             required
           />
         </View>
-        <View style={gridStyle.cell}>
+        <View style={cell}>
           <Select
             label="Gives its force to the concrete by"
             options={KIND_OPTIONS}
@@ -75,7 +76,7 @@ function NameSection({ typed, onChange, errors, disabled }: PartProps) {
             onChange={(kind) => onChange(asKind(typed, kind))}
           />
         </View>
-        <View style={gridStyle.cell}>
+        <View style={cell}>
           <Select
             label="Stands at"
             options={END_OPTIONS.map((option) => ({
@@ -87,7 +88,7 @@ function NameSection({ typed, onChange, errors, disabled }: PartProps) {
             onChange={(ends) => onChange({ ends })}
           />
         </View>
-        <View style={gridStyle.cell}>
+        <View style={cell}>
           <NumberField
             label="Strands, at most"
             usual={{ range: '1 to 7 in slabs', source: 'common practice' }}

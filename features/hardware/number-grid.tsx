@@ -1,5 +1,5 @@
 import { StyleSheet, View } from 'react-native'
-import { space } from '@/components/theme'
+import { space, useWide } from '@/components/theme'
 import { NumberField } from '@/components/ui/number-field'
 import type { NumberSpec } from './fields'
 import type { Errors } from './typed'
@@ -17,10 +17,11 @@ export interface NumberGridProps<Key extends string> {
 /** Numbers side by side, as many as the width takes. */
 export function NumberGrid<Key extends string>(props: NumberGridProps<Key>) {
   const { specs, values, onChange, errors, path = '', disabled } = props
+  const cell = useCellStyle()
   return (
     <View style={gridStyle.grid}>
       {specs.map(({ key, isOptional, ...words }) => (
-        <View key={key} style={gridStyle.cell}>
+        <View key={key} style={cell}>
           <NumberField
             {...words}
             value={values[key]}
@@ -37,5 +38,9 @@ export function NumberGrid<Key extends string>(props: NumberGridProps<Key>) {
 
 export const gridStyle = StyleSheet.create({
   grid: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.m },
-  cell: { flexBasis: 220, flexGrow: 1, maxWidth: 340 },
+  cell: { width: 250 },
+  cellOnPhone: { flexBasis: 150, flexGrow: 1 },
 })
+
+/** Columns of one width where there is room; on a phone two share the width. */
+export const useCellStyle = () => (useWide() ? gridStyle.cell : gridStyle.cellOnPhone)

@@ -133,5 +133,5 @@ function SettingEntry({ field, form, errors, canSet, onChange }: SettingEntryPro
 
 const styles = StyleSheet.create({
   grid: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.xl, rowGap: space.l, paddingTop: space.s },
-  cell: { flexBasis: 300, flexGrow: 1, maxWidth: 420 },
+  cell: { width: 320, maxWidth: '100%' },
 })

@@ -47,5 +47,5 @@ export function FactorEntry({ factor, typed, errors, canSet, onChange }: FactorE
 }
 
 const styles = StyleSheet.create({
-  entry: { gap: space.s, flexBasis: 300, flexGrow: 1, maxWidth: 420 },
+  entry: { gap: space.s, width: 320, maxWidth: '100%' },
 })

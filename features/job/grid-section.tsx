@@ -30,19 +30,21 @@ export function GridSection() {
           action={canEdit ? add : null}
         />
       ) : (
-        <Table
-          caption="Grid lines"
-          columns={[
-            { key: 'name', head: 'Line', isRowHead: true, cell: ({ name }) => name },
-            { key: 'direction', head: 'Runs', cell: ({ azimuthDeg }) => directionText(azimuthDeg) },
-            { key: 'east', head: 'Through, east mm', align: 'end', cell: ({ xMm }) => xMm },
-            { key: 'north', head: 'Through, north mm', align: 'end', cell: ({ yMm }) => yMm },
-          ]}
-          rows={lines}
-          rowKey={({ id }) => id}
-          {...(canEdit ? { onSelect: setOpen } : {})}
-          maxHeight={320}
-        />
+        <View style={styles.table}>
+          <Table
+            caption="Grid lines"
+            columns={[
+              { key: 'name', head: 'Line', isRowHead: true, cell: ({ name }) => name },
+              { key: 'direction', head: 'Runs', cell: ({ azimuthDeg }) => directionText(azimuthDeg) },
+              { key: 'east', head: 'Through, east mm', align: 'end', cell: ({ xMm }) => xMm },
+              { key: 'north', head: 'Through, north mm', align: 'end', cell: ({ yMm }) => yMm },
+            ]}
+            rows={lines}
+            rowKey={({ id }) => id}
+            {...(canEdit ? { onSelect: setOpen } : {})}
+            maxHeight={320}
+          />
+        </View>
       )}
       {open ? <GridLineDialog line={open === 'new' ? null : open} onClose={() => setOpen(null)} /> : null}
     </Section>
@@ -147,4 +149,4 @@ function nameProblem(name: string, lines: readonly GridLine[], own: GridLine | n
   return isTaken ? `There is a grid line ${wanted} already. Give this one another name.` : undefined
 }
 
-const styles = StyleSheet.create({ fields: { gap: space.m } })
+const styles = StyleSheet.create({ fields: { gap: space.m }, table: { maxWidth: 720 } })

@@ -1,5 +1,6 @@
 import type { LayoutFile } from '@wedgeline/contract'
 import { useState } from 'react'
+import { View } from 'react-native'
 import { v7 as newId } from 'uuid'
 import { Button } from '@/components/ui/button'
 import { Dialog } from '@/components/ui/dialog'
@@ -22,17 +23,19 @@ export function LevelSection() {
       {layout.levels.length === 0 ? (
         <Text tone="soft">There is no level yet; the first pour brings its own.</Text>
       ) : (
-        <Table
-          caption="Levels"
-          columns={[
-            { key: 'mark', head: 'Level', isRowHead: true, cell: ({ mark }) => mark },
-            { key: 'title', head: 'Title', wraps: true, cell: ({ title }) => title || '–' },
-            { key: 'pours', head: 'Pours', cell: ({ id }) => poursOn(layout, id).join(', ') || 'none' },
-          ]}
-          rows={layout.levels}
-          rowKey={({ id }) => id}
-          {...(canEdit ? { onSelect: setOpen } : {})}
-        />
+        <View style={{ maxWidth: 720 }}>
+          <Table
+            caption="Levels"
+            columns={[
+              { key: 'mark', head: 'Level', isRowHead: true, cell: ({ mark }) => mark },
+              { key: 'title', head: 'Title', wraps: true, cell: ({ title }) => title || '–' },
+              { key: 'pours', head: 'Pours', cell: ({ id }) => poursOn(layout, id).join(', ') || 'none' },
+            ]}
+            rows={layout.levels}
+            rowKey={({ id }) => id}
+            {...(canEdit ? { onSelect: setOpen } : {})}
+          />
+        </View>
       )}
       {open ? <LevelDialog level={open === 'new' ? null : open} onClose={() => setOpen(null)} /> : null}
     </Section>

@@ -17,6 +17,9 @@ import type { JobDialogProps } from './new-job-dialog'
 /** As much as the server takes in one piece. */
 const FILE_MAX = 8_000_000
 
+const NOT_TAKEN = 'This file cannot be taken. Nothing was stored.'
+const isRefused = ({ severity }: Problem) => severity === 'refused'
+
 type PickedProblem = Pick<Problem, 'field' | 'message'>
 
 interface Refusal {
@@ -107,13 +110,12 @@ async function readFile(file: File): Promise<Refusal | LayoutFile> {
   if (file.size > FILE_MAX) return { words: 'This file is larger than 8 MB. Nothing was stored.', problems: [] }
   const { readLayoutText } = await import('@/features/work')
   const read = readLayoutText(await file.text())
-  return read.ok ? read.layout : { words: `${file.name} cannot be taken. Nothing was stored.`, problems: read.problems }
+  return read.ok ? read.layout : { words: NOT_TAKEN, problems: read.problems.filter(isRefused) }
 }
 
 function refusalOf(error: unknown): Refusal {
-  const { sentence, fields } = failureOf(error)
-  const problems = Object.entries(fields).map(([field, message]) => ({ field, message }))
-  return { words: `${sentence} Nothing was stored.`, problems: problems.length > 1 ? problems : [] }
+  const { sentence, problems } = failureOf(error)
+  return { words: problems.length > 0 ? NOT_TAKEN : `${sentence} Nothing was stored.`, problems }
 }
 
 function Refused({ refusal: { words, problems } }: { refusal: Refusal }) {

@@ -18,5 +18,5 @@ export function StatusCounts({ counts }: { counts: Counts }) {
 }
 
 const styles = StyleSheet.create({
-  line: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.xs },
+  line: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.xs, flexShrink: 1, minWidth: 0 },
 })

@@ -63,10 +63,7 @@ export function SignInScreen() {
             <View style={styles.actions}>
               <Button kind="main" label="Sign in" onPress={send} busy={signIn.isPending} />
             </View>
-            <Text tone="soft">
-              No account yet, or the password is lost? An admin of your company sends an invitation, which makes an
-              account and works once.
-            </Text>
+            <Text tone="soft">No account yet? An admin of your company sends an invitation, whose link makes one.</Text>
           </View>
         </Form>
       </Screen>
