@@ -9,7 +9,7 @@ import { Text } from './text'
 
 export interface BottomSheetProps {
   title: string
-  /** Stands at the end of the title's line. */
+  /** Stands under the title. */
   detail?: string | undefined
   isOpen: boolean
   onClose: () => void
@@ -39,10 +39,16 @@ export function BottomSheet({ title, detail, isOpen, onClose, children, bar }: B
             <View style={styles.handle} />
           </Pressable>
           <View style={styles.head}>
-            <Text kind="title" level={2} id={id} style={styles.title}>
-              {title}
-            </Text>
-            {detail ? <Text tone="soft">{detail}</Text> : null}
+            <View style={styles.title}>
+              <Text kind="title" level={2} id={id}>
+                {title}
+              </Text>
+              {detail ? (
+                <Text kind="small" tone="soft">
+                  {detail}
+                </Text>
+              ) : null}
+            </View>
             <Button label="Close" kind="quiet" iconOnly icon={<Icon name="close" />} onPress={onClose} />
           </View>
           <ScrollView style={styles.body} contentContainerStyle={styles.content}>
@@ -59,12 +65,12 @@ const styles = StyleSheet.create({
   over: { flex: 1 },
   above: { flex: 1 },
   sheet: { backgroundColor: colour.sheet, borderTopWidth: 2, borderColor: colour.ink },
-  half: { height: '56%' },
+  half: { height: '50%' },
   full: { height: '94%' },
   grip: { height: 24, alignItems: 'center', justifyContent: 'center' },
   handle: { width: 44, height: 4, backgroundColor: colour.line },
   head: { flexDirection: 'row', alignItems: 'center', gap: space.s, paddingLeft: space.l, paddingRight: space.xs },
-  title: { flex: 1 },
+  title: { flex: 1, minWidth: 0 },
   body: { flex: 1 },
   content: { padding: space.l, paddingTop: space.xs, gap: space.m },
   bar: { flexDirection: 'row', borderTopWidth: 1, borderColor: colour.ink },

@@ -23,6 +23,8 @@ export const ICON_LINES = {
   more: [{ d: 'M2 7h2v2H2zM7 7h2v2H7zM12 7h2v2h-2z', filled: true }],
   plus: [{ d: 'M8 2.5v11M2.5 8h11', width: 1.75 }],
   minus: [{ d: 'M2.5 8h11', width: 1.75 }],
+  whole: [{ d: 'M2 3.5v9M14 3.5v9M4.5 8h7M6.5 6l-2 2 2 2M9.5 6l2 2-2 2' }],
+  turn: [{ d: 'M3 6.5A5.2 5.2 0 0 1 13 7M13 9.5A5.2 5.2 0 0 1 3 9M13 3.5V7H9.5M3 12.5V9h3.5' }],
   undo: [{ d: 'M6 3 2.5 6.5 6 10M2.5 6.5H10a3.5 3.5 0 0 1 0 7H7' }],
   redo: [{ d: 'M10 3l3.5 3.5L10 10M13.5 6.5H6a3.5 3.5 0 0 0 0 7h3' }],
   search: [{ d: 'M7 2.5a4.5 4.5 0 1 0 0 9 4.5 4.5 0 0 0 0-9ZM10.3 10.3 14 14' }],

@@ -97,7 +97,7 @@ const styles = StyleSheet.create({
     columnGap: space.l,
     rowGap: space.xs,
   },
-  actions: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.s },
+  actions: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.s, flexShrink: 1 },
   nav: { borderBottomWidth: 1, borderColor: colour.rule, backgroundColor: colour.sheet },
   body: { flex: 1, minWidth: 0 },
   padded: { paddingVertical: space.l, gap: space.xl },

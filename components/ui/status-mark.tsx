@@ -34,10 +34,12 @@ export interface StatusMarkProps {
   markOnly?: boolean | undefined
   kind?: TextKind | undefined
   size?: number | undefined
+  /** In a table's row: what does not fit is cut off with an ellipsis. */
+  oneLine?: boolean | undefined
 }
 
 /** A status: a mark of its own shape and a word. */
-export function StatusMark({ status, words, markOnly, kind = 'body', size = 16 }: StatusMarkProps) {
+export function StatusMark({ status, words, markOnly, kind = 'body', size = 16, oneLine }: StatusMarkProps) {
   const tone = TONE[status]
   const word = STATUS_WORD[status]
   const isStrong = status === 'over' || status === 'stop'
@@ -46,7 +48,12 @@ export function StatusMark({ status, words, markOnly, kind = 'body', size = 16 }
       <Icon name={status} size={size} colour={colour[tone]} />
       {markOnly || (words && !words.includes(word)) ? <VisuallyHidden>{`${word}: `}</VisuallyHidden> : null}
       {markOnly ? null : (
-        <Text kind={kind} tone={isStrong ? tone : 'ink'} style={styles.words}>
+        <Text
+          kind={kind}
+          tone={isStrong ? tone : 'ink'}
+          style={styles.words}
+          {...(oneLine ? { numberOfLines: 1 } : {})}
+        >
           {words ?? word}
         </Text>
       )}

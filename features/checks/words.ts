@@ -100,6 +100,37 @@ export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
   anchorage: 'anchorage and laps',
 }
 
+/** A zone's worst check as short as a strip needs it: bursting in plan 2.58; cover, short 30. */
+export function worstShort({ status, checks }: ZoneResult): Worst | null {
+  const [first] = checks
+  if (status === null || !first || first.kind === 'advice') return null
+  const family = FAMILY_SHORT[first.family]
+  if (first.kind === 'refused') return { status, words: family }
+  if (first.compares === 'ratio') return { status, words: `${family} ${ratioText(first.utilisation)}` }
+  const spare = Math.round(first.spare ?? 0)
+  return { status, words: spare < 0 ? `${family}, short ${-spare}` : `${family}, spare ${spare}` }
+}
+
+const FAMILY_SHORT: Readonly<Record<Family, string>> = {
+  bearing: 'bearing',
+  'bursting-thickness': 'thickness',
+  'bursting-plan': 'plan',
+  spalling: 'spalling',
+  'depth-change': 'depth',
+  cover: 'cover',
+  spacing: 'spacing',
+  'straight-length': 'straight',
+  'edge-wedge': 'wedge',
+  joint: 'joint',
+  'pan-access': 'access',
+  'pan-bars': 'pan bars',
+  tendon: 'force',
+  'dead-end': 'dead end',
+  precompression: 'P/A',
+  fit: 'fit',
+  anchorage: 'anchorage',
+}
+
 /** What this version does not check at a zone, as one sentence; null where nothing is left. */
 export function notYetText(families: readonly Family[]): string | null {
   if (families.length === 0) return null

@@ -93,10 +93,16 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
               <Button
                 label={isWide && undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
                 icon={<Icon name="undo" />}
+                iconOnly={!isWide}
                 disabled={!canUndo}
                 onPress={undo}
               />
-              <Button label="Paste anchors" icon={<Icon name="paste" />} onPress={() => setPasting(true)} />
+              <Button
+                label="Paste anchors"
+                icon={<Icon name="paste" />}
+                iconOnly={!isWide}
+                onPress={() => setPasting(true)}
+              />
             </>
           ) : null}
           <Button label="Edge bars" onPress={() => select(`edge:${edge.id}`)} />

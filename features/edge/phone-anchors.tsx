@@ -6,6 +6,7 @@ import { StatusMark } from '@/components/ui/status-mark'
 import { Table } from '@/components/ui/table'
 import { TextField } from '@/components/ui/text-field'
 import { colour, space } from '@/components/theme'
+import { useJobDraft } from '../editing/job-draft'
 import type { AnchorRow } from './table/anchor-rows'
 
 export interface PhoneAnchorsProps {
@@ -72,6 +73,7 @@ function NextAnchor({ onInsert }: Pick<PhoneAnchorsProps, 'onInsert'>) {
 
 /** In thumb's reach under a sheet: the anchors before and after. */
 export function SheetBar({ rows, zone, onSelect }: Pick<PhoneAnchorsProps, 'rows' | 'zone' | 'onSelect'>) {
+  const { undo, canUndo, canEdit } = useJobDraft()
   const at = rows.findIndex(({ anchor }) => `anchor:${anchor.id}` === zone)
   const [before, after] = at < 0 ? [undefined, undefined] : [rows[at - 1], rows[at + 1]]
   const go = (row: AnchorRow | undefined) => row && onSelect(`anchor:${row.anchor.id}`)
@@ -87,6 +89,9 @@ export function SheetBar({ rows, zone, onSelect }: Pick<PhoneAnchorsProps, 'rows
           onPress={() => go(before)}
         />
       </View>
+      {canEdit ? (
+        <Button kind="quiet" large label="Undo" icon={<Icon name="undo" />} disabled={!canUndo} onPress={undo} />
+      ) : null}
       <View style={styles.grow}>
         <Button
           kind="quiet"

@@ -17,7 +17,7 @@ export interface AnchorDrawingProps {
 /** Slab shown behind the bearing face, mm, and beside the plate. */
 const BEHIND_MM = 700
 const BESIDE_MM = 120
-const GAP_PX = 28
+const GAP_PX = 44
 const FOOT_PX = 40
 
 /** Face and section of one anchor at one true scale, with the dimensions that are looked for on the deck. */
@@ -113,8 +113,8 @@ export function AnchorDrawing({ index, anchorId, bars }: AnchorDrawingProps) {
             strokeWidth={2}
           />
           <Dimension
-            from={{ x: 16, y: y(soffit) }}
-            to={{ x: 16, y: y(anchor.height) }}
+            from={{ x: GAP_PX - 10, y: y(soffit) }}
+            to={{ x: GAP_PX - 10, y: y(anchor.height) }}
             label={`${anchor.height - soffit}`}
             side="left"
           />

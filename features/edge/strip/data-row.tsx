@@ -61,6 +61,7 @@ export function DataRow({ label, scale, height, cells, gutter, isLabelAbove = fa
   const fitting = fittingLabels(
     inView.map((cell) => ({ id: cell.id, x: scale.x(cell.chainage), width: widthOf(cell), weight: cell.weight ?? 0 })),
   )
+  const shown = inView.filter((cell) => fitting.has(cell.id) || isClear(cell, { scale, inView, fitting, widthOf }))
   return (
     <View style={[styles.row, { height: isLabelAbove ? height + LABEL_PX : height }]}>
       <View style={isLabelAbove ? styles.labelAbove : [styles.label, { width: gutter }]}>
@@ -68,13 +69,10 @@ export function DataRow({ label, scale, height, cells, gutter, isLabelAbove = fa
           {label}
         </Text>
       </View>
-      {inView.map((cell) => {
+      {shown.map((cell) => {
         const isWhole = fitting.has(cell.id)
         const width = isWhole ? widthOf(cell) + 12 : ICON_PX
-        const left = Math.min(
-          Math.max(scale.x(cell.chainage) - width / 2, scale.left),
-          scale.left + scale.width - width,
-        )
+        const left = scale.x(cell.chainage) - width / 2
         return (
           <Cell key={cell.id} cell={cell} style={{ left, width, height }}>
             {cell.status ? <Icon name={cell.status} size={14} colour={colour[STATUS_COLOUR[cell.status]]} /> : null}
@@ -93,6 +91,23 @@ export function DataRow({ label, scale, height, cells, gutter, isLabelAbove = fa
         )
       })}
     </View>
+  )
+}
+
+/** A cell that keeps only its mark still needs room for it beside the labels that stand whole. */
+function isClear(
+  cell: DataCell,
+  row: {
+    readonly scale: StripScale
+    readonly inView: readonly DataCell[]
+    readonly fitting: ReadonlySet<string>
+    readonly widthOf: (cell: DataCell) => number
+  },
+): boolean {
+  const x = row.scale.x(cell.chainage)
+  return row.inView.every(
+    (other) =>
+      !row.fitting.has(other.id) || Math.abs(row.scale.x(other.chainage) - x) >= (row.widthOf(other) + ICON_PX) / 2 + 2,
   )
 }
 

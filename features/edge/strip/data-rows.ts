@@ -1,5 +1,5 @@
 import type { LayoutIndex, ZoneResult } from '@wedgeline/engine'
-import { worstWords } from '../../checks/words'
+import { worstShort, worstWords } from '../../checks/words'
 import { steelWords } from '../steel-words'
 import type { DataCell } from './data-row'
 import type { StripData } from './strip-data'
@@ -53,7 +53,8 @@ const WORST_WEIGHT = { stop: 6, over: 5, 'not-covered': 4, 'needs-judgement': 3,
 function worstRow({ data, results, onSelect }: RowsOf): Row {
   const cells = data.ends.flatMap((end): DataCell[] => {
     const result = results.get(`anchor:${end.id}`)
-    const worst = result ? worstWords(result) : null
+    const worst = result ? worstShort(result) : null
+    const whole = result ? worstWords(result) : null
     if (!worst) return []
     return [
       {
@@ -62,7 +63,7 @@ function worstRow({ data, results, onSelect }: RowsOf): Row {
         text: worst.words,
         status: worst.status,
         weight: WORST_WEIGHT[worst.status],
-        spoken: `${end.mark}: ${worst.words}`,
+        spoken: `${end.mark}: ${whole?.words ?? worst.words}`,
         onPress: () => onSelect(`anchor:${end.id}`),
       },
     ]

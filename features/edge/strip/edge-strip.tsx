@@ -28,8 +28,8 @@ export interface EdgeStripProps {
 }
 
 const PLAN_PX = { wide: 150, phone: 150 } as const
-const FACE_PX = { wide: 64, phone: 96 } as const
-const GUTTER_PX = { wide: 176, phone: 12 } as const
+const FACE_PX = { wide: 92, phone: 110 } as const
+const GUTTER_PX = { wide: 200, phone: 12 } as const
 /** On a phone an anchor every 1.2 m gets about 110 px. */
 const PHONE_VIEW_MM = 4000
 
@@ -50,7 +50,7 @@ export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpe
   }
   const gutter = isWide ? GUTTER_PX.wide : GUTTER_PX.phone
   const growsRight = data.frame.runsLeftToRight !== isOnDeck
-  const scale = stripScale({ view, left: gutter, width: Math.max(1, width - gutter - 16), growsRight })
+  const scale = stripScale({ view, left: gutter, width: Math.max(1, width - gutter - (isWide ? 36 : 16)), growsRight })
   const planHeight = isWide ? PLAN_PX.wide : PLAN_PX.phone
   const depth = data.highest - data.lowest
   const stretch = heightStretch(depth, scale.pxPerMm, isWide ? FACE_PX.wide : FACE_PX.phone)
@@ -60,6 +60,7 @@ export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpe
   const rows = dataRows({ index, data, results, selected, onSelect, isTableOpen })
   const look = { edge, view, setView, scale }
   const step = (by: number) => setView(scrolled(view, edge, by * (view.to - view.from) * 0.8 * (growsRight ? 1 : -1)))
+  const tools = <StripTools look={look} isOnDeck={isOnDeck} onDeck={setOnDeck} onStep={step} />
   return (
     <View
       style={styles.strip}
@@ -69,7 +70,7 @@ export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpe
     >
       {width === 0 ? null : (
         <>
-          <StripTools look={look} isOnDeck={isOnDeck} onDeck={setOnDeck} onStep={step} />
+          {isWide ? <View style={[styles.gutterTools, { width: gutter }]}>{tools}</View> : null}
           <Overview
             edge={edge}
             view={view}
@@ -102,6 +103,7 @@ export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpe
               />
             </Svg>
           </View>
+          {isWide ? null : <View style={styles.tools}>{tools}</View>}
           {isWide ? null : (
             <Text kind="small" tone="soft" style={styles.note}>
               {notes({ data, stretch, isOnDeck }).join(' · ')}
@@ -182,19 +184,27 @@ function StripTools(props: {
     look.setView(zoomed(look.view, look.edge, { factor, about }))
   }
   return (
-    <View style={styles.tools} dataSet={{ print: 'no' }}>
+    <>
       <Button kind="quiet" label="Scroll left" iconOnly icon={<Icon name="back" />} onPress={() => onStep(-1)} />
       <Button kind="quiet" label="Scroll right" iconOnly icon={<Icon name="forward" />} onPress={() => onStep(1)} />
       <Button kind="quiet" label="Closer" iconOnly icon={<Icon name="plus" />} onPress={() => zoom(0.5)} />
       <Button kind="quiet" label="Further away" iconOnly icon={<Icon name="minus" />} onPress={() => zoom(2)} />
-      <Button kind="quiet" label="Whole edge" onPress={() => look.setView(look.edge)} />
+      <Button
+        kind="quiet"
+        label="Whole edge"
+        iconOnly
+        icon={<Icon name="whole" />}
+        onPress={() => look.setView(look.edge)}
+      />
       <Button
         kind="quiet"
         label={isOnDeck ? 'See from outside' : 'See from the deck'}
+        iconOnly
+        icon={<Icon name="turn" />}
         aria-pressed={isOnDeck}
         onPress={() => onDeck(!isOnDeck)}
       />
-    </View>
+    </>
   )
 }
 
@@ -219,7 +229,8 @@ function Picked(props: {
 
 const styles = StyleSheet.create({
   strip: { backgroundColor: colour.sheet, paddingBottom: space.s },
-  tools: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'flex-end', paddingHorizontal: space.s },
+  tools: { flexDirection: 'row', justifyContent: 'space-between', paddingHorizontal: space.s },
+  gutterTools: { position: 'absolute', top: 2, left: 0, flexDirection: 'row', justifyContent: 'flex-end', zIndex: 1 },
   bandNames: { position: 'absolute', left: 0, alignItems: 'flex-end', paddingRight: space.s, zIndex: 1 },
   bandName: { textAlign: 'right' },
   note: { paddingHorizontal: space.m, paddingVertical: space.xs },

@@ -258,7 +258,7 @@ function AnchorLine(of: {
       ))}
       <td style={styles.words}>{row.steel || 'none'}</td>
       <td style={styles.words}>
-        {row.worst ? <StatusMark status={row.worst.status} words={row.worst.words} kind="figure" /> : '–'}
+        {row.worst ? <StatusMark status={row.worst.status} words={row.worst.words} kind="figure" oneLine /> : '–'}
       </td>
     </tr>
   )
@@ -371,7 +371,14 @@ const styles = {
     fontWeight: 400,
     textAlign: 'start',
   },
-  words: { padding: '1px 8px', borderBottom: `1px solid ${colour.rule}`, whiteSpace: 'nowrap' },
+  words: {
+    padding: '1px 8px',
+    borderBottom: `1px solid ${colour.rule}`,
+    whiteSpace: 'nowrap',
+    maxWidth: 200,
+    overflow: 'hidden',
+    textOverflow: 'ellipsis',
+  },
   here: { boxShadow: `inset 0 0 0 2px ${colour.ink}` },
   picked: { background: colour.wash },
   input: {
