@@ -1,9 +1,13 @@
 /** Sign-in stands between a person and the page that was asked for; these two keep the way. */
 
-/** Path of sign-in that leads back to the page in the address bar. */
-export function signInPath(): string {
+/** Page in the address bar, with what it asks for. */
+export function pageInAddressBar(): string {
   const here = globalThis.location as Location | undefined
-  const asked = here ? `${here.pathname}${here.search}` : '/'
+  return here ? `${here.pathname}${here.search}` : '/'
+}
+
+/** Path of sign-in that leads back to the page that was asked for. */
+export function signInPath(asked: string): string {
   return asked === '/' ? '/sign-in' : `/sign-in?to=${encodeURIComponent(asked)}`
 }
 

@@ -1,7 +1,7 @@
 import type { Href } from 'expo-router'
 import { Redirect } from 'expo-router'
 import type { ReactNode } from 'react'
-import { Suspense } from 'react'
+import { Suspense, useState } from 'react'
 import { View } from 'react-native'
 import { space } from '@/components/theme'
 import type { MenuItem } from '@/components/ui/menu'
@@ -10,14 +10,15 @@ import { Failed, Waiting } from '@/components/ui/states'
 import type { Me } from '@/lib/session'
 import { useSession, useSignOut } from '@/lib/session'
 import type { Account } from './header'
-import { signInPath } from './way-back'
+import { pageInAddressBar, signInPath } from './way-back'
 import { WorkShell } from './work-shell'
 
 /** Everything that needs somebody signed in: who is not goes to sign in and comes back to the page asked for. */
 export function WorkLayout({ children }: { children: ReactNode }) {
   const session = useSession()
   const signOut = useSignOut()
-  if (session.state === 'out') return <Redirect href={signInPath() as Href} />
+  const asked = useAskedPage(session.state === 'in')
+  if (session.state === 'out') return <Redirect href={signInPath(asked()) as Href} />
   if (session.state !== 'in') {
     return (
       <WorkShell account={null}>
@@ -40,6 +41,17 @@ export function WorkLayout({ children }: { children: ReactNode }) {
       <Suspense fallback={<PageOnItsWay />}>{children}</Suspense>
     </WorkShell>
   )
+}
+
+/**
+ * The page that somebody who is not signed in wants. Until a layout has its pages, the router writes an address that
+ * leaves them out: what stood there at first counts until somebody is in.
+ */
+function useAskedPage(isIn: boolean): () => string {
+  const [atFirst] = useState(pageInAddressBar)
+  const [wasIn, setWasIn] = useState(isIn)
+  if (isIn && !wasIn) setWasIn(true)
+  return () => (wasIn ? pageInAddressBar() : atFirst)
 }
 
 function PageOnItsWay() {
