@@ -1,7 +1,7 @@
 import type { Approval, ApprovalStrength, Hardware, Steel } from '@wedgeline/engine'
 import { describe, expect, test } from 'vitest'
 import { APPROVAL, checkAt, checksAt, compared, K4, row, S4_APPROVED } from './anchor-checks'
-import { anchor, B7, D4, layout, S4 } from './sample-layout'
+import { anchor, B7, D4, layout, S4, twoPours } from './sample-layout'
 
 describe('A plate without an approval: EN 1992-1-1 6.7 Eq. 6.63 (digest)', () => {
   const value = (symbol: string, stage: string) =>
@@ -96,6 +96,20 @@ describe('Hardware with an approval', () => {
     expect(check).toMatchObject({ status: 'not-covered', code: 'OUTSIDE_APPROVAL', field })
     expect(check.kind === 'refused' && check.message).toContain('not covered: outside its approval (')
     expect(check.kind === 'refused' && check.message).toContain(says)
+  })
+
+  test.each([
+    { beyond: 19_349, isInside: false },
+    { beyond: 19_350, isInside: true },
+  ])('a neighbour in the next pour counts: from 19000 to $beyond', ({ beyond, isInside }) => {
+    const anchors = [
+      anchor('E2', 1, { chainage: 19_000, hardwareId: 'S4A' }),
+      anchor('E2-P2', 1, { chainage: beyond, hardwareId: 'S4A', castWithPourId: 'P2' }),
+    ]
+    const checks = checksAt(layout({ hardware: [S4_APPROVED], ...twoPours(anchors) }), 'E2-1')
+    const check = checks.find(({ family, stage }) => family === 'bearing' && stage === 'Full')
+    expect(check?.kind).toBe(isInside ? 'compared' : 'refused')
+    if (!isInside) expect(check).toMatchObject({ code: 'OUTSIDE_APPROVAL', field: 'chainage' })
   })
 
   test.each([350, 351])('spacing of %s is inside the approval', (spacing) => {

@@ -2,7 +2,7 @@ import type { Check, Region, Steel, SteelShape } from '@wedgeline/engine'
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { accepted, accepting, checkAt, checksAt, compared, row } from './anchor-checks'
-import { anchor, layout, length, EDGES } from './sample-layout'
+import { anchor, layout, length, EDGES, twoPours } from './sample-layout'
 
 const A10 = (Math.PI * 10 ** 2) / 4
 const A12 = (Math.PI * 12 ** 2) / 4
@@ -280,6 +280,41 @@ describe('Bursting in plan', () => {
     const check = plan('S4', { middle: { chainage: 6150 + 439 } })
     expect(check).toMatchObject({ status: 'not-covered', code: 'ANCHORS_ACT_AS_ONE' })
     expect(check.kind === 'refused' && check.message).toContain('E4-03')
+  })
+})
+
+describe('Beside a pour boundary', () => {
+  const F = 1.2 * 4 * 0.8 * 184_000
+  const across = (from: number, beyond: number) => {
+    const anchors = [
+      anchor('E2', 1, { chainage: 17_000 }),
+      anchor('E2', 2, { chainage: from }),
+      anchor('E2-P2', 1, { chainage: beyond, castWithPourId: 'P2' }),
+    ]
+    const check = checksAt(layout(twoPours(anchors)), 'E2-2').find(({ family }) => family === 'bursting-plan')
+    if (!check) throw new Error('No bursting in plan')
+    return compared(check)
+  }
+
+  test('the gap across it is checked beside the own prism, and the worse of the two counts', () => {
+    // 500 to the end of the pour: b = 1000. Half-gap across 20400 - 18700 is 850, as is the one before: b = 1700.
+    const check = across(18_700, 20_400)
+    expect(check.demand).toBeCloseTo((0.25 * F * (1700 - 220)) / 1700 / 300, 6)
+    const own = Math.round((0.25 * F * (1000 - 220)) / 1000 / 300)
+    expect(check.notes.join(' ')).toContain(`By the own prism (1000) alone: ${own} mm2 asked for`)
+    expect(check.notes.join(' ')).toContain('The prism with the next pour cast governs')
+  })
+
+  test('where the gap across is the narrower one the own prism governs', () => {
+    // 600 to the end: b = 1200. Half-gap across 19400 - 18600 is 400: b = 800, which asks for less.
+    const check = across(18_600, 19_400)
+    expect(check.demand).toBeCloseTo((0.25 * F * (1200 - 220)) / 1200 / 300, 6)
+    expect(check.notes.join(' ')).toContain('By the prism with the next pour cast (800) alone')
+  })
+
+  test('where the other side sets both there is one prism and no more is said', () => {
+    // Half of 1100 to the anchor before: b = 1100 either way, with 1100 to the end and as much across.
+    expect(across(18_100, 20_300).notes.join(' ')).not.toContain('next pour')
   })
 })
 

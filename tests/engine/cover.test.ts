@@ -130,6 +130,13 @@ describe('plate and pocket to soffit and top', () => {
   })
 })
 
+test('the height that mends a plate or pocket too near to a surface', () => {
+  // The plate is 80 high and the cover 30: 0 + 30 + 40 = 70. The pocket is 120 high and the job asks for 25: 85.
+  const parts = { anchors: [anchor('E1', 3, { chainage: 8000, height: 60 })] }
+  expect(named('Plate to soffit', parts, 'E1-3').mend).toEqual({ field: 'height', value: 70 })
+  expect(named('Pocket to soffit', parts, 'E1-3').mend).toEqual({ field: 'height', value: 85 })
+})
+
 describe('plate and pocket to the next face', () => {
   /** The north end of the east edge, 17400 along, is the corner with the north edge. */
   const nearCorner = (away: number) => ({ anchors: [anchor('J1', 1, { chainage: 17400 - away })] })

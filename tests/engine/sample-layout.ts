@@ -213,6 +213,21 @@ export interface Parts {
   readonly more?: Partial<Layout>
 }
 
+/** Pour P2 east of P1 on the same south line, from 19.2 to 34.2 m, with its edge E2-P2. */
+export function twoPours(anchors: readonly Anchor[]): Parts {
+  const outline = [
+    { id: 'q', x: 19200, y: 0 },
+    { id: 'r', x: 34200, y: 0 },
+    { id: 's', x: 34200, y: 17400 },
+    { id: 't', x: 19200, y: 17400 },
+  ]
+  return {
+    edges: [...EDGES, { ...edge(SOUTH, 'q', [length(19200, 34200)]), id: 'E2-P2', pourId: 'P2' }],
+    anchors,
+    more: { pours: [POUR, { ...POUR, id: 'P2', mark: 'P2', outline }] },
+  }
+}
+
 /** One pour, 19.2 by 17.4 m, whose tendons are made from its anchors. */
 export function layout(parts: Parts = {}): Layout {
   const { pour = {}, hardware = [S4, B7, D4], edges = EDGES, anchors = [], pans = [], steel = [], more = {} } = parts

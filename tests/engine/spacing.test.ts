@@ -13,6 +13,7 @@ import {
   POUR,
   S4,
   SOUTH,
+  twoPours,
   type Parts,
 } from './sample-layout'
 
@@ -32,6 +33,42 @@ function named(name: string, parts: Parts, id: string): Compared {
 
 const pair = (spacing: number, change: Partial<Anchor> = {}) => ({
   anchors: [anchor('E1', 5, { chainage: 15100 }), anchor('E1', 6, { chainage: 15100 + spacing, ...change })],
+})
+
+describe('what mends it is a chainage', () => {
+  test('away from the neighbour by what is short, from either side', () => {
+    // 15100 and 15400 are 50 short of 350: 15400 - 350 = 15050 or 15100 + 350 = 15450.
+    const parts = pair(300)
+    expect(named('Spacing to E1-06', parts, 'E1-5').mend).toEqual({ field: 'chainage', value: 15_050 })
+    expect(named('Spacing to E1-05', parts, 'E1-6').mend).toEqual({ field: 'chainage', value: 15_450 })
+  })
+
+  test.each([
+    { third: 15_800, mend: { field: 'chainage', value: 15_450 } },
+    { third: 15_799, mend: null },
+  ])('with a third anchor at $third', ({ third, mend }) => {
+    // At 15450 the third must stand 350 further on: 15800.
+    const { anchors } = pair(300)
+    const parts = { anchors: [...anchors, anchor('E1', 7, { chainage: third })] }
+    expect(named('Spacing to E1-05', parts, 'E1-6').mend).toEqual(mend)
+  })
+
+  test('none where nothing is short', () => {
+    expect(named('Spacing to E1-06', pair(350), 'E1-5').mend).toBeNull()
+  })
+
+  test.each([
+    { neighbour: 16_860, mend: { field: 'chainage', value: 17_210 } },
+    { neighbour: 16_861, mend: null },
+  ])('away from the corner, with a neighbour at $neighbour', ({ neighbour, mend }) => {
+    // The edge ends at 17400: 150 is 40 short of 190, so 17250 - 40 = 17210, and 17210 - 350 = 16860 is room enough.
+    const anchors = [anchor('E1', 1, { chainage: neighbour }), anchor('E1', 2, { chainage: 17_250 })]
+    const check = named('Edge distance to edge E4', { anchors }, 'E1-2')
+    expect(check).toMatchObject({ status: 'over', limit: 190 })
+    expect(check.demand).toBeCloseTo(150, 9)
+    if (mend === null) expect(check.mend).toBeNull()
+    else expect(check.mend?.value).toBeCloseTo(mend.value, 9)
+  })
 })
 
 describe('spacing along the edge, hardware asks for 350', () => {
@@ -85,55 +122,22 @@ describe('spacing along the edge, hardware asks for 350', () => {
   })
 
   test('from pour to pour on one edge line, with the stage in which it counts', () => {
-    const second = { ...SOUTH, id: 'south' }
-    const parts: Parts = {
-      edges: [
-        EDGES[0] ?? edge(SOUTH, 'a', []),
-        { ...edge(second, 'q', [length(19200, 34200)]), id: 'E2-P2', pourId: 'P2' },
-      ],
-      anchors: [anchor('E2', 11, { chainage: 19050 }), anchor('E2-P2', 1, { chainage: 19350, castWithPourId: 'P2' })],
-      more: {
-        pours: [
-          POUR,
-          {
-            ...POUR,
-            id: 'P2',
-            mark: 'P2',
-            outline: [
-              { id: 'q', x: 19200, y: 0 },
-              { id: 'r', x: 34200, y: 0 },
-              { id: 's', x: 34200, y: 17400 },
-              { id: 't', x: 19200, y: 17400 },
-            ],
-          },
-        ],
-      },
-    }
+    const parts = twoPours([
+      anchor('E2', 11, { chainage: 19050 }),
+      anchor('E2-P2', 1, { chainage: 19350, castWithPourId: 'P2' }),
+    ])
     const check = named('Spacing to E2-01', parts, 'E2-11')
     expect(check).toMatchObject({ demand: 300, status: 'over' })
     expect(check.notes.join()).toMatch(/pour P2.*both pours/)
   })
 
   test('the two sides of a joint are two rows', () => {
-    const west: Parts = {
-      edges: [EDGES[1] ?? edge(EAST, 'b', []), { ...edge(EAST, 't', [length(0, 17400)]), id: 'J1-P2', pourId: 'P2' }],
-      anchors: [deadEnd('J1', 1, { chainage: 7500 }), deadEnd('J1-P2', 1, { chainage: 7500, castWithPourId: 'P2' })],
-      more: {
-        pours: [
-          POUR,
-          {
-            ...POUR,
-            id: 'P2',
-            outline: [
-              { id: 'q', x: 19200, y: 0 },
-              { id: 'r', x: 34200, y: 0 },
-              { id: 's', x: 34200, y: 17400 },
-              { id: 't', x: 19200, y: 17400 },
-            ],
-          },
-        ],
-      },
-    }
+    const parts = twoPours([
+      deadEnd('J1', 1, { chainage: 7500 }),
+      deadEnd('J1-P2', 1, { chainage: 7500, castWithPourId: 'P2' }),
+    ])
+    const far = { ...edge(EAST, 't', [length(0, 17400)]), id: 'J1-P2', pourId: 'P2' }
+    const west = { ...parts, edges: [...(parts.edges ?? []), far] }
     expect(compared(west, 'J1-1').filter(({ name }) => name.startsWith('Spacing'))).toEqual([])
   })
 })

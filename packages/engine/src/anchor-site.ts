@@ -37,6 +37,9 @@ export interface AnchorSite {
   /** Half the gap to the next anchor along the edge on either side; null where there is none. */
   readonly halfGapBefore: number | null
   readonly halfGapAfter: number | null
+  /** Likewise to the next anchor across a pour boundary, once both pours are cast; null where none is there. */
+  readonly jointGapBefore: number | null
+  readonly jointGapAfter: number | null
   /** Stands inside a near-equal row: five or more anchors of one force, no gap over 1.2 of the smallest, not the outermost. */
   readonly isInEqualRow: boolean
   /** Anchors near enough for spread or spacing to matter, nearest along the edge first. */
@@ -52,10 +55,12 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
   const goesOn = openEnds(edge, pour, frame)
   const reach = reachOf(index, index.rowOfEdge.get(edgeId) ?? anchors)
   const isEqual = isEqualRow(index, anchors)
+  const boundary = acrossBoundary(index, edge, frame)
   return new Map(
     anchors.map((anchor, at): [string, AnchorSite] => {
       const tendon = found(index.tendons, anchor.tendonId, 'tendon')
       const { topAt, soffitAt } = frame
+      const [before, after] = [halfGap(anchors, at, -1), halfGap(anchors, at, 1)]
       const [top, soffit] = [topAt(anchor.chainage), soffitAt(anchor.chainage)]
       const site: AnchorSite = {
         anchor,
@@ -72,8 +77,10 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
         toStart: goesOn.start ? null : anchor.chainage - frame.from,
         toEnd: goesOn.end ? null : frame.to - anchor.chainage,
         sideFace: facesFromCentre(index, anchor)[0] ?? null,
-        halfGapBefore: halfGap(anchors, at, -1),
-        halfGapAfter: halfGap(anchors, at, 1),
+        halfGapBefore: before,
+        halfGapAfter: after,
+        jointGapBefore: before === null ? gapAcross(anchor, boundary.before) : null,
+        jointGapAfter: after === null ? gapAcross(anchor, boundary.after) : null,
         isInEqualRow: isEqual && at > 0 && at < anchors.length - 1,
         neighbours: nearRow(index, anchor, reach),
       }
@@ -149,6 +156,27 @@ function halfGap(anchors: readonly Anchor[], at: number, way: 1 | -1): number | 
   }
   return null
 }
+
+/** Two edges nearer than this carry on into one another, mm. */
+const BOUNDARY_GAP_MAX = 1
+
+/** Chainage of the nearest anchor beyond each end of an edge, where another pour's edge carries on in its line. */
+function acrossBoundary(index: LayoutIndex, edge: Edge, frame: EdgeFrame) {
+  const next = (index.edgesOfLine.get(edge.edgeLineId) ?? []).filter(
+    (other) =>
+      other.pourId !== edge.pourId && found(index.frames, other.id, 'edge').runsLeftToRight === frame.runsLeftToRight,
+  )
+  const meets = (at: number, end: 'from' | 'to') =>
+    next.find((other) => Math.abs(found(index.frames, other.id, 'edge')[end] - at) <= BOUNDARY_GAP_MAX)
+  const anchorsOf = (other: Edge | undefined) => index.anchorsOfEdge.get(other?.id ?? '') ?? []
+  return {
+    before: anchorsOf(meets(frame.from, 'to')).at(-1)?.chainage ?? null,
+    after: anchorsOf(meets(frame.to, 'from'))[0]?.chainage ?? null,
+  }
+}
+
+const gapAcross = ({ chainage }: Anchor, beyond: number | null): number | null =>
+  beyond === null ? null : Math.abs(beyond - chainage) / 2
 
 function nearRow(index: LayoutIndex, own: Anchor, reach: number): readonly Neighbour[] {
   return neighboursOf(index, own, reach)

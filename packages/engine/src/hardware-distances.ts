@@ -34,9 +34,9 @@ export function distancesByStage(index: LayoutIndex, anchor: Anchor): StageDista
 }
 
 /** Of two anchors the larger value counts: the other's at the same stage, or at all stages if it has no such stage. */
-export function largerOf(own: StageDistances, others: readonly StageDistances[]): Distances {
+export function largerOf(own: Omit<StageDistances, 'clause'>, others: readonly StageDistances[]): Distances {
   const sameStage = others.filter((other) => other.stage === own.stage)
-  const counted = [own, ...(sameStage.length > 0 ? sameStage : others)]
+  const counted: readonly Distances[] = [own, ...(sameStage.length > 0 ? sameStage : others)]
   const most = (name: keyof Distances) => Math.max(...counted.map((distances) => distances[name]))
   return {
     spacingAlongMin: most('spacingAlongMin'),

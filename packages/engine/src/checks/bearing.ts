@@ -3,7 +3,8 @@
 import { nearerFace, whyNoRule, type AnchorSite } from '../anchor-site'
 import type { BearingRule } from '../bases/basis'
 import { jackingForce, stageForce } from '../force'
-import { approvalLine, hardwareClause } from '../hardware-distances'
+import { ROUNDING } from '../geometry'
+import { approvalLine, distancesByStage, hardwareClause, largerOf } from '../hardware-distances'
 import type { Approval, ApprovalStrength, Hardware, Stage, SteelShape } from '../model'
 import type { Check } from '../result'
 import type { Clause, Step } from '../step'
@@ -116,7 +117,7 @@ function bearingByApproval({ site, stage, context, approval }: Approved): Check 
   }
   const line = approvalLine(approval, stage)
   if (!line) return outside('stage.share', `no strength is given for ${percent(stage.share)} of the force`)
-  const [broken] = line.strengthMin <= stage.strength ? brokenConditions(site, line, context) : []
+  const [broken] = line.strengthMin <= stage.strength ? brokenConditions({ site, stage, context, approval }, line) : []
   if (broken) return outside(broken.field, broken.condition)
   return atLeast(head, { demand: stage.strength, limit: line.strengthMin, unit: 'MPa', steps: [] })
 }
@@ -130,26 +131,24 @@ interface Broken {
 }
 
 /** The approval's own distances and its local steel, all of which must be met. */
-export function brokenConditions(site: AnchorSite, line: ApprovalStrength, context: CheckContext): readonly Broken[] {
+function brokenConditions({ site, stage, context }: Approved, line: ApprovalStrength): readonly Broken[] {
   const broken: Broken[] = []
-  for (const { hardware, along, inHeight } of site.neighbours) {
-    const alongMin = Math.max(line.spacingAlongMin, hardware.spacingAlongMin)
-    const heightMin = Math.max(line.spacingHeightMin, hardware.spacingHeightMin)
-    if (along < alongMin && inHeight < heightMin) {
-      broken.push({
-        field: 'chainage',
-        condition: `spacing ${mm(along)} along the edge, ${mm(alongMin)} or more`,
-      })
+  const own = { ...line, stage: stage.name }
+  for (const { anchor, along, inHeight } of site.neighbours) {
+    const { spacingAlongMin, spacingHeightMin } = largerOf(own, distancesByStage(context.index, anchor))
+    if (along < spacingAlongMin - ROUNDING && inHeight < spacingHeightMin - ROUNDING) {
+      const condition = `spacing ${mm(along)} along the edge, ${mm(spacingAlongMin)} or more`
+      broken.push({ field: 'chainage', condition })
       break
     }
   }
   const side = site.sideFace
-  if (side && side.distance < line.edgeAlongMin) {
+  if (side && side.distance < line.edgeAlongMin - ROUNDING) {
     const condition = `${mm(side.distance)} to ${side.name}, ${mm(line.edgeAlongMin)} or more`
     broken.push({ field: 'chainage', condition })
   }
   const face = nearerFace(site)
-  if (face < line.edgeHeightMin) {
+  if (face < line.edgeHeightMin - ROUNDING) {
     const which = site.toSoffit <= site.toTop ? 'soffit' : 'top'
     broken.push({ field: 'height', condition: `${mm(face)} to the ${which}, ${mm(line.edgeHeightMin)} or more` })
   }

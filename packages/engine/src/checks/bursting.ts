@@ -14,7 +14,7 @@ import type { CountPlace, Plane } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
 import { anchorMark } from '../zones'
 import { byRatio, refusal, type CheckContext, type Head } from './outcome'
-import { planNotes, planPrism, thicknessPrisms, type Prism } from './prism'
+import { planNotes, planPrisms, thicknessPrisms, type Prism } from './prism'
 
 /** Within this share of plate to prism the prism rule follows elastic theory within about 8 % (computed). */
 const RATIO_MIN = 0.1
@@ -64,15 +64,17 @@ export function checkBurstingPlan(site: AnchorSite, context: CheckContext, close
   if (Math.abs(site.anchor.skew) > context.basis.inclinationMax.value) {
     return tooInclined(head, 'skew', site.anchor.skew)
   }
-  const prism = planPrism(site)
-  if (prism.a >= prism.b.value) return noPrism(head, prism, 'chainage')
+  const { own, acrossBoundary } = planPrisms(site)
+  const prisms = acrossBoundary === null ? [own] : [own, acrossBoundary]
+  const tooSmall = prisms.find(({ a, b }) => a >= b.value)
+  if (tooSmall) return noPrism(head, tooSmall, 'chainage')
   const notes = [
-    ...ratioNotes(prism, false),
+    ...ratioNotes(own, false),
     ...inclinedNotes(site.anchor.skew, 'in plan'),
-    ...planNotes(site, prism),
+    ...planNotes(site, own),
     ...stepNotes(site),
   ]
-  return burst({ site, context, plane: 'plan', prisms: [prism], notes, readings: [] }, head)
+  return burst({ site, context, plane: 'plan', prisms, notes, readings: [] }, head)
 }
 
 function headOf(site: AnchorSite, plane: Plane, { basis }: CheckContext): Head {
@@ -112,7 +114,9 @@ function burst(asked: Asked, head: Head): Compared {
     worst(site.pour.stages.map((stage) => answerOf({ asked, prism, stage, place, shapes: steel.shapes }))),
   )
   const governing = worst(answers)
-  const others = answers.filter((answer) => answer !== governing).map((answer) => otherNote(answer, governing))
+  const others = answers
+    .filter((answer) => answer !== governing)
+    .map((answer) => otherNote(answer, governing, asked.plane))
   const face = faceNote(governing, basis.window(governing.prism.b.value))
   const readings = [basis.windowReading, basis.steelReading, ...asked.readings]
   const result = byRatio(
@@ -214,9 +218,13 @@ function judged(result: Compared): Compared {
 const whole = (value: number): string => String(Math.round(value))
 const degrees = (angle: number): string => String(Math.round((angle * 1800) / Math.PI) / 10)
 
-function otherNote({ prism, rule, counted }: Answer, governing: Answer): string {
+function otherNote({ prism, rule, counted }: Answer, governing: Answer, plane: Plane): string {
   const numbers = `${whole(rule.area)} mm2 asked for, ${whole(counted.area)} mm2 counted`
-  return `By the ${prism.title} (${whole(prism.b.value)}) alone: ${numbers}. The ${governing.prism.title} governs, so that moving towards a face is no gain.`
+  const why =
+    plane === 'plan'
+      ? 'both are checked, for the next pour may be there or not'
+      : 'so that moving towards a face is no gain'
+  return `By the ${prism.title} (${whole(prism.b.value)}) alone: ${numbers}. The ${governing.prism.title} governs, ${why}.`
 }
 
 function ratioNotes({ a, b }: Prism, isEccentric: boolean): readonly string[] {

@@ -136,13 +136,17 @@ function bodyChecks(site: Site, of: BodyLimits & { readonly body: Box; readonly 
         { z: site.anchor.height, h: body.toHeight - body.fromHeight, zt: site.top },
         (v) => v.zt - v.z - v.h / 2,
       )
-  const shared = { limitKind: 'C', clause, stage: null, isClearance: true, mend: null } as const
+  const shared = { limitKind: 'C', clause, stage: null, isClearance: true } as const
+  const half = (body.toHeight - body.fromHeight) / 2
+  const fits = site.top - site.soffit >= 2 * half + toTop + toSoffit
+  const height = isSoffit ? site.soffit + toSoffit + half : site.top - toTop - half
   const inHeight = distanceCheck({
     ...headOf(site, `${name} to ${isSoffit ? 'soffit' : 'top'}`),
     ...shared,
     demand: measured.value,
     limit: isSoffit ? toSoffit : toTop,
     steps: [measured],
+    mend: fits ? { field: 'height', value: height } : null,
   })
   const face = nearestFace(site.index, site.anchor, body)
   if (!face) return [inHeight]
@@ -152,6 +156,7 @@ function bodyChecks(site: Site, of: BodyLimits & { readonly body: Box; readonly 
     demand: face.distance,
     limit: toFace,
     steps: [],
+    mend: null,
   }
   return [inHeight, distanceCheck(inPlan)]
 }

@@ -68,21 +68,29 @@ function sidesOf(site: AnchorSite): Sides {
   }
 }
 
-export function planPrism(site: AnchorSite): Prism {
-  const { before, after } = sidesOf(site)
-  const b = step(
-    {
-      symbol: 'b',
-      meaning: 'Prism: twice the nearer half-gap or end of the edge',
-      formula: '2 * min(before, after)',
-      unit: 'mm',
-      clause: GEOMETRY,
-    },
+/**
+ * In plan twice the nearer half-gap or end of the edge. Beside a pour boundary the gap that runs across it gives
+ * another prism once both pours are cast; null where it changes nothing.
+ */
+export function planPrisms(site: AnchorSite): { readonly own: Prism; readonly acrossBoundary: Prism | null } {
+  const a = site.hardware.plate.width
+  const sides = sidesOf(site)
+  const own = twiceNearer('Prism: twice the nearer half-gap or end of the edge', sides)
+  const joined = { before: site.jointGapBefore ?? sides.before, after: site.jointGapAfter ?? sides.after }
+  const both = twiceNearer('Prism with the next pour cast: twice the nearer half-gap', joined)
+  const isSame = Math.abs(both.value - own.value) <= ROUNDING
+  return {
+    own: { title: 'own prism', a, b: own },
+    acrossBoundary: isSame ? null : { title: 'prism with the next pour cast', a, b: both },
+  }
+}
+
+const twiceNearer = (meaning: string, { before, after }: Sides): Step =>
+  step(
+    { symbol: 'b', meaning, formula: '2 * min(before, after)', unit: 'mm', clause: GEOMETRY },
     { before, after },
     (v) => 2 * Math.min(v.before, v.after),
   )
-  return { title: 'own prism', a: site.hardware.plate.width, b }
-}
 
 export function planNotes(site: AnchorSite, prism: Prism): readonly string[] {
   const { before, after } = sidesOf(site)

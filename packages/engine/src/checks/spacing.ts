@@ -61,6 +61,7 @@ function pairCheck(pair: Pair, own: StageDistances, others: readonly StageDistan
   const isAlong =
     shortAlong <= ROUNDING || (shortInHeight > ROUNDING && (overlaps(pair) || shortAlong <= shortInHeight))
   const mark = anchorMark(index, other)
+  const away = other.chainage + Math.sign(anchor.chainage - other.chainage) * spacingAlongMin
   const measured = step(
     isAlong
       ? { symbol: 's', meaning: 'distance along the edge', formula: 'abs(x2 - x1)', unit: 'mm', clause: own.clause }
@@ -78,7 +79,7 @@ function pairCheck(pair: Pair, own: StageDistances, others: readonly StageDistan
     limit: isAlong ? spacingAlongMin : spacingHeightMin,
     isClearance: false,
     steps: [measured],
-    mend: null,
+    mend: isAlong && shortAlong > ROUNDING ? movedTo(index, anchor, [away]) : null,
   })
 }
 
@@ -136,9 +137,48 @@ function edgeDistances(index: LayoutIndex, anchor: Anchor, stages: readonly Stag
           limit: edgeAlongMin,
           isClearance: false,
           steps: [],
-          mend: null,
+          mend: mendOfFace(index, anchor, edgeAlongMin - distance),
         }),
       ),
+  )
+}
+
+// What mends it -----------------------------------------------------------------------------------------------------
+
+/** Away from a face means along the edge to one side or the other: whichever conforms. */
+function mendOfFace(index: LayoutIndex, anchor: Anchor, short: number): Compared['mend'] {
+  if (short <= ROUNDING) return null
+  return movedTo(index, anchor, [anchor.chainage + short, anchor.chainage - short])
+}
+
+/** The first of some chainages at which the anchor has its spacing and edge distances to all sides; null where none has. */
+function movedTo(index: LayoutIndex, anchor: Anchor, chainages: readonly number[]): Compared['mend'] {
+  const value = chainages.find((chainage) => conforms(index, anchor, chainage))
+  return value === undefined ? null : { field: 'chainage', value }
+}
+
+function conforms(index: LayoutIndex, anchor: Anchor, chainage: number): boolean {
+  const { from, to } = found(index.frames, anchor.edgeId ?? '', 'edge')
+  const half = hardwareOf(index, anchor).plate.width / 2
+  if (chainage - half < from || chainage + half > to) return false
+  const moved = { ...anchor, chainage }
+  const stages = distancesByStage(index, anchor)
+  const nearest = facesFromCentre(index, moved)[0]?.distance ?? Infinity
+  if (stages.some(({ edgeAlongMin }) => nearest < edgeAlongMin - ROUNDING)) return false
+  const reach = largestSpacing(index) + Math.abs(chainage - anchor.chainage)
+  return neighboursOf(index, anchor, reach).within.every((other) =>
+    stages.every((own) => isApart(moved, other, largerOf(own, distancesByStage(index, other)))),
+  )
+}
+
+function isApart(
+  one: Anchor,
+  other: Anchor,
+  asked: Pick<StageDistances, 'spacingAlongMin' | 'spacingHeightMin'>,
+): boolean {
+  return (
+    Math.abs(one.chainage - other.chainage) >= asked.spacingAlongMin - ROUNDING ||
+    Math.abs(one.height - other.height) >= asked.spacingHeightMin - ROUNDING
   )
 }
 
