@@ -37,6 +37,8 @@ export interface DraftView {
   readonly save: SaveState
   /** Why the server refused or could not be reached; null otherwise. */
   readonly problem: string | null
+  /** When the server last stored an edit of this page; null before the first. */
+  readonly savedAtMs: number | null
   /** How many kept edits no longer fitted after a reload or a conflict. */
   readonly dropped: number
 }
@@ -46,7 +48,7 @@ const RETRY_MS = [1000, 2000, 5000, 10_000, 30_000] as const
 
 /** Holds one job's draft, saves it by itself, and never loses a key: what is unsent is kept before it is sent. */
 export class DraftStore {
-  private view: DraftView = { draft: null, save: 'saved', problem: null, dropped: 0 }
+  private view: DraftView = { draft: null, save: 'saved', problem: null, savedAtMs: null, dropped: 0 }
   private readonly listeners = new Set<() => void>()
   private cancelTimer: (() => void) | null = null
   private failures = 0
@@ -157,7 +159,12 @@ export class DraftStore {
     if (!draft?.sending) return
     if (answer.kind === 'stored') {
       const next = acknowledged(draft, answer.versions)
-      this.show({ draft: next, save: next.unsent.length > 0 ? 'unsaved' : 'saved', problem: null })
+      this.show({
+        draft: next,
+        save: next.unsent.length > 0 ? 'unsaved' : 'saved',
+        problem: null,
+        savedAtMs: Date.now(),
+      })
       if (next.unsent.length > 0) this.schedule(SEND_AFTER_MS)
     } else if (answer.kind === 'stale') {
       this.show({ draft: refusedAsStale(draft, answer.conflicts), save: 'conflict', problem: null })

@@ -87,7 +87,7 @@ export function valueText(layout: LayoutFile, field: string, value: unknown): st
   if (typeof value === 'boolean') return value ? 'yes' : 'no'
   if (typeof value === 'object') return Array.isArray(value) ? `${value.length} entries` : 'other values'
   const unit = UNIT_WORDS[UNIT.exec(field)?.[1] ?? '']
-  const text = String(value)
+  const text = typeof value === 'number' || typeof value === 'string' ? String(value) : 'another value'
   if (unit) return unit === '°' ? `${text}°` : `${text} ${unit}`
   return nameOfReferred(layout, field, text) ?? text
 }

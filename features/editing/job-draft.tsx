@@ -19,6 +19,7 @@ export interface JobDraft {
   readonly canEdit: boolean
   readonly save: SaveState
   readonly problem: string | null
+  readonly savedAtMs: number | null
   readonly conflicts: readonly Conflict[]
   readonly dropped: number
   readonly canUndo: boolean
@@ -89,7 +90,7 @@ export function JobDraftProvider({ jobId, children }: { readonly jobId: string; 
 }
 
 const never = () => () => undefined
-const EMPTY: DraftView = { draft: null, save: 'saved', problem: null, dropped: 0 }
+const EMPTY: DraftView = { draft: null, save: 'saved', problem: null, savedAtMs: null, dropped: 0 }
 const nothing = () => EMPTY
 
 interface About {
@@ -100,7 +101,7 @@ interface About {
 
 function jobOf(of: { store: DraftStore; view: DraftView; about: About; say: (words: string) => void }): JobDraft {
   const { store, view, about, say } = of
-  const { draft, save, problem, dropped } = view
+  const { draft, save, problem, savedAtMs, dropped } = view
   if (!draft) throw new Error('the draft is open here')
   return {
     jobId: about.id,
@@ -110,6 +111,7 @@ function jobOf(of: { store: DraftStore; view: DraftView; about: About; say: (wor
     canEdit: about.myRoles.some((role) => role === 'detailer' || role === 'engineer'),
     save,
     problem,
+    savedAtMs,
     conflicts: draft.conflicts,
     dropped,
     canUndo: draft.undo.length > 0,
