@@ -17,6 +17,8 @@ export interface NumberFieldProps extends Omit<FieldProps, 'error'> {
   value: number | null
   /** Called on Enter and on leaving the field, with a value that differs from `value`. */
   onCommit: (value: number | null) => void
+  /** Called with each key that leaves another number, so that nothing typed is lost with the tab; Esc gives the number from before. */
+  onType?: ((value: number) => void) | undefined
   /** The person's setting; without one, a text with two meanings is asked about. */
   separator?: Separator
   /** A message about the text from outside: the server or the contract could not take it. */
@@ -100,14 +102,17 @@ interface Typed {
   readonly isLeft: boolean
 }
 
-function useDraft({ value, onCommit, unit, separator = null }: NumberFieldProps): Draft {
+function useDraft({ value, onCommit, onType, unit, separator = null }: NumberFieldProps): Draft {
   const [typed, setTyped] = useState<Typed | null>(null)
   const [isFocused, setFocused] = useState(false)
+  const [before, setBefore] = useState(value)
   const live = typed && (isFocused || typed.against === value) ? typed : null
   const text = live ? live.text : value === null ? '' : formatNumber(value, separator)
-  const read = parseNumber(text, { unit: unit ?? null, separator })
+  const reading = { unit: unit ?? null, separator }
+  const read = parseNumber(text, reading)
   const take = (next: number | null, kept: string) => {
     setTyped({ text: kept, against: next, isLeft: true })
+    setBefore(next)
     if (next !== value) onCommit(next)
   }
   const commit = () => {
@@ -119,16 +124,26 @@ function useDraft({ value, onCommit, unit, separator = null }: NumberFieldProps)
   return {
     text,
     read,
-    isOpen: live !== null && !(read.kind === 'number' && read.value === value),
+    isOpen: live !== null && !(read.kind === 'number' && read.value === value && (!onType || before === value)),
     isLeft: live?.isLeft ?? false,
-    type: (next) => setTyped({ text: next, against: value, isLeft: false }),
-    enter: () => setFocused(true),
+    type: (next) => {
+      setTyped({ text: next, against: value, isLeft: false })
+      const now = parseNumber(next, reading)
+      if (now.kind === 'number' && now.value !== value) onType?.(now.value)
+    },
+    enter: () => {
+      setFocused(true)
+      setBefore(value)
+    },
     leave: () => {
       setFocused(false)
       commit()
     },
     commit,
-    restore: () => setTyped(null),
+    restore: () => {
+      setTyped(null)
+      if (before !== null && before !== value) onType?.(before)
+    },
     take: (next) => take(next, formatNumber(next, separator)),
   }
 }

@@ -75,6 +75,32 @@ test('Esc brings back what was there and leaves the dialog open; Esc again close
   expect(onClose).toHaveBeenCalledTimes(1)
 })
 
+test('where each key counts, every number on the way is told, and Esc gives the one from before', async () => {
+  const told: number[] = []
+  const onCommit = vi.fn()
+  function Live() {
+    const [value, setValue] = useState<number | null>(110)
+    const onType = (next: number) => {
+      told.push(next)
+      setValue(next)
+    }
+    return <NumberField label="Height" unit="mm" value={value} onCommit={onCommit} onType={onType} />
+  }
+  render(<Live />)
+  await userEvent.clear(box())
+  await userEvent.type(box(), '62')
+  expect(told).toEqual([6, 62])
+  await userEvent.keyboard('{Escape}')
+  expect(told).toEqual([6, 62, 110])
+  expect(box().value).toBe('110')
+  await userEvent.clear(box())
+  await userEvent.type(box(), '75.0')
+  await userEvent.tab()
+  expect(told).toEqual([6, 62, 110, 7, 75])
+  expect(box().value).toBe('75.0')
+  expect(onCommit).not.toHaveBeenCalled()
+})
+
 test('1,5 is asked about and nothing is committed until it is answered', async () => {
   const onCommit = vi.fn()
   render(<Height onCommit={onCommit} />)

@@ -34,6 +34,7 @@ export function AnchorFields({ anchor, tendon, hardware, mark, result }: AnchorF
     onCommit: (value: number | null) => {
       if (value !== null || field.isOptional) apply({ [field.key]: value }, field.label.toLowerCase())
     },
+    onType: (value: number) => apply({ [field.key]: value }, field.label.toLowerCase()),
     note: (
       <MendNote
         field={field.key}
