@@ -8,6 +8,8 @@ export interface CallFailure {
   readonly sentence: string
   /** First message of each field of the input that could not be taken. */
   readonly fields: Readonly<Record<string, string>>
+  /** Everything that is wrong with a file that was sent, field by field. */
+  readonly problems: readonly { readonly field: string; readonly message: string }[]
   readonly retryAfterS: number | null
 }
 
@@ -16,11 +18,12 @@ const UNREACHABLE = 'The server does not answer. Check the connection, then try 
 /** Reads whatever a query or mutation threw. */
 export function failureOf(error: unknown): CallFailure {
   const data = error instanceof TRPCClientError ? (error as TRPCClientError<AppRouter>).data : null
-  if (!data) return { code: 'unreachable', sentence: UNREACHABLE, fields: {}, retryAfterS: null }
-  const { code, fields, problem, retryAfterS } = data
+  if (!data) return { code: 'unreachable', sentence: UNREACHABLE, fields: {}, problems: [], retryAfterS: null }
+  const { code, fields, problem, problems, retryAfterS } = data
   const named = Object.entries(fields ?? {}).map(([field, messages]) => [field, messages[0] ?? ''] as const)
   const own = problem && problem.field !== null ? [[problem.field, problem.message] as const] : []
-  return { code, sentence: sentenceOf(error), fields: Object.fromEntries([...named, ...own]), retryAfterS }
+  const all = Object.fromEntries([...named, ...own])
+  return { code, sentence: sentenceOf(error), fields: all, problems: problems ?? [], retryAfterS }
 }
 
 const sentenceOf = (error: unknown): string => (error instanceof Error ? error.message : UNREACHABLE)

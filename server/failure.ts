@@ -2,9 +2,17 @@ import type { Conflict } from '@wedgeline/contract'
 
 export type FailureKind = 'missing' | 'forbidden' | 'conflict' | 'refused' | 'throttled'
 
+export interface FieldProblem {
+  readonly field: string
+  /** What is wrong and what would be right. */
+  readonly message: string
+}
+
 export interface FailureDetails {
   /** The field of the input that is meant, as the form names it. */
   readonly field?: string
+  /** Everything that is wrong with a file, field by field, in the words of whoever fills it in. */
+  readonly problems?: readonly FieldProblem[]
   /** Both values of every field that the sender and somebody else changed. */
   readonly conflicts?: readonly Conflict[]
   /** Today's version of each unit that was touched. */

@@ -1,10 +1,9 @@
 import { v7 as uuidv7 } from 'uuid'
-import { EDITABLE_TABLES, layoutProblems, type LayoutFile } from '@wedgeline/contract'
+import { EDITABLE_TABLES, readLayout, type LayoutFile } from '@wedgeline/contract'
 import { write, type Connection } from '../db/client'
 import { checkPours } from './checking'
-import { forbidden, refused } from './failure'
+import { Failure, forbidden } from './failure'
 import { stampOf, type StoringCall } from './job-call'
-import { assertFactors, assertTimeZone } from './jobs'
 import { renewIds, type KnownIds } from './layout-ids'
 import { recordAudit } from './stores/audit'
 import { insertBarMarks } from './stores/bar-mark'
@@ -31,15 +30,13 @@ export interface Imported {
 /**
  * Makes a job from a layout file, under new ids. Hardware, jacks and strand types that the company has with the same
  * name and content are used; others are added to it.
- * @throws Failure for a layout that contradicts itself, and for factors that are not the caller's to set.
+ * @param json the layout as its file holds it, of whatever shape
+ * @throws Failure with every problem of a layout that cannot be read or contradicts itself, as the command line names
+ * them; and for factors that are not the caller's to set.
  */
-export function importLayout(ctx: StoringCall, file: LayoutFile): Imported {
+export function importLayout(ctx: StoringCall, json: unknown): Imported {
   const { db, company, person } = ctx
-  const problem = layoutProblems(file).find(({ severity }) => severity === 'refused')
-  if (problem) throw refused(`${problem.field}: ${problem.message}.`, problem.field)
-  assertFactors(file.job)
-  assertTimeZone(file.job.timeZone)
-  const { layout, leftOut } = permitted(ctx, file)
+  const { layout, leftOut } = permitted(ctx, soundLayout(json))
   const key: JobKey = { companyId: company.id, jobId: uuidv7() }
   storing(() =>
     write(db, (tx) => {
@@ -63,6 +60,17 @@ export function importLayout(ctx: StoringCall, file: LayoutFile): Imported {
     }),
   )
   return { jobId: key.jobId, leftOut }
+}
+
+function soundLayout(json: unknown): LayoutFile {
+  const read = readLayout(json)
+  if (read.ok) return read.layout
+  const problems = read.problems
+    .filter(({ severity }) => severity === 'refused')
+    .map(({ field, message }) => ({ field, message }))
+  const [first, ...others] = problems
+  const more = others.length === 0 ? '' : ` ${others.length} more ${others.length === 1 ? 'problem' : 'problems'}.`
+  throw new Failure('refused', `${first?.field}: ${first?.message}.${more}`, { problems })
 }
 
 /** What only an engineer may say of a job comes in with an engineer alone. */

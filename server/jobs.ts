@@ -1,4 +1,4 @@
-import type { JobData, Role } from '@wedgeline/contract'
+import { isTimeZone, type JobData, type Role } from '@wedgeline/contract'
 import { BASIS_SOURCES, STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
 import { write, type Connection } from '../db/client'
 import { recheckJob } from './checking'
@@ -120,12 +120,8 @@ function isRepeat({ company, person }: CompanyCall, db: Connection, job: NewJob)
 }
 
 /** @throws Failure for a name that is no IANA time zone. */
-export function assertTimeZone(timeZone: string): void {
-  try {
-    new Intl.DateTimeFormat('en', { timeZone })
-  } catch {
-    throw refused(`"${timeZone}" is no time zone; write one as Europe/London.`, 'timeZone')
-  }
+function assertTimeZone(timeZone: string): void {
+  if (!isTimeZone(timeZone)) throw refused(`"${timeZone}" is no time zone; write one as Europe/London.`, 'timeZone')
 }
 
 export function renameJob(ctx: JobCall, change: { number: string; title: string }): void {
@@ -154,7 +150,7 @@ export function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'settings
   })
 }
 
-export function assertFactors(job: Pick<JobData, 'basis' | 'factors'>): void {
+function assertFactors(job: Pick<JobData, 'basis' | 'factors'>): void {
   const [problem] = factorProblems(job)
   if (problem) throw refused(problem.message, problem.field.replace(/^job\./, ''))
 }

@@ -142,7 +142,9 @@ function problemError(layout: LayoutFile, { path, field, message }: Problem): Er
   const [tableName, index, ...rest] = path
   const table = EDITABLE_TABLES.find((each) => each === tableName)
   const row = table && typeof index === 'number' ? layout[table][index] : undefined
-  return table && row ? new CommandError(message, table, row.id, rest.join('.') || null) : refused(message, field)
+  return table && row
+    ? new CommandError(message, { table, id: row.id, field: rest.join('.') || null })
+    : refused(message, field)
 }
 
 /**

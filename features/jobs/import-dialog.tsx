@@ -17,7 +17,7 @@ import type { JobDialogProps } from './new-job-dialog'
 /** As much as the server takes in one piece. */
 const FILE_MAX = 8_000_000
 
-const NOT_TAKEN = 'This file cannot be taken. Nothing was stored.'
+const notTaken = ({ name }: File) => `${name} cannot be taken. Nothing was stored.`
 const isRefused = ({ severity }: Problem) => severity === 'refused'
 
 type PickedProblem = Pick<Problem, 'field' | 'message'>
@@ -90,7 +90,7 @@ function useImport({ companyId, onClose }: { companyId: string; onClose: () => v
       await queryClient.invalidateQueries(trpc.job.list.queryFilter())
       if (made.leftOut.length === 0) openMade(made.jobId)
     } catch (error) {
-      setRefusal(refusalOf(error))
+      setRefusal(refusalOf(error, file))
     } finally {
       setReading(false)
     }
@@ -110,12 +110,12 @@ async function readFile(file: File): Promise<Refusal | LayoutFile> {
   if (file.size > FILE_MAX) return { words: 'This file is larger than 8 MB. Nothing was stored.', problems: [] }
   const { readLayoutText } = await import('@/features/work')
   const read = readLayoutText(await file.text())
-  return read.ok ? read.layout : { words: NOT_TAKEN, problems: read.problems.filter(isRefused) }
+  return read.ok ? read.layout : { words: notTaken(file), problems: read.problems.filter(isRefused) }
 }
 
-function refusalOf(error: unknown): Refusal {
+function refusalOf(error: unknown, file: File): Refusal {
   const { sentence, problems } = failureOf(error)
-  return { words: problems.length > 0 ? NOT_TAKEN : `${sentence} Nothing was stored.`, problems }
+  return { words: problems.length > 0 ? notTaken(file) : `${sentence} Nothing was stored.`, problems }
 }
 
 function Refused({ refusal: { words, problems } }: { refusal: Refusal }) {

@@ -1,7 +1,7 @@
 import { CommandError, type Conflict } from '@wedgeline/contract'
 import { TRPCError, type TRPCDefaultErrorShape } from '@trpc/server'
 import { z } from 'zod'
-import { Failure, type FailureKind } from '../failure'
+import { Failure, type FailureKind, type FieldProblem } from '../failure'
 
 /** The row and field that could not be taken, with what would be right. */
 export interface Problem {
@@ -19,6 +19,8 @@ export interface ErrorData {
   /** Messages by field of the input ('' for the whole), when it could not be read. */
   readonly fields: Readonly<Record<string, readonly string[]>> | null
   readonly problem: Problem | null
+  /** Everything that is wrong with a file that was sent, in its own order. */
+  readonly problems: readonly FieldProblem[] | null
   readonly conflicts: readonly Conflict[] | null
   readonly versions: Readonly<Record<string, number>> | null
   readonly retryAfterS: number | null
@@ -51,6 +53,7 @@ export function errorShape({ shape, error }: { shape: TRPCDefaultErrorShape; err
     path: shape.data.path ?? null,
     fields,
     problem: problemOf(cause),
+    problems: failure?.details.problems ?? null,
     conflicts: failure?.details.conflicts ?? null,
     versions: failure?.details.versions ?? null,
     retryAfterS: failure?.details.retryAfterS ?? null,

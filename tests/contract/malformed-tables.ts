@@ -99,6 +99,7 @@ export const WRONG_FIELDS: readonly Wrong[] = wrong([
   ],
   ['an empty basis', 'job.basis', '', 'job.basis', /must be "en-1992"/],
   ['a misspelt end', 'anchors.0.end', 'alive', 'anchors[0].end', /must be one of "live", "dead"/],
+  ['a time zone of no place', 'job.timeZone', 'Mars/Base', 'job.timeZone', /is no time zone; must be an IANA name/],
   ['no title', 'job.title', '', 'job.title', /must not be empty/],
   ['an id with a blank', 'levels.0.id', 'L 1', 'levels[0].id', /letters, digits, dots, colons or dashes/],
   ['a field with its unit left off', 'pours.0.thickness', 220, 'pours[0].thickness', /is no field of the layout file/],
@@ -111,7 +112,7 @@ export const WRONG_FIELDS: readonly Wrong[] = wrong([
     /needs three points|corners/,
   ],
   ['no stage', 'pours.0.stages', [], 'pours[0].stages', /needs at least one stage/],
-  ['no level', 'levels', [], 'levels', /needs at least one level/],
+  ['levels that are missing', 'levels', undefined, 'levels', /is missing; must be a list in square brackets/],
   ['anchors that are no list', 'anchors', {}, 'anchors', /must be a list in square brackets, not a group of fields/],
 ])
 

@@ -1,5 +1,6 @@
 import { TRPCError } from '@trpc/server'
-import { readLayout, type LayoutFile, type LayoutInput } from '@wedgeline/contract'
+import { readLayout, type LayoutFile } from '@wedgeline/contract'
+import { Failure } from '@/server/failure'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
 import { loadLayout } from '@/server/stores/layout'
 import { demoWith, placeOf } from '../contract/layout-edits'
@@ -19,8 +20,7 @@ function rowCounts(): Record<string, unknown> {
   return Object.fromEntries(tables.map((name) => [name, sql.prepare(`select count(*) from "${name}"`).pluck().get()]))
 }
 
-const importIt = (layout: unknown) =>
-  company.as('detailer').job.importLayout({ companyId: company.id, layout: layout as LayoutInput })
+const importIt = (layout: unknown) => company.as('detailer').job.importLayout({ companyId: company.id, layout })
 
 async function refusalOf(layout: unknown): Promise<TRPCError> {
   const error: unknown = await importIt(layout).catch((reason: unknown) => reason)
@@ -37,12 +37,20 @@ describe('a malformed layout is refused whole', () => {
     expect(rowCounts()).toEqual(before)
   })
 
-  test('the sentence names the field', async () => {
-    for (const { path, value } of CONTRADICTIONS) {
+  test('with every field and message that the command line prints', async () => {
+    for (const { path, value, field } of [...WRONG_FIELDS, ...CONTRADICTIONS].filter((_, i) => i % 4 === 0)) {
       const layout = demoWith(path, value)
-      const first = readLayout(layout).problems.find(({ severity }) => severity === 'refused')
-      expect((await refusalOf(layout)).message).toContain(`${first?.field}: ${first?.message}`)
+      const refusal = await refusalOf(layout)
+      const problems = refusal.cause instanceof Failure ? refusal.cause.details.problems : undefined
+      const printed = readLayout(layout).problems.filter(({ severity }) => severity === 'refused')
+      expect(problems).toEqual(printed.map((problem) => ({ field: problem.field, message: problem.message })))
+      expect(problems?.map((problem) => problem.field)).toContain(field)
+      expect(refusal.message).toContain(`${printed[0]?.field}: ${printed[0]?.message}`)
     }
+  })
+
+  test.each([undefined, null, 'text', 7, [], {}])('%j is no layout', async (layout) => {
+    expect((await refusalOf(layout)).code).toBe('BAD_REQUEST')
   })
 })
 

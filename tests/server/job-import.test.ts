@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest'
+import { v7 as uuidv7 } from 'uuid'
 import type { LayoutFile } from '@wedgeline/contract'
 import { demoLayout } from '@/db/seed/demo-layout'
 import { openTestCompany, type TestCompany } from './company'
@@ -39,6 +40,16 @@ async function importAs(company: TestCompany, layout: LayoutFile): Promise<Layou
 }
 
 describe('a layout file that is imported and exported', () => {
+  test('comes back equal but for its ids, for a job that was made a moment ago and holds nothing', async () => {
+    const company = openTestCompany()
+    const detailer = company.as('detailer')
+    const id = uuidv7()
+    await detailer.job.create({ id, companyId: company.id, number: '1', title: 'New' })
+    const { layout } = await detailer.layout.byJob({ jobId: id })
+    expect(layout).toMatchObject({ levels: [], pours: [] })
+    expect(withoutIds(await importAs(company, layout))).toEqual(withoutIds(layout))
+  })
+
   test('comes back equal but for its ids, for a small pour', async () => {
     const back = await importAs(openTestCompany(), sampleLayout())
     expect(withoutIds(back)).toEqual(withoutIds(sampleLayout()))

@@ -1,16 +1,7 @@
 import { z } from 'zod'
-import {
-  BASES,
-  acceptedReadingSchema,
-  hardwareSchema,
-  idSchema,
-  jackSchema,
-  jobSettingsSchema,
-  label,
-  layoutSchema,
-  strandTypeSchema,
-  text,
-} from './layout'
+import { idSchema, label, text } from './fields'
+import { hardwareSchema, jackSchema, strandTypeSchema } from './hardware-schema'
+import { BASES, acceptedReadingSchema, jobSettingsSchema } from './layout'
 
 /** Inputs of the procedures that are not layout edits. Forms and procedures read the same schema. */
 
@@ -82,7 +73,8 @@ export const byCompanySchema = z.strictObject({ companyId: idSchema })
 export const byJobSchema = z.strictObject({ jobId: idSchema })
 export const byPourSchema = z.strictObject({ jobId: idSchema, pourId: idSchema })
 export const companyNameSchema = z.strictObject({ companyId: idSchema, name: label(120), note: text(500).default('') })
-export const importLayoutSchema = z.strictObject({ companyId: idSchema, layout: layoutSchema })
+/** `layout` is read by readLayout, whose messages name its fields as the file's writer knows them. */
+export const importLayoutSchema = z.strictObject({ companyId: idSchema, layout: z.unknown() })
 /** A page of what was done on a job, newest first; `beforeMs` is the instant of the last entry that was seen. */
 export const auditListSchema = z.strictObject({
   jobId: idSchema,

@@ -1,22 +1,21 @@
 import { z } from 'zod'
+import { idSchema } from './fields'
 import {
   anchorSchema,
   concreteResultSchema,
   edgeLineSchema,
   edgeSchema,
   gridLineSchema,
-  idSchema,
   jointSchema,
   levelSchema,
   obstructionSchema,
   panSchema,
   pourSchema,
-  steelSchema,
   tendonSchema,
   type AnchorData,
   type LayoutFile,
-  type SteelData,
 } from './layout'
+import { steelSchema, type SteelData } from './steel-schema'
 
 /**
  * How a layout is edited: a batch of commands on rows, sent whole, applied whole or not at all. Every command has an
@@ -83,16 +82,24 @@ export interface Applied {
   readonly units: readonly string[]
 }
 
+/** A row, and the field of it that is meant; null for the whole of it. */
+export interface CommandPlace {
+  readonly table: EditableTable
+  readonly id: string
+  readonly field: string | null
+}
+
 /** A command that cannot be applied: `table`, `id` and `field` say where, the message what would be right. */
-export class CommandError extends Error {
+export class CommandError extends Error implements CommandPlace {
   override readonly name = 'CommandError'
-  constructor(
-    message: string,
-    readonly table: EditableTable,
-    readonly id: string,
-    readonly field: string | null,
-  ) {
+  readonly table: EditableTable
+  readonly id: string
+  readonly field: string | null
+  constructor(message: string, { table, id, field }: CommandPlace) {
     super(message)
+    this.table = table
+    this.id = id
+    this.field = field
   }
 }
 
@@ -103,36 +110,34 @@ export class CommandError extends Error {
 export function applyCommands(layout: LayoutFile, commands: readonly Command[]): Applied {
   const draft = new Draft(layout)
   const inverse: Command[] = []
-  const units = new Set<string>()
-  for (const command of commands) {
-    const undo = applyOne(draft, command, units)
-    inverse.unshift(undo)
-  }
-  return { layout: draft.finish(), inverse, units: [...units] }
+  for (const command of commands) inverse.push(applyOne(draft, command))
+  return { layout: draft.finish(), inverse: inverse.reverse(), units: [...draft.units] }
 }
 
-function applyOne(draft: Draft, command: Command, units: Set<string>): Command {
+/** Applies one command and gives the one that takes it back. */
+function applyOne(draft: Draft, command: Command): Command {
   const { table } = command
   if (command.type === 'insert') {
     const row = readRow(table, command.row.id, command.row)
-    if (draft.find(table, row.id)) throw new CommandError('This row exists already.', table, row.id, 'id')
+    if (draft.find(table, row.id))
+      throw new CommandError('This row exists already.', { table, id: row.id, field: 'id' })
     draft.put(table, row)
-    note(draft, table, row, units)
+    draft.touch(table, row)
     return { type: 'remove', table, id: row.id }
   }
   const before = draft.find(table, command.id)
-  if (!before) throw new CommandError('This row is no longer there.', table, command.id, 'id')
-  note(draft, table, before, units)
+  if (!before) throw new CommandError('This row is no longer there.', { table, id: command.id, field: 'id' })
+  draft.touch(table, before)
   if (command.type === 'remove') {
     draft.remove(table, command.id)
     return { type: 'insert', table, row: before }
   }
   if ('id' in command.changes && command.changes.id !== command.id) {
-    throw new CommandError('An id cannot be changed.', table, command.id, 'id')
+    throw new CommandError('An id cannot be changed.', { table, id: command.id, field: 'id' })
   }
   const after = readRow(table, command.id, { ...before, ...command.changes })
   draft.put(table, after)
-  note(draft, table, after, units)
+  draft.touch(table, after)
   return { type: 'set', table, id: command.id, changes: pick(before, Object.keys(command.changes)) }
 }
 
@@ -140,14 +145,15 @@ function readRow(table: EditableTable, id: string, value: unknown): Row {
   const read = TABLES[table].safeParse(value)
   if (read.success) return read.data
   const issue = read.error.issues[0]
-  throw new CommandError(issue?.message ?? 'cannot be read', table, id, issue?.path.join('.') ?? null)
+  throw new CommandError(issue?.message ?? 'cannot be read', { table, id, field: issue?.path.join('.') ?? null })
 }
 
 const pick = (row: Row, keys: readonly string[]): Record<string, unknown> =>
   Object.fromEntries(Object.entries(row).filter(([key]) => keys.includes(key)))
 
-/** Working copy: a Map of rows for each table that a command touches. */
+/** Working copy: a Map of rows for each table that a command touches, and the units whose version counts up. */
 class Draft {
+  readonly units = new Set<string>()
   private readonly touched = new Map<EditableTable, Map<string, Row>>()
   constructor(private readonly layout: LayoutFile) {}
 
@@ -159,6 +165,10 @@ class Draft {
   }
   remove(table: EditableTable, id: string): void {
     this.rows(table).delete(id)
+  }
+  /** Counts the unit that the row belongs to as it stands. */
+  touch(table: EditableTable, row: Row): void {
+    this.units.add(unitOf(table, row, (id) => this.find('anchors', id) as AnchorData | undefined))
   }
   finish(): LayoutFile {
     const tables = [...this.touched].map(([table, rows]) => [table, [...rows.values()]] as const)
@@ -172,10 +182,6 @@ class Draft {
     this.touched.set(table, rows)
     return rows
   }
-}
-
-function note(draft: Draft, table: EditableTable, row: Row, units: Set<string>): void {
-  units.add(unitOf(table, row, (id) => draft.find('anchors', id) as AnchorData | undefined))
 }
 
 /**

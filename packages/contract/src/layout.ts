@@ -1,6 +1,9 @@
 import type { Layout } from '@wedgeline/engine'
 import { z } from 'zod'
+import { anywhere, azimuth, barDiameter, idSchema, label, notNegative, positive, share, text } from './fields'
+import { hardwareSchema, jackSchema, strandTypeSchema } from './hardware-schema'
 import { toSi } from './si'
+import { steelSchema } from './steel-schema'
 
 /**
  * The layout of a job: everything that a pour's checks and bars are made from. The layout file and the API share it.
@@ -12,23 +15,6 @@ export const LAYOUT_VERSION = 1
 
 /** Sizes that a layout may have; docs/layout-format.md names them. */
 export const LIMITS = { anchors: 20_000, pours: 200, edges: 2_000, corners: 200, steel: 60_000 } as const
-
-const HUGE = 1e7
-export const idSchema = z
-  .string()
-  .regex(/^[A-Za-z0-9][A-Za-z0-9._:-]{0,63}$/, 'must be 1 to 64 letters, digits, dots, colons or dashes')
-export const text = (max: number) => z.string().trim().max(max)
-export const label = (max: number) => z.string().trim().min(1, 'must not be empty').max(max)
-const anywhere = z.number().min(-HUGE).max(HUGE)
-const positive = z.number().positive('must be more than 0').max(HUGE)
-const notNegative = z.number().min(0, 'must be 0 or more').max(HUGE)
-const share = z.number().gt(0, 'must be more than 0').max(1, 'must be at most 1')
-const azimuth = z.number().min(-360).max(360)
-const count = z.number().int('must be a whole number').min(0).max(1000)
-const barDiameter = z.union(
-  [6, 8, 10, 12, 16, 20, 25, 32, 40].map((d) => z.literal(d)),
-  'must be a bar size: 6, 8, 10, 12, 16, 20, 25, 32 or 40',
-)
 
 export const pointSchema = z.strictObject({ xMm: anywhere, yMm: anywhere })
 const outline = z.array(pointSchema).min(3, 'needs three points or more').max(LIMITS.corners)
@@ -78,149 +64,6 @@ export const gridLineSchema = z.strictObject({
   xMm: anywhere,
   yMm: anywhere,
   azimuthDeg: azimuth,
-})
-
-export const strandTypeSchema = z.strictObject({
-  id: idSchema,
-  name: label(60),
-  diameterMm: positive,
-  areaMm2: positive,
-  breakingLoadKN: positive,
-  proofLoadKN: positive,
-})
-
-export const jackSchema = z.strictObject({
-  id: idSchema,
-  name: label(60),
-  description: text(200).default(''),
-  closedLengthMm: positive,
-  strokeMm: notNegative,
-  strandTailMm: notNegative,
-  handRoomMm: notNegative,
-  bodyDiameterMm: positive,
-  noseDiameterMm: positive,
-  noseLengthMm: notNegative,
-  bentNoseMaxDeg: z.number().min(0).max(45),
-  sideRoomMm: notNegative,
-  roomAboveMm: notNegative,
-})
-
-const rectangle = { widthMm: positive, heightMm: positive }
-const opening = z.strictObject({ ...rectangle, isRound: z.boolean() })
-
-const spiral = {
-  kind: z.literal('spiral'),
-  diameterMm: barDiameter,
-  outsideMm: positive,
-  pitchMm: positive,
-  turns: z.number().min(1).max(40),
-  flatTurns: z.number().min(0).max(4).default(0),
-  firstMm: anywhere.default(0),
-}
-const links = {
-  kind: z.literal('links'),
-  diameterMm: barDiameter,
-  widthMm: positive,
-  heightMm: positive,
-  hookMm: positive,
-  count: count.min(1),
-  firstMm: anywhere,
-  pitchMm: positive,
-}
-const hairpins = {
-  kind: z.literal('hairpins'),
-  diameterMm: barDiameter,
-  legMm: positive,
-  bendMm: positive,
-  count: count.min(1),
-  lies: z.enum(['upright', 'flat']).default('upright'),
-  firstMm: anywhere.default(0),
-  pitchMm: notNegative.default(0),
-}
-const layers = z.enum(['top', 'bottom', 'both'])
-
-export const steelShapeSchema = z.discriminatedUnion('kind', [
-  z.strictObject(spiral),
-  z.strictObject(links),
-  z.strictObject(hairpins),
-  z.strictObject({
-    kind: z.literal('edge-bars'),
-    diameterMm: barDiameter,
-    countTop: count,
-    countBottom: count,
-    firstMm: positive,
-    pitchMm: positive,
-    fromMm: anywhere,
-    toMm: anywhere,
-  }),
-  z.strictObject({
-    kind: z.literal('transverse-bars'),
-    diameterMm: barDiameter,
-    lengthMm: positive,
-    count: count.min(1),
-    layers,
-    firstMm: notNegative,
-    pitchMm: positive,
-  }),
-  z.strictObject({
-    kind: z.literal('wedge-bars'),
-    diameterMm: barDiameter,
-    lengthMm: positive,
-    count: count.min(1),
-    layers,
-  }),
-  z.strictObject({
-    kind: z.enum(['trimmers', 'diagonals', 'tie-back-bars', 'lap-bars']),
-    diameterMm: barDiameter,
-    lengthMm: positive,
-    count: count.min(1),
-    layers,
-  }),
-])
-
-const isTested = z.boolean()
-export const localSteelSchema = z.discriminatedUnion('kind', [
-  z.strictObject({ isTested, ...spiral }),
-  z.strictObject({ isTested, ...links }),
-  z.strictObject({ isTested, ...hairpins }),
-])
-
-const distances = {
-  spacingAlongMinMm: positive,
-  spacingHeightMinMm: positive,
-  edgeAlongMinMm: positive,
-  edgeHeightMinMm: positive,
-}
-
-export const approvalSchema = z.strictObject({
-  reference: label(120),
-  strengths: z
-    .array(z.strictObject({ share, strengthMinMPa: positive.max(120), ...distances }))
-    .min(1, 'needs at least one smallest strength')
-    .max(12),
-})
-
-export const hardwareSchema = z.strictObject({
-  id: idSchema,
-  name: label(60),
-  description: text(200).default(''),
-  kind: z.enum(['plate', 'bonded-splay']),
-  ends: z.enum(['live', 'dead', 'both']),
-  strandsMax: z.number().int().min(1).max(61),
-  approval: approvalSchema.nullable().default(null),
-  plate: z.strictObject(rectangle),
-  hole: opening.nullable(),
-  duct: opening,
-  pocket: z.strictObject({ ...rectangle, depthMm: positive }).nullable(),
-  deviceLengthMm: notNegative.default(0),
-  splayLengthMm: positive.nullable().default(null),
-  transmissionLengthMm: positive.nullable().default(null),
-  ...distances,
-  straightBehindMinMm: notNegative,
-  strandTailMinMm: notNegative,
-  drawInMm: notNegative,
-  localSteel: localSteelSchema.nullable().default(null),
-  jackId: idSchema.nullable().default(null),
 })
 
 export const edgeLineSchema = z.strictObject({
@@ -367,28 +210,6 @@ export const anchorSchema = z.strictObject({
   straightBehindMm: notNegative.nullable().default(null),
 })
 
-export const steelZoneSchema = z.discriminatedUnion('kind', [
-  z.strictObject({ kind: z.literal('anchor'), anchorId: idSchema }),
-  z.strictObject({
-    kind: z.literal('gap'),
-    edgeId: idSchema,
-    afterAnchorId: idSchema.nullable(),
-    beforeAnchorId: idSchema.nullable(),
-  }),
-  z.strictObject({ kind: z.literal('edge'), edgeId: idSchema }),
-  z.strictObject({ kind: z.literal('pan'), panId: idSchema }),
-  z.strictObject({ kind: z.literal('joint'), jointId: idSchema }),
-])
-
-export const steelSchema = z.strictObject({
-  id: idSchema,
-  pourId: idSchema,
-  zone: steelZoneSchema,
-  shape: steelShapeSchema,
-  source: z.enum(['by-hand', 'proposed', 'hardware']).default('by-hand'),
-  isLocked: z.boolean().default(false),
-})
-
 export const barMarkSchema = z.strictObject({
   id: idSchema,
   pourId: idSchema,
@@ -409,7 +230,7 @@ export const layoutSchema = z.strictObject({
   format: z.literal(LAYOUT_FORMAT, `must be "${LAYOUT_FORMAT}"`),
   version: z.literal(LAYOUT_VERSION, `must be ${LAYOUT_VERSION}, the only version that this build reads`),
   job: jobSchema,
-  levels: z.array(levelSchema).min(1, 'needs at least one level').max(100),
+  levels: z.array(levelSchema).max(100),
   gridLines: z.array(gridLineSchema).max(400).default([]),
   strandTypes: z.array(strandTypeSchema).max(100).default([]),
   jacks: z.array(jackSchema).max(100).default([]),
@@ -436,12 +257,6 @@ export type EdgeLineData = z.output<typeof edgeLineSchema>
 export type PanData = z.output<typeof panSchema>
 export type TendonData = z.output<typeof tendonSchema>
 export type AnchorData = z.output<typeof anchorSchema>
-export type SteelData = z.output<typeof steelSchema>
-export type SteelShapeData = z.output<typeof steelShapeSchema>
-export type SteelZoneData = z.output<typeof steelZoneSchema>
-export type HardwareData = z.output<typeof hardwareSchema>
-export type StrandTypeData = z.output<typeof strandTypeSchema>
-export type JackData = z.output<typeof jackSchema>
 
 /** A layout file in the engine's units and names. */
 export const toEngine = (file: LayoutFile): Layout => toSi(file)

@@ -9,9 +9,11 @@ import type { Problem } from './problems/problem'
 import { referenceProblems } from './problems/references'
 import { steelProblems } from './problems/steel'
 import { stopProblems } from './problems/stops'
+import { timeZoneProblems } from './problems/time-zone'
 
 export { fieldOf, type Path, type Problem, type Severity } from './problems/problem'
 export { hardwareProblems } from './problems/hardware'
+export { isTimeZone } from './problems/time-zone'
 export { LENGTH_GAP_MAX_MM, OFF_LINE_MAX_MM } from './problems/edges'
 
 /**
@@ -21,6 +23,7 @@ export { LENGTH_GAP_MAX_MM, OFF_LINE_MAX_MM } from './problems/edges'
 export function layoutProblems(layout: LayoutFile): Problem[] {
   return [
     ...nameProblems(layout),
+    ...timeZoneProblems(layout),
     ...jobFactorProblems(layout),
     ...referenceProblems(layout),
     ...pourProblems(layout),

@@ -1,4 +1,6 @@
-import type { HardwareData, LayoutFile, SteelShapeData } from '../layout'
+import type { HardwareData } from '../hardware-schema'
+import type { LayoutFile } from '../layout'
+import type { SteelShapeData } from '../steel-schema'
 import { mm, refused, type Path, type Problem } from './problem'
 
 /** Sizes of hardware that contradict one another, approvals that do not grow, and strands. */

@@ -1,4 +1,5 @@
-import type { AnchorData, LayoutFile, SteelData } from '../layout'
+import type { AnchorData, LayoutFile } from '../layout'
+import type { SteelData } from '../steel-schema'
 import { shapeProblems } from './hardware'
 import { byId, refused, type Path, type Problem } from './problem'
 

@@ -1,4 +1,5 @@
-import type { AnchorData, EdgeData, HardwareData, LayoutFile } from '../layout'
+import type { HardwareData } from '../hardware-schema'
+import type { AnchorData, EdgeData, LayoutFile } from '../layout'
 import { intervalOf, type Interval } from './edges'
 import { contains } from './outline'
 import { byId, mm, stop, type Path, type Problem } from './problem'
