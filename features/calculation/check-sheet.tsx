@@ -30,7 +30,12 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
         </Text>
       </View>
       {steps.map((step, at) => (
-        <StepLine key={`${step.symbol}-${at}`} step={step} isWide={isWide} isRepeated={isRepeated.has(step)} />
+        <StepLine
+          key={`${step.symbol}-${at}`}
+          step={step}
+          isWide={isWide}
+          says={isRepeated.has(step) ? 'as above' : meaningOf(step, check)}
+        />
       ))}
       <Outcome check={check} />
       {check.notes.map((note) => (
@@ -50,11 +55,17 @@ function nameOf({ name, plane, stage }: Check): string {
 interface StepLineProps {
   readonly step: Step
   readonly isWide: boolean
-  /** The same line stands above on this sheet: its meaning is not said again. */
-  readonly isRepeated: boolean
+  /** What stands beside the line: its meaning and clause, or that it stands above. */
+  readonly says: string
 }
 
-function StepLine({ step, isWide, isRepeated }: StepLineProps) {
+/** The clause is left out where it is the one that the head of the check names. */
+function meaningOf({ meaning, clause }: Step, check: Check): string {
+  const own = clauseText(clause)
+  return own === clauseText(check.clause) ? meaning : `${meaning}; ${own}`
+}
+
+function StepLine({ step, isWide, says }: StepLineProps) {
   const numbers = putIn(step.formula, step.values)
   const result = figureText(step.value)
   return (
@@ -65,7 +76,7 @@ function StepLine({ step, isWide, isRepeated }: StepLineProps) {
         <Text kind="figureStrong">{` = ${result}${step.unit === '-' ? '' : ` ${unitText(step.unit)}`}`}</Text>
       </View>
       <Text kind="small" tone="soft" style={isWide ? styles.meaningWide : styles.meaning}>
-        {isRepeated ? 'as above' : `${step.meaning}; ${clauseText(step.clause)}`}
+        {says}
       </Text>
     </View>
   )

@@ -1,5 +1,5 @@
 import type { LengthKind } from '@wedgeline/engine'
-import { G, Line, Path } from 'react-native-svg'
+import { G, Line, Path, Rect } from 'react-native-svg'
 import { DrawingText } from '@/components/drawing/drawing-text'
 import { GridBubble } from '@/components/drawing/grid-bubble'
 import { colour } from '@/components/theme'
@@ -158,9 +158,14 @@ function EdgeMark({ edge, scale }: { readonly edge: PlanEdge; readonly scale: Pl
   const x = (a.x + b.x) / 2 + way.x * 14
   const y = (a.y + b.y) / 2 + way.y * 14 + 4
   const anchor = way.x > 0.5 ? 'start' : way.x < -0.5 ? 'end' : 'middle'
+  const width = edge.mark.length * 6.5 + 6
+  const left = anchor === 'start' ? x - 3 : anchor === 'end' ? x - width + 3 : x - width / 2
   return (
-    <DrawingText x={x} y={y} isStrong textAnchor={anchor}>
-      {edge.mark}
-    </DrawingText>
+    <G>
+      <Rect x={left} y={y - 11} width={width} height={14} fill={colour.sheet} />
+      <DrawingText x={x} y={y} isStrong textAnchor={anchor}>
+        {edge.mark}
+      </DrawingText>
+    </G>
   )
 }

@@ -18,6 +18,9 @@ const ZOOM = { least: 1, most: 12, step: 1.5 } as const
 const MARGIN = { wide: 78, phone: 62 } as const
 const HEIGHT = { wide: 720, phone: 420 } as const
 
+/** Scale in px a mm from which the names of neighbouring pans have room. */
+const PAN_NAMES_FROM = 0.018
+
 export interface PourPlanProps {
   readonly index: LayoutIndex
   readonly pourId: string
@@ -79,7 +82,7 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
                 <Path key={thing.id} d={areaOf(thing)} fill={colour.soft} stroke={colour.ink} strokeWidth={1} />
               ))}
               <PlanEdges data={data} scale={scale} onEdge={onEdge} />
-              {[...data.regions, ...data.pans].map((area) => (
+              {[...data.regions, ...(scale.pxPerMm >= PAN_NAMES_FROM ? data.pans : [])].map((area) => (
                 <AreaName key={area.id} area={area} at={scale.at} />
               ))}
               <ScaleBar x={12} y={scale.height - 14} pxPerMm={scale.pxPerMm} />
