@@ -22,7 +22,7 @@ import { readPasted, type Pasted } from './paste'
 import { PasteDialog } from './paste-dialog'
 import { sheetTitle, ZoneSheet } from './sheet/zone-sheet'
 import { EdgeStrip } from './strip/edge-strip'
-import { stripData } from './strip/strip-data'
+import { stripData, type StripData } from './strip/strip-data'
 import { compass } from './strip/view-words'
 import { anchorRows } from './table/anchor-rows'
 import { AnchorTable } from './table/anchor-table'
@@ -49,7 +49,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
   const checks = usePourChecks(edge.pourId)
   const index = useMemo(() => layoutIndex(toEngine(layout)), [layout])
   const data = useMemo(() => stripData(index, edge.id), [index, edge.id])
-  const results = useMemo(() => resultsOf(checks.result?.zones ?? [], edge.id), [checks.result, edge.id])
+  const results = useMemo(() => resultsOf(checks.result?.zones ?? [], data), [checks.result, data])
   const rows = useMemo(() => anchorRows({ layout, edge, results }), [layout, edge, results])
   const select = useCallback((zone: string | null) => router.setParams({ zone: zone ?? '' }), [])
   const put = useCallback(
@@ -159,8 +159,12 @@ const outward = (index: LayoutIndex, edgeId: string) => {
   return frame ? { x: -frame.inward.x, y: -frame.inward.y } : { x: 0, y: 1 }
 }
 
-const resultsOf = (zones: readonly ZoneResult[], edgeId: string): ReadonlyMap<string, ZoneResult> =>
-  new Map(zones.filter(({ zone }) => zone.edgeId === edgeId || zone.panId !== null).map((each) => [each.zone.id, each]))
+/** Results of the edge's own zones, and of the anchors in pans that face it. */
+function resultsOf(zones: readonly ZoneResult[], data: StripData): ReadonlyMap<string, ZoneResult> {
+  const inPans = new Set(data.ends.filter(({ isInPan }) => isInPan).map(({ id }) => `anchor:${id}`))
+  const own = zones.filter(({ zone }) => zone.edgeId === data.frame.edgeId || inPans.has(zone.id))
+  return new Map(own.map((each) => [each.zone.id, each]))
+}
 
 /** Without hardware or a strand type no anchor can be entered: says which, and where to enter it. */
 function whatIsMissing({
@@ -182,7 +186,7 @@ function whatIsMissing({
 function SheetPane(props: {
   readonly edge: EdgeData
   readonly index: LayoutIndex
-  readonly data: ReturnType<typeof stripData>
+  readonly data: StripData
   readonly zoneId: string | null
   readonly children: ReactNode
 }) {

@@ -19,6 +19,8 @@ const BEHIND_MM = 700
 const BESIDE_MM = 120
 const GAP_PX = 44
 const FOOT_PX = 40
+/** Room above for the set-back's dimension. */
+const HEAD_PX = 26
 
 /** Face and section of one anchor at one true scale, with the dimensions that are looked for on the deck. */
 export function AnchorDrawing({ index, anchorId, bars }: AnchorDrawingProps) {
@@ -33,7 +35,7 @@ export function AnchorDrawing({ index, anchorId, bars }: AnchorDrawingProps) {
   const scale = Math.min((width - 3 * GAP_PX) / (faceMm + sectionMm), 240 / (top - soffit))
   const height = (top - soffit) * scale
   const own = bars.filter((bar) => bar.anchorId === anchorId || bar.kind === 'edge-bars')
-  const y = (h: number) => 10 + (top - h) * scale
+  const y = (h: number) => HEAD_PX + (top - h) * scale
   const face = (c: number) =>
     GAP_PX + ((frame.runsLeftToRight ? c - anchor.chainage : anchor.chainage - c) + faceMm / 2) * scale
   const depth = (d: number) => 2 * GAP_PX + faceMm * scale + d * scale
@@ -46,7 +48,7 @@ export function AnchorDrawing({ index, anchorId, bars }: AnchorDrawingProps) {
       {width === 0 ? null : (
         <Svg
           width={width}
-          height={height + FOOT_PX + 10}
+          height={height + FOOT_PX + HEAD_PX}
           role="img"
           aria-label={`${anchorMark(index, anchor)}: face and section at true scale`}
         >
@@ -119,10 +121,10 @@ export function AnchorDrawing({ index, anchorId, bars }: AnchorDrawingProps) {
             side="left"
           />
           <Dimension
-            from={{ x: depth(0), y: y(soffit) + 12 }}
-            to={{ x: depth(anchor.setBack), y: y(soffit) + 12 }}
+            from={{ x: depth(0), y: y(top) - 8 }}
+            to={{ x: depth(anchor.setBack), y: y(top) - 8 }}
             label={`${anchor.setBack}`}
-            side="right"
+            side="left"
           />
           {straight === null ? null : (
             <Dimension

@@ -152,8 +152,10 @@ function MendNote(props: {
   const { canEdit } = useJobDraft()
   const broken = result?.checks.filter((check): check is Compared => isBroken(check, field)) ?? []
   const [worst] = broken
-  if (!worst?.mend) return null
-  const { mend } = worst
+  // The value furthest from the one typed does for all of them.
+  const mends = broken.flatMap(({ mend }) => mend ?? [])
+  const mend = mends.sort((a, b) => Math.abs(b.value - (value ?? 0)) - Math.abs(a.value - (value ?? 0)))[0]
+  if (!worst || !mend) return null
   return (
     <View style={styles.note}>
       <StatusMark status={worst.status} words={`${worst.name}: ${sidesText(worst)}. Kept as typed.`} kind="small" />

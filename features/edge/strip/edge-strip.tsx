@@ -40,7 +40,7 @@ export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpe
   const [isOnDeck, setOnDeck] = useState(false)
   const edge = useMemo((): StripView => ({ from: data.frame.from, to: data.frame.to }), [data.frame])
   const [asked, setView] = useState<StripView | null>(null)
-  const [shown, setShown] = useState(selected)
+  const [shown, setShown] = useState<string | null>(null)
   const startView = isWide ? edge : { from: edge.from, to: Math.min(edge.to, edge.from + PHONE_VIEW_MM) }
   const view = asked ? zoomed(asked, edge, { factor: 1, about: asked.from }) : startView
   if (selected !== shown) {

@@ -256,7 +256,9 @@ function AnchorLine(of: {
           {...{ column, grid, props }}
         />
       ))}
-      <td style={styles.words}>{row.steel || 'none'}</td>
+      <td style={{ ...styles.words, maxWidth: 150 }} title={row.steel}>
+        {row.steel || 'none'}
+      </td>
       <td style={styles.words}>
         {row.worst ? <StatusMark status={row.worst.status} words={row.worst.words} kind="figure" oneLine /> : '–'}
       </td>
@@ -299,7 +301,7 @@ function GridCell(of: {
     <td
       data-place={`${place.row}:${place.column}`}
       tabIndex={isHere && !editing ? 0 : -1}
-      style={{ ...styles.cell, textAlign: column.align, ...(isHere ? styles.here : null) }}
+      style={{ ...styles.cell, textAlign: column.align, ...(editing ? styles.here : null) }}
       onClick={() => (isHere && !editing ? grid.begin(place, null) : editing ? undefined : grid.go(place))}
       onDoubleClick={() => grid.begin(place, null)}
     >
@@ -375,7 +377,7 @@ const styles = {
     padding: '1px 8px',
     borderBottom: `1px solid ${colour.rule}`,
     whiteSpace: 'nowrap',
-    maxWidth: 200,
+    maxWidth: 180,
     overflow: 'hidden',
     textOverflow: 'ellipsis',
   },
