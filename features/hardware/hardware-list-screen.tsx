@@ -2,6 +2,7 @@ import type { HardwareData, JackData, StrandTypeData } from '@wedgeline/contract
 import { useQuery } from '@tanstack/react-query'
 import { router } from 'expo-router'
 import { useState } from 'react'
+import { useWide } from '@/components/theme'
 import { Button } from '@/components/ui/button'
 import { Screen, Section } from '@/components/ui/screen'
 import { Empty, Failed, Waiting } from '@/components/ui/states'
@@ -51,6 +52,14 @@ export function HardwareListScreen({ companyId }: { companyId: string }) {
   )
 }
 
+/** A long text wraps in its place where there is room; on a phone it stands last, in one line. */
+function useColumns<Row>(columns: readonly Column<Row>[], about: Column<Row>): readonly Column<Row>[] {
+  const isWide = useWide()
+  return isWide
+    ? [...columns.slice(0, 1), { ...about, wraps: true, width: 280 }, ...columns.slice(1)]
+    : [...columns, about]
+}
+
 const END_WORDS = { live: 'live', dead: 'dead', both: 'live and dead' } as const
 const KIND_WORDS = { plate: 'plate', 'bonded-splay': 'bonded splay' } as const
 
@@ -62,15 +71,8 @@ interface HardwareSectionProps {
 
 function HardwareSection({ companyId, lists: { hardware, jacks }, isAdmin }: HardwareSectionProps) {
   const jackOf = ({ jackId }: HardwareData) => jacks.find(({ id }) => id === jackId)?.name ?? 'none'
-  const columns: Column<HardwareData>[] = [
+  const own: Column<HardwareData>[] = [
     { key: 'name', head: 'Name', isRowHead: true, cell: ({ name }) => name },
-    {
-      key: 'description',
-      head: 'What it is for',
-      wraps: true,
-      width: 280,
-      cell: ({ description }) => description || '–',
-    },
     { key: 'kind', head: 'Kind', cell: ({ kind }) => KIND_WORDS[kind] },
     { key: 'ends', head: 'Ends', cell: ({ ends }) => END_WORDS[ends] },
     { key: 'strands', head: 'Strands, at most', align: 'end', cell: ({ strandsMax }) => strandsMax },
@@ -84,6 +86,11 @@ function HardwareSection({ companyId, lists: { hardware, jacks }, isAdmin }: Har
       cell: ({ approval }) => approval?.reference ?? 'none',
     },
   ]
+  const columns = useColumns(own, {
+    key: 'description',
+    head: 'What it is for',
+    cell: ({ description }) => description || '–',
+  })
   return (
     <Section title="Anchorages">
       {hardware.length === 0 ? (
@@ -117,6 +124,18 @@ interface JackSectionProps {
 
 function JackSection({ companyId, jacks, isAdmin }: JackSectionProps) {
   const [open, setOpen] = useState<JackData | 'new' | null>(null)
+  const own: Column<JackData>[] = [
+    { key: 'name', head: 'Name', isRowHead: true, cell: ({ name }) => name },
+    { key: 'closed', head: 'Closed, mm', align: 'end', cell: ({ closedLengthMm }) => closedLengthMm },
+    { key: 'stroke', head: 'Stroke, mm', align: 'end', cell: ({ strokeMm }) => strokeMm },
+    { key: 'body', head: 'Body, mm', align: 'end', cell: ({ bodyDiameterMm }) => bodyDiameterMm },
+    { key: 'nose', head: 'Bent nose, up to', align: 'end', cell: ({ bentNoseMaxDeg }) => `${bentNoseMaxDeg}°` },
+  ]
+  const columns = useColumns(own, {
+    key: 'description',
+    head: 'What it is for',
+    cell: (jack) => jack.description || '–',
+  })
   return (
     <Section title="Jacks" actions={isAdmin ? <Button label="New jack" onPress={() => setOpen('new')} /> : null}>
       {jacks.length === 0 ? (
@@ -124,20 +143,7 @@ function JackSection({ companyId, jacks, isAdmin }: JackSectionProps) {
       ) : (
         <Table
           caption="Jacks of the company"
-          columns={[
-            { key: 'name', head: 'Name', isRowHead: true, cell: ({ name }) => name },
-            {
-              key: 'description',
-              head: 'What it is for',
-              wraps: true,
-              width: 280,
-              cell: (jack) => jack.description || '–',
-            },
-            { key: 'closed', head: 'Closed, mm', align: 'end', cell: ({ closedLengthMm }) => closedLengthMm },
-            { key: 'stroke', head: 'Stroke, mm', align: 'end', cell: ({ strokeMm }) => strokeMm },
-            { key: 'body', head: 'Body, mm', align: 'end', cell: ({ bodyDiameterMm }) => bodyDiameterMm },
-            { key: 'nose', head: 'Bent nose, up to', align: 'end', cell: ({ bentNoseMaxDeg }) => `${bentNoseMaxDeg}°` },
-          ]}
+          columns={columns}
           rows={jacks}
           rowKey={({ id }) => id}
           onSelect={setOpen}
