@@ -15,6 +15,7 @@ import {
 import { describe, expect, test } from 'vitest'
 import { accepted, checksAt, K4, row, S4_APPROVED } from './anchor-checks'
 import { anchor, B7, D4, deadEnd, inPan, layout, pan, S4 } from './sample-layout'
+import { scaled } from './scaled'
 import { evaluated } from './step-text'
 
 /** Every kind of anchor: approved, plain, off centre, skew, beam plate, too close, dead, in a pan. */
@@ -242,24 +243,6 @@ describe('One edge of a pour', () => {
 })
 
 describe('Scaling: lengths x k and forces x k^2 leave every ratio unchanged', () => {
-  const grown = (value: unknown, by: Readonly<Record<string, number>>, name = ''): unknown => {
-    if (typeof value === 'number') return value * (by[name] ?? 1)
-    if (Array.isArray(value)) return value.map((item) => grown(item, by, name))
-    if (value === null || typeof value !== 'object') return value
-    return Object.fromEntries(Object.entries(value).map(([key, item]) => [key, grown(item, by, key)]))
-  }
-  const LENGTHS =
-    'x y thickness coverTop coverSoffit coverEdge from to top soffit chainage height setBack straightBehind width ' +
-    'depth diameter hook first pitch outside length leg bend spacingAlongMin spacingHeightMin edgeAlongMin ' +
-    'edgeHeightMin straightBehindMin cover pocketToFaceMin pocketToPocketMin clearGapMin'
-  const scaled = (of: Layout, k: number): Layout =>
-    grown(of, {
-      ...Object.fromEntries(LENGTHS.split(' ').map((name) => [name, k])),
-      breakingLoad: k ** 2,
-      proofLoad: k ** 2,
-      area: k ** 2,
-    }) as Layout
-
   test.each([0.37, 3.7])('k = %s', (k) => {
     // Transverse bars long enough that the least lengths of EN 8.4, which are in mm, do not enter.
     const bars: SteelShape = {
