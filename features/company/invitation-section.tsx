@@ -150,7 +150,7 @@ const dateText = (atMs: number): string => new Intl.DateTimeFormat('en-GB', { da
 const styles = StyleSheet.create({
   line: { flexDirection: 'row' },
   made: { gap: space.s, padding: space.m, borderWidth: 1, borderLeftWidth: 4, borderColor: colour.ink },
-  link: { overflowWrap: 'anywhere' } as object,
+  link: { overflowWrap: 'anywhere' },
   row: {
     flexDirection: 'row',
     alignItems: 'center',
