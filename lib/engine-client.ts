@@ -3,12 +3,13 @@ import type { CheckReply, CheckRequest } from './engine.worker'
 
 /**
  * Asks the engine for a pour's checks while somebody types. The latest edit wins: while one request runs only the
- * newest waiting one is kept, and an older answer is never shown over a newer one.
+ * newest waiting one of each pour is kept, and an older answer is never shown over a newer one.
  */
 export class EngineClient {
   private readonly worker: Worker | null
   private running: Pending | null = null
-  private waiting: Pending | null = null
+  /** By pour, in the order in which they were asked for. */
+  private readonly waiting = new Map<string, Pending>()
   private nextId = 1
 
   constructor(makeWorker: (() => Worker) | null) {
@@ -20,8 +21,8 @@ export class EngineClient {
   check(layout: Layout, pourId: string): Promise<PourResult | null> {
     if (!this.worker) return Promise.resolve(checkPour(layout, { pourId, withSteps: true }))
     return new Promise((resolve, reject) => {
-      this.waiting?.resolve(null)
-      this.waiting = { request: { id: this.nextId++, layout, pourId }, resolve, reject }
+      this.waiting.get(pourId)?.resolve(null)
+      this.waiting.set(pourId, { request: { id: this.nextId++, layout, pourId }, resolve, reject })
       this.start()
     })
   }
@@ -31,10 +32,11 @@ export class EngineClient {
   }
 
   private start(): void {
-    if (this.running || !this.waiting) return
-    this.running = this.waiting
-    this.waiting = null
-    this.worker?.postMessage(this.running.request)
+    const [next] = this.waiting.values()
+    if (this.running || !next) return
+    this.waiting.delete(next.request.pourId)
+    this.running = next
+    this.worker?.postMessage(next.request)
   }
 
   private answered(reply: CheckReply): void {
