@@ -8,7 +8,7 @@ import { EXPO_ENV, at, filesUnder, hashOf, runNode, seconds } from './project.mj
 
 export const DIST = 'dist'
 /** Exported beside dist and renamed at the end: a build that fails leaves the previous one whole. */
-const FRESH = '.expo/web-build'
+const FRESH = `.expo/web-build-${process.pid}`
 /** A dot file, so that the server's static files never serve it. */
 const STAMP = `${DIST}/.sources`
 const SOURCES = [
