@@ -15,6 +15,8 @@ const PLANE_WORDS = { thickness: 'in the thickness', plan: 'in plan' } as const
 export function CheckSheet({ check, isRepeated }: { readonly check: Check; readonly isRepeated: ReadonlySet<Step> }) {
   const isWide = useWide()
   const steps = check.kind === 'compared' ? check.steps : []
+  // A distance says what came of it in its first line, so that a zone with many keeps to one side of A4.
+  const isShort = isWide && check.kind === 'compared' && check.compares !== 'ratio'
   return (
     <View style={styles.check} dataSet={{ print: 'together' }}>
       <View style={styles.head}>
@@ -28,6 +30,7 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
         <Text kind="small" tone="soft" style={styles.clause}>
           {clauseText(check.clause)}
         </Text>
+        {isShort ? <Text kind="strong">{comparedText(check)}</Text> : null}
       </View>
       {steps.map((step, at) => (
         <StepLine
@@ -37,12 +40,12 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
           says={isRepeated.has(step) ? 'as above' : meaningOf(step, check)}
         />
       ))}
-      <Outcome check={check} />
-      {check.notes.map((note) => (
-        <Text key={note} kind="small" tone="soft" style={styles.note}>
-          {note}
+      {isShort ? null : <Outcome check={check} />}
+      {check.notes.length > 0 ? (
+        <Text kind="small" tone="soft" style={styles.note}>
+          {check.notes.map(noteText).join(' ')}
         </Text>
-      ))}
+      ) : null}
     </View>
   )
 }

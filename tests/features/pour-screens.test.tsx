@@ -2,20 +2,29 @@ import { layoutSchema, toEngine, type LayoutFile } from '@wedgeline/contract'
 import { checkPour } from '@wedgeline/engine'
 import { render, screen, within } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
-import { beforeEach, expect, test, vi } from 'vitest'
+import { beforeEach, expect, test, vi, type Mock } from 'vitest'
 import { CalculationScreen } from '@/features/calculation/calculation-screen'
 import { NewPourScreen } from '@/features/pour/new-pour-screen'
 import { PourZonesScreen } from '@/features/pour/zones-screen'
 import { expectAccessible } from '../components/axe'
 import example from '../../docs/example-layout.json'
 
-const state = vi.hoisted(() => ({
+interface Shown {
+  edit: Mock
+  replace: Mock
+  canEdit: boolean
+  layout: unknown
+  checks: unknown
+  status: string | undefined
+}
+
+const state = vi.hoisted((): Shown => ({
   edit: vi.fn(),
   replace: vi.fn(),
   canEdit: true,
-  layout: null as unknown,
-  checks: null as unknown,
-  status: undefined as string | undefined,
+  layout: null,
+  checks: null,
+  status: undefined,
 }))
 
 vi.mock('expo-router', () => ({
