@@ -162,7 +162,7 @@ function SheetHead({ zone, pour, basis }: ZoneSheetProps) {
               {`Reading: ${readingTitle(readingId)}. ${accepted ? `Accepted by ${accepted.acceptedBy}.` : 'Not accepted yet.'}`}
             </Text>
             {accepted ? null : (
-              <Link kind="small" href={`/jobs/${jobId}/basis`}>
+              <Link kind="small" href={`/jobs/${jobId}`}>
                 Readings of this job
               </Link>
             )}

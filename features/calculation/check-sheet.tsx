@@ -43,7 +43,7 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
       {isShort ? null : <Outcome check={check} />}
       {check.notes.length > 0 ? (
         <Text kind="small" tone="soft" style={styles.note}>
-          {check.notes.map(noteText).join(' ')}
+          {check.notes.join(' ')}
         </Text>
       ) : null}
     </View>

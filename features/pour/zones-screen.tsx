@@ -86,7 +86,7 @@ function Waits({ jobId, result }: { readonly jobId: string; readonly result: Pou
   return (
     <Banner
       words={`Checks wait for an engineer to accept what they rest on: ${list.join('; ')}.`}
-      actions={<Button label="Readings of this job" href={`/jobs/${jobId}/basis`} />}
+      actions={<Button label="Readings of this job" href={`/jobs/${jobId}`} />}
     />
   )
 }
