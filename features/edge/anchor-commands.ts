@@ -46,7 +46,7 @@ export function insertAnchors({ layout, edge, newId }: Place, typed: readonly Ty
       setBackMm: anchor.setBackMm ?? like.setBackMm,
       skewDeg: 0,
       elevationDeg: 0,
-      straightBehindMm: null,
+      straightBehindMm: like.straightBehindMm,
     }
     return [
       { type: 'insert', table: 'tendons', row: tendon },
@@ -61,6 +61,8 @@ interface Likeness {
   readonly heightMm: number
   readonly strands: number
   readonly setBackMm: number
+  /** What is drawn until somebody types another: as the anchor before, or the least that the hardware asks for. */
+  readonly straightBehindMm: number | null
   readonly end: AnchorData['end']
   readonly hardware: HardwareData | undefined
 }
@@ -82,6 +84,7 @@ function likeness(layout: LayoutFile, edge: EdgeData, { chainageMm, hardwareId, 
     heightMm: before?.heightMm ?? middleHeight(layout, edge, chainageMm),
     strands,
     setBackMm: sameEnd && sameEnd.hardwareId === hardware?.id ? sameEnd.setBackMm : usualSetBack(hardware),
+    straightBehindMm: sameEnd?.straightBehindMm ?? hardware?.straightBehindMinMm ?? null,
     end: wantedEnd,
     hardware,
   }

@@ -35,7 +35,8 @@ export function PhoneAnchors({ rows, zone, canEdit, onSelect, onInsert }: PhoneA
           {
             key: 'worst',
             head: 'Worst check',
-            cell: ({ worst }) => (worst ? <StatusMark status={worst.status} words={worst.words} kind="figure" /> : '–'),
+            cell: ({ worstShort }) =>
+              worstShort ? <StatusMark status={worstShort.status} words={worstShort.words} kind="figure" /> : '–',
           },
         ]}
       />

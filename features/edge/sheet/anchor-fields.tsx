@@ -168,6 +168,23 @@ function MendNote(props: {
   )
 }
 
+/** The same notes on their own, where the fields stand further down. */
+export function Mends({ anchor, mark, result }: Pick<AnchorFieldsProps, 'anchor' | 'mark' | 'result'>) {
+  const { edit } = useJobDraft()
+  return FIELDS.map(({ key, label }) => (
+    <MendNote
+      key={key}
+      field={key}
+      result={result}
+      value={anchor[key]}
+      onUse={(value) => {
+        const typed = anchorChange(anchor, { [key]: value }, `${mark}: ${label.toLowerCase()}`)
+        if (typed.kind === 'change') edit(typed.change)
+      }}
+    />
+  ))
+}
+
 const isBroken = (check: ZoneResult['checks'][number], field: string): boolean =>
   check.kind === 'compared' &&
   (check.status === 'over' || check.status === 'stop') &&

@@ -5,13 +5,13 @@ import { useMemo, type ReactNode } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { Button } from '@/components/ui/button'
 import { Text } from '@/components/ui/text'
-import { space } from '@/components/theme'
+import { space, useWide } from '@/components/theme'
 import { useJobDraft } from '../../editing/job-draft'
 import { removeAnchors } from '../anchor-commands'
 import type { StripData } from '../strip/strip-data'
 import { anchorMarkOf } from '../table/anchor-rows'
 import { AnchorDrawing } from './anchor-drawing'
-import { AnchorFields } from './anchor-fields'
+import { AnchorFields, Mends } from './anchor-fields'
 import { KINDS_OF_ZONE, type Place } from './steel-fields'
 import { SteelList } from './steel-list'
 import { ZoneChecks } from './zone-checks'
@@ -42,7 +42,8 @@ export function sheetTitle({
     const { frame } = data
     const above = end.heightAbove - frame.soffitAt(end.chainage)
     const below = frame.topAt(end.chainage) - end.heightAbove
-    const place = gridReference(index.layout, frame.pointAt(end.chainage, end.setBack))
+    const place =
+      gridReference(index.layout, frame.pointAt(end.chainage, end.setBack)) || `${end.chainage} along the edge`
     return { title: `${end.mark}, ${end.end} end`, detail: `${place}, ${above} above soffit, ${below} below top` }
   }
   const wedge = data.wedges.find((each) => each.zoneId === zoneId)
@@ -54,6 +55,7 @@ export function sheetTitle({
 export function ZoneSheet(props: ZoneSheetProps) {
   const { edge, index, data, zoneId, result, onClose } = props
   const { layout, jobId, canEdit, edit } = useJobDraft()
+  const isWide = useWide()
   const anchor = layout.anchors.find(({ id }) => `anchor:${id}` === zoneId) ?? null
   const zone = useMemo(() => steelZoneOf(edge.id, zoneId), [edge.id, zoneId])
   const pour = layout.pours.find(({ id }) => id === edge.pourId)
@@ -71,20 +73,20 @@ export function ZoneSheet(props: ZoneSheetProps) {
   }
   const name = anchor ? anchorMarkOf(edge, anchor) : sheetTitle(props).title
   const likeZones = zone.kind === 'anchor' ? otherLiveAnchors(layout.anchors, edge.id, zone.anchorId) : []
+  const numbers = anchor ? (
+    <AnchorFields
+      anchor={anchor}
+      hardware={hardware}
+      mark={name}
+      result={result}
+      tendon={layout.tendons.find(({ id }) => id === anchor.tendonId) ?? null}
+    />
+  ) : null
   return (
     <View style={styles.sheet}>
-      {anchor ? (
-        <>
-          <AnchorDrawing index={index} anchorId={anchor.id} bars={data.bars} />
-          <AnchorFields
-            anchor={anchor}
-            hardware={hardware}
-            mark={name}
-            result={result}
-            tendon={layout.tendons.find(({ id }) => id === anchor.tendonId) ?? null}
-          />
-        </>
-      ) : null}
+      {anchor ? <AnchorDrawing index={index} anchorId={anchor.id} bars={data.bars} /> : null}
+      {isWide ? null : numbers}
+      {anchor && isWide ? <Mends anchor={anchor} mark={name} result={result} /> : null}
       <Part title="Checks">
         <ZoneChecks jobId={jobId} result={result} />
       </Part>
@@ -97,6 +99,7 @@ export function ZoneSheet(props: ZoneSheetProps) {
           likeZones={likeZones}
         />
       </Part>
+      {isWide && numbers ? <Part title="Numbers">{numbers}</Part> : null}
       {anchor && canEdit ? (
         <Button
           kind="quiet"

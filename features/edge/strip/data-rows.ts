@@ -7,6 +7,8 @@ import type { StripData } from './strip-data'
 export interface Row {
   readonly label: string
   readonly cells: readonly DataCell[]
+  /** Its cells can be pressed, and so need the height of a thumb. */
+  readonly isPressed: boolean
 }
 
 export interface RowsOf {
@@ -45,7 +47,7 @@ function anchorRow({ data, results, selected, onSelect }: RowsOf): Row {
       onPress: () => onSelect(zoneId),
     }
   })
-  return { label: 'Anchor', cells }
+  return { label: 'Anchor', cells, isPressed: true }
 }
 
 const WORST_WEIGHT = { stop: 6, over: 5, 'not-covered': 4, 'needs-judgement': 3, near: 2, within: 1 } as const
@@ -68,7 +70,7 @@ function worstRow({ data, results, onSelect }: RowsOf): Row {
       },
     ]
   })
-  return { label: 'Worst check', cells }
+  return { label: 'Worst check', cells, isPressed: true }
 }
 
 function heightRow({ data }: RowsOf): Row {
@@ -77,7 +79,7 @@ function heightRow({ data }: RowsOf): Row {
     chainage: end.chainage,
     text: String(end.heightAbove),
   }))
-  return { label: 'Height, mm', cells }
+  return { label: 'Height, mm', cells, isPressed: false }
 }
 
 function forceRow({ index, data }: RowsOf): Row {
@@ -88,7 +90,7 @@ function forceRow({ index, data }: RowsOf): Row {
     const kN = (tendon.strands * tendon.jackingRatio * strand.breakingLoad) / 1000
     return [{ id: end.id, chainage: end.chainage, text: kN.toFixed(0) }]
   })
-  return { label: 'Jacking force, kN', cells }
+  return { label: 'Jacking force, kN', cells, isPressed: false }
 }
 
 function steelRow({ index, data }: RowsOf): Row {
@@ -96,7 +98,7 @@ function steelRow({ index, data }: RowsOf): Row {
     const shapes = (index.steelOfZone.get(`anchor:${end.id}`) ?? []).map(({ shape }) => shape)
     return { id: end.id, chainage: end.chainage, text: shapes.map(steelWords).join(', ') || 'none' }
   })
-  return { label: 'Steel', cells }
+  return { label: 'Steel', cells, isPressed: false }
 }
 
 function wedgeRow({ data, selected, onSelect }: RowsOf): Row {
@@ -109,7 +111,7 @@ function wedgeRow({ data, selected, onSelect }: RowsOf): Row {
     weight: depth,
     onPress: () => onSelect(zoneId),
   }))
-  return { label: 'Edge wedge depth, mm', cells }
+  return { label: 'Edge wedge depth, mm', cells, isPressed: true }
 }
 
 function wedgeBarsRow({ index, data }: RowsOf): Row {
@@ -117,5 +119,5 @@ function wedgeBarsRow({ index, data }: RowsOf): Row {
     const bars = (index.steelOfZone.get(zoneId) ?? []).map(({ shape }) => steelWords(shape)).join(', ')
     return { id: zoneId, chainage: middle, text: bars || 'none', weight: bars ? 1 : 0 }
   })
-  return { label: 'Wedge bars', cells }
+  return { label: 'Wedge bars', cells, isPressed: false }
 }

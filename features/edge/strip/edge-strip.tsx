@@ -112,9 +112,10 @@ export function EdgeStrip({ index, data, results, selected, onSelect, isTableOpe
           {rows.map((row) => (
             <DataRow
               key={row.label}
-              {...row}
+              label={row.label}
+              cells={row.cells}
               scale={scale}
-              height={isWide ? 24 : 40}
+              height={isWide ? 24 : row.isPressed ? 40 : 22}
               gutter={gutter}
               isLabelAbove={!isWide}
             />

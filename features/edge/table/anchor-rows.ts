@@ -1,6 +1,6 @@
 import { toSi, type AnchorData, type EdgeData, type LayoutFile, type TendonData } from '@wedgeline/contract'
 import type { ZoneResult } from '@wedgeline/engine'
-import { worstWords, type Worst } from '../../checks/words'
+import { worstShort, worstWords, type Worst } from '../../checks/words'
 import { steelWords } from '../steel-words'
 
 /** One line of the anchor table. */
@@ -12,6 +12,8 @@ export interface AnchorRow {
   readonly fromLastMm: number | null
   readonly steel: string
   readonly worst: Worst | null
+  /** The same as short as a phone needs it. */
+  readonly worstShort: Worst | null
 }
 
 export interface RowsOf {
@@ -42,6 +44,7 @@ export function anchorRows({ layout, edge, results }: RowsOf): readonly AnchorRo
       fromLastMm: before ? anchor.chainageMm - before.chainageMm : null,
       steel: steelOf(layout, anchor, item?.localSteel?.kind ?? null),
       worst: result ? worstWords(result) : null,
+      worstShort: result ? worstShort(result) : null,
     }
   })
 }
