@@ -17,10 +17,11 @@ export async function cell(page: Page, row: string, column: string): Promise<Loc
     .nth(at - 1)
 }
 
-/** Puts the focus on a cell. */
+/** Puts the focus on a cell; a second press on one would begin to edit it. */
 export async function focusCell(page: Page, row: string, column: string): Promise<void> {
   const target = await cell(page, row, column)
   await target.click()
+  if ((await target.getByRole('textbox').count()) > 0) await page.keyboard.press('Escape')
   await target.and(page.locator(':focus')).waitFor()
 }
 

@@ -1,31 +1,22 @@
 import type { LayoutFile } from '@wedgeline/contract'
 import type { Browser, Page } from 'playwright-core'
-import { afterAll, afterEach, beforeAll, describe, expect, test } from 'vitest'
+import { afterAll, beforeAll, describe, expect, test } from 'vitest'
 import { cell, grid, typeOver } from './anchor-grid'
 import { startProduct, type Product } from './product'
-import { storedLayout } from './stored-layout'
+import { storedDemo, type Stored } from './stored-layout'
 import { arrive, launchBrowser, openVisit, type Size, type Visit } from './visit'
 
 /** What becomes of typed values that are undone, reloaded, cut off or changed by two people, on the demo's edges. */
 
 let product: Product
 let browser: Browser
-let jobId: string
+let stored: Stored
 let demo: LayoutFile
-const visits: Visit[] = []
 
 beforeAll(async () => {
   ;[product, browser] = await Promise.all([startProduct({ withDemo: true }), launchBrowser()])
-  const { page, close } = await openVisit(browser, { origin: product.origin, size: 'wide' })
-  await arrive(page, '/', product.signInOf('detailer'))
-  await page.getByRole('link', { name: /Quillmarsh/ }).click()
-  await page.waitForURL(/\/jobs\/[^/]+$/)
-  jobId = /\/jobs\/([^/]+)$/.exec(page.url())?.[1] ?? ''
-  demo = await storedLayout(page, jobId)
-  await close()
-})
-afterEach(async () => {
-  for (const visit of visits.splice(0)) await visit.close()
+  stored = await storedDemo(product)
+  demo = await stored.layout()
 })
 afterAll(async () => {
   await browser?.close()
@@ -33,11 +24,11 @@ afterAll(async () => {
 })
 
 const HEIGHT = 'Height, mm'
-const STARTED = /^console:.*|^failed:.*/
+/** What a browser says of a server that it cannot reach. */
+const OUT_OF_REACH = /ERR_INTERNET_DISCONNECTED/
 
 async function visitEdge(mark: string, size: Size, role: 'detailer' | 'engineer' = 'detailer'): Promise<Visit> {
   const visit = await openVisit(browser, { origin: product.origin, size })
-  visits.push(visit)
   await arrive(visit.page, edgePath(mark), product.signInOf(role))
   await isOpen(visit.page, mark)
   return visit
@@ -45,7 +36,7 @@ async function visitEdge(mark: string, size: Size, role: 'detailer' | 'engineer'
 
 function edgePath(mark: string): string {
   const edge = demo.edges.find((each) => each.mark === mark)
-  return `/jobs/${jobId}/edges/${edge?.id}`
+  return `/jobs/${stored.jobId}/edges/${edge?.id}`
 }
 
 const isOpen = (page: Page, mark: string) =>
@@ -57,13 +48,6 @@ const saved = (page: Page) =>
     .filter({ hasText: /^Saved/ })
     .first()
     .waitFor()
-
-/** Height of an anchor as the server holds it. */
-async function storedHeight(page: Page, edgeMark: string, number: number): Promise<number | undefined> {
-  const { anchors, edges } = await storedLayout(page, jobId)
-  const edge = edges.find(({ mark }) => mark === edgeMark)
-  return anchors.find((anchor) => anchor.edgeId === edge?.id && anchor.number === number)?.heightMm
-}
 
 /** The renderer ends at once, as when a phone takes its memory: nothing in the page runs any more. */
 async function killTab(page: Page): Promise<void> {
@@ -94,14 +78,14 @@ describe('undo', () => {
     await page.keyboard.press('Enter')
     await page.getByRole('button', { name: 'Undo: E1-02: height' }).waitFor()
     await saved(page)
-    expect(await storedHeight(page, 'E1', 2)).toBe(131)
+    expect(await stored.heightOf('E1', 2)).toBe(131)
     await page.keyboard.press('Control+z')
     expect(await (await cell(page, 'E1-02', HEIGHT)).textContent()).toBe(before)
     await page.keyboard.press('Control+Shift+z')
     expect(await (await cell(page, 'E1-02', HEIGHT)).textContent()).toBe('131')
     await page.getByRole('button', { name: /^Undo/ }).click()
     expect(await (await cell(page, 'E1-02', HEIGHT)).textContent()).toBe(before)
-    await expect.poll(() => storedHeight(page, 'E1', 2)).toBe(Number(before))
+    await expect.poll(() => stored.heightOf('E1', 2)).toBe(Number(before))
   })
 
   test('brings back a removed anchor with its bars', async () => {
@@ -125,7 +109,7 @@ describe('a tab that ends in the middle of typing', () => {
     await page.reload()
     await isOpen(page, 'E1')
     expect(await (await cell(page, 'E1-03', HEIGHT)).textContent()).toBe('118')
-    await expect.poll(() => storedHeight(page, 'E1', 3)).toBe(118)
+    await expect.poll(() => stored.heightOf('E1', 3)).toBe(118)
   })
 
   test('wide: killed 1 s after the last key, nothing is lost', async () => {
@@ -137,13 +121,13 @@ describe('a tab that ends in the middle of typing', () => {
     await tab.goto(edgePath('E1'))
     await isOpen(tab, 'E1')
     expect(await (await cell(tab, 'E1-04', HEIGHT)).textContent()).toBe('121')
-    expect(await storedHeight(tab, 'E1', 4)).toBe(121)
+    expect(await stored.heightOf('E1', 4)).toBe(121)
   })
 
   test('wide: killed while the server is out of reach, it is sent once the edge is opened again', async () => {
     const visit = await visitEdge('E1', 'wide')
     const { page, context, newTab } = visit
-    visit.expect(STARTED)
+    visit.expect(OUT_OF_REACH)
     await context.setOffline(true)
     await typeOver(page, { row: 'E1-06', column: HEIGHT, text: '122' })
     await page.waitForTimeout(1000)
@@ -154,7 +138,7 @@ describe('a tab that ends in the middle of typing', () => {
     await tab.goto(edgePath('E1'))
     await isOpen(tab, 'E1')
     expect(await (await cell(tab, 'E1-06', HEIGHT)).textContent()).toBe('122')
-    await expect.poll(() => storedHeight(tab, 'E1', 6)).toBe(122)
+    await expect.poll(() => stored.heightOf('E1', 6)).toBe(122)
   })
 
   test('phone: killed 1 s after the last key in a field that was not left, nothing is lost', async () => {
@@ -167,7 +151,7 @@ describe('a tab that ends in the middle of typing', () => {
     await isOpen(tab, 'E1')
     const row = tab.getByRole('row').filter({ has: tab.getByRole('rowheader', { name: /E1-07/ }) })
     await row.getByRole('cell', { name: '123', exact: true }).waitFor()
-    expect(await storedHeight(tab, 'E1', 7)).toBe(123)
+    expect(await stored.heightOf('E1', 7)).toBe(123)
   })
 })
 
@@ -181,7 +165,7 @@ describe('two people at one edge', () => {
     engineer.expect(/^console: Failed to load resource: .* 409 /)
     await typeOver(detailer.page, { row: mark, column: HEIGHT, text: theirs })
     await detailer.page.keyboard.press('Enter')
-    await expect.poll(() => storedHeight(detailer.page, 'E3', number)).toBe(Number(theirs))
+    await expect.poll(() => stored.heightOf('E3', number)).toBe(Number(theirs))
     await typeOver(engineer.page, { row: mark, column: HEIGHT, text: mine })
     await engineer.page.keyboard.press('Enter')
     const refusal = engineer.page.getByRole('alert').filter({ hasText: 'Somebody else changed the same place' })
@@ -191,7 +175,7 @@ describe('two people at one edge', () => {
     expect([yours, other]).toEqual([`${mine} mm`, `${theirs} mm`])
     // What was typed still stands, and is stored nowhere.
     expect(await (await cell(engineer.page, mark, HEIGHT)).textContent()).toBe(mine)
-    expect(await storedHeight(engineer.page, 'E3', number)).toBe(Number(theirs))
+    expect(await stored.heightOf('E3', number)).toBe(Number(theirs))
     return { detailer, engineer }
   }
 
@@ -200,7 +184,7 @@ describe('two people at one edge', () => {
     await engineer.page.getByRole('button', { name: 'Keep theirs' }).click()
     await engineer.page.getByRole('alert').waitFor({ state: 'detached' })
     expect(await (await cell(engineer.page, 'E3-01', HEIGHT)).textContent()).toBe('112')
-    expect(await storedHeight(engineer.page, 'E3', 1)).toBe(112)
+    expect(await stored.heightOf('E3', 1)).toBe(112)
   })
 
   test('the second is refused with both values, and can keep mine', async () => {
@@ -208,13 +192,12 @@ describe('two people at one edge', () => {
     await engineer.page.getByRole('button', { name: 'Keep mine' }).click()
     await engineer.page.getByRole('alert').waitFor({ state: 'detached' })
     expect(await (await cell(engineer.page, 'E3-02', HEIGHT)).textContent()).toBe('116')
-    await expect.poll(() => storedHeight(engineer.page, 'E3', 2)).toBe(116)
+    await expect.poll(() => stored.heightOf('E3', 2)).toBe(116)
   })
 })
 
 test('an inspector reads an edge and can change nothing', async () => {
   const visit = await openVisit(browser, { origin: product.origin, size: 'wide' })
-  visits.push(visit)
   const { page } = visit
   await arrive(page, edgePath('E1'), product.signInOf('inspector'))
   await isOpen(page, 'E1')

@@ -17,10 +17,10 @@ export interface SignIn {
 export interface Product {
   readonly origin: string
   /** The demo's person for a role alone, as the server printed it. @throws where the demo has none. */
-  signInOf(role: Role): SignIn
+  readonly signInOf: (role: Role) => SignIn
   /** Path of the link that lets the first person in; null where the demo was seeded. */
   readonly invitationPath: string | null
-  stop(): Promise<void>
+  readonly stop: () => Promise<void>
 }
 
 /**

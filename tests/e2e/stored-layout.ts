@@ -1,19 +1,42 @@
-import { layoutSchema, type LayoutFile } from '@wedgeline/contract'
-import type { Page } from 'playwright-core'
+import { layoutSchema, type LayoutFile, type Role } from '@wedgeline/contract'
 import { z } from 'zod'
+import type { Product } from './product'
 
-const answerSchema = z.object({ result: z.object({ data: z.object({ layout: layoutSchema }) }) })
+const answerOf = <Data extends z.ZodType>(data: Data) => z.object({ result: z.object({ data }) })
+const jobsSchema = answerOf(z.array(z.object({ id: z.string(), title: z.string() })))
+const layoutAnswerSchema = answerOf(z.object({ layout: layoutSchema }))
 
-/** The job's layout as the server holds it, asked for as the person of this page. */
-export async function storedLayout(page: Page, jobId: string): Promise<LayoutFile> {
-  const input = encodeURIComponent(JSON.stringify({ jobId }))
-  const answer = await page.request.get(`/trpc/layout.byJob?input=${input}`)
-  return answerSchema.parse(await answer.json()).result.data.layout
+/** What the server holds, asked for beside the browser. */
+export interface Stored {
+  readonly jobId: string
+  layout(): Promise<LayoutFile>
+  /** Height of an anchor by its edge's mark and its number. */
+  heightOf(edgeMark: string, number: number): Promise<number | undefined>
 }
 
-/** The id that follows a part of the address: jobs, pours, edges. */
-export function idInAddress(page: Page, part: 'jobs' | 'pours' | 'edges'): string {
-  const id = new RegExp(`/${part}/([^/?]+)`).exec(page.url())?.[1]
-  if (!id) throw new Error(`${page.url()} names none of ${part}.`)
-  return id
+/** The demo's job as a person of this role reads it. @throws where signing in or reading fails. */
+export async function storedDemo({ origin, signInOf }: Product, role: Role = 'detailer'): Promise<Stored> {
+  const answer = await fetch(`${origin}/trpc/session.signIn`, {
+    method: 'POST',
+    headers: { 'Content-Type': 'application/json', Origin: origin },
+    body: JSON.stringify(signInOf(role)),
+  })
+  const cookie = answer.headers.get('set-cookie')?.split(';')[0] ?? ''
+  const ask = async (procedure: string, input: string): Promise<unknown> =>
+    (await fetch(`${origin}/trpc/${procedure}${input}`, { headers: { cookie } })).json()
+  const { result } = jobsSchema.parse(await ask('job.list', ''))
+  const jobId = result.data.find(({ title }) => title.startsWith('Quillmarsh'))?.id ?? ''
+  const layout = async () => {
+    const read = await ask('layout.byJob', `?input=${encodeURIComponent(JSON.stringify({ jobId }))}`)
+    return layoutAnswerSchema.parse(read).result.data.layout
+  }
+  return {
+    jobId,
+    layout,
+    async heightOf(edgeMark, number) {
+      const { anchors, edges } = await layout()
+      const edge = edges.find(({ mark }) => mark === edgeMark)
+      return anchors.find((anchor) => anchor.edgeId === edge?.id && anchor.number === number)?.heightMm
+    },
+  }
 }

@@ -1,5 +1,6 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core'
 import { chromium } from 'playwright-core'
+import { expect, onTestFailed, onTestFinished } from 'vitest'
 import { launchOptions } from '../../scripts/chromium.mjs'
 import type { SignIn } from './product'
 
@@ -18,7 +19,7 @@ export interface VisitOptions {
   readonly scheme?: 'light' | 'dark'
 }
 
-/** One person's browser window. Whatever goes wrong in it unseen is kept and fails the test at the end. */
+/** One person's browser window, open until the test ends. */
 export interface Visit {
   readonly context: BrowserContext
   readonly page: Page
@@ -26,10 +27,14 @@ export interface Visit {
   readonly newTab: () => Promise<Page>
   /** Complaints of the browser that this test brings about itself, a refused edit for instance. */
   readonly expect: (...complaints: readonly RegExp[]) => void
-  /** Closes the window. @throws with every console error, failed request and request to elsewhere. */
-  readonly close: () => Promise<void>
 }
 
+let failures = 0
+
+/**
+ * Opens a window inside a test. When the test ends it fails for every console error, failed request and request to
+ * elsewhere; a test that fails leaves pictures of its tabs in test-results.
+ */
 export async function openVisit(browser: Browser, { origin, size, scheme = 'light' }: VisitOptions): Promise<Visit> {
   const context = await browser.newContext({
     baseURL: origin,
@@ -45,16 +50,22 @@ export async function openVisit(browser: Browser, { origin, size, scheme = 'ligh
   const complaints: string[] = []
   const expected: RegExp[] = []
   context.on('page', (page) => watch(page, origin, complaints))
+  onTestFailed(async () => {
+    for (const page of context.pages()) {
+      failures += 1
+      await page.screenshot({ path: `test-results/failed-${failures}.png`, timeout: 5000 }).catch(() => undefined)
+      console.error(`${page.url()} is in test-results/failed-${failures}.png`, complaints)
+    }
+  })
+  onTestFinished(async () => {
+    await context.close()
+    expect(complaints.filter((complaint) => !expected.some((pattern) => pattern.test(complaint)))).toEqual([])
+  })
   return {
     context,
     page: await context.newPage(),
     newTab: () => context.newPage(),
     expect: (...patterns) => expected.push(...patterns),
-    async close() {
-      await context.close()
-      const unexpected = complaints.filter((complaint) => !expected.some((pattern) => pattern.test(complaint)))
-      if (unexpected.length > 0) throw new Error(`The browser complained:\n${unexpected.join('\n')}`)
-    },
   }
 }
 
