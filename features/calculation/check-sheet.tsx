@@ -27,10 +27,10 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
           {nameOf(check)}
         </Text>
         <LimitKindBox kind={check.limitKind} />
+        {isShort ? <Text kind="strong">{comparedText(check)}</Text> : null}
         <Text kind="small" tone="soft" style={styles.clause}>
           {clauseText(check.clause)}
         </Text>
-        {isShort ? <Text kind="strong">{comparedText(check)}</Text> : null}
       </View>
       {steps.map((step, at) => (
         <StepLine
@@ -122,7 +122,7 @@ const styles = StyleSheet.create({
   head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', columnGap: space.s },
   mark: { width: 18 },
   name: { flexShrink: 1 },
-  clause: { flexShrink: 1 },
+  clause: { flexShrink: 1, minWidth: 0 },
   step: { paddingLeft: 26, paddingVertical: 1 },
   stepWide: { flexDirection: 'row', alignItems: 'baseline', columnGap: space.l },
   sum: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'baseline', flexGrow: 1, flexShrink: 1, flexBasis: '56%' },
