@@ -7,7 +7,7 @@ import { checkBurstingPlan, checkBurstingThickness } from './checks/bursting'
 import { closeAnchors, type CloseGroup } from './close-anchors'
 import { coverChecks } from './checks/cover'
 import { notYetChecked } from './checks/not-yet'
-import type { CheckContext } from './checks/outcome'
+import { comparison, type CheckContext } from './checks/outcome'
 import { spacingChecks } from './checks/spacing'
 import { straightLengthChecks } from './checks/straight-length'
 import { checkJackingForce } from './checks/tendon'
@@ -103,7 +103,11 @@ function checkZone(run: Run, zone: Zone, withSteps: boolean): ZoneResult {
   }
 }
 
-const withoutSteps = (check: Check): Check => (check.kind === 'compared' ? { ...check, steps: [] } : check)
+function withoutSteps(check: Check): Check {
+  if (check.kind !== 'compared' || check.steps.length === 0) return check
+  const { demand, limit, unit } = check
+  return comparison(check, { demand, limit, unit, steps: [] }, check)
+}
 
 const isNotYet = (checks: readonly Check[] | null): boolean =>
   checks === null || checks.some((check) => check.kind === 'refused' && check.code === 'NOT_YET_CHECKED')

@@ -35,7 +35,7 @@ export function facesFromCentre(index: LayoutIndex, anchor: Anchor): NearFace[] 
   const place = placeOf(index, anchor)
   if (!place) return []
   const centre = place.frame.pointAt(anchor.chainage, anchor.setBack)
-  const faces = [...otherSides(index, place), ...openingSides(index, place)].map(({ name, ends }) => ({
+  const faces = facesBeside(index, place).map(({ name, ends }) => ({
     name,
     distance: distanceToSegment(centre, ...ends),
   }))
@@ -52,11 +52,12 @@ export function facesFromCentre(index: LayoutIndex, anchor: Anchor): NearFace[] 
 export function nearestFace(index: LayoutIndex, anchor: Anchor, body: Box): NearFace | null {
   const place = placeOf(index, anchor)
   if (!place) return null
-  const outline = place.pour.outline
-  const sides = [...otherSides(index, place), ...openingSides(index, place)]
+  const sides = facesBeside(index, place)
   const rim = rectangleOf(place.frame, body)
-  const outside = rim.filter((corner) => isOutside(corner, outline, openingsOf(index, place.pour)))
-  const faces = outside.length > 0 ? outermost(outside, sides) : clearances(rim, sides)
+  const near = whereInside(index, place, { body, sides })
+  const isCorner = (corner: Point) => isOutside(corner, place.pour.outline, openingsOf(index, place.pour))
+  const outside = near ? [] : rim.filter(isCorner)
+  const faces = outside.length > 0 ? outermost(outside, sides) : clearances(rim, near ?? sides)
   return [...faces, ...profileSides(place.frame, body)].sort((a, b) => a.distance - b.distance)[0] ?? null
 }
 
@@ -70,6 +71,33 @@ function placeOf(index: LayoutIndex, anchor: Anchor): Place | null {
   const edge = anchor.edgeId === null ? undefined : index.edges.get(anchor.edgeId)
   if (!edge) return null
   return { edge, pour: found(index.pours, edge.pourId, 'pour'), frame: found(index.frames, edge.id, 'edge') }
+}
+
+/**
+ * The sides that can be the nearest to a body well inside the concrete; null where it may stand outside. A body that
+ * no side comes as near as its half diagonal lies inside with its middle.
+ */
+function whereInside(
+  index: LayoutIndex,
+  { frame, pour }: Place,
+  { body, sides }: { readonly body: Box; readonly sides: readonly Side[] },
+): readonly Side[] | null {
+  const middle = frame.pointAt((body.fromChainage + body.toChainage) / 2, (body.fromDepth + body.toDepth) / 2)
+  const radius = Math.hypot(body.toChainage - body.fromChainage, body.toDepth - body.fromDepth) / 2
+  const away = sides.map(({ ends }) => distanceToSegment(middle, ...ends))
+  const least = away.reduce((nearest, distance) => Math.min(nearest, distance), Infinity)
+  if (least <= radius + ROUNDING || isOutside(middle, pour.outline, openingsOf(index, pour))) return null
+  return sides.filter((_, i) => (away[i] ?? Infinity) - radius <= least)
+}
+
+/** Kept beside an index, which never changes: every anchor of an edge asks for the same. */
+const KEPT = new WeakMap<LayoutIndex, Map<string, readonly Side[]>>()
+
+function facesBeside(index: LayoutIndex, place: Place): readonly Side[] {
+  const ofEdges = KEPT.get(index) ?? new Map<string, readonly Side[]>()
+  const sides = ofEdges.get(place.edge.id) ?? [...otherSides(index, place), ...openingSides(index, place)]
+  KEPT.set(index, ofEdges.set(place.edge.id, sides))
+  return sides
 }
 
 /** All sides of the outline but the edge's own, sides in line with it and the next chords of the same curve. */

@@ -3,6 +3,7 @@
 import type { Compared } from '../result'
 import { statusOfDistance } from '../status'
 import type { Step } from '../step'
+import { comparison } from './outcome'
 
 export interface DistanceCheck extends Pick<
   Compared,
@@ -21,27 +22,17 @@ export function distanceCheck(check: DistanceCheck): Compared {
   const { demand, limit } = check
   const spare = demand - limit
   const status = statusOfDistance(spare, check.isClearance ? demand : undefined)
-  // Written out, since spreading a check thousands of times in a pour costs more than the check.
-  return {
-    kind: 'compared',
-    zoneId: check.zoneId,
-    family: check.family,
-    name: check.name,
-    plane: null,
-    stage: check.stage,
-    limitKind: check.limitKind,
-    clause: check.clause,
-    notes: check.notes,
-    status,
-    demand,
-    limit,
-    unit: 'mm',
-    compares: 'at-least',
-    utilisation: null,
-    spare,
-    steps: check.steps,
-    readingIds: [],
-    statusOnceAccepted: status,
-    mend: check.mend,
-  }
+  return comparison(
+    check,
+    { demand, limit, unit: 'mm', steps: check.steps },
+    {
+      compares: 'at-least',
+      status,
+      statusOnceAccepted: status,
+      utilisation: null,
+      spare,
+      readingIds: [],
+      mend: check.mend,
+    },
+  )
 }

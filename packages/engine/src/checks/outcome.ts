@@ -39,6 +39,7 @@ export function byRatio(
     utilisation: utilisationOf(answer),
     spare: null,
     readingIds: readings,
+    mend: null,
   })
 }
 
@@ -53,19 +54,27 @@ export function atLeast(head: Head, answer: Answer): Compared {
     utilisation: null,
     spare,
     readingIds: [],
+    mend: null,
   })
 }
 
-type Verdict = Pick<Compared, 'compares' | 'status' | 'statusOnceAccepted' | 'utilisation' | 'spare' | 'readingIds'>
+type Verdict = Pick<
+  Compared,
+  'compares' | 'status' | 'statusOnceAccepted' | 'utilisation' | 'spare' | 'readingIds' | 'mend'
+>
 
 /** Written out, since spreading a check thousands of times in a pour costs more than the check. */
-function comparison(head: Head, answer: Answer, verdict: Verdict): Compared {
+export function comparison(
+  head: Omit<Head, 'plane'> & Partial<Pick<Head, 'plane'>>,
+  answer: Answer,
+  verdict: Verdict,
+): Compared {
   return {
     kind: 'compared',
     zoneId: head.zoneId,
     family: head.family,
     name: head.name,
-    plane: head.plane,
+    plane: head.plane ?? null,
     stage: head.stage,
     limitKind: head.limitKind,
     clause: head.clause,
@@ -80,7 +89,7 @@ function comparison(head: Head, answer: Answer, verdict: Verdict): Compared {
     steps: answer.steps,
     readingIds: verdict.readingIds,
     statusOnceAccepted: verdict.statusOnceAccepted,
-    mend: null,
+    mend: verdict.mend,
   }
 }
 
