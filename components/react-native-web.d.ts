@@ -22,6 +22,9 @@ declare module 'react-native' {
     onKeyDown?: ((event: WebKeyEvent) => void) | undefined
     onKeyUp?: ((event: WebKeyEvent) => void) | undefined
   }
+  interface TextStyle {
+    overflowWrap?: 'anywhere' | 'break-word' | undefined
+  }
   interface ViewProps extends WebProps {}
   interface TextProps extends WebProps {}
   interface PressableProps extends WebProps {}
