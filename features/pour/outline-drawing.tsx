@@ -16,6 +16,11 @@ export interface OutlineDrawingProps {
   readonly isSound: boolean
 }
 
+/** Always as high, so that a button below does not move from under the thumb that leaves a field. */
+const HEIGHT_PX = 300
+/** Room for a size of five figures beside the outline. */
+const MARGIN_PX = 64
+
 const spot = ({ xMm, yMm }: PlanPoint) => ({ x: xMm, y: yMm })
 
 /** The outline as it is typed, beside the pours that the level has already. */
@@ -24,7 +29,9 @@ export function OutlineDrawing({ corners, others, isSound }: OutlineDrawingProps
   const points = corners.map(spot)
   const drawn = [...points, ...others.flatMap(({ outline }) => outline.map(spot))]
   const scale =
-    width > 0 && drawn.length > 0 ? planScale(boundsOf(drawn), { width, heightMax: 360, margin: 44, zoom: 1 }) : null
+    width > 0 && drawn.length > 0
+      ? planScale(boundsOf(drawn), { width, heightMax: HEIGHT_PX, margin: MARGIN_PX, zoom: 1 })
+      : null
   return (
     <View style={styles.drawing} onLayout={(event) => setWidth(event.nativeEvent.layout.width)}>
       {scale ? (
@@ -122,6 +129,12 @@ function Sizes({ points, at }: SizesProps) {
 }
 
 const styles = StyleSheet.create({
-  drawing: { backgroundColor: colour.sheet, borderWidth: 1, borderColor: colour.rule, minHeight: 120 },
+  drawing: {
+    height: HEIGHT_PX + 2,
+    justifyContent: 'center',
+    backgroundColor: colour.sheet,
+    borderWidth: 1,
+    borderColor: colour.rule,
+  },
   none: { padding: space.l },
 })

@@ -1,6 +1,6 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core'
 import { chromium } from 'playwright-core'
-import { expect, onTestFailed, onTestFinished } from 'vitest'
+import { expect, onTestFinished } from 'vitest'
 import { launchOptions } from '../../scripts/chromium.mjs'
 import type { SignIn } from './product'
 
@@ -50,14 +50,8 @@ export async function openVisit(browser: Browser, { origin, size, scheme = 'ligh
   const complaints: string[] = []
   const expected: RegExp[] = []
   context.on('page', (page) => watch(page, origin, complaints))
-  onTestFailed(async () => {
-    for (const page of context.pages()) {
-      failures += 1
-      await page.screenshot({ path: `test-results/failed-${failures}.png`, timeout: 5000 }).catch(() => undefined)
-      console.error(`${page.url()} is in test-results/failed-${failures}.png`, complaints)
-    }
-  })
-  onTestFinished(async () => {
+  onTestFinished(async ({ task }) => {
+    if (task.result?.state === 'fail') await picture(context, complaints)
     await context.close()
     expect(complaints.filter((complaint) => !expected.some((pattern) => pattern.test(complaint)))).toEqual([])
   })
@@ -66,6 +60,15 @@ export async function openVisit(browser: Browser, { origin, size, scheme = 'ligh
     page: await context.newPage(),
     newTab: () => context.newPage(),
     expect: (...patterns) => expected.push(...patterns),
+  }
+}
+
+async function picture(context: BrowserContext, complaints: readonly string[]): Promise<void> {
+  for (const page of context.pages()) {
+    failures += 1
+    const path = `test-results/failed-${failures}.png`
+    await page.screenshot({ path, timeout: 5000 }).catch(() => undefined)
+    console.error(`${path} shows ${page.url()}`, complaints)
   }
 }
 
