@@ -34,6 +34,12 @@ export function useAcceptInvitation() {
   return useMutation(useTRPC().invitation.accept.mutationOptions({ onSuccess: takeOver }))
 }
 
+/** Takes a new password for a link; whoever was signed in as that person no longer is, here neither. */
+export function useResetPassword() {
+  const takeOver = useTakeOver()
+  return useMutation(useTRPC().session.resetPassword.mutationOptions({ onSuccess: () => takeOver(null) }))
+}
+
 /** Signs out and forgets every answer on this device. */
 export function useSignOut() {
   const takeOver = useTakeOver()

@@ -3,6 +3,7 @@ import { createServer, type Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import { dirname } from 'node:path'
 import { fileURLToPath } from 'node:url'
+import type { Logger } from 'pino'
 import { openDatabase, type Db } from '../db/client'
 import { buildApp } from './app'
 import { readSettings, type Settings } from './env'
@@ -10,6 +11,7 @@ import { localFiles } from './files/local-files'
 import { firstInvitationLink } from './invite'
 import { serverLog } from './log'
 import { localOutbox } from './mail/local-outbox'
+import type { Mailer } from './mail/mailer'
 import { smtpMailer } from './mail/smtp'
 import { seedDemo } from './seed-demo'
 
@@ -36,7 +38,7 @@ async function serve(settings: Settings): Promise<void> {
     const app = buildApp({
       db,
       files: localFiles(settings.filesDir),
-      mail: settings.smtpUrl ? smtpMailer(settings.smtpUrl, settings.mailFrom) : localOutbox(settings.outboxDir),
+      mail: mailerOf(settings, log),
       log,
       now: Date.now,
       appUrl,
@@ -51,6 +53,12 @@ async function serve(settings: Settings): Promise<void> {
     db.$client.close()
     throw error
   }
+}
+
+/** Without a mail server each message becomes a file, and the log says which. */
+function mailerOf({ smtpUrl, mailFrom, outboxDir }: Settings, log: Logger): Mailer {
+  if (smtpUrl) return smtpMailer(smtpUrl, mailFrom)
+  return localOutbox(outboxDir, (path) => log.info({ event: 'mail stored', path }, 'A mail lies in the local outbox'))
 }
 
 /** @returns the port, which the system chooses where it is given as 0 */

@@ -2,7 +2,7 @@ import type { Role } from '@wedgeline/contract'
 import { v7 as uuidv7 } from 'uuid'
 import { write, type Tx } from '../db/client'
 import { conflict, missing, refused } from './failure'
-import { hashPassword, isObvious } from './password'
+import { newPasswordHash } from './password'
 import { hashToken, newToken } from './session'
 import { me, personByPassword, type Me } from './sign-in'
 import { recordAudit } from './stores/audit'
@@ -17,6 +17,7 @@ import {
 } from './stores/invitation'
 import { companyAccess } from './stores/access'
 import { credentialsByEmail, hasAnyPerson, insertPerson, membersOf, setMember } from './stores/person'
+import { renewSessionsOf } from './stores/session'
 import type { CompanyCall, Context, Person, ServerDeps } from './trpc/context'
 
 const OPEN_FOR_MS = 7 * 24 * 60 * 60_000
@@ -123,18 +124,12 @@ async function knownPerson(ctx: Context, input: { email: string; password: strin
   return person
 }
 
-async function newPasswordHash(password: string, email: string): Promise<string> {
-  if (isObvious(password, email)) {
-    throw refused('This password is among the first that anybody would try. Take a longer or odder one.', 'password')
-  }
-  return hashPassword(password)
-}
-
 function join(tx: Tx, { found, person, nowMs }: { found: OpenInvitation; person: Person; nowMs: number }): void {
   const { companyId } = found
   const before = companyAccess(tx, { personId: person.id, companyId })
   const roles = [...new Set([...(before ?? []), ...found.roles])]
   setMember(tx, { companyId, personId: person.id, roles, nowMs })
+  renewSessionsOf(tx, person.id)
   const after = { invitationId: found.id, name: person.name, email: person.email, roles }
   const entry = { companyId, jobId: null, personId: person.id, atMs: nowMs }
   recordAudit(tx, { ...entry, what: 'invitation.accept', before: before && { roles: before }, after })

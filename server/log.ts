@@ -32,8 +32,8 @@ export const requestLog = (log: Logger) =>
 const responseOf = ({ statusCode }: { statusCode: number }) => ({ statusCode })
 const requestOf = ({ id, method, url = '' }: IncomingMessage) => ({ id, method, path: pathOf(url) })
 
-/** Without the query, which holds a procedure's input, and without the token of an invitation. */
-const pathOf = (url: string): string => url.replace(/[?#].*$/s, '').replace(/^(\/invite\/).+/s, '$1[token]')
+/** Without the query, which holds a procedure's input, and without the token of an invitation or a new password. */
+const pathOf = (url: string): string => url.replace(/[?#].*$/s, '').replace(/^(\/(?:invite|reset)\/).+/s, '$1[token]')
 
 /** An error's own words hold the values of a failed query; its place in the code does not. */
 function errorOf(error: unknown): Record<string, unknown> {

@@ -1,5 +1,6 @@
 import { hash, verify } from '@node-rs/argon2'
 import { COMMON_PASSWORDS } from './common-passwords-table'
+import { refused } from './failure'
 
 /** Argon2id (the package's default kind), 19 MiB, 2 passes, 1 lane: the smallest set that OWASP's cheat sheet names. */
 const COST = { memoryCost: 19_456, timeCost: 2, parallelism: 1 } as const
@@ -11,6 +12,14 @@ const COST = { memoryCost: 19_456, timeCost: 2, parallelism: 1 } as const
 const NOBODY = hash(`nobody ${Math.random()}`, COST)
 
 export const hashPassword = (password: string): Promise<string> => hash(password, COST)
+
+/** @throws Failure for a password that anybody would try. */
+export async function newPasswordHash(password: string, email: string): Promise<string> {
+  if (isObvious(password, email)) {
+    throw refused('This password is among the first that anybody would try. Take a longer or odder one.', 'password')
+  }
+  return hashPassword(password)
+}
 
 /** Whether the password is the one hashed; false, after as long a time, when there is no hash. */
 export async function isPassword(passwordHash: string | null, password: string): Promise<boolean> {

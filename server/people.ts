@@ -4,6 +4,7 @@ import { conflict, missing } from './failure'
 import { companyAccess } from './stores/access'
 import { recordAudit } from './stores/audit'
 import { hasOtherAdmin, removeMember, setMember, type MemberKey } from './stores/person'
+import { renewSessionsOf } from './stores/session'
 import type { CompanyCall } from './trpc/context'
 
 const NOBODY = 'There is nobody like that in this company.'
@@ -19,6 +20,7 @@ export function setRoles(ctx: CompanyCall, { personId, roles }: { personId: stri
     if (!before) throw missing(NOBODY)
     if (before.includes('admin') && !roles.includes('admin') && !hasOtherAdmin(tx, key)) throw conflict(LAST_ADMIN)
     setMember(tx, { ...key, roles, nowMs })
+    renewSessionsOf(tx, personId)
     const entry = { companyId: company.id, jobId: null, personId: person.id, atMs: nowMs, what: 'people.setRoles' }
     recordAudit(tx, { ...entry, before: { personId, roles: before }, after: { personId, roles } })
   })
@@ -33,6 +35,7 @@ export function removePerson(ctx: CompanyCall, { personId }: { personId: string 
     if (!before) throw missing(NOBODY)
     if (before.includes('admin') && !hasOtherAdmin(tx, key)) throw conflict(LAST_ADMIN)
     removeMember(tx, key)
+    renewSessionsOf(tx, personId)
     const entry = { companyId: company.id, jobId: null, personId: person.id, atMs: ctx.now(), what: 'people.remove' }
     recordAudit(tx, { ...entry, before: { personId, roles: before }, after: null })
   })

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto'
-import { write, type Db, type Connection } from '../db/client'
+import { write, type Connection, type Db, type Tx } from '../db/client'
 import { throttled } from './failure'
 import { countBack, countOf, countUp, forget, forgetOld } from './stores/rate-limit'
 
@@ -13,7 +13,7 @@ const MINUTE_MS = 60_000
 const KNOWN_FOR_MS = 30 * 24 * 60 * MINUTE_MS
 
 interface Limit {
-  readonly kind: 'pair' | 'account' | 'address'
+  readonly kind: 'pair' | 'account' | 'address' | 'reset' | 'reset-address'
   readonly freeAttempts: number
   readonly windowMs: number
 }
@@ -24,6 +24,12 @@ const PAIR: Limit = { kind: 'pair', freeAttempts: 5, windowMs: 15 * MINUTE_MS }
 const ACCOUNT: Limit = { kind: 'account', freeAttempts: 20, windowMs: 60 * MINUTE_MS }
 /** All accounts from one address: one password tried on many people. */
 const ADDRESS: Limit = { kind: 'address', freeAttempts: 50, windowMs: 15 * MINUTE_MS }
+
+/** Links for a forgotten password, to one address and from one machine. */
+const RESETS: readonly Limit[] = [
+  { kind: 'reset', freeAttempts: 3, windowMs: 60 * MINUTE_MS },
+  { kind: 'reset-address', freeAttempts: 20, windowMs: 60 * MINUTE_MS },
+]
 
 export interface Attempt {
   readonly email: string
@@ -36,11 +42,23 @@ export interface Attempt {
  * @throws Failure that says how long to wait.
  */
 export function countAttempt(db: Db, attempt: Attempt): void {
+  countUnder(db, attempt, (tx) => {
+    // An address that the owner has signed in from is not held back by what others do elsewhere.
+    const isKnown = countOf(tx, keyOf('known', attempt), attempt.nowMs) !== null
+    return isKnown ? [PAIR] : [PAIR, ACCOUNT, ADDRESS]
+  })
+}
+
+/**
+ * Counts a link for a forgotten password that is asked for, whoever has the address.
+ * @throws Failure that says how long to wait.
+ */
+export const countReset = (db: Db, attempt: Attempt): void => countUnder(db, attempt, () => RESETS)
+
+function countUnder(db: Db, attempt: Attempt, limitsIn: (tx: Tx) => readonly Limit[]): void {
   const { nowMs } = attempt
   const waitMs = write(db, (tx) => {
-    // An address that the owner has signed in from is not held back by what others do elsewhere.
-    const isKnown = countOf(tx, keyOf('known', attempt), nowMs) !== null
-    const limits = isKnown ? [PAIR] : [PAIR, ACCOUNT, ADDRESS]
+    const limits = limitsIn(tx)
     const longestMs = Math.max(...limits.map((limit) => waitOf(tx, limit, attempt)))
     if (longestMs > 0) return longestMs
     forgetOld(tx, nowMs)
@@ -74,8 +92,22 @@ function waitOf(db: Connection, limit: Limit, attempt: Attempt): number {
 
 /** Hashed, so that the table holds neither addresses of people nor of machines. */
 function keyOf(kind: Limit['kind'] | 'known', { email, address }: Attempt): string {
-  const parts = kind === 'account' ? [email] : kind === 'address' ? [networkOf(address)] : [email, networkOf(address)]
+  const parts = partsOf(kind, email, networkOf(address))
   return `${kind}:${createHash('sha256').update(parts.join('\n')).digest('hex')}`
+}
+
+function partsOf(kind: Limit['kind'] | 'known', email: string, network: string): string[] {
+  switch (kind) {
+    case 'account':
+    case 'reset':
+      return [email]
+    case 'address':
+    case 'reset-address':
+      return [network]
+    case 'pair':
+    case 'known':
+      return [email, network]
+  }
 }
 
 /** An IPv6 address stands for its /64: one household or machine has the whole of it. IPv4 stands for itself. */

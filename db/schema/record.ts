@@ -55,7 +55,7 @@ export const audit = sqliteTable(
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),
     foreignKey({ columns: [t.companyId, t.jobId], foreignColumns: [job.companyId, job.id] }).onDelete('restrict'),
-    index('audit_job_at').on(t.companyId, t.jobId, t.atMs),
+    index('audit_job_at').on(t.companyId, t.jobId, t.atMs, t.id),
     index('audit_job_change').on(t.companyId, t.jobId, t.changeNumber),
   ],
 )
@@ -109,6 +109,7 @@ export const file = sqliteTable(
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),
     foreignKey({ columns: [t.companyId, t.jobId], foreignColumns: [job.companyId, job.id] }).onDelete('restrict'),
+    index('file_id').on(t.id),
     check('file_sha256', sql`length(${t.sha256}) = 64`),
     check('file_bytes', sql`${t.bytes} >= 0`),
   ],

@@ -14,6 +14,8 @@ export const session = sqliteTable(
     expiresAt: integer('expires_at_s').notNull(),
     absoluteEndAtMs: integer('absolute_end_at_ms').notNull(),
     createdAtMs: integer('created_at_ms').notNull(),
+    /** The person's roles changed: the next call gets a session of another id in place of this one. */
+    isRenewalDue: integer('is_renewal_due', { mode: 'boolean' }).notNull().default(false),
   },
   (t) => [index('session_person').on(t.userId)],
 )
@@ -24,14 +26,14 @@ export const verificationToken = sqliteTable(
   {
     id: text('id').primaryKey(),
     kind: text('kind').notNull(),
-    /** Null for the link to the first person of an empty database. */
-    personId: text('person_id').references(() => person.id, { onDelete: 'cascade' }),
-    email: text('email'),
+    personId: text('person_id')
+      .notNull()
+      .references(() => person.id, { onDelete: 'cascade' }),
     expiresAtMs: integer('expires_at_ms').notNull(),
     usedAtMs: integer('used_at_ms'),
     createdAtMs: integer('created_at_ms').notNull(),
   },
-  (t) => [oneOf('verification_token_kind', t.kind, ['first-person', 'password'])],
+  (t) => [oneOf('verification_token_kind', t.kind, ['password']), index('verification_token_person').on(t.personId)],
 )
 
 /** Attempts in a window of time, by account or by address. */

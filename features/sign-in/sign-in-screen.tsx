@@ -62,6 +62,7 @@ export function SignInScreen() {
             />
             <View style={styles.actions}>
               <Button kind="main" label="Sign in" onPress={send} busy={signIn.isPending} />
+              <Button label="Forgotten password" href="/forgotten" />
             </View>
             <Text tone="soft">No account yet? An admin of your company sends an invitation, whose link makes one.</Text>
           </View>
@@ -86,5 +87,5 @@ function whyNot({ sentence, retryAfterS }: CallFailure): string {
 
 const styles = StyleSheet.create({
   form: { gap: space.l, width: '100%', maxWidth: 420 },
-  actions: { flexDirection: 'row' },
+  actions: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m },
 })

@@ -52,6 +52,13 @@ export function insertPerson(
     .run()
 }
 
+export function setPasswordHash(
+  tx: Tx,
+  { personId, passwordHash, nowMs }: { personId: string; passwordHash: string; nowMs: number },
+): void {
+  tx.update(person).set({ passwordHash, updatedAtMs: nowMs }).where(eq(person.id, personId)).run()
+}
+
 /** Everybody in a company with their roles, by name. */
 export function membersOf(db: Connection, companyId: string): Member[] {
   const rows = db

@@ -57,6 +57,8 @@ const EXPECTED: Record<string, Record<CallerName, Verdict>> = {
   'session.me': anybody,
   'session.signIn': anybody,
   'session.signOut': anybody,
+  'session.askReset': anybody,
+  'session.resetPassword': anybody,
   'invitation.byToken': anybody,
   'invitation.accept': anybody,
   'invitation.list': inCompany('admin'),

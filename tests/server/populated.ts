@@ -6,6 +6,7 @@ import { appRouter } from '@/server/router'
 import { hashToken } from '@/server/session'
 import { insertFile } from '@/server/stores/file'
 import { insertInvitation } from '@/server/stores/invitation'
+import { insertPasswordLink } from '@/server/stores/password-link'
 import { insertPerson, setMember } from '@/server/stores/person'
 import { createCallerFactory } from '@/server/trpc/builders'
 import { addCompany } from './company'
@@ -22,6 +23,7 @@ export type Person = Exclude<CallerName, 'nobody'> | 'everything'
 
 export const PROCEDURES = appRouter._def.procedures as unknown as Record<string, AnyTRPCProcedure>
 const TOKEN = 'an-invitation-token-for-this-test-alone'
+const RESET_TOKEN = 'a-token-of-a-new-password-for-this-test-alone'
 /** One that is accepted before the calls and one that is not. */
 const READING = 'en-window'
 const OTHER_READING = 'en-own-prism'
@@ -107,7 +109,7 @@ function addOthers({ db, company }: TestServer): Record<Person, string> {
   }
 }
 
-/** An open invitation and a stored file, whose id is returned. */
+/** An open invitation, a link to a new password and a stored file, whose id is returned. */
 async function addRecords({ db, company, files }: TestServer, jobId: string): Promise<string> {
   const createdBy = company.personId('admin')
   const companyId = company.id
@@ -116,6 +118,8 @@ async function addRecords({ db, company, files }: TestServer, jobId: string): Pr
     const times = { createdAtMs: 0, createdBy, expiresAtMs: Date.UTC(2100, 0, 1) }
     const invitation = { companyId, id: 'invitation-1', email: 'new@x.example', name: 'New', roles }
     insertInvitation(tx, { ...invitation, tokenHash: hashToken(TOKEN), ...times })
+    const link = { tokenHash: hashToken(RESET_TOKEN), personId: 'leaver', nowMs: 0 }
+    insertPasswordLink(tx, { ...link, expiresAtMs: times.expiresAtMs })
   })
   const { sha256 } = await files.save(companyId, Buffer.from('bars'))
   const fileId = uuidv7()
@@ -135,6 +139,8 @@ function validInputs({ companyId, jobId, layout, versions }: Loaded): Record<str
     'session.me': undefined,
     'session.signIn': { email: 'leaver@x.example', password: PASSWORD },
     'session.signOut': undefined,
+    'session.askReset': { email: 'leaver@x.example' },
+    'session.resetPassword': { token: RESET_TOKEN, password: PASSWORD },
     'invitation.byToken': { token: TOKEN },
     'invitation.accept': { token: TOKEN, name: 'New', password: PASSWORD },
     'invitation.list': { companyId },

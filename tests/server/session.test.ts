@@ -112,13 +112,26 @@ describe('a session', () => {
     vi.useFakeTimers({ toFake: ['Date'] })
     vi.setSystemTime(Date.UTC(2026, 0, 5))
     const cookie = await server.cookieOf(personId)
-    vi.setSystemTime(Date.UTC(2026, 0, 8)) // day 3: more than half of the seven days is left
+    vi.setSystemTime(Date.UTC(2026, 0, 5, 0, 0, 59)) // under a minute: not written down
     expect(setCookieOf(await get(server, query('session.me'), { cookie }))).toBeNull()
-    vi.setSystemTime(Date.UTC(2026, 0, 9)) // day 4: less than half
+    vi.setSystemTime(Date.UTC(2026, 0, 5, 0, 1)) // a minute
     const renewed = cookieFrom(await get(server, query('session.me'), { cookie }))
     expect(renewed).toBe(cookie)
-    vi.setSystemTime(Date.UTC(2026, 0, 15)) // day 10: past the first seven days
-    expect(await me(cookie)).not.toBeNull()
+  })
+
+  test('idles from its last use: used on day 1, it is there seven days later less a second and gone at seven', async () => {
+    vi.useFakeTimers({ toFake: ['Date'] })
+    for (const [late, isThere] of [
+      [-1000, true],
+      [0, false],
+    ] as const) {
+      vi.setSystemTime(Date.UTC(2026, 0, 5))
+      const cookie = await server.cookieOf(personId)
+      vi.setSystemTime(Date.UTC(2026, 0, 6))
+      await me(cookie)
+      vi.setSystemTime(Date.UTC(2026, 0, 13) + late)
+      expect((await me(cookie)) !== null).toBe(isThere)
+    }
   })
 
   test('ends after thirty days however often it is used', async () => {
@@ -155,6 +168,43 @@ describe('a change of roles', () => {
     expect((await me(cookie))?.companies[0]?.roles).toEqual(['inspector'])
     await server.company.as('admin').people.setRoles({ companyId: 'north', personId, roles: ['admin'] })
     await rename(cookie).expect(200)
+  })
+
+  test('gives the session another id at the next call, with the same absolute end', async () => {
+    vi.useFakeTimers({ toFake: ['Date'] })
+    const startMs = Date.UTC(2026, 0, 5)
+    vi.setSystemTime(startMs)
+    const cookie = await server.cookieOf(personId)
+    const [before] = server.db.select().from(session).all()
+    await server.company.as('admin').people.setRoles({ companyId: 'north', personId, roles: ['inspector'] })
+    vi.setSystemTime(startMs + DAY_MS)
+    // Three at once, as a screen sends them: all are answered and one of them gets the other id.
+    const answers = await Promise.all([1, 2, 3].map(() => get(server, query('session.me'), { cookie }).expect(200)))
+    expect(answers.map(({ body }) => (body.result.data as Me).person.id)).toEqual([personId, personId, personId])
+    const renewed = answers.map(cookieFrom).filter((value) => value !== '')
+    expect(renewed).toHaveLength(1)
+    expect(renewed[0]).not.toBe(cookie)
+    const id = hashToken(tokenIn(renewed[0] ?? ''))
+    const row = server.db
+      .select()
+      .from(session)
+      .all()
+      .find((each) => each.id === id)
+    expect(row).toMatchObject({ absoluteEndAtMs: before?.absoluteEndAtMs, createdAtMs: startMs, isRenewalDue: false })
+    // What was under way is answered for a minute, without the old cookie being set again.
+    vi.setSystemTime(startMs + DAY_MS + 59_999)
+    const late = await get(server, query('session.me'), { cookie }).expect(200)
+    expect([late.body.result.data.person.id, setCookieOf(late)]).toEqual([personId, null])
+    vi.setSystemTime(startMs + DAY_MS + 60_000)
+    expect(await me(cookie)).toBeNull()
+    expect(await me(renewed[0] ?? '')).not.toBeNull()
+  })
+
+  test('and a sign-out in the same call leaves no session behind', async () => {
+    const cookie = await server.cookieOf(personId)
+    await server.company.as('admin').people.setRoles({ companyId: 'north', personId, roles: ['inspector'] })
+    await post(server, 'session.signOut', { cookie }).expect(200)
+    expect(server.db.select().from(session).all()).toEqual([])
   })
 
   test('somebody taken out of the company reads nothing of it from the next call on', async () => {

@@ -17,6 +17,8 @@ export const signInSchema = z.strictObject({
   email: emailSchema,
   password: z.string().min(1, 'must not be empty').max(256),
 })
+/** Asks for a link to a new password; the link goes to the address alone. */
+export const askResetSchema = z.strictObject({ email: emailSchema })
 export const invitationSchema = z.strictObject({
   companyId: idSchema,
   email: emailSchema,
@@ -29,6 +31,10 @@ export const acceptInvitationSchema = z.strictObject({
   /** Only for an invitation that names no address: the first person of an empty database. */
   email: emailSchema.optional(),
   name: label(120),
+  password: passwordSchema,
+})
+export const resetPasswordSchema = z.strictObject({
+  token: invitationTokenSchema.shape.token,
   password: passwordSchema,
 })
 export const withdrawInvitationSchema = z.strictObject({ companyId: idSchema, invitationId: idSchema })

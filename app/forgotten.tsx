@@ -1,0 +1,5 @@
+import { ForgottenScreen } from '@/features/sign-in/forgotten-screen'
+
+export default function ForgottenRoute() {
+  return <ForgottenScreen />
+}
