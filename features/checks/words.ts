@@ -59,7 +59,8 @@ export function worstWords({ status, checks }: ZoneResult): Worst | null {
 export function checkWords(check: Exclude<Check, { readonly kind: 'advice' }>): string {
   if (check.kind === 'refused') return check.name
   const outcome = outcomeText(check)
-  return check.compares === 'ratio' ? `${check.name} ${outcome}` : `${check.name}, ${outcome}`
+  const isFigure = check.compares === 'ratio' && check.utilisation !== null
+  return isFigure ? `${check.name} ${outcome}` : `${check.name}, ${outcome}`
 }
 
 export const TAG_WORDS = {
@@ -106,7 +107,10 @@ export function worstShort({ status, checks }: ZoneResult): Worst | null {
   if (status === null || !first || first.kind === 'advice') return null
   const family = FAMILY_SHORT[first.family]
   if (first.kind === 'refused') return { status, words: family }
-  if (first.compares === 'ratio') return { status, words: `${family} ${ratioText(first.utilisation)}` }
+  if (first.compares === 'ratio') {
+    const joint = first.utilisation === null ? ', ' : ' '
+    return { status, words: `${family}${joint}${ratioText(first.utilisation)}` }
+  }
   const spare = Math.round(first.spare ?? 0)
   return { status, words: spare < 0 ? `${family}, short ${-spare}` : `${family}, spare ${spare}` }
 }

@@ -31,6 +31,8 @@ export function PlanBand(props: PlanBandProps) {
     `${px(scale.x(p.chainage))} ${px(y(p.depth))}`
   const closed = (points: readonly { readonly chainage: number; readonly depth: number }[]) =>
     `M${points.map(point).join('L')}Z`
+  /** The two sides of the spread: without the ends at the edge, where the next wedge begins. */
+  const sides = (outline: StripWedge['outline']) => `M${outline.slice(1, -1).map(point).join('L')}`
   const [x0, x1] = [scale.x(frame.from), scale.x(frame.to)]
   return (
     <G>
@@ -43,7 +45,10 @@ export function PlanBand(props: PlanBandProps) {
       <G clipPath="url(#strip-plan)">
         <Rect x={Math.min(x0, x1)} y={top} width={Math.abs(x1 - x0)} height={edgeY - top} fill={colour.concrete} />
         {wedges.map(({ zoneId, outline }) => (
-          <Path key={zoneId} d={closed(outline)} fill={hatchFill(WEDGE)} stroke={colour.ochre} strokeWidth={1} />
+          <G key={zoneId}>
+            <Path d={closed(outline)} fill={hatchFill(WEDGE)} />
+            <Path d={sides(outline)} fill="none" stroke={colour.ochre} strokeWidth={1} />
+          </G>
         ))}
         {pans.map((pan) => (
           <Path key={closed(pan)} d={closed(pan)} fill={colour.sheet} stroke={colour.ink} strokeWidth={1.2} />
