@@ -1,4 +1,4 @@
-import type { Page } from 'playwright-core'
+import type { Locator, Page } from 'playwright-core'
 import { cell, focusCell, grid, typeOver } from './anchor-grid'
 
 /** What a person does at an edge, in the way of a wide screen with a keyboard or of a phone. */
@@ -10,6 +10,8 @@ export interface Hands {
   readonly typeHeight: (page: Page, mark: string, height: number) => Promise<void>
   readonly openAnchor: (page: Page, mark: string) => Promise<void>
   readonly heightOf: (page: Page, mark: string) => Promise<number>
+  /** What is open of the anchor that is picked. */
+  readonly sheet: (page: Page, mark: string) => Locator
 }
 
 const HEIGHT = 'Height, mm'
@@ -41,9 +43,10 @@ export const keyboard: Hands = {
   },
   async openAnchor(page, mark) {
     await focusCell(page, mark, HEIGHT)
-    await page.getByRole('region', { name: `${mark}, live end` }).waitFor()
+    await keyboard.sheet(page, mark).waitFor()
   },
   heightOf: async (page, mark) => Number(await (await cell(page, mark, HEIGHT)).innerText()),
+  sheet: (page, mark) => page.getByRole('region', { name: `${mark}, live end` }),
 }
 
 const sheet = (page: Page) => page.getByRole('dialog')
@@ -73,4 +76,5 @@ export const thumbs: Hands = {
     await heightField(page).waitFor()
   },
   heightOf: async (page) => Number(await heightField(page).inputValue()),
+  sheet,
 }

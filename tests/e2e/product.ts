@@ -6,6 +6,8 @@ import { fileURLToPath } from 'node:url'
 import type { Role } from '@wedgeline/contract'
 import { build } from '../../scripts/build.mjs'
 
+/** Longest that starting may take; the demo's passwords are hashed slowly on purpose. */
+const START_MS = 60_000
 const ROOT = fileURLToPath(new URL('../..', import.meta.url))
 
 export interface SignIn {
@@ -46,6 +48,7 @@ export async function startProduct({ withDemo }: { readonly withDemo: boolean })
   }
   const printed = await new Promise<string>((resolve, reject) => {
     let text = ''
+    setTimeout(() => reject(new Error(`The server did not start: ${text}`)), START_MS).unref()
     child.stderr.on('data', (part: Buffer) => (text += part.toString()))
     child.stdout.on('data', (part: Buffer) => {
       text += part.toString()
