@@ -6,6 +6,7 @@ import { fileURLToPath } from 'node:url'
 import type { Logger } from 'pino'
 import { openDatabase, type Db } from '../db/client'
 import { buildApp } from './app'
+import { recheckOutdated } from './checking'
 import { readSettings, type Settings } from './env'
 import { localFiles } from './files/local-files'
 import { firstInvitationLink } from './invite'
@@ -46,6 +47,9 @@ async function serve(settings: Settings): Promise<void> {
       proxies: settings.proxies,
     })
     server.on('request', app)
+    recheckOutdated(db, Date.now(), ({ jobId }, error) =>
+      log.error({ event: 'not checked', jobId, err: error }, 'A job could not be checked again'),
+    )
     stopOnSignal(server, () => db.$client.close())
     await letFirstPeopleIn(db, { settings, appUrl })
     console.log(`Wedgeline is at ${appUrl}`)

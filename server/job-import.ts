@@ -56,7 +56,8 @@ export function importLayout(ctx: StoringCall, json: unknown): Imported {
         before: null,
         after: { number, title, rows, leftOut },
       })
-      checkPours(tx, key, { layout: loadLayout(tx, key), pourIds: renewed.pours.map(({ id }) => id), atMs: stamp.atMs })
+      const pourIds = renewed.pours.map(({ id }) => id)
+      checkPours(tx, key, { layout: loadLayout(tx, key), pourIds, changeNumber: 1, atMs: stamp.atMs })
     }),
   )
   return { jobId: key.jobId, leftOut }

@@ -11,8 +11,8 @@ import {
   type LayoutFile,
   type Problem,
 } from '@wedgeline/contract'
-import { write, type Connection } from '../db/client'
-import { checkPours, latestResults, type Checked } from './checking'
+import { write, type Connection, type Tx } from '../db/client'
+import { checkStored, latestResults, type Checked, type ToCheck } from './checking'
 import { conflict, forbidden, refused } from './failure'
 import { changesOf, conflictsOf, type RowChange } from './layout-changes'
 import { changesSince, recordAudit } from './stores/audit'
@@ -21,6 +21,7 @@ import { jobRow } from './stores/job'
 import type { JobKey } from './stores/job-key'
 import { loadLayout, loadVersions, type Versions } from './stores/layout'
 import { storeChange } from './stores/layout-write'
+import { areChecked, markOvertaken } from './stores/result'
 import { storing } from './storing'
 import { keyOf, stampOf, type JobCall } from './job-call'
 
@@ -36,38 +37,57 @@ export interface BatchAnswer extends Checked {
  * not the person's to make; CommandError when a row cannot be taken.
  */
 export function applyBatch(ctx: JobCall, batch: Batch): BatchAnswer {
-  const { db, person } = ctx
+  const { db } = ctx
   const key = keyOf(ctx)
-  const payloadHash = createHash('sha256').update(JSON.stringify(batch)).digest('hex')
-  return storing(() =>
-    write(db, (tx) => {
-      const known = batchById(tx, { companyId: key.companyId, id: batch.id })
-      if (known)
-        return answerAgain(tx, { known, isSame: known.personId === person.id && known.payloadHash === payloadHash })
-      const stamp = stampOf(ctx)
-      const { before, applied } = applyToday(tx, key, batch)
-      assertSpareShare(ctx, before, applied.layout)
-      assertNoNewProblem(before, applied.layout)
-      const changeNumber = jobRow(tx, key).changeCount + 1
-      const { layout: after, units } = applied
-      storeChange(tx, { ...key, before, after, units, changeNumber, stamp })
-      recordAudit(tx, { ...key, ...stamp, what: 'layout.applyBatch', ...changesOf(before, after), changeNumber })
-      const pourIds = touchedPours(before, after, units)
-      const checked = checkPours(tx, key, { layout: after, pourIds, atMs: stamp.atMs })
-      const today = loadVersions(tx, key)
-      const versions = Object.fromEntries(units.map((unit) => [unit, today[unit] ?? 0]))
-      insertBatch(tx, { ...key, ...stamp, id: batch.id, payloadHash, versions, pourIds, changeNumber })
-      return { versions, ...checked }
-    }),
-  )
+  const { versions, pourIds, toCheck } = storing(() => write(db, (tx) => storeBatch(ctx, tx, batch)))
+  const checked = toCheck ? checkStored(db, key, toCheck) : latestResults(db, key, pourIds)
+  return { versions, ...checked }
 }
 
-/** A reply that got lost on its way is asked for again: the versions of then, and the latest results. */
-function answerAgain(db: Connection, { known, isSame }: { known: StoredBatch; isSame: boolean }): BatchAnswer {
+interface Stored {
+  readonly versions: Versions
+  readonly pourIds: readonly string[]
+  /** Null where the latest results are those of the layout as it is. */
+  readonly toCheck: ToCheck | null
+}
+
+function storeBatch(ctx: JobCall, tx: Tx, batch: Batch): Stored {
+  const key = keyOf(ctx)
+  const payloadHash = createHash('sha256').update(JSON.stringify(batch)).digest('hex')
+  const known = batchById(tx, { companyId: key.companyId, id: batch.id })
+  if (known) {
+    const isSame = known.personId === ctx.person.id && known.payloadHash === payloadHash
+    return storedBefore(tx, { known, isSame, atMs: ctx.now() })
+  }
+  const stamp = stampOf(ctx)
+  const { before, applied } = applyToday(tx, key, batch)
+  assertSpareShare(ctx, before, applied.layout)
+  assertNoNewProblem(before, applied.layout)
+  const changeNumber = jobRow(tx, key).changeCount + 1
+  const { layout: after, units } = applied
+  storeChange(tx, { ...key, before, after, units, changeNumber, stamp })
+  recordAudit(tx, { ...key, ...stamp, what: 'layout.applyBatch', ...changesOf(before, after), changeNumber })
+  const pourIds = touchedPours(before, after, units)
+  markOvertaken(tx, key, pourIds)
+  const today = loadVersions(tx, key)
+  const versions = Object.fromEntries(units.map((unit) => [unit, today[unit] ?? 0]))
+  insertBatch(tx, { ...key, ...stamp, id: batch.id, payloadHash, versions, pourIds, changeNumber })
+  return { versions, pourIds, toCheck: { layout: after, pourIds, changeNumber, atMs: stamp.atMs } }
+}
+
+/**
+ * A reply that got lost on its way is asked for again: the versions of then, and the latest results; those are made now
+ * where the server stopped before they were.
+ */
+function storedBefore(tx: Tx, { known, isSame, atMs }: { known: StoredBatch; isSame: boolean; atMs: number }): Stored {
   if (!isSame) {
     throw conflict('A change with this id was stored before and it was another one. Give each change an id of its own.')
   }
-  return { versions: known.versions, ...latestResults(db, known, known.pourIds) }
+  const { versions, pourIds } = known
+  if (areChecked(tx, known, pourIds)) return { versions, pourIds, toCheck: null }
+  const layout = loadLayout(tx, known)
+  const left = layout.pours.map(({ id }) => id).filter((id) => pourIds.includes(id))
+  return { versions, pourIds, toCheck: { layout, pourIds: left, changeNumber: jobRow(tx, known).changeCount, atMs } }
 }
 
 /** The batch on today's layout, when its sender saw today's version of everything that it touches. */

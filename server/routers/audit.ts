@@ -6,5 +6,5 @@ import { jobProcedure, router } from '../trpc/builders'
 export const auditRouter = router({
   list: jobProcedure()
     .input(auditListSchema)
-    .query(({ ctx, input: { limit, beforeMs } }) => auditOf(ctx.db, keyOf(ctx), { limit, beforeMs })),
+    .query(({ ctx, input: { limit, before } }) => auditOf(ctx.db, keyOf(ctx), { limit, before })),
 })

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, gt, isNotNull, lt } from 'drizzle-orm'
+import { and, asc, desc, eq, gt, isNotNull, lt, or } from 'drizzle-orm'
 import { v7 as uuidv7 } from 'uuid'
 import type { Connection } from '../../db/client'
 import { audit } from '../../db/schema/record'
@@ -26,11 +26,11 @@ export function recordAudit(db: Connection, entry: AuditEntry): void {
     .run()
 }
 
-/** The latest entries of a job, newest first; with `beforeMs` those before that instant. */
+/** The latest entries of a job, newest first; with `before` those that come after that one in this order. */
 export function auditOf(
   db: Connection,
   { companyId, jobId }: JobKey,
-  page: { limit: number; beforeMs?: number | undefined },
+  page: { limit: number; before?: { atMs: number; id: string } | undefined },
 ) {
   return db
     .select({
@@ -43,17 +43,15 @@ export function auditOf(
     })
     .from(audit)
     .innerJoin(person, eq(person.id, audit.personId))
-    .where(
-      and(
-        eq(audit.companyId, companyId),
-        eq(audit.jobId, jobId),
-        page.beforeMs === undefined ? undefined : lt(audit.atMs, page.beforeMs),
-      ),
-    )
+    .where(and(eq(audit.companyId, companyId), eq(audit.jobId, jobId), page.before && isBefore(page.before)))
     .orderBy(desc(audit.atMs), desc(audit.id))
     .limit(page.limit)
     .all()
 }
+
+/** Entries of one instant are told apart by their ids, so that none is left out between two pages. */
+const isBefore = ({ atMs, id }: { atMs: number; id: string }) =>
+  or(lt(audit.atMs, atMs), and(eq(audit.atMs, atMs), lt(audit.id, id)))
 
 /** What was there after each change of the layout since `changeNumber`, oldest first. */
 export const changesSince = (db: Connection, { companyId, jobId }: JobKey, changeNumber: number): unknown[] =>

@@ -76,6 +76,13 @@ export function insertJob(
   for (const reading of readings) insertReading(db, key, { ...reading, personId: stamp.personId })
 }
 
+/** Counts one more change of what a job's checks rest on. @returns the count */
+export function countChange(db: Connection, key: JobKey): number {
+  const changeCount = jobRow(db, key).changeCount + 1
+  db.update(job).set({ changeCount }).where(isJob(key)).run()
+  return changeCount
+}
+
 export function updateJobTitle(
   db: Connection,
   key: JobKey,

@@ -1,4 +1,4 @@
-import { and, count, eq, inArray, ne } from 'drizzle-orm'
+import { and, count, eq, inArray, isNull, lte, ne, or } from 'drizzle-orm'
 import type { PourResult } from '@wedgeline/engine'
 import type { Connection } from '../../db/client'
 import { acceptedReading, anchor, hardware, jobMember, pan, pour, pourResult, tendon } from '../../db/schema'
@@ -12,13 +12,51 @@ export interface StoredResult extends JobKey {
   readonly atMs: number
 }
 
-/** Stores the latest results of a pour in place of what was there. */
+/** Stores results of a pour in place of what was there, unless that is of a later change. */
 export function putResult(db: Connection, { companyId, jobId, result, ...rest }: StoredResult): void {
   const row = { results: [...result.zones], counts: result.counts, readingIds: readingIdsOf(result), ...rest }
   db.insert(pourResult)
     .values({ companyId, jobId, pourId: result.pourId, ...row })
-    .onConflictDoUpdate({ target: [pourResult.companyId, pourResult.jobId, pourResult.pourId], set: row })
+    .onConflictDoUpdate({
+      target: [pourResult.companyId, pourResult.jobId, pourResult.pourId],
+      set: row,
+      setWhere: lte(pourResult.changeNumber, row.changeNumber),
+    })
     .run()
+}
+
+/** No engine's version: results that a stored change has overtaken and that are about to be made again. */
+const OVERTAKEN = ''
+
+/** Results of these pours are of the layout before a change; they stay until the new ones are there. */
+export function markOvertaken(db: Connection, key: JobKey, pourIds: readonly string[]): void {
+  db.update(pourResult)
+    .set({ engineVersion: OVERTAKEN })
+    .where(and(ofJob(pourResult, key), inArray(pourResult.pourId, [...pourIds])))
+    .run()
+}
+
+/** Those of these pours that the job still has. */
+export const poursAmong = (db: Connection, key: JobKey, pourIds: readonly string[]): ReadonlySet<string> =>
+  new Set(
+    db
+      .select({ id: pour.id })
+      .from(pour)
+      .where(and(ofJob(pour, key), inArray(pour.id, [...pourIds])))
+      .all()
+      .map(({ id }) => id),
+  )
+
+/** Whether each of these pours that the job still has holds results of its layout as it is. */
+export function areChecked(db: Connection, key: JobKey, pourIds: readonly string[]): boolean {
+  const checked = db
+    .select({ pourId: pourResult.pourId })
+    .from(pourResult)
+    .where(
+      and(ofJob(pourResult, key), inArray(pourResult.pourId, [...pourIds]), ne(pourResult.engineVersion, OVERTAKEN)),
+    )
+    .all()
+  return checked.length === poursAmong(db, key, pourIds).size
 }
 
 /** Latest results of some pours of a job, in the order in which the pours are named; a pour without any is left out. */
@@ -84,12 +122,16 @@ export const acceptedReadingIds = (db: Connection, personId: string): ReadonlySe
       .map(({ jobId, readingId }) => `${jobId} ${readingId}`),
   )
 
-/** Jobs that hold results of another version of the engine. */
+/** Jobs with a pour whose results are of another version of the engine, overtaken or not there. */
 export const jobsNotCheckedBy = (db: Connection, engineVersion: string): JobKey[] =>
   db
-    .selectDistinct({ companyId: pourResult.companyId, jobId: pourResult.jobId })
-    .from(pourResult)
-    .where(ne(pourResult.engineVersion, engineVersion))
+    .selectDistinct({ companyId: pour.companyId, jobId: pour.jobId })
+    .from(pour)
+    .leftJoin(
+      pourResult,
+      and(eq(pourResult.companyId, pour.companyId), eq(pourResult.jobId, pour.jobId), eq(pourResult.pourId, pour.id)),
+    )
+    .where(or(isNull(pourResult.engineVersion), ne(pourResult.engineVersion, engineVersion)))
     .all()
 
 /** Jobs of a company that press or bear on one of its hardware, jacks or strand types. */

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, test } from 'vitest'
 import { v7 as uuidv7 } from 'uuid'
 import { ENGINE_VERSION, applyCommands, jobSettingsSchema, type Command } from '@wedgeline/contract'
 import { recheckOutdated } from '@/server/checking'
+import { recordAudit } from '@/server/stores/audit'
 import { addCompany, openTestCompany, type Caller, type TestCompany } from './company'
 import { sampleLayout } from './layout-sample'
 
@@ -325,9 +326,24 @@ describe('the audit', () => {
     await detailer.job.update({ jobId, number: '1', title: 'A' })
     await detailer.job.update({ jobId, number: '2', title: 'B' })
     const [newest] = await detailer.audit.list({ jobId, limit: 1 })
-    const older = await detailer.audit.list({ jobId, beforeMs: newest?.atMs ?? 0 })
+    const older = await detailer.audit.list({ jobId, before: { atMs: newest?.atMs ?? 0, id: newest?.id ?? '' } })
     expect(newest).toMatchObject({ after: { number: '2' } })
     expect(older[0]).toMatchObject({ after: { number: '1' } })
     expect(older).toHaveLength(3)
+  })
+
+  test('leaves none out between two pages where several were stored in one instant', async () => {
+    const jobId = await importSample()
+    const entry = { companyId: company.id, jobId, personId: company.personId('detailer'), atMs: Date.UTC(2099, 0, 1) }
+    for (let n = 0; n < 5; n++) recordAudit(company.db, { ...entry, what: `entry ${n}`, before: null, after: null })
+    const seen: string[] = []
+    let before: { atMs: number; id: string } | undefined
+    for (let page = 0; page < 3; page++) {
+      const entries = await detailer.audit.list({ jobId, limit: 2, ...(before ? { before } : {}) })
+      seen.push(...entries.map(({ what }) => what))
+      before = entries.at(-1)
+      before = before && { atMs: before.atMs, id: before.id }
+    }
+    expect(seen).toEqual(['entry 4', 'entry 3', 'entry 2', 'entry 1', 'entry 0', 'job.addMember'])
   })
 })

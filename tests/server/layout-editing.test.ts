@@ -4,8 +4,9 @@ import { join } from 'node:path'
 import fc from 'fast-check'
 import { beforeEach, describe, expect, test } from 'vitest'
 import { v7 as uuidv7 } from 'uuid'
-import { applyCommands, type Command, type LayoutFile } from '@wedgeline/contract'
+import { ENGINE_VERSION, applyCommands, type Command, type LayoutFile } from '@wedgeline/contract'
 import { openDatabase } from '@/db/client'
+import { checkStored, recheckOutdated } from '@/server/checking'
 import { companyOn, openTestCompany, type Caller, type TestCompany } from './company'
 import { sampleLayout } from './layout-sample'
 
@@ -178,6 +179,26 @@ describe('a batch', () => {
     expect((await load()).layout.pours[0]).toMatchObject({ title: 'North', mats })
   })
 
+  test('whose spare share names nobody who says so is refused with the field', async () => {
+    const seen = await load()
+    const pour = first(seen.layout.pours)
+    const withSpare = (spareBy: string | null) => {
+      const mats = pour.mats.map((mat) => ({ ...mat, spareShare: 0.01, spareBy }))
+      const commands: Command[] = [{ type: 'set', table: 'pours', id: pour.id, changes: { mats } }]
+      const unit = `pour:${pour.id}`
+      return { id: uuidv7(), jobId, bases: { [unit]: seen.versions[unit] ?? 0 }, commands }
+    }
+    const engineer = company.as('engineer')
+    for (const spareBy of [null, '', '  ']) {
+      // An empty name is refused while its row is read, a missing one with what the row says.
+      expect(await failure(engineer.layout.applyBatch(withSpare(spareBy)))).toMatchObject({
+        code: 'BAD_REQUEST',
+        field: 'mats.0.spareBy',
+      })
+    }
+    await engineer.layout.applyBatch(withSpare('A. Person'))
+  })
+
   test('of a person without the role, off the job or of another job is refused', async () => {
     const seen = await load()
     const batch = batchOf(seen, [setAnchor(first(seen.layout.anchors).id, { heightMm: 120 })])
@@ -206,6 +227,65 @@ describe('edits of one edge at the same time', () => {
     }
     const entries = await detailer.audit.list({ jobId, limit: 200 })
     expect(entries.filter(({ what }) => what === 'layout.applyBatch')).toHaveLength(50)
+  })
+})
+
+describe('results', () => {
+  const storedResult = () =>
+    company.db.$client.prepare('select engine_version, change_number, counts from pour_result').get() as {
+      engine_version: string
+      change_number: number
+      counts: string
+    }
+
+  test('are of the engine that layout.byJob names, and of the change that was stored', async () => {
+    const seen = await load()
+    await detailer.layout.applyBatch(batchOf(seen, [setAnchor(first(seen.layout.anchors).id, { chainageMm: 1650 })]))
+    const { engineVersion, versions } = await load()
+    expect(engineVersion).toBe(ENGINE_VERSION)
+    // Package version, then the first 12 hex digits of the hash over the engine's source.
+    expect(engineVersion).toMatch(/^\d+\.\d+\.\d+\+[0-9a-f]{12}$/)
+    const unit = `edge:${first(seen.layout.anchors).edgeId}`
+    expect(storedResult()).toMatchObject({ engine_version: engineVersion, change_number: versions[unit] })
+  })
+
+  test('of an earlier change never replace those of a later one', async () => {
+    const seen = await load()
+    await detailer.layout.applyBatch(batchOf(seen, [setAnchor(first(seen.layout.anchors).id, { chainageMm: 1650 })]))
+    const later = storedResult()
+    const key = { companyId: company.id, jobId }
+    const pourIds = [first(seen.layout.pours).id]
+    const check = (changeNumber: number) =>
+      checkStored(company.db, key, { layout: { ...seen.layout, anchors: [] }, pourIds, changeNumber, atMs: 0 })
+    check(later.change_number - 1)
+    expect(storedResult()).toEqual(later)
+    check(later.change_number)
+    expect(storedResult().counts).not.toBe(later.counts)
+  })
+
+  test('are left alone for a pour that somebody took away meanwhile', async () => {
+    const { layout } = await load()
+    const toCheck = { layout, pourIds: [first(layout.pours).id], changeNumber: 9, atMs: 0 }
+    company.db.$client.exec('delete from pour_result')
+    company.db.$client.exec(`pragma foreign_keys = off; update pour set id = 'other'; pragma foreign_keys = on`)
+    expect(checkStored(company.db, { companyId: company.id, jobId }, toCheck).results.length).toBeGreaterThan(0)
+    expect(storedResult()).toBeUndefined()
+  })
+
+  test('are made when the batch is sent again, or at the start, where the server stopped before it had them', async () => {
+    const seen = await load()
+    const batch = batchOf(seen, [setAnchor(first(seen.layout.anchors).id, { chainageMm: 1650 })])
+    const answer = await detailer.layout.applyBatch(batch)
+    const right = storedResult()
+    const stopBefore = () => company.db.$client.exec(`update pour_result set engine_version = '', counts = '{}'`)
+    stopBefore()
+    expect(await detailer.layout.applyBatch(batch)).toEqual(answer)
+    expect(storedResult().counts).toBe(right.counts)
+    stopBefore()
+    recheckOutdated(company.db, 0, (_key, error) => {
+      throw error
+    })
+    expect(storedResult()).toMatchObject({ engine_version: ENGINE_VERSION, counts: right.counts })
   })
 })
 

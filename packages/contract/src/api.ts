@@ -81,9 +81,9 @@ export const byPourSchema = z.strictObject({ jobId: idSchema, pourId: idSchema }
 export const companyNameSchema = z.strictObject({ companyId: idSchema, name: label(120), note: text(500).default('') })
 /** `layout` is read by readLayout, whose messages name its fields as the file's writer knows them. */
 export const importLayoutSchema = z.strictObject({ companyId: idSchema, layout: z.unknown() })
-/** A page of what was done on a job, newest first; `beforeMs` is the instant of the last entry that was seen. */
+/** A page of what was done on a job, newest first; `before` is the last entry that was seen. */
 export const auditListSchema = z.strictObject({
   jobId: idSchema,
   limit: z.number().int().min(1).max(200).default(50),
-  beforeMs: z.number().int().optional(),
+  before: z.strictObject({ atMs: z.number().int(), id: idSchema }).optional(),
 })
