@@ -5,15 +5,20 @@ import { DIST } from './build.mjs'
 import { at, filesUnder } from './project.mjs'
 
 /**
- * Adds up what a browser fetches. kB is 1000 bytes. The first screens are sign-in, invitation and jobs; everything
- * behind a job is one more chunk (features/work.ts).
+ * Adds up what a browser fetches. kB is 1000 bytes. The first screens are sign-in with what belongs to it, invitation
+ * and jobs; everything behind a job is one more chunk (features/work.ts).
  */
 const KB = 1000
 const FIRST = { gz: 400 * KB, br: 330 * KB }
 const WORK_GZ = 200 * KB
 const DEEP = { gz: 600 * KB, br: 480 * KB }
 /** Chunk names as the bundler gives them: the route's file name. The group's layouts load with the first screens. */
-const FIRST_ROUTES = { 'sign-in': 'sign-in', invitation: '[token]', jobs: 'index' }
+const FIRST_ROUTES = {
+  'sign-in': 'sign-in',
+  'forgotten password': 'forgotten',
+  'invitation, reset': '[token]',
+  jobs: 'index',
+}
 const SHELL = '_layout'
 const WORK = 'work'
 
