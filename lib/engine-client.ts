@@ -1,4 +1,5 @@
-import { checkPour, type Layout, type PourResult } from '@wedgeline/engine'
+import type { Layout, PourResult } from '@wedgeline/engine'
+import { checkDirectly } from './engine-direct'
 import type { CheckReply, CheckRequest } from './engine.worker'
 
 /**
@@ -19,7 +20,7 @@ export class EngineClient {
 
   /** Answers null when a newer request took this one's place. */
   check(layout: Layout, pourId: string): Promise<PourResult | null> {
-    if (!this.worker) return Promise.resolve(checkPour(layout, { pourId, withSteps: true }))
+    if (!this.worker) return direct(layout, pourId)
     return new Promise((resolve, reject) => {
       this.waiting.get(pourId)?.resolve(null)
       this.waiting.set(pourId, { request: { id: this.nextId++, layout, pourId }, resolve, reject })
@@ -47,6 +48,11 @@ export class EngineClient {
     else done.reject(new Error(reply.failure))
     this.start()
   }
+}
+
+function direct(layout: Layout, pourId: string): Promise<PourResult> {
+  if (checkDirectly) return Promise.resolve(checkDirectly(layout, pourId))
+  return Promise.reject(new Error('This browser has no workers, which the checks run in. Use a current browser.'))
 }
 
 interface Pending {

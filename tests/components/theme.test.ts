@@ -46,9 +46,8 @@ describe('public/theme.css', () => {
     const at = css.indexOf(`${selector} {`)
     expect(at, selector).toBeGreaterThanOrEqual(0)
     const body = css.slice(at, css.indexOf('}', at))
-    return Object.fromEntries<string | undefined>(
-      [...body.matchAll(/--(\w+): (#\w+);/g)].map(([, name, value]) => [name, value]),
-    )
+    const pairs = [...body.matchAll(/--(\w+): (#\w+);/g)]
+    return Object.fromEntries(pairs.map(([, name = '', value = '']): [string, string] => [name, value]))
   }
   test.each([
     ['light', ':root'],

@@ -79,7 +79,7 @@ const ALLOWED: readonly [string, string][] = [
   ['features/edge/edge-screen.tsx', '@wedgeline/engine/result'],
   ['features/job/job-screen.tsx', '@wedgeline/engine/bases'],
   ['lib/engine.worker.ts', '@wedgeline/engine'],
-  ['lib/engine-client.ts', '@wedgeline/engine'],
+  ['lib/engine-direct.ts', '@wedgeline/engine'],
   ['server/routers/job.ts', '../stores/job'],
   ['server/stores/job.ts', '@/db/client'],
   ['server/stores/job.ts', '@wedgeline/engine'],
