@@ -100,7 +100,8 @@ export async function arrive(page: Page, path: string, signIn: SignIn): Promise<
   await page.goto(path)
   await page.waitForURL(/\/sign-in/)
   await fillSignIn(page, signIn)
-  await page.waitForURL((url) => url.pathname + url.search === path)
+  // The router writes a colon as it is.
+  await page.waitForURL((url) => decodeURIComponent(url.pathname + url.search) === decodeURIComponent(path))
 }
 
 /** The heading of the page that is open, once it is there. */
