@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm'
+import { eq } from 'drizzle-orm'
 import type { Connection } from '../../db/client'
 import { file } from '../../db/schema/record'
 
@@ -21,13 +21,3 @@ export function insertFile(db: Connection, row: FileRow): void {
 
 /** Files whose id this is, one for each company that has one; whoever asks is checked against the row. */
 export const filesById = (db: Connection, id: string): FileRow[] => db.select().from(file).where(eq(file.id, id)).all()
-
-export const fileOfCompany = (
-  db: Connection,
-  { companyId, id }: { companyId: string; id: string },
-): FileRow | undefined =>
-  db
-    .select()
-    .from(file)
-    .where(and(eq(file.companyId, companyId), eq(file.id, id)))
-    .get()
