@@ -2,7 +2,7 @@ import type { LayoutIndex, PourResult } from '@wedgeline/engine'
 import { router } from 'expo-router'
 import { useMemo } from 'react'
 import { Pressable, StyleSheet, View } from 'react-native'
-import { colour, space, useWide } from '@/components/theme'
+import { colour, space } from '@/components/theme'
 import { Button } from '@/components/ui/button'
 import { follow } from '@/components/ui/follow'
 import { StatusMark } from '@/components/ui/status-mark'
@@ -17,13 +17,14 @@ export interface EdgeListProps {
   readonly index: LayoutIndex
   readonly result: PourResult | null
   readonly onLengths: (edgeId: string) => void
+  /** Stands in a narrow column: one edge below the other rather than a table. */
+  readonly isColumn: boolean
 }
 
 /** The edges of a pour in words: where, how long, how many anchors, and what is worst. */
-export function EdgeList({ jobId, pourId, index, result, onLengths }: EdgeListProps) {
-  const isWide = useWide()
+export function EdgeList({ jobId, pourId, index, result, onLengths, isColumn }: EdgeListProps) {
   const rows = useMemo(() => edgeRows(index, pourId, result), [index, pourId, result])
-  if (!isWide) {
+  if (isColumn) {
     return (
       <View>
         {rows.map((row) => (
@@ -43,7 +44,7 @@ export function EdgeList({ jobId, pourId, index, result, onLengths }: EdgeListPr
     { key: 'worst', head: 'Worst', cell: (row) => <WorstOf row={row} /> },
     {
       key: 'lengths',
-      head: '',
+      head: 'Along the edge',
       align: 'end',
       cell: (row) => (
         <View onClick={(event) => event.stopPropagation()}>
