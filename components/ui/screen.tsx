@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react'
-import { StyleSheet, View } from 'react-native'
+import { StyleSheet, useWindowDimensions, View } from 'react-native'
 import { colour, space, useWide } from '@/components/theme'
 import { usePageTitle } from './page-title'
 import { Text } from './text'
@@ -26,15 +26,24 @@ export interface ScreenProps {
 
 const NO_PARENTS: readonly Parent[] = []
 
+/** The line above every screen with its rule, px. */
+const HEADER_PX = 49
+/** Below this the page scrolls rather than squeeze its parts. */
+const HELD_MIN_PX = 680
+
 /** One page of the product under the header: what it is, what can be done, and the thing itself. */
 export function Screen(props: ScreenProps) {
   const { title, parents = NO_PARENTS, summary, actions, nav, isNarrow, fills, children } = props
   const isWide = useWide()
+  const window = useWindowDimensions()
+  const held = fills
+    ? ({ flexGrow: 0, flexBasis: 'auto', height: Math.max(window.height - HEADER_PX, HELD_MIN_PX) } as const)
+    : null
   usePageTitle(title)
   useTellTrail(title, parents)
   const gutter = { paddingHorizontal: isWide ? space.xl : space.l }
   return (
-    <View role="main" id="main" tabIndex={-1} style={styles.screen}>
+    <View role="main" id="main" tabIndex={-1} style={[styles.screen, held]}>
       <View style={[styles.head, gutter]}>
         <View style={styles.named}>
           <Text kind="title" level={1}>

@@ -23,7 +23,7 @@ const ALLOWED = {
   [ENGINE]: [ENGINE],
 }
 
-/** Pairs that are allowed for types alone. */
+/** Pairs that are allowed for types alone; the contract may also take the engine's small entries. */
 const TYPES_ONLY = { [CONTRACT]: [ENGINE], components: [ENGINE] }
 
 /** The engine as a whole runs in these files of the client; screens take its types and its small entries. */
@@ -69,7 +69,9 @@ function areaProblem({ from, area, to, specifier, isType }) {
     return `Import @wedgeline/${toArea.slice('packages/'.length)}, not its files.`
   }
   if (isType) return undefined
-  if (TYPES_ONLY[area]?.includes(toArea)) return `${area}/ takes types alone from ${toArea}/: write import type.`
+  const isSmall = area === CONTRACT && SMALL_ENTRIES.includes(specifier)
+  if (TYPES_ONLY[area]?.includes(toArea) && !isSmall)
+    return `${area}/ takes types alone from ${toArea}/: write import type.`
   const isScreen = CLIENT.includes(area) && !RUNS_ENGINE.test(from)
   if (isScreen && toArea === ENGINE && !SMALL_ENTRIES.includes(specifier)) {
     return `The engine runs in lib/engine.worker.ts and lib/engine-direct.ts; elsewhere import types or ${SMALL_ENTRIES.join(', ')}.`

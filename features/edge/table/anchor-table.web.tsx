@@ -256,7 +256,7 @@ function AnchorLine(of: {
           {...{ column, grid, props }}
         />
       ))}
-      <td style={{ ...styles.words, maxWidth: 150 }} title={row.steel}>
+      <td style={{ ...styles.words, maxWidth: 120 }} title={row.steel}>
         {row.steel || 'none'}
       </td>
       <td style={styles.words}>
@@ -377,7 +377,7 @@ const styles = {
     padding: '1px 8px',
     borderBottom: `1px solid ${colour.rule}`,
     whiteSpace: 'nowrap',
-    maxWidth: 180,
+    maxWidth: 215,
     overflow: 'hidden',
     textOverflow: 'ellipsis',
   },
