@@ -72,7 +72,8 @@ function RowButton({ children }: { children: ReactNode }) {
 }
 
 function placed<Row>(column: Column<Row>): CSSProperties {
-  return { textAlign: column.align ?? 'start', width: column.width, whiteSpace: column.wraps ? 'normal' : 'nowrap' }
+  const { align = 'start', width, wraps } = column
+  return { textAlign: align, width, minWidth: wraps ? width : undefined, whiteSpace: wraps ? 'normal' : 'nowrap' }
 }
 
 const styles = {

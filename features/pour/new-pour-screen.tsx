@@ -199,7 +199,7 @@ function ConcreteFields({ form, set, problems }: FieldsProps) {
           </View>
           <View style={styles.field}>
             <NumberField
-              label="Cylinder strength, 28 days"
+              label="Cylinder strength at 28 days"
               unit="MPa"
               value={form.ownFckMPa}
               usual={USUAL.fck}

@@ -1,7 +1,7 @@
 import type { PourData } from '@wedgeline/contract'
 import { StyleSheet, View } from 'react-native'
 import { v7 as newId } from 'uuid'
-import { space } from '@/components/theme'
+import { space, useWide } from '@/components/theme'
 import { Banner } from '@/components/ui/banner'
 import { NumberField } from '@/components/ui/number-field'
 import { Section } from '@/components/ui/screen'
@@ -26,6 +26,7 @@ const NUMBERS: readonly { readonly name: NumberName; readonly label: string; rea
 /** What is known of a pour beside its outline, each value with its unit and what is usual. */
 export function PourDataForm({ pour }: { readonly pour: PourData }) {
   const { apply, refusal, canEdit } = useRowEdit()
+  const field = useWide() ? styles.fifth : styles.field
   const set = (changes: Partial<PourData>, label: string) =>
     apply({ label, commands: [{ type: 'set', table: 'pours', id: pour.id, changes }] })
   const isClass = fckOf(pour.concrete) !== null
@@ -34,7 +35,7 @@ export function PourDataForm({ pour }: { readonly pour: PourData }) {
       <Section title="Slab">
         {refusal ? <Banner tone="over" words={refusal} isUrgent /> : null}
         <View style={styles.fields}>
-          <View style={styles.field}>
+          <View style={field}>
             <CommittedText
               label="Mark"
               value={pour.mark}
@@ -43,7 +44,7 @@ export function PourDataForm({ pour }: { readonly pour: PourData }) {
               onCommit={(mark) => set({ mark }, 'Mark of the pour')}
             />
           </View>
-          <View style={styles.field}>
+          <View style={field}>
             <CommittedText
               label="Title"
               value={pour.title}
@@ -51,7 +52,7 @@ export function PourDataForm({ pour }: { readonly pour: PourData }) {
               onCommit={(title) => set({ title }, 'Title of the pour')}
             />
           </View>
-          <View style={styles.field}>
+          <View style={field}>
             <Select
               label="Concrete"
               options={[
@@ -63,9 +64,9 @@ export function PourDataForm({ pour }: { readonly pour: PourData }) {
               onChange={(name) => set(concreteOf(name, pour), 'Concrete')}
             />
           </View>
-          <View style={styles.field}>
+          <View style={field}>
             <NumberField
-              label="Cylinder strength, 28 days"
+              label="Cylinder strength at 28 days"
               unit="MPa"
               value={pour.fckMPa}
               usual={USUAL.fck}
@@ -74,7 +75,7 @@ export function PourDataForm({ pour }: { readonly pour: PourData }) {
             />
           </View>
           {NUMBERS.map(({ name, label, usual }) => (
-            <View key={name} style={styles.field}>
+            <View key={name} style={field}>
               <NumberField
                 label={label}
                 unit="mm"
@@ -108,5 +109,7 @@ function concreteOf(name: string, pour: PourData): Partial<PourData> {
 
 const styles = StyleSheet.create({
   fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m },
+  /** Five in a line, those of the second line under those of the first. */
+  fifth: { width: '19%', minWidth: 0 },
   field: { flexGrow: 1, flexBasis: 150, maxWidth: 320, minWidth: 0 },
 })

@@ -1,6 +1,6 @@
 import type { LayoutIndex } from '@wedgeline/engine'
 import { useLayoutEffect, useMemo, useRef, useState } from 'react'
-import { StyleSheet, View } from 'react-native'
+import { StyleSheet, useWindowDimensions, View } from 'react-native'
 import Svg, { ClipPath, Defs, G, Path, Rect } from 'react-native-svg'
 import { DrawingText } from '@/components/drawing/drawing-text'
 import { Hatch, hatchFill } from '@/components/drawing/hatch'
@@ -16,7 +16,10 @@ import { boundsOf, pathThrough, planScale } from './plan-scale'
 const WEDGE = 'pour-wedge'
 const ZOOM = { least: 1, most: 12, step: 1.5 } as const
 const MARGIN = { wide: 78, phone: 62 } as const
-const HEIGHT = { wide: 720, phone: 420 } as const
+const PHONE_HEIGHT = 420
+
+/** On a wide window the plan leaves room for what stands above it, so that it is seen whole. */
+const WIDE_HEIGHT = { least: 380, around: 330 } as const
 
 /** Scale in px a mm from which the names of neighbouring pans have room. */
 const PAN_NAMES_FROM = 0.018
@@ -35,7 +38,8 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
   const data = useMemo(() => planData(index, pourId), [index, pourId])
   const bounds = useMemo(() => boundsOf(data.outline), [data.outline])
   const margin = isWide ? MARGIN.wide : MARGIN.phone
-  const scale = planScale(bounds, { width, heightMax: isWide ? HEIGHT.wide : HEIGHT.phone, margin, zoom })
+  const heightMax = useHeightMax(isWide)
+  const scale = planScale(bounds, { width, heightMax, margin, zoom })
   const sheet = useKeptMiddle(zoom)
   const areaOf = ({ outline }: PlanArea) => pathThrough(scale, outline, true)
   const outline = pathThrough(scale, data.outline, true)
@@ -46,7 +50,7 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
           <ZoomTools zoom={zoom} onZoom={setZoom} />
           <View
             ref={sheet}
-            style={[styles.sheet, { maxHeight: (isWide ? HEIGHT.wide : HEIGHT.phone) + 16 }]}
+            style={[styles.sheet, { maxHeight: heightMax + 16 }]}
             role="region"
             aria-label="Plan of the pour; the table of edges says the same in words"
             tabIndex={0}
@@ -93,6 +97,11 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
       )}
     </View>
   )
+}
+
+function useHeightMax(isWide: boolean): number {
+  const window = useWindowDimensions()
+  return isWide ? Math.max(WIDE_HEIGHT.least, window.height - WIDE_HEIGHT.around) : PHONE_HEIGHT
 }
 
 /** What stands in the middle of the window stays there when the drawing grows. */

@@ -4,7 +4,7 @@ import type { PourResult } from '@wedgeline/engine'
 import { router } from 'expo-router'
 import { useMemo, useState } from 'react'
 import { StyleSheet, View } from 'react-native'
-import { space } from '@/components/theme'
+import { space, useWide } from '@/components/theme'
 import { Button } from '@/components/ui/button'
 import { Icon } from '@/components/ui/icon'
 import { Section } from '@/components/ui/screen'
@@ -18,6 +18,7 @@ import { EdgeList } from './edge-list'
 import { PourDataForm } from './pour-data'
 import { PourFrame } from './pour-frame'
 import { PourPlan } from './pour-plan'
+import { boundsOf } from './plan-scale'
 
 /** A pour from above with its edges, checks counted by status, and what is known of the slab. */
 export function PourScreen({ jobId, pourId }: { readonly jobId: string; readonly pourId: string }) {
@@ -47,6 +48,8 @@ function PourParts({ jobId, pour }: { readonly jobId: string; readonly pour: Pou
   const index = useMemo(() => layoutIndex(toEngine(layout)), [layout])
   const [lengthsOf, setLengthsOf] = useState<string | null>(null)
   const hasAnchors = (index.tendonsOfPour.get(pour.id) ?? []).length > 0
+  const isWide = useWide()
+  const isBeside = isWide && !isLong(pour)
   const firstEdge = index.edgesOfPour.get(pour.id)?.[0]
   return (
     <>
@@ -62,10 +65,23 @@ function PourParts({ jobId, pour }: { readonly jobId: string; readonly pour: Pou
           }
         />
       )}
-      <PourPlan index={index} pourId={pour.id} onEdge={(edgeId) => router.push(`/jobs/${jobId}/edges/${edgeId}`)} />
-      <Section title="Edges">
-        <EdgeList jobId={jobId} pourId={pour.id} index={index} result={result} onLengths={setLengthsOf} />
-      </Section>
+      <View style={isBeside ? styles.beside : styles.stacked}>
+        <View style={isBeside ? styles.plan : null}>
+          <PourPlan index={index} pourId={pour.id} onEdge={(edgeId) => router.push(`/jobs/${jobId}/edges/${edgeId}`)} />
+        </View>
+        <View style={isBeside ? styles.list : null}>
+          <Section title="Edges">
+            <EdgeList
+              jobId={jobId}
+              pourId={pour.id}
+              index={index}
+              result={result}
+              onLengths={setLengthsOf}
+              isColumn={!isWide || isBeside}
+            />
+          </Section>
+        </View>
+      </View>
       <PourDataForm pour={pour} />
       <EdgeLengths edgeId={lengthsOf} onClose={() => setLengthsOf(null)} />
     </>
@@ -92,4 +108,18 @@ function Checks({ jobId, pourId, result, failure }: ChecksProps) {
   )
 }
 
-const styles = StyleSheet.create({ checks: { minHeight: space.xl } })
+/** A pour much longer than it is deep takes the whole width for its plan. */
+function isLong({ outline }: PourData): boolean {
+  const { left, right, top, bottom } = boundsOf(outline.map(({ xMm, yMm }) => ({ x: xMm, y: yMm })))
+  return right - left > LONG_FROM * (top - bottom)
+}
+
+const LONG_FROM = 2
+
+const styles = StyleSheet.create({
+  checks: { minHeight: space.xl },
+  stacked: { gap: space.xl },
+  beside: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xl },
+  plan: { flex: 1, minWidth: 0 },
+  list: { width: 440 },
+})

@@ -108,7 +108,7 @@ const styles = StyleSheet.create({
     borderColor: colour.rule,
     paddingBottom: space.s,
   },
-  field: { flexGrow: 1, flexBasis: 150, minWidth: 0 },
+  field: { flexGrow: 1, flexBasis: 150, maxWidth: 320, minWidth: 0 },
   noRemove: { width: 32 },
   add: { flexDirection: 'row' },
 })
