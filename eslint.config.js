@@ -64,8 +64,6 @@ export default defineConfig([
       // TypeScript resolves imports itself, and knows the packages' export maps, which this rule does not.
       'import/no-unresolved': 'off',
       'import/namespace': 'off',
-      // TanStack Table: fine without the React compiler.
-      'react-hooks/incompatible-library': 'off',
     },
   },
   typeAware,
