@@ -19,8 +19,12 @@ import { PasswordField } from './password-field'
 /** What an invitation offers, and the fields that take it. */
 export function InvitationScreen({ token }: { token: string }) {
   const trpc = useTRPC()
-  const invitation = useQuery(trpc.invitation.byToken.queryOptions({ token }, { refetchOnWindowFocus: false }))
   const accept = useAcceptInvitation()
+  // Once it is being accepted the link is used up: asked for again it would be refused.
+  const isOpen = !accept.isPending && !accept.isSuccess
+  const invitation = useQuery(
+    trpc.invitation.byToken.queryOptions({ token }, { refetchOnWindowFocus: false, enabled: isOpen }),
+  )
   if (accept.isSuccess) return <Redirect href="/" />
   return (
     <WorkShell account={null}>

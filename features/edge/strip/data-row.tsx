@@ -32,6 +32,8 @@ export interface DataRowProps {
 }
 
 const CHAR_PX = 7
+/** How far a label may reach past the end of the strip, into its margin. */
+const END_PX = 6
 const ICON_PX = 20
 
 const STATUS_COLOUR = {
@@ -58,10 +60,18 @@ const STATUS_TONE = {
 export function DataRow({ label, scale, height, cells, gutter, isLabelAbove = false }: DataRowProps) {
   const inView = cells.filter(({ chainage }) => chainage >= scale.from && chainage <= scale.to)
   const widthOf = (cell: DataCell) => cell.text.length * CHAR_PX + (cell.status ? ICON_PX : 0)
+  // A label at an end of the strip stands inside it.
+  const middleOf = (cell: DataCell) => {
+    const half = widthOf(cell) / 2
+    const { left, width } = scale
+    return Math.min(Math.max(scale.x(cell.chainage), left + half - END_PX), left + width - half + END_PX)
+  }
   const fitting = fittingLabels(
-    inView.map((cell) => ({ id: cell.id, x: scale.x(cell.chainage), width: widthOf(cell), weight: cell.weight ?? 0 })),
+    inView.map((cell) => ({ id: cell.id, x: middleOf(cell), width: widthOf(cell), weight: cell.weight ?? 0 })),
   )
-  const shown = inView.filter((cell) => fitting.has(cell.id) || isClear(cell, { scale, inView, fitting, widthOf }))
+  const shown = inView.filter(
+    (cell) => fitting.has(cell.id) || isClear(cell, { scale, inView, fitting, widthOf, middleOf }),
+  )
   return (
     <View style={[styles.row, { height: isLabelAbove ? height + LABEL_PX : height }]}>
       <View style={isLabelAbove ? styles.labelAbove : [styles.label, { width: gutter }]}>
@@ -72,7 +82,7 @@ export function DataRow({ label, scale, height, cells, gutter, isLabelAbove = fa
       {shown.map((cell) => {
         const isWhole = fitting.has(cell.id)
         const width = isWhole ? widthOf(cell) + 12 : ICON_PX
-        const left = scale.x(cell.chainage) - width / 2
+        const left = (isWhole ? middleOf(cell) : scale.x(cell.chainage)) - width / 2
         return (
           <Cell key={cell.id} cell={cell} style={{ left, width, height }}>
             {cell.status ? <Icon name={cell.status} size={14} colour={colour[STATUS_COLOUR[cell.status]]} /> : null}
@@ -102,12 +112,13 @@ function isClear(
     readonly inView: readonly DataCell[]
     readonly fitting: ReadonlySet<string>
     readonly widthOf: (cell: DataCell) => number
+    readonly middleOf: (cell: DataCell) => number
   },
 ): boolean {
   const x = row.scale.x(cell.chainage)
   return row.inView.every(
     (other) =>
-      !row.fitting.has(other.id) || Math.abs(row.scale.x(other.chainage) - x) >= (row.widthOf(other) + ICON_PX) / 2 + 2,
+      !row.fitting.has(other.id) || Math.abs(row.middleOf(other) - x) >= (row.widthOf(other) + ICON_PX) / 2 + 2,
   )
 }
 
