@@ -1,37 +1,36 @@
-import { STATUSES } from '@wedgeline/engine/result'
-import type { Status, ZoneResult } from '@wedgeline/engine'
+import { StyleSheet, View } from 'react-native'
 import { StatusMark, STATUS_WORD } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
-import { useWide } from '@/components/theme'
+import { space } from '@/components/theme'
+import { statusesIn, type Counts } from './counts'
 
-/** How many zones stand at each status, worst first; a status without a zone is left out. */
-export function StatusCounts({ zones, isStale }: { readonly zones: readonly ZoneResult[]; readonly isStale: boolean }) {
-  const isWide = useWide()
-  const counts = countZones(zones)
-  const shown = STATUSES.filter((status) => counts[status] > 0)
+interface StatusMarksProps {
+  readonly counts: Counts
+  /** Figures alone, for a narrow screen; the words are still read out. */
+  readonly isShort?: boolean
+}
+
+/** How many stand at each status, worst first, each with its mark; a status that nothing has is left out. */
+export function StatusMarks({ counts, isShort = false }: StatusMarksProps) {
+  return statusesIn(counts).map((status) => (
+    <StatusMark
+      key={status}
+      status={status}
+      words={isShort ? String(counts[status]) : `${counts[status]} ${STATUS_WORD[status]}`}
+    />
+  ))
+}
+
+/** The same as a line of its own, which also says where nothing is checked. */
+export function StatusLine({ counts }: Pick<StatusMarksProps, 'counts'>) {
+  if (statusesIn(counts).length === 0) return <Text tone="soft">nothing checked yet</Text>
   return (
-    <>
-      {shown.map((status) => (
-        <StatusMark
-          key={status}
-          status={status}
-          words={isWide ? `${counts[status]} ${STATUS_WORD[status]}` : String(counts[status])}
-        />
-      ))}
-      {isStale ? <Text tone="soft">working out …</Text> : null}
-    </>
+    <View style={styles.line}>
+      <StatusMarks counts={counts} />
+    </View>
   )
 }
 
-/** Zones by their worst status. */
-export function countZones(zones: readonly ZoneResult[]): Readonly<Record<Status, number>> {
-  const count = (wanted: Status) => zones.filter(({ status }) => status === wanted).length
-  return {
-    stop: count('stop'),
-    'not-covered': count('not-covered'),
-    over: count('over'),
-    'needs-judgement': count('needs-judgement'),
-    near: count('near'),
-    within: count('within'),
-  }
-}
+const styles = StyleSheet.create({
+  line: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.xs, flexShrink: 1, minWidth: 0 },
+})

@@ -12,7 +12,8 @@ import { Screen } from '@/components/ui/screen'
 import { Empty, Failed, Waiting } from '@/components/ui/states'
 import { Text } from '@/components/ui/text'
 import { colour, space, useWide } from '@/components/theme'
-import { StatusCounts } from '../checks/status-counts'
+import { countZones } from '../checks/counts'
+import { StatusMarks } from '../checks/status-counts'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
 import { SaveState } from '../editing/save-state'
@@ -84,7 +85,12 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         { label: layout.job.title, href: `/jobs/${jobId}` },
         { label: `Pour ${pour?.mark ?? ''}`, href: `/jobs/${jobId}/pours/${edge.pourId}` },
       ]}
-      summary={<StatusCounts zones={[...results.values()]} isStale={checks.isStale} />}
+      summary={
+        <>
+          <StatusMarks counts={countZones([...results.values()])} isShort={!isWide} />
+          {checks.isStale ? <Text tone="soft">working out …</Text> : null}
+        </>
+      }
       actions={
         <>
           <SaveState />

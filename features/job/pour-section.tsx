@@ -8,9 +8,9 @@ import { Section } from '@/components/ui/screen'
 import { Empty } from '@/components/ui/states'
 import { Text } from '@/components/ui/text'
 import { useTRPC } from '@/lib/trpc'
+import type { Counts } from '../checks/counts'
+import { StatusLine } from '../checks/status-counts'
 import { useJobDraft } from '../editing/job-draft'
-import { StatusCounts } from '../jobs/status-counts'
-import type { Counts } from '../jobs/worst-first'
 
 /** The pours with how they stand, and under each a link to every edge. */
 export function PourSection() {
@@ -57,7 +57,7 @@ function PourEntry({ pour, counts }: { pour: PourData; counts: Counts | null }) 
           </Link>
         </Text>
         <Text tone="soft">{`${level ? `${level.mark}, ` : ''}${pour.thicknessMm} mm, draft`}</Text>
-        {counts ? <StatusCounts counts={counts} /> : null}
+        {counts ? <StatusLine counts={counts} /> : null}
       </View>
       <View style={[styles.parts, !isWide && styles.partsNarrow]}>
         <View role="list" aria-label={`Edges of pour ${pour.mark}`} style={styles.edges}>

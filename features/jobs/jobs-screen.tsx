@@ -11,10 +11,11 @@ import { Text } from '@/components/ui/text'
 import { failureOf } from '@/lib/failure'
 import { useSession, type Me } from '@/lib/session'
 import { useTRPC } from '@/lib/trpc'
+import type { Counts } from '../checks/counts'
+import { StatusLine } from '../checks/status-counts'
 import { ImportDialog } from './import-dialog'
 import { NewJobDialog } from './new-job-dialog'
-import { StatusCounts } from './status-counts'
-import { worstFirst, type Counts } from './worst-first'
+import { worstFirst } from './worst-first'
 
 export interface JobInList {
   readonly id: string
@@ -148,7 +149,7 @@ function JobEntry({ job, hasCompany }: { job: JobInList; hasCompany: boolean }) 
           <Text tone="soft" style={styles.anchors}>
             {`${pour.anchors} ${pour.anchors === 1 ? 'anchor' : 'anchors'}, draft`}
           </Text>
-          <StatusCounts counts={pour.counts} />
+          <StatusLine counts={pour.counts} />
         </View>
       ))}
     </View>

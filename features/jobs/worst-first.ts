@@ -1,13 +1,5 @@
-import type { Status } from '@wedgeline/engine'
-import { STATUS_WORD } from '@/components/ui/status-mark'
-
-export type Counts = Readonly<Record<Status, number>>
-
-/** Worst first: the words are kept in that order. */
-export const WORST_FIRST = Object.keys(STATUS_WORD) as readonly Status[]
-
-/** Statuses that some check has, worst first. */
-export const statusesIn = (counts: Counts): readonly Status[] => WORST_FIRST.filter((status) => counts[status] > 0)
+import { STATUSES } from '@wedgeline/engine/result'
+import type { Counts } from '../checks/counts'
 
 interface Counted {
   readonly counts: Counts
@@ -20,7 +12,7 @@ export function worstFirst<T>(rows: readonly T[], pours: (row: T) => readonly Co
 }
 
 const keyOf = (pours: readonly Counted[]): readonly number[] =>
-  WORST_FIRST.map((status) => pours.reduce((total, { counts }) => total + counts[status], 0))
+  STATUSES.map((status) => pours.reduce((total, { counts }) => total + counts[status], 0))
 
 function compare(a: readonly number[], b: readonly number[]): number {
   const at = a.findIndex((value, index) => value !== b[index])

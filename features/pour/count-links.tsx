@@ -1,15 +1,16 @@
+import { STATUSES } from '@wedgeline/engine/result'
 import type { Status } from '@wedgeline/engine'
 import { Pressable, StyleSheet, View } from 'react-native'
 import { colour, space, useTargetHeight } from '@/components/theme'
 import { follow } from '@/components/ui/follow'
 import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
-import { SHOWN_COUNTS } from './counts'
+import type { Counts } from '../checks/counts'
 
 export interface CountLinksProps {
   readonly jobId: string
   readonly pourId: string
-  readonly counts: Readonly<Record<Status, number>>
+  readonly counts: Counts
   /** Status that the page shows alone; undefined where the links lead to another page. */
   readonly chosen?: Status | null
 }
@@ -17,7 +18,7 @@ export interface CountLinksProps {
 /** Checks counted by status; each count leads to the zones with those checks alone. */
 export function CountLinks({ jobId, pourId, counts, chosen }: CountLinksProps) {
   const minHeight = useTargetHeight()
-  const shown = SHOWN_COUNTS.filter((status) => counts[status] > 0 || status === chosen)
+  const shown = STATUSES.filter((status) => counts[status] > 0 || status === chosen)
   const base = `/jobs/${jobId}/pours/${pourId}/zones` as const
   if (shown.length === 0) return <Text tone="soft">No check is made in this pour yet.</Text>
   return (

@@ -8,7 +8,7 @@ import { follow } from '@/components/ui/follow'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Table, type Column } from '@/components/ui/table'
 import { Text } from '@/components/ui/text'
-import { SHOWN_COUNTS } from './counts'
+import { statusesIn } from '../checks/counts'
 import { edgeRows, type EdgeRow } from './edge-rows'
 
 export interface EdgeListProps {
@@ -84,7 +84,7 @@ function EdgeCard({ jobId, row, onLengths }: { jobId: string; row: EdgeRow; onLe
 
 function Counts({ row: { counts } }: { readonly row: EdgeRow }) {
   if (!counts) return <Text tone="soft">…</Text>
-  const shown = SHOWN_COUNTS.filter((status) => counts[status] > 0)
+  const shown = statusesIn(counts)
   if (shown.length === 0) return <Text tone="soft">none yet</Text>
   return (
     <View style={styles.counts}>

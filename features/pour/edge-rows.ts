@@ -1,8 +1,8 @@
 import { found, gridReference } from '@wedgeline/engine/geometry'
 import { STATUSES } from '@wedgeline/engine/result'
-import type { LayoutIndex, PourResult, Status, ZoneResult } from '@wedgeline/engine'
+import type { LayoutIndex, PourResult, ZoneResult } from '@wedgeline/engine'
+import { countChecks, type Counts } from '../checks/counts'
 import { worstWords, type Worst } from '../checks/words'
-import { countsOf } from './counts'
 import { LENGTH_KIND_WORDS } from './edge-words'
 
 /** One edge of a pour as its list shows it. */
@@ -15,7 +15,7 @@ export interface EdgeRow {
   readonly lengthMm: number
   readonly live: number
   readonly dead: number
-  readonly counts: Readonly<Record<Status, number>> | null
+  readonly counts: Counts | null
   readonly worst: (Worst & { readonly zoneId: string; readonly zoneName: string }) | null
 }
 
@@ -33,7 +33,7 @@ export function edgeRows(index: LayoutIndex, pourId: string, result: PourResult 
       lengthMm: frame.to - frame.from,
       live: anchors.filter(({ end }) => end === 'live').length,
       dead: anchors.filter(({ end }) => end === 'dead').length,
-      counts: zones && countsOf(zones),
+      counts: zones && countChecks(zones),
       worst: zones && worstOfZones(zones),
     }
   })

@@ -1,20 +1,19 @@
 import type { PourData } from '@wedgeline/contract'
-import type { Status } from '@wedgeline/engine'
 import type { ReactNode } from 'react'
 import { Failed } from '@/components/ui/states'
 import { NavBar } from '@/components/ui/nav-bar'
 import { Screen } from '@/components/ui/screen'
-import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
+import type { Counts } from '../checks/counts'
+import { StatusMarks } from '../checks/status-counts'
 import { useJobDraft, type JobDraft } from '../editing/job-draft'
 import { SaveState } from '../editing/save-state'
-import { SHOWN_COUNTS } from './counts'
 
 export type PourPage = 'plan' | 'zones' | 'schedule'
 
 export interface PourFrameProps {
   readonly pourId: string
   readonly page: PourPage
-  readonly counts?: Readonly<Record<Status, number>> | undefined
+  readonly counts?: Counts | undefined
   readonly actions?: ReactNode
   readonly children: (pour: PourData) => ReactNode
 }
@@ -70,11 +69,7 @@ export const jobParents = ({ jobId, layout }: Pick<JobDraft, 'jobId' | 'layout'>
 function Summary({ counts }: Pick<PourFrameProps, 'counts'>) {
   return (
     <>
-      {counts
-        ? SHOWN_COUNTS.filter((status) => counts[status] > 0).map((status) => (
-            <StatusMark key={status} status={status} words={`${counts[status]} ${STATUS_WORD[status]}`} />
-          ))
-        : null}
+      {counts ? <StatusMarks counts={counts} /> : null}
       <SaveState />
     </>
   )
