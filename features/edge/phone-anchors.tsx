@@ -18,7 +18,7 @@ export interface PhoneAnchorsProps {
   readonly onInsert: (text: string) => string | null
 }
 
-/** The anchors under the strip on a phone; one press opens an anchor's sheet, where it is changed. */
+/** The anchors under the strip on a phone, which shows their heights; one press opens an anchor's sheet, where it is changed. */
 export function PhoneAnchors({ rows, zone, canEdit, onSelect, onInsert }: PhoneAnchorsProps) {
   return (
     <View style={styles.all}>
@@ -31,7 +31,6 @@ export function PhoneAnchors({ rows, zone, canEdit, onSelect, onInsert }: PhoneA
         columns={[
           { key: 'mark', head: 'Anchor', isRowHead: true, cell: ({ mark, anchor }) => `${mark} ${anchor.end}` },
           { key: 'chainage', head: 'Chainage, mm', align: 'end', cell: ({ anchor }) => anchor.chainageMm },
-          { key: 'height', head: 'Height, mm', align: 'end', cell: ({ anchor }) => anchor.heightMm },
           {
             key: 'worst',
             head: 'Worst check',
