@@ -4,10 +4,10 @@ import { parseArgs } from 'node:util'
 import { toEngine } from '@wedgeline/contract'
 import { ENGINE_VERSION } from '@wedgeline/contract/engine-version'
 import { checkPour, scheduleOf, type Layout, type Pour } from '@wedgeline/engine'
-import { ScheduleBlockedError, scheduleWorkbook } from '../server/exports/workbook'
+import { ScheduleBlockedError, scheduleWorkbook, type ScheduleWorkbookInput } from '../server/exports/workbook'
 import { InputError, readLayoutFile, runCommand } from './layout-file'
 
-/** npm run -s schedule -- <file> --out x.xlsx: the workbook of a pour's bar schedule; exit 2 on bad input. */
+/** npm run -s schedule -- <file> --out x.xlsx: the workbook of each pour's bar schedule; exit 2 on bad input. */
 
 const USAGE = 'Usage: npm run -s schedule -- <layout file> --out <workbook.xlsx> [--pour <mark>] [--by <name>]'
 
@@ -16,16 +16,14 @@ await runCommand(async () => {
   const { layout } = readLayoutFile(file)
   const engineLayout = toEngine(layout)
   const pours = engineLayout.pours.filter(({ mark }) => pourMark === undefined || mark === pourMark)
-  if (pours.length === 0) {
+  if (pourMark !== undefined && pours.length === 0) {
     const marks = engineLayout.pours.map(({ mark }) => mark).join(', ')
-    throw new InputError(`--pour: no pour is marked "${pourMark ?? ''}"; must be one of ${marks}`)
+    throw new InputError(`--pour: no pour is marked "${pourMark}"; must be one of ${marks}`)
   }
-  for (const pour of pours) {
-    const path = pours.length === 1 ? out : withMark(out, pour.mark)
-    const workbook = await workbookOf(engineLayout, pour, { by, timeZone: layout.job.timeZone })
-    writeWorkbook(path, workbook)
-    process.stdout.write(`${path}\n`)
-  }
+  const [first, ...more] = pours.map((pour) => partOf(engineLayout, pour, { by, timeZone: layout.job.timeZone }))
+  if (!first) throw new InputError('pours: the layout has no pour to schedule')
+  writeWorkbook(out, await workbookOf(first, more))
+  process.stdout.write(`${out}\n`)
 })
 
 function readArguments() {
@@ -46,35 +44,37 @@ function parsed() {
   }
 }
 
-/** x.xlsx of a layout with several pours becomes x-P1.xlsx, x-P2.xlsx. */
-function withMark(out: string, mark: string): string {
-  return `${out.slice(0, -'.xlsx'.length)}-${mark}.xlsx`
-}
-
-async function workbookOf(layout: Layout, pour: Pour, { by, timeZone }: { by: string; timeZone: string }) {
+function partOf(layout: Layout, pour: Pour, { by, timeZone }: { by: string; timeZone: string }): ScheduleWorkbookInput {
   const checks = checkPour(layout, { pourId: pour.id })
   const notYetChecked = [...new Set(checks.zones.flatMap((zone) => zone.notYetChecked))]
   const now = Date.now()
-  try {
-    return await scheduleWorkbook({
-      schedule: scheduleOf(layout, pour.id, notYetChecked),
-      checks,
-      job: layout.job,
-      pour,
-      reference: `${layout.job.number}-${pour.mark}`,
-      drawing: '',
-      preparedBy: by,
-      preparedOn: dayIn(timeZone, now),
-      preparedAtMs: now,
-      checkedBy: null,
-      approval: null,
-      engineVersion: ENGINE_VERSION,
-    })
-  } catch (error) {
-    if (error instanceof ScheduleBlockedError) throw new InputError(`steel of pour ${pour.mark}: ${error.message}`)
-    throw error
+  return {
+    schedule: scheduleOf(layout, pour.id, notYetChecked),
+    checks,
+    job: layout.job,
+    pour,
+    reference: `${layout.job.number}-${pour.mark}`,
+    drawing: '',
+    preparedBy: by,
+    preparedOn: dayIn(timeZone, now),
+    preparedAtMs: now,
+    checkedBy: null,
+    approval: null,
+    engineVersion: ENGINE_VERSION,
   }
 }
+
+async function workbookOf(first: ScheduleWorkbookInput, more: readonly ScheduleWorkbookInput[]): Promise<Buffer> {
+  try {
+    return await scheduleWorkbook(first, ...more)
+  } catch (error) {
+    if (!(error instanceof ScheduleBlockedError)) throw error
+    const blocked = [first, ...more].filter(({ schedule }) => schedule.problems.some(isError))
+    throw new InputError(`steel of pour ${blocked.map(({ pour }) => pour.mark).join(', ')}: ${error.message}`)
+  }
+}
+
+const isError = ({ severity }: { readonly severity: string }): boolean => severity === 'error'
 
 /** Calendar day as YYYY-MM-DD; Swedish writes it so. */
 function dayIn(timeZone: string, atMs: number): string {

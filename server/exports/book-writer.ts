@@ -63,6 +63,10 @@ export interface BookWriter {
   finish(): Promise<Buffer>
 }
 
+/** A range on a sheet, whose name is quoted where it is more than one word. */
+export const onSheet = (sheet: string, range: string): string =>
+  `${/^\w+$/.test(sheet) ? sheet : `'${sheet}'`}!${range}`
+
 /** A, B, ... Z, AA for 1, 2, ... 26, 27. */
 export function columnLetter(column: number): string {
   const last = String.fromCharCode(65 + ((column - 1) % 26))

@@ -1,7 +1,7 @@
-import { STATUSES, type Check, type Status, type ZoneResult } from '@wedgeline/engine'
+import { BASIS_SOURCES, STATUSES, type Check, type Status, type ZoneResult } from '@wedgeline/engine'
 import type { BookWriter, CellValue, Column } from './book-writer'
 import { familyWords, notYetChecked, STATUS_WORDS, statusLine } from './wording'
-import type { ScheduleWorkbookInput } from './workbook'
+import type { WorkbookPart } from './workbook'
 
 /** What an engineer must see before the bars are ordered. */
 const LISTED: readonly Status[] = ['stop', 'not-covered', 'over', 'needs-judgement']
@@ -28,17 +28,19 @@ interface Listed {
   readonly check: Exclude<Check, { kind: 'advice' }>
 }
 
-export function writeChecks(book: BookWriter, input: ScheduleWorkbookInput): void {
+const basisTitle = (basis: string): string => BASIS_SOURCES.find(({ id }) => id === basis)?.title ?? basis
+
+export function writeChecks(book: BookWriter, input: WorkbookPart): void {
   const { checks } = input
-  const sheet = book.sheet('Checks')
+  const sheet = book.sheet(input.sheetName('Checks'))
   const listed = listedChecks(checks.zones)
   sheet.widths(COLUMNS.map((column) => column.width))
   sheet.put(1, 1, { value: `Checks of pour ${input.pour.mark}`, style: { isBold: true, size: 14 } })
   sheet.put(2, 1, { value: statusLine(input) })
   const counts = STATUSES.map((status) => `${STATUS_WORDS[status]} ${checks.counts[status]}`).join(', ')
-  sheet.put(3, 1, { value: `Basis ${checks.basis}. Zones: ${counts}.` })
+  sheet.put(3, 1, { value: `Basis ${basisTitle(checks.basis)}. Checks by status: ${counts}.` })
   if (listed.length > 0) {
-    sheet.table({ name: 'OpenChecks', row: HEAD_ROW, columns: COLUMNS, rows: listed.map(checkRow) })
+    sheet.table({ name: input.rangeName('OpenChecks'), row: HEAD_ROW, columns: COLUMNS, rows: listed.map(checkRow) })
   } else {
     sheet.put(HEAD_ROW, 1, { value: 'No check that was made is a stop, not covered, over or in need of judgement.' })
   }
@@ -46,7 +48,7 @@ export function writeChecks(book: BookWriter, input: ScheduleWorkbookInput): voi
   const open = notYetChecked(input)
   if (open.length > 0) {
     sheet.table({
-      name: 'NotYetChecked',
+      name: input.rangeName('NotYetChecked'),
       row: below,
       columns: [
         { title: 'Not yet checked', width: 22 },

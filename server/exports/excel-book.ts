@@ -46,11 +46,43 @@ function sheetWriter(sheet: ExcelJS.Worksheet): SheetWriter {
         fitToWidth: 1,
         fitToHeight: 0,
       } as const
-      Object.assign(sheet.pageSetup, pageSetup, { printArea: area, printTitlesRow: titleRows })
+      // The library puts a dollar before each letter alone; an area with rows that shift is not taken everywhere.
+      const printArea = area.replaceAll(/\d+/g, (row) => `$${row}`)
+      Object.assign(sheet.pageSetup, pageSetup, { printArea, printTitlesRow: titleRows })
+      fitRows(sheet)
       // An ampersand begins a code in a footer; two of them print one.
       sheet.headerFooter.oddFooter = `&L${footer.replaceAll('&', '&&')}&RPage &P of &N`
     },
   }
+}
+
+const LINE_PT = 15
+/** A bold letter is wider than the digit in which widths of columns count. */
+const BOLD = 1.15
+
+/** Rows as high as their wrapped texts need: not every program works that out when it opens a file. */
+function fitRows(sheet: ExcelJS.Worksheet): void {
+  sheet.eachRow((row) => {
+    let lines = 1
+    row.eachCell((cell) => {
+      if (cell.alignment?.wrapText !== true || typeof cell.value !== 'string') return
+      const width = Number(sheet.getColumn(cell.col).width ?? 9) - 1
+      lines = Math.max(lines, linesOf(cell.value, cell.font?.bold ? width / BOLD : width))
+    })
+    if (lines > 1) row.height = lines * LINE_PT
+  })
+}
+
+/** Lines that a text takes when its words wrap at so many letters. */
+function linesOf(text: string, width: number): number {
+  let [lines, used] = [1, 0]
+  for (const word of text.split(' ')) {
+    const next = used === 0 ? word.length : used + 1 + word.length
+    if (next > width && used > 0) [lines, used] = [lines + 1, word.length]
+    else used = next
+    while (used > width) [lines, used] = [lines + 1, used - width]
+  }
+  return lines
 }
 
 function writeTable(sheet: ExcelJS.Worksheet, { name, row, columns, rows }: TableBlock): void {

@@ -1,9 +1,9 @@
 import type { BookWriter } from './book-writer'
 import { CAUTIONS, editionLine, statusLine } from './wording'
-import type { ScheduleWorkbookInput } from './workbook'
+import type { ScheduleWorkbookInput, WorkbookPart } from './workbook'
 
-export function writeNotes(book: BookWriter, input: ScheduleWorkbookInput): void {
-  const sheet = book.sheet('Notes')
+export function writeNotes(book: BookWriter, input: WorkbookPart): void {
+  const sheet = book.sheet(input.sheetName('Notes'))
   const lines = noteLines(input)
   sheet.widths([18, 120])
   sheet.put(1, 1, { value: `Notes to schedule ${input.reference}`, style: { isBold: true, size: 14 } })

@@ -1,7 +1,7 @@
 import type { ScheduleRow, Step } from '@wedgeline/engine'
-import { columnLetter, type BookWriter, type CellValue, type Column, type SheetWriter } from './book-writer'
+import { columnLetter, onSheet, type BookWriter, type CellValue, type Column, type SheetWriter } from './book-writer'
 import { CAUTIONS, editionLine, familyWords, notYetChecked, statusLine } from './wording'
-import type { ScheduleWorkbookInput } from './workbook'
+import type { ScheduleWorkbookInput, WorkbookPart } from './workbook'
 
 /** Columns of a BS 8666 schedule, left to right (from memory). */
 const COLUMNS: readonly Column[] = [
@@ -24,13 +24,14 @@ export const SCHEDULE_SHEET = 'Schedule'
 const HEAD_ROW = 9
 const LAST = columnLetter(COLUMNS.length)
 
-export function writeSchedule(book: BookWriter, input: ScheduleWorkbookInput): void {
+export function writeSchedule(book: BookWriter, input: WorkbookPart): void {
   const { rows } = input.schedule
-  const sheet = book.sheet(SCHEDULE_SHEET)
+  const name = input.sheetName(SCHEDULE_SHEET)
+  const sheet = book.sheet(name)
   sheet.widths([...COLUMNS.map((column) => column.width), 3, 13, 11, 13, 40])
   writeHeader(sheet, input)
   sheet.table({
-    name: 'BarSchedule',
+    name: input.rangeName('BarSchedule'),
     row: HEAD_ROW,
     columns: COLUMNS,
     rows: rows.map((row, k) => tableRow(row, HEAD_ROW + 1 + k)),
@@ -45,8 +46,8 @@ export function writeSchedule(book: BookWriter, input: ScheduleWorkbookInput): v
     titleRows: `${HEAD_ROW}:${HEAD_ROW}`,
     footer: `${input.reference} ${statusLine(input)}`,
   })
-  for (const [name, column] of RANGES) {
-    book.name(name, `${SCHEDULE_SHEET}!$${column}$${HEAD_ROW + 1}:$${column}$${lastRow}`)
+  for (const [range, column] of RANGES) {
+    book.name(input.rangeName(range), onSheet(name, `$${column}$${HEAD_ROW + 1}:$${column}$${lastRow}`))
   }
 }
 
@@ -61,19 +62,19 @@ function writeHeader(sheet: SheetWriter, input: ScheduleWorkbookInput): void {
   const { job, pour } = input
   sheet.put(1, 1, { value: 'Bar schedule', style: { isBold: true, size: 14 } })
   const pairs: readonly (readonly [number, number, string, string])[] = [
-    [1, 8, 'Status', statusLine(input)],
+    [1, 7, 'Status', statusLine(input)],
     [2, 1, 'Job', `${job.number} ${job.title}`],
-    [2, 8, 'Schedule reference', input.reference],
+    [2, 7, 'Schedule reference', input.reference],
     [3, 1, 'Pour', `${pour.mark} ${pour.title}`.trim()],
-    [3, 8, 'Drawing', input.drawing],
+    [3, 7, 'Drawing', input.drawing],
     [4, 1, 'Prepared by', input.preparedBy],
-    [4, 8, 'Date prepared', input.preparedOn],
+    [4, 7, 'Date prepared', input.preparedOn],
     [5, 1, 'Checked by', input.checkedBy ?? 'not yet'],
-    [5, 8, 'Units', 'mm, kg'],
+    [5, 7, 'Units', 'mm, kg'],
   ]
   for (const [row, column, name, value] of pairs) {
     sheet.put(row, column, { value: name, style: { isBold: true } })
-    sheet.put(row, column + 2, { value })
+    sheet.put(row, column === 1 ? 3 : 10, { value })
   }
   const open = notYetChecked(input).map(({ family }) => familyWords(family))
   sheet.put(6, 1, { value: editionLine(input) })

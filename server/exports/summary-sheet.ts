@@ -1,6 +1,6 @@
-import type { BookWriter, CellValue, Column } from './book-writer'
+import { onSheet, type BookWriter, type CellValue, type Column } from './book-writer'
 import { statusLine } from './wording'
-import type { ScheduleWorkbookInput } from './workbook'
+import type { WorkbookPart } from './workbook'
 
 const COLUMNS: readonly Column[] = [
   { title: 'Type and size', width: 16 },
@@ -11,9 +11,10 @@ const COLUMNS: readonly Column[] = [
 ]
 const HEAD_ROW = 4
 
-export function writeSummary(book: BookWriter, input: ScheduleWorkbookInput): void {
+export function writeSummary(book: BookWriter, input: WorkbookPart): void {
   const { totals, metres, mass } = input.schedule
-  const sheet = book.sheet('Summary')
+  const sheet = book.sheet(input.sheetName('Summary'))
+  const [totalsRange, typesRange, lengthsRange] = ['BarTotals', 'BarTypes', 'BarLengths'].map(input.rangeName)
   sheet.widths(COLUMNS.map((column) => column.width))
   sheet.put(1, 1, { value: `Bars by type and size, schedule ${input.reference}`, style: { isBold: true, size: 14 } })
   sheet.put(2, 1, { value: statusLine(input) })
@@ -21,13 +22,13 @@ export function writeSummary(book: BookWriter, input: ScheduleWorkbookInput): vo
     const at = HEAD_ROW + 1 + k
     return [
       total.typeAndSize,
-      { formula: `SUMIFS(BarTotals,BarTypes,A${at})`, result: total.bars },
-      { formula: `SUMPRODUCT((BarTypes=A${at})*BarTotals*BarLengths)/1000`, result: total.metres },
+      { formula: `SUMIFS(${totalsRange},${typesRange},A${at})`, result: total.bars },
+      { formula: `SUMPRODUCT((${typesRange}=A${at})*${totalsRange}*${lengthsRange})/1000`, result: total.metres },
       total.massPerMetre,
       { formula: `C${at}*D${at}`, result: total.mass },
     ]
   })
-  if (rows.length > 0) sheet.table({ name: 'BarSummary', row: HEAD_ROW, columns: COLUMNS, rows })
+  if (rows.length > 0) sheet.table({ name: input.rangeName('BarSummary'), row: HEAD_ROW, columns: COLUMNS, rows })
   const [first, last, sumRow] = [HEAD_ROW + 1, HEAD_ROW + rows.length, HEAD_ROW + rows.length + 1]
   const sums: readonly (readonly [number, CellValue, string])[] = [
     [1, 'All bars', '@'],
@@ -37,8 +38,8 @@ export function writeSummary(book: BookWriter, input: ScheduleWorkbookInput): vo
   ]
   if (rows.length > 0) {
     for (const [column, value, format] of sums) sheet.put(sumRow, column, { value, style: { isBold: true, format } })
-    book.name('AllMetres', `Summary!$C$${sumRow}`)
-    book.name('AllMass', `Summary!$E$${sumRow}`)
+    book.name(input.rangeName('AllMetres'), onSheet(input.sheetName('Summary'), `$C$${sumRow}`))
+    book.name(input.rangeName('AllMass'), onSheet(input.sheetName('Summary'), `$E$${sumRow}`))
   }
   sheet.freeze(HEAD_ROW)
   sheet.page({

@@ -34,23 +34,47 @@ export class ScheduleBlockedError extends Error {
   }
 }
 
+/** One pour's part of a workbook: what it shows, and how its sheets and ranges are called there. */
+export interface WorkbookPart extends ScheduleWorkbookInput {
+  /** Schedule, or Schedule P1 where several pours share the workbook. */
+  readonly sheetName: (name: string) => string
+  /** BarTotals, or BarTotals_2: a name may stand once in a workbook. */
+  readonly rangeName: (name: string) => string
+}
+
 /**
- * The workbook of a pour's bar schedule (xlsx).
+ * The workbook of a pour's bar schedule, or of several pours with sheets of their own for each (xlsx).
  *
- * @throws ScheduleBlockedError while any mark, or the schedule as a whole, has an error.
+ * @throws ScheduleBlockedError while any mark, or a schedule as a whole, has an error.
  */
-export async function scheduleWorkbook(input: ScheduleWorkbookInput): Promise<Buffer> {
-  const errors = input.schedule.problems.filter((problem) => problem.severity === 'error')
+export async function scheduleWorkbook(
+  first: ScheduleWorkbookInput,
+  ...more: readonly ScheduleWorkbookInput[]
+): Promise<Buffer> {
+  const inputs = [first, ...more]
+  const errors = inputs.flatMap(({ schedule }) => schedule.problems).filter(({ severity }) => severity === 'error')
   if (errors.length > 0) throw new ScheduleBlockedError(errors)
+  const marks = inputs.map(({ pour }) => pour.mark).join(', ')
   const book = excelBook({
-    title: `Bar schedule ${input.reference}`,
-    subject: `${input.job.number} ${input.job.title}, pour ${input.pour.mark}`,
-    author: input.preparedBy,
-    atMs: input.preparedAtMs,
+    title: `Bar schedule ${inputs.map(({ reference }) => reference).join(', ')}`,
+    subject: `${first.job.number} ${first.job.title}, pour ${marks}`,
+    author: first.preparedBy,
+    atMs: first.preparedAtMs,
   })
-  writeSchedule(book, input)
-  writeSummary(book, input)
-  writeChecks(book, input)
-  writeNotes(book, input)
+  inputs.forEach((input, at) => {
+    const isAlone = more.length === 0
+    const part: WorkbookPart = {
+      ...input,
+      sheetName: (name) => (isAlone ? name : `${name} ${input.pour.mark.replaceAll(NOT_IN_A_SHEET_NAME, ' ')}`),
+      rangeName: (name) => (isAlone ? name : `${name}_${at + 1}`),
+    }
+    writeSchedule(book, part)
+    writeSummary(book, part)
+    writeChecks(book, part)
+    writeNotes(book, part)
+  })
   return book.finish()
 }
+
+/** Signs that a spreadsheet does not take in the name of a sheet. */
+const NOT_IN_A_SHEET_NAME = /[\\/?*:[\]']/g

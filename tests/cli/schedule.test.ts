@@ -26,15 +26,24 @@ describe('schedule', { timeout: 60_000 }, () => {
     expect(await textOf(out)).toContain('DRAFT: NOT FOR CONSTRUCTION')
   })
 
-  test('writes a workbook for each pour of the demo, with every mark in it', async () => {
-    const folder = temporaryFolder()
-    const { status, stdout } = runNpm('schedule', [demoFile, '--out', join(folder, 'x.xlsx'), '--by', 'A. Drafter'])
+  test('writes one workbook for the demo, each pour on sheets of its own with every mark in it', async () => {
+    const out = join(temporaryFolder(), 'x.xlsx')
+    const { status, stdout } = runNpm('schedule', [demoFile, '--out', out, '--by', 'A. Drafter'])
     expect(status).toBe(0)
-    const files = ['P1', 'P2', 'P3'].map((mark) => join(folder, `x-${mark}.xlsx`))
-    expect(stdout).toBe(files.map((file) => `${file}\n`).join(''))
-    const text = await textOf(files[1] ?? '')
-    expect(text).toContain('A. Drafter')
-    for (const { mark } of scheduleOf(toEngine(demoLayout()), 'P2').rows) expect(text.split('\n')).toContain(mark)
+    expect(stdout).toBe(`${out}\n`)
+    const book = new ExcelJS.Workbook()
+    await book.xlsx.readFile(out)
+    const kinds = ['Schedule', 'Summary', 'Checks', 'Notes']
+    expect(book.worksheets.map(({ name }) => name)).toEqual(
+      ['P1', 'P2', 'P3'].flatMap((mark) => kinds.map((kind) => `${kind} ${mark}`)),
+    )
+    for (const pour of ['P1', 'P2', 'P3']) {
+      const marks = book.getWorksheet(`Schedule ${pour}`)?.getColumn(2).values ?? []
+      for (const { mark } of scheduleOf(toEngine(demoLayout()), pour).rows) expect(marks).toContain(mark)
+    }
+    const first = book.getWorksheet('Summary P2')?.getCell('B5').value
+    expect(first).toMatchObject({ formula: 'SUMIFS(BarTotals_2,BarTypes_2,A5)' })
+    expect(book.definedNames.getRanges('BarTotals_2').ranges[0]).toMatch(/^'Schedule P2'!\$F\$10:/)
   })
 
   test('writes the pour that is asked for', () => {
