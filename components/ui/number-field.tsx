@@ -132,6 +132,8 @@ function useDraft({ value, onCommit, onType, unit, separator = null }: NumberFie
       if (now.kind === 'number' && now.value !== value) onType?.(now.value)
     },
     enter: () => {
+      // A text typed against an older value was put away; focus must not bring it back, nor leaving commit it.
+      if (typed && typed.against !== value) setTyped(null)
       setFocused(true)
       setBefore(value)
     },

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react'
 import { useEffect } from 'react'
+import { View } from 'react-native'
 import { Button } from '@/components/ui/button'
 import { Screen } from '@/components/ui/screen'
 import { Failed, Waiting } from '@/components/ui/states'
@@ -21,7 +22,9 @@ function Opened({ children }: { children: ReactNode }) {
     return (
       <>
         <UndoKeys />
-        <SaveBar />
+        <View dataSet={{ stays: 'top' }}>
+          <SaveBar />
+        </View>
         {children}
       </>
     )

@@ -150,6 +150,21 @@ test('a value that changes from outside takes the place of a text that was left'
   expect(box().value).toBe('75')
 })
 
+test('a committed text that a value from outside replaced does not come back with the focus', async () => {
+  const onCommit = vi.fn()
+  const { rerender } = render(<NumberField label="Height" unit="mm" value={110} onCommit={onCommit} />)
+  await userEvent.clear(box())
+  await userEvent.type(box(), '230')
+  await userEvent.tab()
+  expect(onCommit.mock.calls).toEqual([[230]])
+  rerender(<NumberField label="Height" unit="mm" value={230} onCommit={onCommit} />)
+  rerender(<NumberField label="Height" unit="mm" value={210} onCommit={onCommit} />)
+  await userEvent.click(box())
+  expect(box().value).toBe('210')
+  await userEvent.tab()
+  expect(onCommit).toHaveBeenCalledTimes(1)
+})
+
 test('an emptied field commits that there is no value', async () => {
   const onCommit = vi.fn()
   render(<Height onCommit={onCommit} />)
