@@ -22,9 +22,12 @@ export function failureOf(error: unknown): CallFailure {
   const { code, fields, problem, problems, retryAfterS } = data
   const named = Object.entries(fields ?? {}).map(([field, messages]) => [field, messages[0] ?? ''] as const)
   const own = problem && problem.field !== null ? [[problem.field, problem.message] as const] : []
-  const all = Object.fromEntries([...named, ...own])
+  const all = Object.fromEntries([...named, ...own].map(([field, message]) => [field, asSentence(message)]))
   return { code, sentence: sentenceOf(error), fields: all, problems: problems ?? [], retryAfterS }
 }
+
+/** 'must be a mail address' stands alone beside a box as 'It must be a mail address.' */
+const asSentence = (message: string): string => (/^[a-z]/.test(message) ? `It ${message}.` : message)
 
 const sentenceOf = (error: unknown): string => (error instanceof Error ? error.message : UNREACHABLE)
 

@@ -14,6 +14,7 @@ import { Text } from '@/components/ui/text'
 import { colour, space, useWide } from '@/components/theme'
 import { countZones } from '../checks/counts'
 import { StatusMarks } from '../checks/status-counts'
+import { useCompanyRoles } from '../company/company-roles'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
 import { SaveState } from '../editing/save-state'
@@ -44,7 +45,8 @@ export function EdgeScreen({ jobId, edgeId }: { readonly jobId: string; readonly
 
 function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: EdgeData }) {
   const { zone: selected = null } = useLocalSearchParams<{ zone?: string }>()
-  const { layout, edit, canEdit, undo, canUndo, undoLabel } = useJobDraft()
+  const { layout, companyId, edit, canEdit, undo, canUndo, undoLabel } = useJobDraft()
+  const isAdmin = useCompanyRoles(companyId).includes('admin')
   const isWide = useWide()
   const [isPasting, setPasting] = useState(false)
   const checks = usePourChecks(edge.pourId)
@@ -85,12 +87,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         { label: layout.job.title, href: `/jobs/${jobId}` },
         { label: `Pour ${pour?.mark ?? ''}`, href: `/jobs/${jobId}/pours/${edge.pourId}` },
       ]}
-      summary={
-        <>
-          <StatusMarks counts={countZones([...results.values()])} isShort={!isWide} />
-          {checks.isStale ? <Text tone="soft">working out …</Text> : null}
-        </>
-      }
+      summary={<Summary results={results} isStale={checks.isStale} />}
       actions={
         <>
           <SaveState />
@@ -115,7 +112,14 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         </>
       }
     >
-      {missing ? <Empty {...missing} /> : null}
+      {missing ? (
+        <View style={styles.missing}>
+          <Empty
+            {...missing}
+            action={isAdmin ? <Button kind="main" label="Enter it" href={`/companies/${companyId}/hardware`} /> : null}
+          />
+        </View>
+      ) : null}
       {checks.failure ? (
         <Failed what="The checks could not be worked out." advice={checks.failure} />
       ) : checks.result === null ? (
@@ -157,6 +161,23 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         onPaste={put}
       />
     </Screen>
+  )
+}
+
+/** How many zones of the edge stand at each status, and whether that is being worked out again. */
+function Summary({
+  results,
+  isStale,
+}: {
+  readonly results: ReadonlyMap<string, ZoneResult>
+  readonly isStale: boolean
+}) {
+  const isWide = useWide()
+  return (
+    <>
+      <StatusMarks counts={countZones([...results.values()])} isShort={!isWide} />
+      {isStale ? <Text tone="soft">working out …</Text> : null}
+    </>
   )
 }
 
@@ -227,6 +248,7 @@ function SheetPane(props: {
 }
 
 const styles = StyleSheet.create({
+  missing: { paddingHorizontal: space.l },
   below: { flex: 1, flexDirection: 'row', minHeight: 240, borderTopWidth: 1, borderColor: colour.ink },
   table: { flex: 1, minWidth: 0, backgroundColor: colour.paper },
   pane: { width: 480, flexGrow: 0, borderLeftWidth: 1, borderColor: colour.ink, backgroundColor: colour.sheet },

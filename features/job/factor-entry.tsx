@@ -1,6 +1,7 @@
 import type { Factor } from '@wedgeline/engine'
 import { StyleSheet, View } from 'react-native'
 import { space } from '@/components/theme'
+import { Button } from '@/components/ui/button'
 import { NumberField } from '@/components/ui/number-field'
 import { TextField } from '@/components/ui/text-field'
 import { clauseText } from '../checks/words'
@@ -31,6 +32,15 @@ export function FactorEntry({ factor, typed, errors, canSet, onChange }: FactorE
         disabled={!canSet}
         required
       />
+      {isOwn && canSet ? (
+        <View style={styles.line}>
+          <Button
+            kind="quiet"
+            label={`Back to ${recommended}, the recommended value`}
+            onPress={() => onChange({ value: recommended, reason: '' })}
+          />
+        </View>
+      ) : null}
       {isOwn ? (
         <TextField
           label={`Reason for ${typed.value ?? 'another value'}`}
@@ -47,5 +57,6 @@ export function FactorEntry({ factor, typed, errors, canSet, onChange }: FactorE
 }
 
 const styles = StyleSheet.create({
+  line: { flexDirection: 'row' },
   entry: { gap: space.s, width: 320, maxWidth: '100%' },
 })

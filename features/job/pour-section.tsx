@@ -2,6 +2,7 @@ import type { EdgeData, LayoutFile, PourData } from '@wedgeline/contract'
 import { useQuery } from '@tanstack/react-query'
 import { StyleSheet, View } from 'react-native'
 import { colour, space, useWide } from '@/components/theme'
+import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
 import { Link } from '@/components/ui/link'
 import { Section } from '@/components/ui/screen'
@@ -10,6 +11,7 @@ import { Text } from '@/components/ui/text'
 import { useTRPC } from '@/lib/trpc'
 import type { Counts } from '../checks/counts'
 import { StatusLine } from '../checks/status-counts'
+import { useCompanyRoles } from '../company/company-roles'
 import { useJobDraft } from '../editing/job-draft'
 
 /** The pours with how they stand, and under each a link to every edge. */
@@ -30,15 +32,35 @@ export function PourSection() {
           }
           action={canEdit ? <Button label="Add the first pour" href={`/jobs/${jobId}/pours/new`} /> : null}
         />
+        <HardwareNote />
       </Section>
     )
   }
   return (
     <Section title="Pours">
+      <HardwareNote />
       {layout.pours.map((pour) => (
         <PourEntry key={pour.id} pour={pour} counts={stored.find(({ id }) => id === pour.id)?.counts ?? null} />
       ))}
     </Section>
+  )
+}
+
+/** Without hardware no anchor can be entered: said here, before somebody stands at an edge. */
+function HardwareNote() {
+  const { layout, companyId } = useJobDraft()
+  const isAdmin = useCompanyRoles(companyId).includes('admin')
+  const missing = [
+    ...(layout.hardware.length === 0 ? ['anchorage'] : []),
+    ...(layout.strandTypes.length === 0 ? ['strand type'] : []),
+  ]
+  if (missing.length === 0) return null
+  return (
+    <Banner
+      tone="info"
+      words={`The company has no ${missing.join(' and no ')} yet; anchors need both.${isAdmin ? '' : ' An admin enters them.'}`}
+      actions={isAdmin ? <Button label="Enter hardware" href={`/companies/${companyId}/hardware`} /> : null}
+    />
   )
 }
 

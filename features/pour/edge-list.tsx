@@ -75,7 +75,7 @@ function EdgeCard({ jobId, row, onLengths }: { jobId: string; row: EdgeRow; onLe
         </Text>
         <Text kind="small" tone="soft">{`${row.live} live, ${row.dead} dead ends`}</Text>
         <Counts row={row} />
-        <WorstOf row={row} />
+        {row.worst ? <WorstOf row={row} /> : null}
       </Pressable>
       <Button kind="quiet" label="Lengths" onPress={onLengths} />
     </View>
@@ -85,7 +85,7 @@ function EdgeCard({ jobId, row, onLengths }: { jobId: string; row: EdgeRow; onLe
 function Counts({ row: { counts } }: { readonly row: EdgeRow }) {
   if (!counts) return <Text tone="soft">…</Text>
   const shown = statusesIn(counts)
-  if (shown.length === 0) return <Text tone="soft">none yet</Text>
+  if (shown.length === 0) return <Text tone="soft">no check yet</Text>
   return (
     <View style={styles.counts}>
       {shown.map((status) => (

@@ -1,4 +1,5 @@
 import type { PourData } from '@wedgeline/contract'
+import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { v7 as newId } from 'uuid'
 import { colour, space } from '@/components/theme'
@@ -145,6 +146,7 @@ function SpareField({ mat, onSet }: Pick<MatFieldsProps, 'mat' | 'onSet'>) {
   const { roles } = useJobDraft()
   const session = useSession()
   const isEngineer = roles.includes('engineer')
+  const [refused, setRefused] = useState<number | null>(null)
   const name = session.state === 'in' ? session.me.person.name : null
   const by = mat.spareBy === null ? '' : ` Said by ${mat.spareBy}.`
   return (
@@ -156,8 +158,13 @@ function SpareField({ mat, onSet }: Pick<MatFieldsProps, 'mat' | 'onSet'>) {
         usual={{ range: '0', source: 'nothing counts unless somebody says so' }}
         value={Math.round(mat.spareShare * 1000) / 10}
         disabled={!isEngineer || name === null}
+        error={
+          refused === null ? undefined : `${refused} % is not between 0 and 100. ${mat.spareShare * 100} % still holds.`
+        }
         onCommit={(percent) => {
-          if (percent === null) return
+          const isOut = percent !== null && (percent < 0 || percent > 100)
+          setRefused(isOut ? percent : null)
+          if (percent === null || isOut) return
           onSet({ spareShare: percent / 100, spareBy: percent === 0 ? null : name }, 'Spare share of a mat')
         }}
       />

@@ -53,7 +53,7 @@ function PourParts({ jobId, pour }: { readonly jobId: string; readonly pour: Pou
   const firstEdge = index.edgesOfPour.get(pour.id)?.[0]
   return (
     <>
-      <Checks jobId={jobId} pourId={pour.id} result={result} failure={failure} />
+      {hasAnchors ? <Checks jobId={jobId} pourId={pour.id} result={result} failure={failure} /> : null}
       {hasAnchors ? null : (
         <Empty
           what="This pour has no anchors yet."
