@@ -74,7 +74,9 @@ async function workbookOf(first: ScheduleWorkbookInput, more: readonly ScheduleW
   }
 }
 
-const isError = ({ severity }: { readonly severity: string }): boolean => severity === 'error'
+function isError({ severity }: { readonly severity: string }): boolean {
+  return severity === 'error'
+}
 
 /** Calendar day as YYYY-MM-DD; Swedish writes it so. */
 function dayIn(timeZone: string, atMs: number): string {
