@@ -1,6 +1,6 @@
-import { basisOf } from '@wedgeline/engine/bases'
-import { alongAzimuth, edgeWedge, found, gapsOfEdge, tendonEndsOfEdge } from '@wedgeline/engine/geometry'
-import type { Anchor, Edge, EdgeFrame, LayoutIndex, LengthKind, Pan, Point, Pour, Tendon } from '@wedgeline/engine'
+import { spreadOf } from '@wedgeline/engine/bases'
+import { alongAzimuth, edgeWedge, found, gapsOfEdge, panOutline, tendonEndsOfEdge } from '@wedgeline/engine/geometry'
+import type { Anchor, Edge, EdgeFrame, LayoutIndex, LengthKind, Point, Pour, Tendon } from '@wedgeline/engine'
 
 /** What the plan of a pour draws, in mm on the ground. Nothing here knows of px. */
 export interface PlanData {
@@ -109,25 +109,12 @@ function wedgesOf(index: LayoutIndex, edge: Edge): PlanArea[] {
   const frame = found(index.frames, edge.id, 'edge')
   if (tendonEndsOfEdge(index, edge.id).length === 0) return []
   return gapsOfEdge(index, edge.id).flatMap((gap): PlanArea[] => {
-    const wedge = edgeWedge(frame, gap, { angle: spreadOf(index), startsAt: 'bearing-face' })
+    const wedge = edgeWedge(frame, gap, { angle: spreadOf(index.layout.job), startsAt: 'bearing-face' })
     if (!wedge) return []
     return [
       { id: gap.id, mark: '', outline: wedge.outline.map(({ chainage, depth }) => frame.pointAt(chainage, depth)) },
     ]
   })
-}
-
-const spreadOf = ({ layout: { job } }: LayoutIndex): number => job.settings.wedgeSpread ?? basisOf(job).spread.value
-
-/** The recess reaches from the bearing face outwards along the jack's axis. */
-function panOutline(pan: Pan): readonly Point[] {
-  const axis = alongAzimuth(pan.azimuth)
-  const half = pan.across / 2
-  const corner = (along: number, across: number): Point => ({
-    x: pan.x + along * axis.x + across * axis.y,
-    y: pan.y + along * axis.y - across * axis.x,
-  })
-  return [corner(0, -half), corner(pan.along, -half), corner(pan.along, half), corner(0, half)]
 }
 
 interface Placed {
@@ -163,7 +150,7 @@ function planAnchor(index: LayoutIndex, pour: Pour, anchor: Anchor): PlanAnchor 
   const place = placeOf(index, anchor) ?? { point: pour.outline[0] ?? { x: 0, y: 0 }, inward: { x: 0, y: 1 } }
   const { width } = found(index.hardware, anchor.hardwareId, 'hardware').plate
   const across = { x: place.inward.y, y: -place.inward.x }
-  const angle = spreadOf(index)
+  const angle = spreadOf(index.layout.job)
   const sides = ([1, -1] as const).map((way): readonly [Point, Point] => {
     const start = moved(place.point, across, (way * width) / 2)
     const direction = {

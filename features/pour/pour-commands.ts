@@ -1,4 +1,12 @@
-import type { Command, EdgeData, EdgeLineData, LayoutFile, PourData } from '@wedgeline/contract'
+import {
+  alongLine,
+  type Command,
+  type EdgeData,
+  type EdgeLineData,
+  type LayoutFile,
+  type PourData,
+} from '@wedgeline/contract'
+import { signedArea } from '@wedgeline/engine/geometry'
 import type { Change } from '../editing/draft'
 
 export interface PlanPoint {
@@ -114,26 +122,13 @@ function runsEastOrNorth(a: PlanPoint, b: PlanPoint): boolean {
   return Math.abs(dx) >= Math.abs(dy) ? dx > 0 : dy > 0
 }
 
-function chainageOn(line: EdgeLineData, point: PlanPoint): number {
-  const { along } = offsets(line, point)
-  return Math.round(along * 1000) / 1000
-}
+/** Chainage to a thousandth, so that what trigonometry leaves over is not stored. */
+const chainageOn = (line: EdgeLineData, point: PlanPoint): number =>
+  Math.round(alongLine(line, point).chainageMm * 1000) / 1000
 
-const isOn = (line: EdgeLineData, point: PlanPoint): boolean => Math.abs(offsets(line, point).across) <= ON_LINE_MM
-
-function offsets(line: EdgeLineData, point: PlanPoint): { readonly along: number; readonly across: number } {
-  const azimuth = (line.azimuthDeg * Math.PI) / 180
-  const [dx, dy] = [point.xMm - line.xMm, point.yMm - line.yMm]
-  return {
-    along: dx * Math.sin(azimuth) + dy * Math.cos(azimuth),
-    across: dx * Math.cos(azimuth) - dy * Math.sin(azimuth),
-  }
-}
+const isOn = (line: EdgeLineData, point: PlanPoint): boolean => Math.abs(alongLine(line, point).offMm) <= ON_LINE_MM
 
 function counterClockwise(outline: readonly PlanPoint[]): readonly PlanPoint[] {
-  const twiceArea = outline.reduce((sum, a, i) => {
-    const b = outline[(i + 1) % outline.length] ?? a
-    return sum + a.xMm * b.yMm - b.xMm * a.yMm
-  }, 0)
-  return twiceArea < 0 ? [...outline].reverse() : outline
+  const area = signedArea(outline.map(({ xMm, yMm }) => ({ x: xMm, y: yMm })))
+  return area < 0 ? [...outline].reverse() : outline
 }

@@ -1,4 +1,5 @@
 import type { HardwareData, PourData, SteelData, SteelShapeData, SteelZoneData } from '@wedgeline/contract'
+import { steelKey } from '@wedgeline/engine/geometry'
 
 /** The kinds of steel that may be entered at each kind of zone of an edge, with their fields and usual values. */
 
@@ -196,20 +197,6 @@ export function fieldValue(shape: SteelShapeData, key: string): string | number 
   return typeof value === 'string' || typeof value === 'number' ? value : null
 }
 
-export const zoneKey = (zone: SteelZoneData): string => {
-  switch (zone.kind) {
-    case 'anchor':
-      return `anchor:${zone.anchorId}`
-    case 'gap':
-      return `gap:${zone.edgeId}:${zone.afterAnchorId ?? 'start'}:${zone.beforeAnchorId ?? 'end'}`
-    case 'edge':
-      return `edge:${zone.edgeId}`
-    case 'pan':
-      return `pan:${zone.panId}`
-    case 'joint':
-      return `joint:${zone.jointId}`
-  }
-}
-
-export const steelOfZone = (steel: readonly SteelData[], zoneId: string): readonly SteelData[] =>
-  steel.filter(({ zone }) => zoneKey(zone) === zoneId)
+/** The sets of bars that belong to a zone. */
+export const steelOfZone = (steel: readonly SteelData[], wanted: SteelZoneData): readonly SteelData[] =>
+  steel.filter(({ zone }) => steelKey(zone) === steelKey(wanted))

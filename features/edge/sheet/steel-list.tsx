@@ -10,7 +10,7 @@ import { Text } from '@/components/ui/text'
 import { colour, space } from '@/components/theme'
 import { useJobDraft } from '../../editing/job-draft'
 import { STEEL_NAMES, steelWords } from '../steel-words'
-import { fieldValue, steelFields, steelOfZone, usualSteel, zoneKey, type Place, type SteelKind } from './steel-fields'
+import { fieldValue, steelFields, steelOfZone, usualSteel, type Place, type SteelKind } from './steel-fields'
 
 export interface SteelListProps {
   readonly zone: SteelZoneData
@@ -25,7 +25,7 @@ export interface SteelListProps {
 export function SteelList({ zone, zoneName, kinds, place, likeZones }: SteelListProps) {
   const { layout, canEdit, edit } = useJobDraft()
   const [open, setOpen] = useState<string | null>(null)
-  const steel = steelOfZone(layout.steel, zoneKey(zone))
+  const steel = steelOfZone(layout.steel, zone)
   const local = zone.kind === 'anchor' ? place.hardware?.localSteel : null
   const isLocalShown = local && !steel.some(({ shape }) => shape.kind === local.kind)
   const add = (kind: SteelKind) => {
@@ -95,7 +95,7 @@ function SteelSet(props: {
     edit({ label: `${zoneName}: remove ${name}`, commands: [{ type: 'remove', table: 'steel', id: row.id }] })
   const giveToAll = () => {
     const commands = likeZones.flatMap((zone): Command[] => {
-      const old = steelOfZone(layout.steel, zoneKey(zone)).filter(({ shape }) => shape.kind === row.shape.kind)
+      const old = steelOfZone(layout.steel, zone).filter(({ shape }) => shape.kind === row.shape.kind)
       return [
         ...old.map(({ id }): Command => ({ type: 'remove', table: 'steel', id })),
         { type: 'insert', table: 'steel', row: { ...row, id: newId(), zone } },

@@ -1,6 +1,6 @@
 import type { EdgeData, SteelZoneData } from '@wedgeline/contract'
 import type { LayoutIndex, ZoneResult } from '@wedgeline/engine'
-import { gridReference } from '@wedgeline/engine/geometry'
+import { edgeAnchorMark, gridReference } from '@wedgeline/engine/geometry'
 import { useMemo, type ReactNode } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { Button } from '@/components/ui/button'
@@ -9,7 +9,6 @@ import { space, useWide } from '@/components/theme'
 import { useJobDraft } from '../../editing/job-draft'
 import { removeAnchors } from '../anchor-commands'
 import type { StripData } from '../strip/strip-data'
-import { anchorMarkOf } from '../table/anchor-rows'
 import { AnchorDrawing } from './anchor-drawing'
 import { AnchorFields, Mends } from './anchor-fields'
 import { KINDS_OF_ZONE, type Place } from './steel-fields'
@@ -71,7 +70,7 @@ export function ZoneSheet(props: ZoneSheetProps) {
     prismMm: anchor ? prismOf(data, anchor.chainageMm) : 0,
     wedgeDepthMm: wedge?.depth ?? 0,
   }
-  const name = anchor ? anchorMarkOf(edge, anchor) : sheetTitle(props).title
+  const name = anchor ? edgeAnchorMark(edge, anchor) : sheetTitle(props).title
   const likeZones = zone.kind === 'anchor' ? otherLiveAnchors(layout.anchors, edge.id, zone.anchorId) : []
   const numbers = anchor ? (
     <AnchorFields

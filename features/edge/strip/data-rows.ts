@@ -1,3 +1,4 @@
+import { jackingForce } from '@wedgeline/engine/geometry'
 import type { LayoutIndex, ZoneResult } from '@wedgeline/engine'
 import { worstShort, worstWords } from '../../checks/words'
 import { steelWords } from '../steel-words'
@@ -87,8 +88,8 @@ function forceRow({ index, data }: RowsOf): Row {
     const tendon = index.tendons.get(index.anchors.get(end.id)?.tendonId ?? '')
     const strand = index.strandTypes.get(tendon?.strandTypeId ?? '')
     if (!tendon || !strand) return []
-    const kN = (tendon.strands * tendon.jackingRatio * strand.breakingLoad) / 1000
-    return [{ id: end.id, chainage: end.chainage, text: kN.toFixed(0) }]
+    const force = jackingForce(tendon, strand).value
+    return [{ id: end.id, chainage: end.chainage, text: (force / 1000).toFixed(0) }]
   })
   return { label: 'Jacking force, kN', cells, isPressed: false }
 }

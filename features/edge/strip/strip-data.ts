@@ -1,5 +1,15 @@
-import { basisOf } from '@wedgeline/engine/bases'
-import { anchorMark, edgeWedge, found, gapsOfEdge, placedBars, tendonEndsOfEdge } from '@wedgeline/engine/geometry'
+import { spreadOf } from '@wedgeline/engine/bases'
+import {
+  alongAzimuth,
+  anchorMark,
+  dot,
+  edgeWedge,
+  found,
+  gapsOfEdge,
+  panOutline,
+  placedBars,
+  tendonEndsOfEdge,
+} from '@wedgeline/engine/geometry'
 import type {
   AnchorEnd,
   EdgeFrame,
@@ -89,7 +99,7 @@ export function stripData(index: LayoutIndex, edgeId: string): StripData {
     ends: tendonEndsOfEdge(index, edgeId).map((end) => stripEnd(index, end)),
     bars: placedBars(index, edgeId),
     wedges: wedgesOf(index, edgeId),
-    pans: (index.pansOfPour.get(pour.id) ?? []).map((pan) => panOutline(pan, frame)),
+    pans: (index.pansOfPour.get(pour.id) ?? []).map((pan) => panOutline(pan).map((point) => frame.local(point))),
     obstructions: index.layout.obstructions
       .filter(({ levelId }) => levelId === pour.levelId)
       .map(({ outline }) => outline.map((point) => frame.local(point))),
@@ -102,7 +112,7 @@ export function stripData(index: LayoutIndex, edgeId: string): StripData {
 function wedgesOf(index: LayoutIndex, edgeId: string): readonly StripWedge[] {
   const { job } = index.layout
   const frame = found(index.frames, edgeId, 'edge')
-  const angle = job.settings.wedgeSpread ?? basisOf(job).spread.value
+  const angle = spreadOf(job)
   return gapsOfEdge(index, edgeId).flatMap((gap): StripWedge[] => {
     const wedge = edgeWedge(frame, gap, { angle, startsAt: 'bearing-face' })
     if (!wedge) return []
@@ -145,31 +155,13 @@ function localOnFace(shape: LocalShape | null): LocalOnFace | null {
   return null
 }
 
-/** The recess reaches from the bearing face outwards along the jack's axis. */
-function panOutline(
-  pan: {
-    readonly x: number
-    readonly y: number
-    readonly azimuth: number
-    readonly along: number
-    readonly across: number
-  },
-  frame: EdgeFrame,
-): Outline {
-  const [ax, ay] = [Math.sin(pan.azimuth), Math.cos(pan.azimuth)]
-  const corner = (along: number, across: number) =>
-    frame.local({ x: pan.x + along * ax + across * ay, y: pan.y + along * ay - across * ax })
-  const half = pan.across / 2
-  return [corner(0, -half), corner(pan.along, -half), corner(pan.along, half), corner(0, half)]
-}
-
 function gridCrossings(index: LayoutIndex, frame: EdgeFrame): StripData['gridCrossings'] {
   return index.layout.gridLines.flatMap(({ name, x, y, azimuth }) => {
-    const direction = { x: Math.sin(azimuth), y: Math.cos(azimuth) }
-    const square = direction.x * frame.inward.x + direction.y * frame.inward.y
+    const direction = alongAzimuth(azimuth)
+    const square = dot(direction, frame.inward)
     if (Math.abs(square) < SQUARE_ENOUGH) return []
     const { chainage, depth } = frame.local({ x, y })
-    const lean = (direction.x * frame.along.x + direction.y * frame.along.y) / square
+    const lean = dot(direction, frame.along) / square
     return [{ name, chainage: chainage - depth * lean }]
   })
 }

@@ -1,4 +1,5 @@
 import { toSi, type AnchorData, type EdgeData, type LayoutFile, type TendonData } from '@wedgeline/contract'
+import { edgeAnchorMark } from '@wedgeline/engine/geometry'
 import type { ZoneResult } from '@wedgeline/engine'
 import { worstShort, worstWords, type Worst } from '../../checks/words'
 import { steelWords } from '../steel-words'
@@ -22,9 +23,6 @@ export interface RowsOf {
   readonly results: ReadonlyMap<string, ZoneResult>
 }
 
-export const anchorMarkOf = (edge: Pick<EdgeData, 'mark'>, anchor: Pick<AnchorData, 'number'>): string =>
-  `${edge.mark}-${String(anchor.number).padStart(2, '0')}`
-
 /** The anchors of an edge by chainage, with what the table shows beside what was typed. */
 export function anchorRows({ layout, edge, results }: RowsOf): readonly AnchorRow[] {
   const tendons = new Map(layout.tendons.map((tendon) => [tendon.id, tendon]))
@@ -39,7 +37,7 @@ export function anchorRows({ layout, edge, results }: RowsOf): readonly AnchorRo
     return {
       anchor,
       tendon: tendons.get(anchor.tendonId) ?? null,
-      mark: anchorMarkOf(edge, anchor),
+      mark: edgeAnchorMark(edge, anchor),
       hardwareName: item?.name ?? '',
       fromLastMm: before ? anchor.chainageMm - before.chainageMm : null,
       steel: steelOf(layout, anchor, item?.localSteel?.kind ?? null),

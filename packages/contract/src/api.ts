@@ -6,12 +6,12 @@ import { BASES, acceptedReadingSchema, jobSettingsSchema } from './layout'
 /** Inputs of the procedures that are not layout edits. Forms and procedures read the same schema. */
 
 export const ROLES = ['detailer', 'engineer', 'drafter', 'inspector', 'admin'] as const
-export const roleSchema = z.enum(ROLES)
+const roleSchema = z.enum(ROLES)
 export type Role = (typeof ROLES)[number]
 
-export const emailSchema = z.string().trim().toLowerCase().max(254).email('must be a mail address')
+const emailSchema = z.string().trim().toLowerCase().max(254).email('must be a mail address')
 /** 8 or more, no composition rules, paste allowed (ASVS 5, 6.2). */
-export const passwordSchema = z.string().min(8, 'must have 8 characters or more').max(256)
+const passwordSchema = z.string().min(8, 'must have 8 characters or more').max(256)
 
 export const signInSchema = z.strictObject({
   email: emailSchema,

@@ -44,7 +44,7 @@ const tableSchema = z.enum(Object.keys(TABLES) as [EditableTable, ...EditableTab
 const rowSchema = z.looseObject({ id: idSchema })
 
 /** `row` and `changes` are read again by the table's own schema when the command is applied. */
-export const commandSchema = z.discriminatedUnion('type', [
+const commandSchema = z.discriminatedUnion('type', [
   z.strictObject({ type: z.literal('insert'), table: tableSchema, row: rowSchema }),
   z.strictObject({
     type: z.literal('set'),
@@ -83,7 +83,7 @@ export interface Applied {
 }
 
 /** A row, and the field of it that is meant; null for the whole of it. */
-export interface CommandPlace {
+interface CommandPlace {
   readonly table: EditableTable
   readonly id: string
   readonly field: string | null
@@ -188,7 +188,7 @@ class Draft {
  * The unit of editing that a row belongs to; it carries the version that a batch is held against: an edge, a pan, a
  * pour, a tendon (it reaches two edges, so it is a unit of its own) or the job.
  */
-export function unitOf(table: EditableTable, row: Row, anchorById: (id: string) => AnchorData | undefined): string {
+function unitOf(table: EditableTable, row: Row, anchorById: (id: string) => AnchorData | undefined): string {
   switch (table) {
     case 'pours':
     case 'edges':

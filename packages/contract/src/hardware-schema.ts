@@ -38,7 +38,7 @@ const distances = {
   edgeHeightMinMm: positive,
 }
 
-export const approvalSchema = z.strictObject({
+const approvalSchema = z.strictObject({
   reference: label(120),
   strengths: z
     .array(z.strictObject({ share, strengthMinMPa: positive.max(120), ...distances }))

@@ -1,16 +1,7 @@
-export { toSi, type Si } from './si'
-export { idSchema, label, text } from './fields'
+export { toSi } from './si'
+export { idSchema } from './fields'
+export type { SteelData, SteelShapeData, SteelZoneData } from './steel-schema'
 export {
-  localSteelSchema,
-  steelSchema,
-  steelShapeSchema,
-  steelZoneSchema,
-  type SteelData,
-  type SteelShapeData,
-  type SteelZoneData,
-} from './steel-schema'
-export {
-  approvalSchema,
   hardwareSchema,
   jackSchema,
   strandTypeSchema,
@@ -19,33 +10,11 @@ export {
   type StrandTypeData,
 } from './hardware-schema'
 export {
-  BASES,
   LAYOUT_FORMAT,
   LAYOUT_VERSION,
   LIMITS,
-  acceptedReadingSchema,
-  anchorSchema,
-  barMarkSchema,
-  concreteResultSchema,
-  cornerSchema,
-  edgeLengthSchema,
-  edgeLineSchema,
-  edgeSchema,
-  factorSchema,
-  gridLineSchema,
-  jobSchema,
   jobSettingsSchema,
-  jointSchema,
   layoutSchema,
-  levelSchema,
-  matLayerSchema,
-  obstructionSchema,
-  panSchema,
-  pointSchema,
-  pourSchema,
-  regionSchema,
-  stageSchema,
-  tendonSchema,
   toEngine,
   type AnchorData,
   type EdgeData,
@@ -53,7 +22,6 @@ export {
   type JobData,
   type LayoutFile,
   type LayoutInput,
-  type PanData,
   type PourData,
   type TendonData,
 } from './layout'
@@ -62,8 +30,6 @@ export {
   EDITABLE_TABLES,
   applyCommands,
   batchSchema,
-  commandSchema,
-  unitOf,
   type Applied,
   type Batch,
   type Command,
@@ -81,7 +47,6 @@ export {
   byJobSchema,
   byPourSchema,
   companyNameSchema,
-  emailSchema,
   importLayoutSchema,
   invitationSchema,
   invitationTokenSchema,
@@ -90,9 +55,7 @@ export {
   jobTitleSchema,
   memberSchema,
   newJobSchema,
-  passwordSchema,
   resetPasswordSchema,
-  roleSchema,
   saveHardwareSchema,
   saveJackSchema,
   saveStrandTypeSchema,
@@ -102,16 +65,6 @@ export {
   withdrawReadingSchema,
   type Role,
 } from './api'
-export {
-  LENGTH_GAP_MAX_MM,
-  OFF_LINE_MAX_MM,
-  fieldOf,
-  hardwareProblems,
-  isTimeZone,
-  layoutProblems,
-  type Path,
-  type Problem,
-  type Severity,
-} from './problems'
+export { alongLine, fieldOf, hardwareProblems, isTimeZone, layoutProblems, type Problem } from './problems'
 export { PROBLEMS_MAX, readLayout, readLayoutText, type ReadLayout } from './read-layout'
 export { ENGINE_VERSION } from './engine-version'

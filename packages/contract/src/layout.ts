@@ -16,7 +16,7 @@ export const LAYOUT_VERSION = 1
 /** Sizes that a layout may have; docs/layout-format.md names them. */
 export const LIMITS = { anchors: 20_000, pours: 200, edges: 2_000, corners: 200, steel: 60_000 } as const
 
-export const pointSchema = z.strictObject({ xMm: anywhere, yMm: anywhere })
+const pointSchema = z.strictObject({ xMm: anywhere, yMm: anywhere })
 const outline = z.array(pointSchema).min(3, 'needs three points or more').max(LIMITS.corners)
 
 export const jobSettingsSchema = z.strictObject({
@@ -38,14 +38,14 @@ export const acceptedReadingSchema = z.strictObject({
   reason: label(2000),
 })
 
-export const factorSchema = z.strictObject({
+const factorSchema = z.strictObject({
   name: label(40),
   value: z.number().positive().max(100),
   reason: label(500),
 })
 
 export const BASES = ['en-1992'] as const
-export const jobSchema = z.strictObject({
+const jobSchema = z.strictObject({
   id: idSchema,
   number: label(40),
   title: label(120),
@@ -93,14 +93,14 @@ export const obstructionSchema = z.strictObject({
   cageBars: text(60).default(''),
 })
 
-export const stageSchema = z.strictObject({
+const stageSchema = z.strictObject({
   id: idSchema,
   name: label(40),
   share,
   strengthMPa: positive.max(120),
 })
 
-export const regionSchema = z.strictObject({
+const regionSchema = z.strictObject({
   id: idSchema,
   mark: label(20),
   kind: z.enum(['edge-beam', 'band', 'drop', 'fold']),
@@ -111,7 +111,7 @@ export const regionSchema = z.strictObject({
   linkDiameterMm: notNegative.max(40),
 })
 
-export const matLayerSchema = z.strictObject({
+const matLayerSchema = z.strictObject({
   id: idSchema,
   face: z.enum(['top', 'bottom']),
   azimuthDeg: azimuth,
@@ -122,7 +122,7 @@ export const matLayerSchema = z.strictObject({
   spareBy: label(120).nullable().default(null),
 })
 
-export const cornerSchema = z.strictObject({ id: idSchema, xMm: anywhere, yMm: anywhere })
+const cornerSchema = z.strictObject({ id: idSchema, xMm: anywhere, yMm: anywhere })
 
 export const pourSchema = z.strictObject({
   id: idSchema,
@@ -142,7 +142,7 @@ export const pourSchema = z.strictObject({
   stages: z.array(stageSchema).min(1, 'needs at least one stage').max(6),
 })
 
-export const edgeLengthSchema = z.strictObject({
+const edgeLengthSchema = z.strictObject({
   id: idSchema,
   fromMm: anywhere,
   toMm: anywhere,
@@ -210,7 +210,7 @@ export const anchorSchema = z.strictObject({
   straightBehindMm: notNegative.nullable().default(null),
 })
 
-export const barMarkSchema = z.strictObject({
+const barMarkSchema = z.strictObject({
   id: idSchema,
   pourId: idSchema,
   mark: z.number().int().min(1).max(9999),
@@ -254,7 +254,6 @@ export type JobData = z.output<typeof jobSchema>
 export type PourData = z.output<typeof pourSchema>
 export type EdgeData = z.output<typeof edgeSchema>
 export type EdgeLineData = z.output<typeof edgeLineSchema>
-export type PanData = z.output<typeof panSchema>
 export type TendonData = z.output<typeof tendonSchema>
 export type AnchorData = z.output<typeof anchorSchema>
 

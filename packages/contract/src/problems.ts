@@ -11,10 +11,10 @@ import { steelProblems } from './problems/steel'
 import { stopProblems } from './problems/stops'
 import { timeZoneProblems } from './problems/time-zone'
 
-export { fieldOf, type Path, type Problem, type Severity } from './problems/problem'
+export { fieldOf, type Problem } from './problems/problem'
 export { hardwareProblems } from './problems/hardware'
 export { isTimeZone } from './problems/time-zone'
-export { LENGTH_GAP_MAX_MM, OFF_LINE_MAX_MM } from './problems/edges'
+export { alongLine } from './problems/outline'
 
 /**
  * Everything that a layout of the right shape may still have wrong. A problem that is `refused` contradicts the

@@ -27,7 +27,7 @@ type Bare<K> = K extends `${infer Name}Mm2`
           : K
 
 /** `T` with the unit taken off every name, all the way down. */
-export type Si<T> = T extends readonly (infer Item)[]
+type Si<T> = T extends readonly (infer Item)[]
   ? readonly Si<Item>[]
   : T extends object
     ? { readonly [K in keyof T as Bare<K>]: Si<T[K]> }

@@ -34,7 +34,7 @@ const hairpins = {
 }
 const layers = z.enum(['top', 'bottom', 'both'])
 
-export const steelShapeSchema = z.discriminatedUnion('kind', [
+const steelShapeSchema = z.discriminatedUnion('kind', [
   z.strictObject(spiral),
   z.strictObject(links),
   z.strictObject(hairpins),
@@ -80,7 +80,7 @@ export const localSteelSchema = z.discriminatedUnion('kind', [
   z.strictObject({ isTested, ...hairpins }),
 ])
 
-export const steelZoneSchema = z.discriminatedUnion('kind', [
+const steelZoneSchema = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('anchor'), anchorId: idSchema }),
   z.strictObject({
     kind: z.literal('gap'),

@@ -9,7 +9,7 @@ import { neighboursOf } from './neighbours'
 import type { Anchor, Edge, Hardware, Pour, StrandType, Tendon } from './model'
 
 /** Another anchor of the same row, with the distances between the two centres. */
-export interface Neighbour {
+interface Neighbour {
   readonly anchor: Anchor
   readonly hardware: Hardware
   readonly along: number

@@ -1,5 +1,6 @@
 /** Anchors so close that they act as one on the concrete: rules for a single anchor do not hold for them. */
 
+import { jackingForce } from './force'
 import type { EdgeFrame } from './frame'
 import { ROUNDING } from './geometry'
 import { found, type LayoutIndex } from './layout-index'
@@ -105,7 +106,7 @@ function clusterOf(index: LayoutIndex, anchor: Anchor): Cluster {
 function forceOf(index: LayoutIndex, anchor: Anchor): number {
   const tendon = found(index.tendons, anchor.tendonId, 'tendon')
   const strand = found(index.strandTypes, tendon.strandTypeId, 'strand type')
-  return tendon.strands * tendon.jackingRatio * strand.breakingLoad
+  return jackingForce(tendon, strand).value
 }
 
 interface ClosePair {

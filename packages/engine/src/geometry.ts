@@ -59,7 +59,7 @@ export function signedArea(outline: readonly Point[]): number {
 }
 
 /** The point of the segment from `a` to `b` nearest to `point`. */
-export function nearestOnSegment(point: Point, a: Point, b: Point): Point {
+function nearestOnSegment(point: Point, a: Point, b: Point): Point {
   const side = subtract(b, a)
   const length2 = dot(side, side)
   if (length2 === 0) return a
@@ -73,7 +73,7 @@ export function distanceToSegment(point: Point, a: Point, b: Point): number {
 }
 
 /** Whether two segments cross or touch. */
-export function segmentsMeet([a, b]: readonly [Point, Point], [c, d]: readonly [Point, Point]): boolean {
+function segmentsMeet([a, b]: readonly [Point, Point], [c, d]: readonly [Point, Point]): boolean {
   const turns = (p: Point, q: Point, r: Point) => Math.sign(cross(subtract(q, p), subtract(r, p)))
   const [c1, d1, a1, b1] = [turns(a, b, c), turns(a, b, d), turns(c, d, a), turns(c, d, b)]
   if (c1 !== d1 && a1 !== b1) return true

@@ -3,14 +3,14 @@
 import { alongAzimuth, dot, subtract } from './geometry'
 import type { GridLine, Layout, Point } from './model'
 
-export interface GridOffset {
+interface GridOffset {
   readonly line: string
   /** Square to the line, mm: positive to the east of it, or to the north of one that runs more east than north. */
   readonly offset: number
 }
 
 /** The nearest line of each of the grid's two directions, those that measure eastwards first. */
-export function gridOffsets(layout: Pick<Layout, 'gridLines'>, point: Point): GridOffset[] {
+function gridOffsets(layout: Pick<Layout, 'gridLines'>, point: Point): GridOffset[] {
   const lines = layout.gridLines.map((line) => ({ line, normal: normalOf(line) }))
   const measuresEast = ({ normal }: { readonly normal: Point }) => Math.abs(normal.x) >= Math.abs(normal.y)
   const families = [lines.filter(measuresEast), lines.filter((line) => !measuresEast(line))]

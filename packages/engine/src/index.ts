@@ -1,6 +1,5 @@
 export type * from './model'
 export type { Clause, Step, Tag } from './step'
-export { step } from './step'
 export { FAMILIES, STATUSES } from './result'
 export type {
   Advice,
@@ -17,7 +16,6 @@ export type {
   ZoneResult,
 } from './result'
 export { BAR_STANDARDS, BS_8666_2005, BS_8666_2020, barStandardById } from './schedule/bs-8666'
-export { DIMENSION_NAMES } from './schedule/bar-standards'
 export type {
   BarShape,
   BarSize,
@@ -29,28 +27,16 @@ export type {
 } from './schedule/bar-standards'
 export { cutLength, roundedShape, shapeProblems } from './schedule/cut-length'
 export type { CutLength } from './schedule/cut-length'
-export {
-  azimuthOf,
-  alongAzimuth,
-  distance,
-  distanceToSegment,
-  isInside,
-  ROUNDING,
-  selfCrossing,
-  sidesOf,
-  signedArea,
-} from './geometry'
+export { azimuthOf, alongAzimuth, distanceToSegment, isInside, selfCrossing, signedArea } from './geometry'
 export { edgeFrame, leanOf } from './frame'
-export type { EdgeFrame, LocalPoint } from './frame'
-export { found, gapId, layoutIndex, steelKey } from './layout-index'
+export type { EdgeFrame } from './frame'
+export { found, layoutIndex } from './layout-index'
 export type { LayoutIndex } from './layout-index'
-export { edgeFacedBy, gapsOfEdge, tendonEndsOfEdge } from './gaps'
+export { gapsOfEdge } from './gaps'
 export type { Gap, TendonEnd } from './gaps'
-export { anchorMark, gapName, zonesOfPour } from './zones'
-export { gridOffsets, gridReference } from './grid-reference'
-export type { GridOffset } from './grid-reference'
+export { anchorMark, zonesOfPour } from './zones'
+export { gridReference } from './grid-reference'
 export { barKey, barOfKey, typeLetterOf } from './schedule/bar-key'
-export type { TypedBar, TypeLetter } from './schedule/bar-key'
 export { barsOf } from './schedule/bars'
 export type { Member, PourBars, UnplacedSteel, ZoneBars } from './schedule/bars'
 export { newMarks, scheduleOf } from './schedule/marks'
@@ -58,23 +44,16 @@ export type { NewMark, Schedule, ScheduleProblem, ScheduleRow, ScheduleTotal } f
 export { shapeDrawing } from './schedule/shape-drawing'
 export type { DrawnPoint, ShapeDrawing } from './schedule/shape-drawing'
 export { statusOfDistance, statusOfRatio } from './status'
-export type { Comparison } from './status'
 export { boxRound, placedBars, turnsOf } from './placed'
-export type { PlacedBar, SpiralTurn } from './placed'
-export { faceClearance, plateBox, pocketBox } from './bodies'
-export type { Box } from './bodies'
-export { regionAt, sectionBehind } from './section'
-export type { Section } from './section'
+export type { PlacedBar } from './placed'
 export { BASIS_SOURCES, basisOf, factorProblems } from './bases'
 export type { Basis, BasisSource, Factor, FactorInUse, Reading } from './bases/basis'
 export { FAMILIES_OF_ZONE, checkPour } from './check-pour'
 export type { PourAsk } from './check-pour'
 export { bySeverity, worstOf } from './severity'
-export { jackingForce } from './force'
 export { edgeWedge, USUAL_SPREAD } from './wedge'
-export type { EdgeWedge, PlanPoint, WedgeSpread } from './wedge'
+export type { EdgeWedge } from './wedge'
 export { actsAsOne, closeAnchors, closeBelow } from './close-anchors'
-export type { CloseGroup } from './close-anchors'
 export { coverChecks } from './checks/cover'
 export { spacingChecks } from './checks/spacing'
 export { straightLengthChecks } from './checks/straight-length'

@@ -36,7 +36,7 @@ export interface PlacedBar {
   readonly turns: readonly SpiralTurn[]
 }
 
-export interface SpiralTurn {
+interface SpiralTurn {
   /** Middle of the turn, mm behind the bearing face. */
   readonly behind: number
   /** A flat end turn, which closes the spiral and is not counted. */

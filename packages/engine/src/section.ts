@@ -15,7 +15,7 @@ export interface Section {
 }
 
 /** The region of a pour at a place; where regions overlap the deepest, null where there is none. */
-export function regionAt(pour: Pour, point: Point): Region | null {
+function regionAt(pour: Pour, point: Point): Region | null {
   const here = pour.regions.filter((region) => isInside(point, region.outline))
   return here.sort((a, b) => b.top - b.soffit - (a.top - a.soffit))[0] ?? null
 }

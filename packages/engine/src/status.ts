@@ -4,7 +4,7 @@ import { ROUNDING } from './geometry'
 import type { Status } from './result'
 
 /** Given to a comparison; "not covered" belongs to refusals and "needs judgement" to readings. */
-export type Comparison = Extract<Status, 'stop' | 'over' | 'near' | 'within'>
+type Comparison = Extract<Status, 'stop' | 'over' | 'near' | 'within'>
 
 /**
  * Status of a distance, in mm. Distances are never near.

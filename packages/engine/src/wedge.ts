@@ -15,7 +15,7 @@ const GEOMETRY: Clause = { source: 'Geometry of spread', section: 'closed form',
 /** Where a spread of 45 degrees is assumed in place of the basis's own. */
 export const USUAL_SPREAD = Math.PI / 4
 
-export interface WedgeSpread {
+interface WedgeSpread {
   /** Angle between the tendon and the side of its spread, rad. */
   readonly angle: number
   /** Where the spread begins: at the bearing face, or at the end of the anchor device. */

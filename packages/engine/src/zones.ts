@@ -20,11 +20,16 @@ export function zonesOfPour(index: LayoutIndex, pourId: string): Zone[] {
 /** Edge and two-digit number, E6-03; an anchor in a pan takes the pan's mark. */
 export function anchorMark(index: LayoutIndex, anchor: Anchor): string {
   if (anchor.panId !== null) return found(index.pans, anchor.panId, 'pan').mark
-  return `${found(index.edges, anchor.edgeId ?? '', 'edge').mark}-${twoDigits(anchor.number)}`
+  return edgeAnchorMark(found(index.edges, anchor.edgeId ?? '', 'edge'), anchor)
+}
+
+/** The mark of an anchor at an edge by the edge's mark and the anchor's number alone. */
+export function edgeAnchorMark(edge: { readonly mark: string }, anchor: { readonly number: number }): string {
+  return `${edge.mark}-${twoDigits(anchor.number)}`
 }
 
 /** E6 gap 03 to 04; E6 gap start to 01. */
-export function gapName(index: LayoutIndex, gap: Gap): string {
+function gapName(index: LayoutIndex, gap: Gap): string {
   const { mark } = found(index.edges, gap.edgeId, 'edge')
   return `${mark} gap ${endName(index, gap.after) ?? 'start'} to ${endName(index, gap.before) ?? 'end'}`
 }

@@ -4,8 +4,8 @@ import { topProblems } from './pours'
 import { byId, mm, refused, type Path, type Problem } from './problem'
 
 /** How far the two corners of an edge may stand off its edge line, and how far its lengths may miss its ends. */
-export const OFF_LINE_MAX_MM = 5
-export const LENGTH_GAP_MAX_MM = 1
+const OFF_LINE_MAX_MM = 5
+const LENGTH_GAP_MAX_MM = 1
 
 export interface Interval {
   readonly fromMm: number
@@ -77,7 +77,7 @@ export function intervalOf(edge: EdgeData, layout: Pick<Lookup, 'pours' | 'lines
   return { fromMm: Math.min(start, end), toMm: Math.max(start, end) }
 }
 
-export interface Lookup {
+interface Lookup {
   readonly pours: ReadonlyMap<string, PourData>
   readonly lines: ReadonlyMap<string, EdgeLineData>
 }

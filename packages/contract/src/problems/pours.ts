@@ -1,5 +1,5 @@
 import type { LayoutFile, PourData } from '../layout'
-import { crossingSides, repeatedPoint, signedArea, type Spot } from './outline'
+import { areaOf, crossingSides, repeatedPoint, type Spot } from './outline'
 import { mm, refused, type Path, type Problem } from './problem'
 
 /** Outlines, thicknesses, covers, stages and mats of pours; outlines of obstructions. */
@@ -45,20 +45,19 @@ function outlineProblems(points: readonly Spot[], path: Path): Problem[] {
   }
   const crossing = crossingSides(points)
   if (!crossing) return []
-  const [i, j] = crossing
   return [
     refused(
       path,
-      `crosses itself: the side from corner ${i + 1} meets the side from corner ${j + 1}; must not touch itself`,
+      `crosses itself: the side from corner ${crossing.first + 1} meets the side from corner ${crossing.second + 1}; must not touch itself`,
     ),
   ]
 }
 
 const areaOfFirst = (points: readonly Spot[], i: number): number =>
-  signedArea([...points.slice(0, 2), ...points.slice(i, i + 1)])
+  areaOf([...points.slice(0, 2), ...points.slice(i, i + 1)])
 
 function directionProblems(points: readonly Spot[], path: Path): Problem[] {
-  if (signedArea(points) >= 0) return []
+  if (areaOf(points) >= 0) return []
   return [refused(path, 'runs clockwise; must run counter-clockwise: list the corners in the opposite order')]
 }
 

@@ -5,7 +5,7 @@ export type Path = readonly (string | number)[]
  * `refused`: the layout cannot be read or would contradict itself, and nothing of it is stored.
  * `stop`: kept as typed; the checks show it as a stop until it is changed.
  */
-export type Severity = 'refused' | 'stop'
+type Severity = 'refused' | 'stop'
 
 export interface Problem {
   readonly path: Path

@@ -1,3 +1,4 @@
+import { edgeAnchorMark } from '@wedgeline/engine/geometry'
 import type { HardwareData } from '../hardware-schema'
 import type { AnchorData, EdgeData, LayoutFile } from '../layout'
 import { intervalOf, type Interval } from './edges'
@@ -114,7 +115,7 @@ function overlapMessage(one: PlacedAnchor, other: PlacedAnchor, apart: number): 
   const inHeight = (one.plate.heightMm + other.plate.heightMm) / 2
   const raised = Math.abs(other.anchor.heightMm - one.anchor.heightMm)
   if (apart >= along || raised >= inHeight) return null
-  const name = `${one.edge.mark}-${String(one.anchor.number).padStart(2, '0')}`
+  const name = edgeAnchorMark(one.edge, one.anchor)
   return `the plate overlaps that of ${name}, ${mm(apart)} away; must be ${mm(along)} away or more`
 }
 

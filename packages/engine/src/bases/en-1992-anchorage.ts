@@ -4,7 +4,7 @@ import type { Anchorage, AnchorageInput } from './basis'
 /** EN 1992-1-1:2004, 8.4 and 8.7: how far a bar must run on before it carries its stress. */
 const ANCHORAGE: Clause = { source: 'EN 1992-1-1:2004', section: '8.4.2 to 8.4.4', tag: 'digest' }
 
-export interface BondFactors {
+interface BondFactors {
   readonly gammaC: number
   readonly alphaCt: number
 }

@@ -12,7 +12,12 @@ export function basisOf(job: Pick<Job, 'basis' | 'factors' | 'readings' | 'setti
   return source.make({ factors: job.factors, readings: job.readings, fyk: job.settings.fyk })
 }
 
-export interface FactorProblem {
+/** Angle at which force spreads from a plate for edge wedges, rad: the job's own, otherwise that of its basis. */
+export function spreadOf(job: Job): number {
+  return job.settings.wedgeSpread ?? basisOf(job).spread.value
+}
+
+interface FactorProblem {
   /** Place among the job's factors, and which part of it is wrong. */
   readonly at: number
   readonly part: 'name' | 'value'

@@ -84,7 +84,7 @@ function holeArea({ hole }: Hardware): number {
  * Width and height that the supporting area may take up round the plate's centre: the section, other faces,
  * and a fair share of the distance to each neighbour, beside or above, whichever of the two leaves more.
  */
-export function freeSpread(site: AnchorSite): { readonly width: number; readonly height: number } {
+function freeSpread(site: AnchorSite): { readonly width: number; readonly height: number } {
   const { plate } = site.hardware
   const side = site.sideFace
   let width = side ? 2 * side.distance : 3 * plate.width

@@ -5,7 +5,7 @@ import { statusOfDistance } from '../status'
 import type { Step } from '../step'
 import { comparison } from './outcome'
 
-export interface DistanceCheck extends Pick<
+interface DistanceCheck extends Pick<
   Compared,
   'zoneId' | 'family' | 'name' | 'stage' | 'limitKind' | 'clause' | 'notes'
 > {

@@ -46,7 +46,7 @@ export interface Crossings {
 }
 
 /** The set does not cross the plane: why, in a sentence; null where it stands elsewhere and nobody would ask. */
-export interface NoCrossing {
+interface NoCrossing {
   readonly reason: string | null
 }
 

@@ -9,7 +9,7 @@ export function handSteelOf(index: LayoutIndex, anchorId: string): readonly Stee
   return (index.steelOfZone.get(steelKey({ kind: 'anchor', anchorId })) ?? []).map(({ shape }) => shape)
 }
 
-export interface SteelOfAnchor {
+interface SteelOfAnchor {
   readonly shapes: readonly SteelShape[]
   readonly notes: readonly string[]
 }
