@@ -2,7 +2,7 @@ import { fieldOf, hardwareProblems, type HardwareData, type JackData, type Stran
 import { write, type Connection } from '../db/client'
 import { recheckJob } from './checking'
 import { refused } from './failure'
-import { stampOf, type CompanyCall } from './job-call'
+import { stampOf } from './job-call'
 import { recordAudit } from './stores/audit'
 import {
   hardwareOf,
@@ -14,6 +14,7 @@ import {
 } from './stores/hardware'
 import { jobsUsing } from './stores/result'
 import { storing } from './storing'
+import type { CompanyCall } from './trpc/context'
 
 /** Storing what the company presses and bears on; every job that uses it is checked again. */
 

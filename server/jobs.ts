@@ -3,7 +3,7 @@ import { BASIS_SOURCES, STATUSES, factorProblems, type PourResult } from '@wedge
 import { write, type Connection } from '../db/client'
 import { recheckJob } from './checking'
 import { conflict, missing, refused } from './failure'
-import { keyOf, stampOf, type CompanyCall, type JobCall } from './job-call'
+import { keyOf, stampOf } from './job-call'
 import { companyAccess } from './stores/access'
 import { recordAudit } from './stores/audit'
 import { companyById } from './stores/company'
@@ -22,6 +22,7 @@ import {
 import type { JobKey } from './stores/job-key'
 import { membersOf } from './stores/person'
 import { acceptedReadingIds, anchorCounts, pourSummaries } from './stores/result'
+import type { CompanyCall, JobCall } from './trpc/context'
 
 type Counts = PourResult['counts']
 

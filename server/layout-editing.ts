@@ -23,7 +23,8 @@ import { loadLayout, loadVersions, type Versions } from './stores/layout'
 import { storeChange } from './stores/layout-write'
 import { areChecked, markOvertaken } from './stores/result'
 import { storing } from './storing'
-import { keyOf, stampOf, type JobCall } from './job-call'
+import { keyOf, stampOf } from './job-call'
+import type { JobCall } from './trpc/context'
 
 export interface BatchAnswer extends Checked {
   /** Today's version of each unit that the batch touched; 0 for one that is gone. */

@@ -2,9 +2,10 @@ import { BASIS_SOURCES } from '@wedgeline/engine'
 import { write } from '../db/client'
 import { recheckJob } from './checking'
 import { conflict, missing, refused } from './failure'
-import { keyOf, stampOf, type JobCall } from './job-call'
+import { keyOf, stampOf } from './job-call'
 import { recordAudit } from './stores/audit'
 import { deleteReading, insertReading, jobRow, readingsOf } from './stores/job'
+import type { JobCall } from './trpc/context'
 
 /**
  * Accepts a reading of the job's basis in the caller's name and checks every pour again.

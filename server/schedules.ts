@@ -12,12 +12,13 @@ import {
 import { write, type Connection } from '../db/client'
 import { ScheduleBlockedError, scheduleWorkbook } from './exports/workbook'
 import { missing, refused } from './failure'
-import { keyOf, stampOf, type JobCall } from './job-call'
+import { keyOf, stampOf } from './job-call'
 import { recordAudit } from './stores/audit'
 import { insertBarMarks } from './stores/bar-mark'
 import { insertFile } from './stores/file'
 import type { JobKey } from './stores/job-key'
 import { loadLayout } from './stores/layout'
+import type { JobCall } from './trpc/context'
 
 const XLSX = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet'
 

@@ -62,26 +62,29 @@ function writeHeader(sheet: SheetWriter, input: ScheduleWorkbookInput): void {
   const { job, pour } = input
   sheet.put(1, 1, { value: 'Bar schedule', style: { isBold: true, size: 14 } })
   const pairs: readonly (readonly [number, number, string, string])[] = [
-    [1, 7, 'Status', statusLine(input)],
+    [1, 8, 'Status', statusLine(input)],
     [2, 1, 'Job', `${job.number} ${job.title}`],
-    [2, 7, 'Schedule reference', input.reference],
+    [2, 8, 'Schedule ref.', input.reference],
     [3, 1, 'Pour', `${pour.mark} ${pour.title}`.trim()],
-    [3, 7, 'Drawing', input.drawing],
+    [3, 8, 'Drawing', input.drawing],
     [4, 1, 'Prepared by', input.preparedBy],
-    [4, 7, 'Date prepared', input.preparedOn],
+    [4, 8, 'Date prepared', input.preparedOn],
     [5, 1, 'Checked by', input.checkedBy ?? 'not yet'],
-    [5, 7, 'Units', 'mm, kg'],
+    [5, 8, 'Units', 'mm, kg'],
   ]
   for (const [row, column, name, value] of pairs) {
     sheet.put(row, column, { value: name, style: { isBold: true } })
-    sheet.put(row, column === 1 ? 3 : 10, { value })
+    sheet.put(row, column + 2, { value })
   }
   const open = notYetChecked(input).map(({ family }) => familyWords(family))
-  sheet.put(6, 1, { value: editionLine(input) })
-  sheet.put(7, 1, {
-    value: open.length > 0 ? `Not yet checked: ${open.join(', ')}.` : 'See Checks for what was checked.',
-  })
-  sheet.put(8, 1, { value: CAUTIONS.join(' ') })
+  const lines = [
+    editionLine(input),
+    open.length > 0 ? `Not yet checked: ${open.join(', ')}.` : 'See Checks for what was checked.',
+    CAUTIONS.join(' '),
+  ]
+  lines.forEach((value, k) =>
+    sheet.put(6 + k, 1, { value, style: { isWrapped: true, align: 'left' }, across: COLUMNS.length }),
+  )
 }
 
 function tableRow(row: ScheduleRow, at: number): readonly CellValue[] {

@@ -29,9 +29,6 @@ export interface MemberKey {
 
 const columns = { id: person.id, name: person.name, email: person.email }
 
-export const personById = (db: Connection, id: string): PersonRow | undefined =>
-  db.select(columns).from(person).where(eq(person.id, id)).get()
-
 /** The person and the password's hash, for checking it and for nothing else. */
 export const credentialsByEmail = (db: Connection, email: string) =>
   db
