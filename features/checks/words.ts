@@ -1,3 +1,4 @@
+import { FAMILY_WORDS } from '@wedgeline/engine/result'
 import type { Check, Clause, Compared, Family, Status, ZoneResult } from '@wedgeline/engine'
 
 /** How checks read on screen; the same words everywhere. */
@@ -78,27 +79,6 @@ export const TAG_WORDS = {
 export function clauseText({ source, section, tag }: Clause): string {
   const sure = TAG_WORDS[tag]
   return `${source}, ${section}${sure ? ` (${sure})` : ''}`
-}
-
-/** Families of checks as people call them. */
-export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
-  bearing: 'bearing',
-  'bursting-thickness': 'bursting in the thickness',
-  'bursting-plan': 'bursting in plan',
-  spalling: 'spalling and edge tension',
-  'depth-change': 'depth change',
-  cover: 'cover to the anchor',
-  spacing: 'spacing and edge distance',
-  'straight-length': 'straight length',
-  'edge-wedge': 'edge wedge',
-  joint: 'construction joint',
-  'pan-access': 'pan access',
-  'pan-bars': 'pan bars',
-  tendon: 'tendon',
-  'dead-end': 'dead end',
-  precompression: 'precompression',
-  fit: 'steel fits',
-  anchorage: 'anchorage and laps',
 }
 
 /** A zone's worst check as short as a strip needs it: bursting in plan 2.58; cover, short 30. */

@@ -40,16 +40,9 @@ export interface PageSetup {
   readonly footer: string
 }
 
-export interface PlacedCell {
-  readonly value: CellValue
-  readonly style?: CellStyle
-  /** Columns that a long text runs across, joined into one cell. */
-  readonly across?: number
-}
-
 export interface SheetWriter {
   /** Columns and rows count from 1. */
-  put(row: number, column: number, cell: PlacedCell): void
+  put(row: number, column: number, cell: { readonly value: CellValue; readonly style?: CellStyle }): void
   table(block: TableBlock): void
   widths(widths: readonly number[]): void
   freeze(rows: number): void

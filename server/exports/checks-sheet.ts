@@ -1,6 +1,6 @@
-import { BASIS_SOURCES, STATUSES, type Check, type Status, type ZoneResult } from '@wedgeline/engine'
+import { BASIS_SOURCES, FAMILY_WORDS, STATUSES, type Check, type Status, type ZoneResult } from '@wedgeline/engine'
 import type { BookWriter, CellValue, Column } from './book-writer'
-import { familyWords, notYetChecked, STATUS_WORDS, statusLine } from './wording'
+import { notYetChecked, STATUS_WORDS, statusLine } from './wording'
 import type { WorkbookPart } from './workbook'
 
 /** What an engineer must see before the bars are ordered. */
@@ -54,7 +54,7 @@ export function writeChecks(book: BookWriter, input: WorkbookPart): void {
         { title: 'Not yet checked', width: 22 },
         { title: 'Zones that it would apply to', width: 30, style: { align: 'left', format: '0' } },
       ],
-      rows: open.map(({ family, zones }) => [familyWords(family), zones]),
+      rows: open.map(({ family, zones }) => [FAMILY_WORDS[family], zones]),
     })
   } else {
     sheet.put(below, 1, { value: 'Every family of checks that applies was made.' })

@@ -23,18 +23,10 @@ export function excelBook(properties: BookProperties): BookWriter {
   }
 }
 
-/** Columns that a text runs across, by the address of its cell. */
-type Spans = Map<string, number>
-
 function sheetWriter(sheet: ExcelJS.Worksheet): SheetWriter {
-  const spans: Spans = new Map()
   return {
-    put(row, column, { value, style, across }) {
+    put(row, column, { value, style }) {
       const cell = sheet.getCell(row, column)
-      if (across !== undefined) {
-        sheet.mergeCells(row, column, row, column + across - 1)
-        spans.set(cell.address, across)
-      }
       cell.value = cellValue(value)
       styled(cell, style)
     },
@@ -57,7 +49,7 @@ function sheetWriter(sheet: ExcelJS.Worksheet): SheetWriter {
       // The library puts a dollar before each letter alone; an area with rows that shift is not taken everywhere.
       const printArea = area.replaceAll(/\d+/g, (row) => `$${row}`)
       Object.assign(sheet.pageSetup, pageSetup, { printArea, printTitlesRow: titleRows })
-      fitRows(sheet, spans)
+      fitRows(sheet)
       // An ampersand begins a code in a footer; two of them print one.
       sheet.headerFooter.oddFooter = `&L${footer.replaceAll('&', '&&')}&RPage &P of &N`
     },
@@ -69,13 +61,12 @@ const LINE_PT = 15
 const PER_DIGIT = { plain: 1.1, bold: 0.95 } as const
 
 /** Rows as high as their wrapped texts need: not every program works that out when it opens a file. */
-function fitRows(sheet: ExcelJS.Worksheet, spans: Spans): void {
+function fitRows(sheet: ExcelJS.Worksheet): void {
   sheet.eachRow((row) => {
     let lines = 1
     row.eachCell((cell) => {
       if (cell.alignment?.wrapText !== true || typeof cell.value !== 'string') return
-      const columns = Array.from({ length: spans.get(cell.address) ?? 1 }, (_, k) => Number(cell.col) + k)
-      const width = columns.reduce((sum, column) => sum + (sheet.getColumn(column).width ?? 9), -1)
+      const width = (sheet.getColumn(Number(cell.col)).width ?? 9) - 1
       lines = Math.max(lines, linesOf(cell.value, width * (cell.font?.bold ? PER_DIGIT.bold : PER_DIGIT.plain)))
     })
     if (lines === 1) return

@@ -1,6 +1,6 @@
-import type { ScheduleRow, Step } from '@wedgeline/engine'
+import { FAMILY_WORDS, type ScheduleRow, type Step } from '@wedgeline/engine'
 import { columnLetter, onSheet, type BookWriter, type CellValue, type Column, type SheetWriter } from './book-writer'
-import { CAUTIONS, editionLine, familyWords, notYetChecked, statusLine } from './wording'
+import { CAUTIONS, editionLine, notYetChecked, statusLine } from './wording'
 import type { ScheduleWorkbookInput, WorkbookPart } from './workbook'
 
 /** Columns of a BS 8666 schedule, left to right (from memory). */
@@ -76,15 +76,20 @@ function writeHeader(sheet: SheetWriter, input: ScheduleWorkbookInput): void {
     sheet.put(row, column, { value: name, style: { isBold: true } })
     sheet.put(row, column + 2, { value })
   }
-  const open = notYetChecked(input).map(({ family }) => familyWords(family))
-  const lines = [
-    editionLine(input),
-    open.length > 0 ? `Not yet checked: ${open.join(', ')}.` : 'See Checks for what was checked.',
-    CAUTIONS.join(' '),
-  ]
-  lines.forEach((value, k) =>
-    sheet.put(6 + k, 1, { value, style: { isWrapped: true, align: 'left' }, across: COLUMNS.length }),
-  )
+  const open = notYetChecked(input).map(({ family }) => FAMILY_WORDS[family])
+  const families = open.length > 0 ? `Not yet checked: ${open.join(', ')}.` : 'See Checks for what was checked.'
+  sheet.put(6, 1, { value: [editionLine(input), ...CAUTIONS].join(' '), style: { size: 8 } })
+  twoLines(families).forEach((value, k) => sheet.put(7 + k, 1, { value, style: { size: 9 } }))
+}
+
+/** Letters of the small size that the print is wide. */
+const LINE_LETTERS = 148
+
+/** A text in one or two cells, none joined, so that the print does not cut it. */
+function twoLines(text: string): readonly string[] {
+  if (text.length <= LINE_LETTERS) return [text]
+  const at = text.lastIndexOf(' ', LINE_LETTERS)
+  return [text.slice(0, at), text.slice(at + 1)]
 }
 
 function tableRow(row: ScheduleRow, at: number): readonly CellValue[] {

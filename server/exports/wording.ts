@@ -18,8 +18,6 @@ export const STATUS_WORDS: Readonly<Record<Status, string>> = {
 export const statusLine = ({ approval }: ScheduleWorkbookInput): string =>
   approval ? `APPROVED by ${approval.by} on ${approval.on}` : 'DRAFT: NOT FOR CONSTRUCTION'
 
-export const familyWords = (family: Family): string => family.replaceAll('-', ' ')
-
 export const editionLine = ({ schedule }: ScheduleWorkbookInput): string =>
   `Shapes, dimensions and lengths follow ${schedule.edition}. Its tables were not read in the original print: see Notes.`
 

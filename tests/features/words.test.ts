@@ -76,7 +76,7 @@ describe('checks in words', () => {
   })
 
   test('families not yet checked make one sentence', () => {
-    expect(notYetText(['spalling', 'fit'])).toBe('Not yet checked here: spalling and edge tension, steel fits.')
+    expect(notYetText(['spalling', 'fit'])).toBe('Not yet checked here: spalling and edge tension, fit of the steel.')
     expect(notYetText([])).toBeNull()
   })
 })

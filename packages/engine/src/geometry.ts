@@ -23,6 +23,7 @@ export const distance = (a: Point, b: Point): number => Math.hypot(b.x - a.x, b.
 /** `a` turned by a quarter counter-clockwise. */
 export const turnedLeft = (a: Point): Point => ({ x: -a.y, y: a.x })
 
+/** The vector of length 1 in the direction of `a`. @throws where `a` has no length. */
 export function unit(a: Point): Point {
   const length = Math.hypot(a.x, a.y)
   if (length === 0) throw new Error('A vector without length has no direction.')

@@ -1,6 +1,6 @@
 export type * from './model'
 export type { Clause, Step, Tag } from './step'
-export { FAMILIES, STATUSES } from './result'
+export { FAMILIES, FAMILY_WORDS, STATUSES } from './result'
 export type {
   Advice,
   Check,

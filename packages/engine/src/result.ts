@@ -22,6 +22,27 @@ export const FAMILIES = [
 ] as const
 export type Family = (typeof FAMILIES)[number]
 
+/** Families of checks as people call them, on screens and in workbooks. */
+export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
+  bearing: 'bearing',
+  'bursting-thickness': 'bursting in the thickness',
+  'bursting-plan': 'bursting in plan',
+  spalling: 'spalling and edge tension',
+  'depth-change': 'depth change',
+  cover: 'cover to the anchor',
+  spacing: 'spacing and edge distance',
+  'straight-length': 'straight length',
+  'edge-wedge': 'edge wedge',
+  joint: 'construction joint',
+  'pan-access': 'pan access',
+  'pan-bars': 'pan bars',
+  tendon: 'tendon',
+  'dead-end': 'dead end',
+  precompression: 'precompression',
+  fit: 'fit of the steel',
+  anchorage: 'anchorage and laps',
+}
+
 /** Worst first is the order of severity in `STATUSES`. */
 export const STATUSES = ['stop', 'not-covered', 'over', 'needs-judgement', 'near', 'within'] as const
 export type Status = (typeof STATUSES)[number]

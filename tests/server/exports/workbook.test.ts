@@ -261,8 +261,8 @@ describe('Schedule sheet', () => {
     expect(sheet.getCell('C4').value).toBe('D. Rafter (invented)')
     expect(sheet.getCell('J4').value).toBe('2026-03-02')
     expect(sheet.getCell('A6').value).toContain('BS 8666:2020')
-    expect(sheet.getCell('A7').value).toBe('Not yet checked: fit, spalling.')
-    expect(sheet.getCell('A8').value).toContain('do not replace one')
+    expect(sheet.getCell('A6').value).toContain('do not replace one')
+    expect(sheet.getCell('A7').value).toBe('Not yet checked: fit of the steel, spalling and edge tension.')
     const approved = await readBack({ approval: { by: 'E. Ngineer (invented)', on: '2026-03-03' } })
     expect(sheetOf(approved, 'Schedule').getCell('J1').value).toBe('APPROVED by E. Ngineer (invented) on 2026-03-03')
   })
@@ -320,8 +320,8 @@ describe('Checks and Notes sheets', () => {
     expect(sheet.getCell('L7').value).toBe('EN 1992-1-1 6.7')
     expect([9, 10, 11].map((at) => [sheet.getCell(at, 1).value, sheet.getCell(at, 2).value])).toEqual([
       ['Not yet checked', 'Zones that it would apply to'],
-      ['fit', 1],
-      ['spalling', 0],
+      ['fit of the steel', 1],
+      ['spalling and edge tension', 0],
     ])
   })
 

@@ -24,6 +24,7 @@ function problemsOf(pour: PourData, path: Path): Problem[] {
   ]
 }
 
+/** A length or region whose top does not stand above its soffit. */
 export function topProblems({ topMm, soffitMm }: { topMm: number; soffitMm: number }, path: Path): Problem[] {
   if (topMm > soffitMm) return []
   return [refused([...path, 'topMm'], `${mm(topMm)} is not above the soffit at ${mm(soffitMm)}; must be higher`)]

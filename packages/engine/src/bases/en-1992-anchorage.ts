@@ -15,6 +15,7 @@ const STRENGTH_FOR_BOND_MAX = 60
 /** In sections up to this depth all bars lie in good bond (8.4.2(2), Fig. 8.2; from memory), mm. */
 const GOOD_BOND_DEPTH_MAX = 250
 
+/** Whether every bar of a section `depth` mm deep lies in good bond (8.4.2(2), Fig. 8.2; from memory). */
 export const isGoodBond = (depth: number): boolean => depth <= GOOD_BOND_DEPTH_MAX
 
 /** Mean tensile strength, MPa (Table 3.1). */

@@ -92,6 +92,7 @@ const twiceNearer = (meaning: string, { before, after }: Sides): Step =>
     (v) => 2 * Math.min(v.before, v.after),
   )
 
+/** What a reader must know of a prism in plan: a wide gap or the end of the edge that sets it, and what a row would give. */
 export function planNotes(site: AnchorSite, prism: Prism): readonly string[] {
   const { before, after } = sidesOf(site)
   const [smaller, larger] = [Math.min(before, after), Math.max(before, after)]

@@ -20,6 +20,7 @@ export interface TypedBar {
   readonly shape: BarShape
 }
 
+/** The key of a bar: equal for bars that are the same in the yard, and readable by `barOfKey`. */
 export function barKey({ letter, shape }: TypedBar): string {
   const words = [`${letter}${shape.diameter}`, shape.code]
   for (const name of DIMENSION_NAMES) {

@@ -87,8 +87,10 @@ export interface ShapeProblem {
   readonly message: string
 }
 
+/** A bar size by its nominal diameter, mm; undefined where the standard does not list it. */
 export const sizeOf = (standard: BarStandard, diameter: number): BarSize | undefined =>
   standard.sizes.find((size) => size.diameter === diameter)
 
+/** A shape's rule by its code; undefined where the standard does not list it. */
 export const shapeRuleOf = (standard: BarStandard, code: string): ShapeRule | undefined =>
   standard.shapes.find((rule) => rule.code === code)

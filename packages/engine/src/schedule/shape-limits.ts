@@ -9,6 +9,7 @@ const FROM_RADIUS: Clause = { source: 'BS 8666:2005', section: 'Table 2, from th
 
 type Bound = ShapeLimit['bound']
 
+/** A dimension that must be a bound (mm) or more; Table 3. */
 export const atLeast = (field: DimensionName, bound: Bound, because: string): ShapeLimit => ({
   field,
   side: 'at-least',
@@ -18,6 +19,7 @@ export const atLeast = (field: DimensionName, bound: Bound, because: string): Sh
   clause: TABLE_3,
 })
 
+/** A dimension that must be a bound (mm) or less; Table 3. */
 export const atMost = (field: DimensionName, bound: Bound, because: string): ShapeLimit => ({
   field,
   side: 'at-most',
@@ -29,12 +31,14 @@ export const atMost = (field: DimensionName, bound: Bound, because: string): Sha
 
 const by = (clause: Clause, limit: ShapeLimit): ShapeLimit => ({ ...limit, clause })
 
+/** The end past a bend: P of Table 2 or more. */
 export const endAtLeast = (field: DimensionName): ShapeLimit =>
   by(
     TABLE_2,
     atLeast(field, (v) => v.size.endMin, 'the shortest end past a bend'),
   )
 
+/** Overall between two bends: the smallest of Table 2 or more. */
 export const betweenBends = (field: DimensionName): ShapeLimit =>
   by(
     TABLE_2,
