@@ -146,6 +146,7 @@ function SpareField({ mat, onSet }: Pick<MatFieldsProps, 'mat' | 'onSet'>) {
   const { roles } = useJobDraft()
   const session = useSession()
   const isEngineer = roles.includes('engineer')
+  const share = Math.round(mat.spareShare * 1000) / 10
   const [refused, setRefused] = useState<number | null>(null)
   const name = session.state === 'in' ? session.me.person.name : null
   const by = mat.spareBy === null ? '' : ` Said by ${mat.spareBy}.`
@@ -156,11 +157,9 @@ function SpareField({ mat, onSet }: Pick<MatFieldsProps, 'mat' | 'onSet'>) {
         unit="%"
         hint={`${isEngineer ? 'Kept with your name.' : 'An engineer of this job sets it.'}${by}`}
         usual={{ range: '0', source: 'nothing counts unless somebody says so' }}
-        value={Math.round(mat.spareShare * 1000) / 10}
+        value={refused ?? share}
         disabled={!isEngineer || name === null}
-        error={
-          refused === null ? undefined : `${refused} % is not between 0 and 100. ${mat.spareShare * 100} % still holds.`
-        }
+        error={refused === null ? undefined : `${refused} % is not between 0 and 100. ${share} % still holds.`}
         onCommit={(percent) => {
           const isOut = percent !== null && (percent < 0 || percent > 100)
           setRefused(isOut ? percent : null)

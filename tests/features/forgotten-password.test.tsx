@@ -46,7 +46,7 @@ test('a new password is taken; a refused one says why beside the field', async (
   }
   const { calls } = renderOver(answers, <ResetScreen token={TOKEN} />)
   await userEvent.type(screen.getByLabelText('Password'), 'short{Enter}')
-  expect(await screen.findByText('must have 8 characters or more')).toBeTruthy()
+  expect(await screen.findByText('It must have 8 characters or more.')).toBeTruthy()
   await expectAccessible()
   await userEvent.clear(screen.getByLabelText('Password'))
   await userEvent.type(screen.getByLabelText('Password'), 'seven quiet lanterns{Enter}')

@@ -68,7 +68,7 @@ test('a failure is read as a sentence, fields and a time to wait', () => {
   expect(failureOf(new TypeError('fetch failed'))).toMatchObject({ code: 'unreachable', fields: {} })
   expect(isAnswer(new TypeError('fetch failed'))).toBe(false)
   const bad = answered('BAD_REQUEST', { fields: { email: ['must be a mail address', 'second'] }, problem: null })
-  expect(failureOf(bad)).toMatchObject({ code: 'BAD_REQUEST', fields: { email: 'must be a mail address' } })
+  expect(failureOf(bad)).toMatchObject({ code: 'BAD_REQUEST', fields: { email: 'It must be a mail address.' } })
   const wrong = answered('BAD_REQUEST', { problem: { table: null, id: null, field: 'password', message: 'Wrong.' } })
   expect(failureOf(wrong).fields).toEqual({ password: 'Wrong.' })
   expect(failureOf(answered('TOO_MANY_REQUESTS', { retryAfterS: 8 })).retryAfterS).toBe(8)
