@@ -7,6 +7,7 @@ import { v7 as uuidv7 } from 'uuid'
 import { ENGINE_VERSION, applyCommands, type Command, type LayoutFile } from '@wedgeline/contract'
 import { openDatabase } from '@/db/client'
 import { checkStored, recheckOutdated } from '@/server/checking'
+import { batchFor, failure, first, setAnchor, type Seen } from './batches'
 import { companyOn, openTestCompany, type Caller, type TestCompany } from './company'
 import { sampleLayout } from './layout-sample'
 
@@ -24,39 +25,7 @@ async function openJob(): Promise<void> {
 beforeEach(openJob)
 
 const load = () => detailer.layout.byJob({ jobId })
-const first = <T>(rows: readonly T[]): T => {
-  const [row] = rows
-  if (row === undefined) throw new Error('the sample has a row here')
-  return row
-}
-const setAnchor = (id: string, changes: Record<string, unknown>): Command => ({
-  type: 'set',
-  table: 'anchors',
-  id,
-  changes,
-})
-
-/** A batch on the versions that `seen` shows. */
-function batchOf(seen: { layout: LayoutFile; versions: Readonly<Record<string, number>> }, commands: Command[]) {
-  const { units } = applyCommands(seen.layout, commands)
-  const bases = Object.fromEntries(units.map((unit) => [unit, seen.versions[unit] ?? 0]))
-  return { id: uuidv7(), jobId, bases, commands }
-}
-
-/** What a refused call carries; null when it was taken. */
-async function failure(call: Promise<unknown>) {
-  const error = await call.then(
-    () => null,
-    (reason: unknown) => reason,
-  )
-  if (error === null) return null
-  const { code, message, cause } = error as {
-    code: string
-    message: string
-    cause?: { details?: Record<string, unknown> } & Record<string, unknown>
-  }
-  return { code, message, details: cause?.details ?? {}, field: cause?.field, table: cause?.table }
-}
+const batchOf = (seen: Seen, commands: Command[]) => batchFor(jobId, seen, commands)
 
 describe('a batch', () => {
   test('is stored and counts its units up', async () => {
