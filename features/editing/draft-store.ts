@@ -14,7 +14,7 @@ import {
   type Unsaved,
 } from './draft'
 
-/** What the store needs from outside: the wire, storage that outlives the tab, ids and a clock. */
+/** What the store needs from outside: the wire, storage that outlives the tab, ids and a timer. */
 export interface DraftPorts {
   load(): Promise<{ readonly layout: LayoutFile; readonly versions: Readonly<Record<string, number>> }>
   /** Sends a batch whole. A stale one answers with conflicts; a failing wire throws. */

@@ -29,6 +29,7 @@ export interface Change {
 
 const UNDO_LEVELS = 200
 
+/** A draft of a layout as the server sent it, with nothing unsent. */
 export function openDraft(loaded: Pick<Draft, 'jobId' | 'versions'> & { readonly layout: LayoutFile }): Draft {
   const { jobId, versions, layout } = loaded
   return { jobId, versions, base: layout, layout, sending: null, unsent: [], undo: [], redo: [], conflicts: [] }
@@ -56,29 +57,25 @@ function withoutOverwritten(unsent: readonly Command[], next: readonly Command[]
 const sameFields = (a: Readonly<Record<string, unknown>>, b: Readonly<Record<string, unknown>>): boolean =>
   Object.keys(a).sort().join() === Object.keys(b).sort().join()
 
-export function undo(draft: Draft): Draft {
-  const last = draft.undo.at(-1)
-  if (!last) return draft
-  const { layout, inverse } = applyCommands(draft.layout, last.commands)
-  return {
-    ...draft,
-    layout,
-    unsent: [...draft.unsent, ...last.commands],
-    undo: draft.undo.slice(0, -1),
-    redo: [...draft.redo, { label: last.label, commands: inverse }],
-  }
-}
+/** Takes the last change back; the same draft where there is none. */
+export const undo = (draft: Draft): Draft => stepBack(draft, 'undo', 'redo')
 
-export function redo(draft: Draft): Draft {
-  const last = draft.redo.at(-1)
+/** Makes the change that was taken back last again; the same draft where there is none. */
+export const redo = (draft: Draft): Draft => stepBack(draft, 'redo', 'undo')
+
+type Way = 'undo' | 'redo'
+
+/** Applies the last change of one list and puts its inverse on the other. */
+function stepBack(draft: Draft, from: Way, to: Way): Draft {
+  const last = draft[from].at(-1)
   if (!last) return draft
   const { layout, inverse } = applyCommands(draft.layout, last.commands)
   return {
     ...draft,
     layout,
     unsent: [...draft.unsent, ...last.commands],
-    redo: draft.redo.slice(0, -1),
-    undo: [...draft.undo, { label: last.label, commands: inverse }],
+    [from]: draft[from].slice(0, -1),
+    [to]: [...draft[to], { label: last.label, commands: inverse }],
   }
 }
 

@@ -19,6 +19,7 @@ export interface EdgeRow {
   readonly worst: (Worst & { readonly zoneId: string; readonly zoneName: string }) | null
 }
 
+/** The edges of a pour; counts and worst check are null until there is a result. */
 export function edgeRows(index: LayoutIndex, pourId: string, result: PourResult | null): readonly EdgeRow[] {
   return (index.edgesOfPour.get(pourId) ?? []).map((edge) => {
     const frame = found(index.frames, edge.id, 'edge')

@@ -53,6 +53,7 @@ export interface PlanAnchor {
 /** How much of a tendon with an open end is drawn, mm. */
 const STUB = 2500
 
+/** The plan of one pour. @throws where the pour or what it refers to is not in the layout. */
 export function planData(index: LayoutIndex, pourId: string): PlanData {
   const pour = found(index.pours, pourId, 'pour')
   const edges = index.edgesOfPour.get(pourId) ?? []

@@ -13,6 +13,7 @@ export interface Stamp {
   readonly atMs: number
 }
 
+/** Columns of a row that is stored for the first time. */
 export const created = ({ personId, atMs }: Stamp) => ({
   createdAtMs: atMs,
   createdBy: personId,
@@ -20,9 +21,11 @@ export const created = ({ personId, atMs }: Stamp) => ({
   updatedBy: personId,
 })
 
+/** Columns of a row that is stored again. */
 export const updated = ({ personId, atMs }: Stamp) => ({ updatedAtMs: atMs, updatedBy: personId })
 
 export type JobTable = SQLiteTable & { companyId: SQLiteColumn; jobId: SQLiteColumn }
 
+/** Condition for the rows of one job of one company. */
 export const ofJob = (table: JobTable, { companyId, jobId }: JobKey) =>
   and(eq(table.companyId, companyId), eq(table.jobId, jobId))

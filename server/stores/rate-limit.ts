@@ -32,10 +32,12 @@ export function countBack(tx: Tx, key: string): void {
     .run()
 }
 
+/** Ends a count before its window does. */
 export function forget(tx: Tx, key: string): void {
   tx.delete(rateLimit).where(eq(rateLimit.key, key)).run()
 }
 
+/** Drops counts whose window has ended. */
 export function forgetOld(tx: Tx, nowMs: number): void {
   tx.delete(rateLimit).where(lte(rateLimit.windowEndAtMs, nowMs)).run()
 }

@@ -21,6 +21,7 @@ export interface View {
   readonly to: number
 }
 
+/** The scale that fits a view into a width in px, from `left` on. */
 export function stripScale(of: {
   readonly view: View
   readonly left: number
@@ -51,6 +52,7 @@ export function zoomed(view: View, edge: View, { factor, about }: { factor: numb
   return within({ from: about - share * length, to: about + (1 - share) * length }, edge)
 }
 
+/** The view moved by so many mm of chainage; never beyond the edge. */
 export function scrolled(view: View, edge: View, by: number): View {
   return within({ from: view.from + by, to: view.to + by }, edge)
 }

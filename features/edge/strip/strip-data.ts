@@ -83,6 +83,7 @@ export interface StripLength {
 /** Grid lines that run within this of square to the edge are marked on its axis. */
 const SQUARE_ENOUGH = Math.cos(Math.PI / 6)
 
+/** The strip of one edge. @throws where the edge or what it refers to is not in the layout. */
 export function stripData(index: LayoutIndex, edgeId: string): StripData {
   const frame = found(index.frames, edgeId, 'edge')
   const edge = found(index.edges, edgeId, 'edge')
