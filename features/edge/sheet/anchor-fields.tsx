@@ -7,7 +7,7 @@ import { Select } from '@/components/ui/select'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { space } from '@/components/theme'
-import { sidesText } from '../../checks/words'
+import { outcomeText, sidesText } from '../../checks/words'
 import { useJobDraft } from '../../editing/job-draft'
 import { anchorChange } from '../table/columns'
 
@@ -17,10 +17,12 @@ export interface AnchorFieldsProps {
   readonly hardware: HardwareData | null
   readonly mark: string
   readonly result: ZoneResult | null
+  /** What checks say stands below each field, unless it stands at the head of the sheet. */
+  readonly hasNotes: boolean
 }
 
 /** The numbers of one anchor, each with its unit and usual range; what a check has to say stands below its field. */
-export function AnchorFields({ anchor, tendon, hardware, mark, result }: AnchorFieldsProps) {
+export function AnchorFields({ anchor, tendon, hardware, mark, result, hasNotes }: AnchorFieldsProps) {
   const { layout, edit, canEdit } = useJobDraft()
   const apply = (changes: Partial<AnchorData>, what: string) => {
     const typed = anchorChange(anchor, changes, `${mark}: ${what}`)
@@ -35,14 +37,14 @@ export function AnchorFields({ anchor, tendon, hardware, mark, result }: AnchorF
       if (value !== null || field.isOptional) apply({ [field.key]: value }, field.label.toLowerCase())
     },
     onType: (value: number) => apply({ [field.key]: value }, field.label.toLowerCase()),
-    note: (
+    note: hasNotes ? (
       <MendNote
         field={field.key}
         result={result}
         value={anchor[field.key]}
         onUse={(value) => apply({ [field.key]: value }, field.label.toLowerCase())}
       />
-    ),
+    ) : null,
     ...(field.usual(hardware, anchor) ? { usual: field.usual(hardware, anchor) } : {}),
     ...(field.isOptional ? {} : { required: true }),
   })
@@ -151,19 +153,28 @@ function MendNote(props: {
   const { field, result, value, onUse } = props
   const { canEdit } = useJobDraft()
   const broken = result?.checks.filter((check): check is Compared => isBroken(check, field)) ?? []
-  const [worst] = broken
   // The value furthest from the one typed does for all of them.
   const mends = broken.flatMap(({ mend }) => mend ?? [])
   const mend = mends.sort((a, b) => Math.abs(b.value - (value ?? 0)) - Math.abs(a.value - (value ?? 0)))[0]
-  if (!worst || !mend) return null
+  if (!mend) return null
   return (
     <View style={styles.note}>
-      <StatusMark status={worst.status} words={`${worst.name}: ${sidesText(worst)}. Kept as typed.`} kind="small" />
-      {canEdit && mend.value !== value ? (
-        <Button label={`Use ${Number(mend.value.toFixed(1))}`} onPress={() => onUse(mend.value)} />
-      ) : (
-        <Text kind="small">Change it, or choose other hardware.</Text>
-      )}
+      {broken.map((check) => (
+        <StatusMark
+          key={check.name}
+          status={check.status}
+          words={`${check.name}: ${sidesText(check)}, ${outcomeText(check)}.`}
+          kind="small"
+        />
+      ))}
+      <View style={styles.choices}>
+        <Text kind="small">Kept as typed.</Text>
+        {canEdit && mend.value !== value ? (
+          <Button label={`Use ${Number(mend.value.toFixed(1))}`} onPress={() => onUse(mend.value)} />
+        ) : (
+          <Text kind="small">Change it, or choose other hardware.</Text>
+        )}
+      </View>
     </View>
   )
 }
@@ -195,4 +206,5 @@ const styles = StyleSheet.create({
   fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m },
   field: { width: 170, flexGrow: 1 },
   note: { gap: space.xs, alignItems: 'flex-start' },
+  choices: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.s },
 })

@@ -1,4 +1,11 @@
-import { toSi, type Command, type SteelData, type SteelZoneData } from '@wedgeline/contract'
+import {
+  steelShapeSchema,
+  toSi,
+  type Command,
+  type SteelData,
+  type SteelShapeData,
+  type SteelZoneData,
+} from '@wedgeline/contract'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { v7 as newId } from 'uuid'
@@ -135,6 +142,7 @@ function SteelSet(props: {
                     {...(field.usual ? { usual: field.usual } : {})}
                     value={typeof value === 'number' ? value : null}
                     onCommit={(next) => set(field.key, next)}
+                    onType={(next) => canHold(row.shape, field.key, next) && set(field.key, next)}
                     required
                   />
                 )}
@@ -149,6 +157,10 @@ function SteelSet(props: {
     </View>
   )
 }
+
+/** Whether a value may stand while it is typed; one that may not is said when the field is left. */
+const canHold = (shape: SteelShapeData, key: string, value: number): boolean =>
+  steelShapeSchema.safeParse({ ...shape, [key]: value }).success
 
 const styles = StyleSheet.create({
   list: { gap: space.xs },

@@ -78,6 +78,7 @@ export function ZoneSheet(props: ZoneSheetProps) {
       hardware={hardware}
       mark={name}
       result={result}
+      hasNotes={!isWide}
       tendon={layout.tendons.find(({ id }) => id === anchor.tendonId) ?? null}
     />
   ) : null

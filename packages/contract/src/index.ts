@@ -1,6 +1,6 @@
 export { toSi } from './si'
 export { idSchema } from './fields'
-export type { SteelData, SteelShapeData, SteelZoneData } from './steel-schema'
+export { steelShapeSchema, type SteelData, type SteelShapeData, type SteelZoneData } from './steel-schema'
 export {
   hardwareSchema,
   jackSchema,
