@@ -94,6 +94,7 @@ function NameSection({ typed, onChange, errors, disabled }: PartProps) {
             usual={{ range: '1 to 7 in slabs', source: 'common practice' }}
             value={typed.strandsMax}
             onCommit={(strandsMax) => onChange({ strandsMax })}
+            onType={(strandsMax) => onChange({ strandsMax })}
             error={errors.strandsMax}
             disabled={disabled}
             required

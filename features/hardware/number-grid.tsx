@@ -26,6 +26,7 @@ export function NumberGrid<Key extends string>(props: NumberGridProps<Key>) {
             {...words}
             value={values[key]}
             onCommit={(value) => onChange({ [key]: value } as Partial<Record<Key, number | null>>)}
+            onType={(value) => onChange({ [key]: value } as Partial<Record<Key, number | null>>)}
             error={errors[path ? `${path}.${key}` : key]}
             disabled={disabled}
             required={!isOptional}

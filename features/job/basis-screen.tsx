@@ -125,6 +125,7 @@ function SettingEntry({ field, form, errors, canSet, onChange }: SettingEntryPro
       {...words}
       value={typeof value === 'number' ? value : null}
       onCommit={set}
+      onType={set}
       error={error}
       disabled={!canSet}
     />

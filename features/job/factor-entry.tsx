@@ -28,6 +28,7 @@ export function FactorEntry({ factor, typed, errors, canSet, onChange }: FactorE
         hint={`Recommended ${recommended}; may be ${least} to ${most}. ${clauseText(clause)}.`}
         value={typed.value}
         onCommit={(value) => onChange({ ...typed, value })}
+        onType={(value) => onChange({ ...typed, value })}
         error={errors[`${name}.value`]}
         disabled={!canSet}
         required
