@@ -34,7 +34,7 @@ const hairpins = {
 }
 const layers = z.enum(['top', 'bottom', 'both'])
 
-const steelShapeSchema = z.discriminatedUnion('kind', [
+export const steelShapeSchema = z.discriminatedUnion('kind', [
   z.strictObject(spiral),
   z.strictObject(links),
   z.strictObject(hairpins),
