@@ -69,6 +69,8 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
   const pour = layout.pours.find(({ id }) => id === edge.pourId)
   const zone = selected === '' ? null : selected
   const missing = whatIsMissing(layout)
+  // Without hardware or a strand type nothing can be typed: the notice above says what comes first.
+  const canType = canEdit && missing === null
   const strip = (
     <EdgeStrip index={index} data={data} results={results} selected={zone} onSelect={select} isTableOpen={isWide} />
   )
@@ -102,6 +104,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
               />
               <Button
                 label="Paste anchors"
+                disabled={!canType}
                 icon={<Icon name="paste" />}
                 iconOnly={!isWide}
                 onPress={() => setPasting(true)}
@@ -130,7 +133,8 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         <View style={styles.below}>
           <View style={styles.table}>
             <AnchorTable
-              {...{ layout, edge, rows, canEdit, selected: zone }}
+              {...{ layout, edge, rows, selected: zone }}
+              canEdit={canType}
               onSelect={select}
               onEdit={edit}
               onInsert={insertText}
@@ -142,7 +146,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
           </SheetPane>
         </View>
       ) : (
-        <PhoneAnchors {...{ rows, zone, canEdit }} onSelect={select} onInsert={insertText} />
+        <PhoneAnchors {...{ rows, zone }} canEdit={canType} onSelect={select} onInsert={insertText} />
       )}
       {!isWide && zone ? (
         <BottomSheet
