@@ -45,7 +45,7 @@ export function EdgeScreen({ jobId, edgeId }: { readonly jobId: string; readonly
 
 function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: EdgeData }) {
   const { zone: selected = null } = useLocalSearchParams<{ zone?: string }>()
-  const { layout, companyId, edit, canEdit, undo, canUndo, undoLabel } = useJobDraft()
+  const { layout, companyId, edit, canEdit } = useJobDraft()
   const isAdmin = useCompanyRoles(companyId).includes('admin')
   const isWide = useWide()
   const [isPasting, setPasting] = useState(false)
@@ -90,30 +90,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         { label: `Pour ${pour?.mark ?? ''}`, href: `/jobs/${jobId}/pours/${edge.pourId}` },
       ]}
       summary={<Summary results={results} isStale={checks.isStale} />}
-      actions={
-        <>
-          <SaveState />
-          {canEdit ? (
-            <>
-              <Button
-                label={isWide && undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
-                icon={<Icon name="undo" />}
-                iconOnly={!isWide}
-                disabled={!canUndo}
-                onPress={undo}
-              />
-              <Button
-                label="Paste anchors"
-                disabled={!canType}
-                icon={<Icon name="paste" />}
-                iconOnly={!isWide}
-                onPress={() => setPasting(true)}
-              />
-            </>
-          ) : null}
-          <Button label="Edge bars" onPress={() => select(`edge:${edge.id}`)} />
-        </>
-      }
+      actions={<Actions edgeId={edge.id} canType={canType} onPaste={() => setPasting(true)} onSelect={select} />}
     >
       {missing ? (
         <View style={styles.missing}>
@@ -181,6 +158,41 @@ function Summary({
     <>
       <StatusMarks counts={countZones([...results.values()])} isShort={!isWide} />
       {isStale ? <Text tone="soft">working out …</Text> : null}
+    </>
+  )
+}
+
+/** Saving, undo, and what is entered for the whole edge. */
+function Actions(props: {
+  readonly edgeId: string
+  readonly canType: boolean
+  readonly onPaste: () => void
+  readonly onSelect: (zoneId: string) => void
+}) {
+  const { canEdit, canUndo, undo, undoLabel } = useJobDraft()
+  const isWide = useWide()
+  return (
+    <>
+      <SaveState />
+      {canEdit ? (
+        <>
+          <Button
+            label={isWide && undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
+            icon={<Icon name="undo" />}
+            iconOnly={!isWide}
+            disabled={!canUndo}
+            onPress={undo}
+          />
+          <Button
+            label="Paste anchors"
+            icon={<Icon name="paste" />}
+            iconOnly={!isWide}
+            disabled={!props.canType}
+            onPress={props.onPaste}
+          />
+        </>
+      ) : null}
+      <Button label="Edge bars" onPress={() => props.onSelect(`edge:${props.edgeId}`)} />
     </>
   )
 }
