@@ -16,7 +16,6 @@ const SOURCES = [
   'features',
   'components',
   'lib',
-  'assets',
   'public',
   'packages/engine/src',
   'packages/contract/src',

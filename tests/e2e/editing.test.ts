@@ -1,5 +1,5 @@
 import type { LayoutFile } from '@wedgeline/contract'
-import type { Browser, Page } from 'playwright-core'
+import type { Browser, Locator, Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, test } from 'vitest'
 import { cell, grid, typeOver } from './anchor-grid'
 import { startProduct, type Product } from './product'
@@ -58,13 +58,18 @@ async function killTab(page: Page): Promise<void> {
   await page.close()
 }
 
-/** Types into the field of a phone's sheet, without leaving it. */
-async function typeHeight(page: Page, mark: string, text: string): Promise<void> {
+/** Opens an anchor's sheet on a phone; its field for the height. */
+async function heightField(page: Page, mark: string): Promise<Locator> {
   await page
     .getByRole('button', { name: new RegExp(`^${mark} `) })
     .last()
     .click()
-  const field = page.getByRole('dialog').getByLabel('Height above soffit, mm')
+  return page.getByRole('dialog').getByLabel('Height above soffit, mm')
+}
+
+/** Types into the field of a phone's sheet, without leaving it. */
+async function typeHeight(page: Page, mark: string, text: string): Promise<void> {
+  const field = await heightField(page, mark)
   await field.click()
   await field.press('Control+A')
   await field.pressSequentially(text)
@@ -149,9 +154,8 @@ describe('a tab that ends in the middle of typing', () => {
     const tab = await newTab()
     await tab.goto(edgePath('E1'))
     await isOpen(tab, 'E1')
-    const row = tab.getByRole('row').filter({ has: tab.getByRole('rowheader', { name: /E1-07/ }) })
-    await row.getByRole('cell', { name: '123', exact: true }).waitFor()
-    expect(await stored.heightOf('E1', 7)).toBe(123)
+    expect(await (await heightField(tab, 'E1-07')).inputValue()).toBe('123')
+    await expect.poll(() => stored.heightOf('E1', 7)).toBe(123)
   })
 })
 

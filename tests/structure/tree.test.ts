@@ -15,7 +15,6 @@ const TOP = [
   'README.md',
   'app',
   'app.json',
-  'assets',
   'babel.config.cjs',
   'components',
   'db',
