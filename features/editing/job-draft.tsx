@@ -8,6 +8,7 @@ import { v7 as newId } from 'uuid'
 import { useToast } from '@/components/ui/toast'
 import { useTRPC, useTRPCClient, type AppRouter } from '@/lib/trpc'
 import type { Change, Unsaved } from './draft'
+import { mirroredUnsent, mirrorUnsent } from './unsent-mirror'
 import { DraftStore, type DraftPorts, type DraftView, type SaveState, type Sent } from './draft-store'
 
 /** One job open for reading and editing, for all screens behind it. */
@@ -142,8 +143,11 @@ function portsOf(
     load: () => client.layout.byJob.query({ jobId }),
     send: (batch) =>
       client.layout.applyBatch.mutate(batch).then(({ versions }): Sent => ({ kind: 'stored', versions }), refusal),
-    keep: (unsaved) => set(key, unsaved, unsentStore),
-    kept: () => get<Unsaved>(key, unsentStore).then((kept) => kept ?? null),
+    keep: (unsaved) => {
+      mirrorUnsent(key, unsaved)
+      return set(key, unsaved, unsentStore)
+    },
+    kept: async () => mirroredUnsent(key) ?? (await get<Unsaved>(key, unsentStore)) ?? null,
     newId: () => newId(),
     later: (run, ms) => {
       const timer = setTimeout(run, ms)
