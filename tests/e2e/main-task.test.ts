@@ -72,7 +72,10 @@ test.each(SIZE_NAMES)('%s: new job, pour, 16 anchors, one mended, calculation, w
   await sheet.getByRole('link', { name: 'Calculation, every step' }).click()
   await heading(page, `Calculation, ${LOW}`)
   // The head stands before the steps are worked out.
-  await page.getByText(/Demand .* limit /).first().waitFor()
+  await page
+    .getByText(/Demand .* limit /)
+    .first()
+    .waitFor()
   const shown = await page.getByRole('main').innerText()
 
   const workbook = await exportWorkbook(page, pourPath)
