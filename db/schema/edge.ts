@@ -68,6 +68,8 @@ export const pan = sqliteTable(
     jackTiltDeg: real('jack_tilt_deg').notNull(),
     bentNoseDeg: real('bent_nose_deg').notNull(),
     headroomMm: real('headroom_mm'),
+    tieBackForceKN: real('tie_back_force_kn'),
+    tieBackReason: text('tie_back_reason').notNull().default(''),
     version: integer('version').notNull(),
     ...stamps(),
   },

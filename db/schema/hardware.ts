@@ -19,6 +19,7 @@ export const strandType = sqliteTable(
     areaMm2: real('area_mm2').notNull(),
     breakingLoadKN: real('breaking_load_kn').notNull(),
     proofLoadKN: real('proof_load_kn').notNull(),
+    modulusMPa: real('modulus_mpa').notNull().default(195_000),
     ...stamps(),
   },
   (t) => [

@@ -15,6 +15,8 @@ import { allPositive, isJson, oneOf, stamps } from './columns'
 import { membership } from './membership'
 import { company, person } from './person'
 
+const BASES = ['en-1992', 'as-3600'] as const
+
 export const job = sqliteTable(
   'job',
   {
@@ -26,18 +28,20 @@ export const job = sqliteTable(
     number: text('number').notNull(),
     title: text('title').notNull(),
     timeZone: text('time_zone').notNull(),
-    basis: text('basis', { enum: ['en-1992'] }).notNull(),
+    basis: text('basis', { enum: BASES }).notNull(),
     settings: text('settings', { mode: 'json' }).$type<JobData['settings']>().notNull(),
     /** Version of the job's own unit: levels, grid, edge lines, joints, obstructions. */
     layoutVersion: integer('layout_version').notNull().default(0),
     /** Counts accepted batches; a touched unit takes it as its version, so that no version ever comes twice. */
     changeCount: integer('change_count').notNull().default(0),
+    /** Made from a quick edge and not yet given a number and a title of its own. */
+    isUnfiled: integer('is_unfiled', { mode: 'boolean' }).notNull().default(false),
     ...stamps(),
   },
   (t) => [
     primaryKey({ columns: [t.companyId, t.id] }),
     uniqueIndex('job_id').on(t.id),
-    oneOf('job_basis', t.basis, ['en-1992']),
+    oneOf('job_basis', t.basis, BASES),
     isJson('job_settings_json', t.settings),
     check('job_counts', sql`${t.layoutVersion} between 0 and ${t.changeCount}`),
   ],

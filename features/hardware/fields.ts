@@ -107,4 +107,5 @@ export const STRAND_FIELDS: readonly NumberSpec<Exclude<keyof StrandTypeData, 'i
   { key: 'areaMm2', label: 'Area of one strand', unit: 'mm²', usual: usual('93 to 150') },
   { key: 'breakingLoadKN', label: 'Breaking load, characteristic', unit: 'kN', usual: usual('170 to 280') },
   { key: 'proofLoadKN', label: 'Proof load at 0.1 %', unit: 'kN', usual: usual('0.86 to 0.90 of the breaking load') },
+  { key: 'modulusMPa', label: 'Modulus of elasticity', unit: 'MPa', usual: usual('190,000 to 200,000') },
 ]

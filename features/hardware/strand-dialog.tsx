@@ -17,7 +17,14 @@ export interface StrandDialogProps {
   readonly onClose: () => void
 }
 
-const EMPTY = { name: '', diameterMm: null, areaMm2: null, breakingLoadKN: null, proofLoadKN: null }
+const EMPTY = {
+  name: '',
+  diameterMm: null,
+  areaMm2: null,
+  breakingLoadKN: null,
+  proofLoadKN: null,
+  modulusMPa: 195_000,
+}
 
 /** One strand: its size and the loads that the jacking force is held against. */
 export function StrandDialog({ companyId, strandType, isAdmin, onClose }: StrandDialogProps) {

@@ -4,7 +4,7 @@ import { BASIS_SOURCES } from '@wedgeline/engine/bases'
 
 /** What an engineer types on the basis page; null while a field is empty. */
 export interface BasisForm {
-  readonly settings: Readonly<Record<keyof JobData['settings'], string | number | null>>
+  readonly settings: Readonly<Record<keyof JobData['settings'], string | number | null | readonly number[]>>
   readonly factors: Readonly<Record<string, TypedFactor>>
 }
 

@@ -60,6 +60,9 @@ export function insertPour(
     regions: [],
     mats: [],
     stages: typed.stages.map((stage) => ({ id: newId(), ...stage })),
+    markPrefix: '',
+    firstMark: 1,
+    deliveries: [],
   }
   const sides = edgesOfOutline({ layout, pour, newId })
   const commands: Command[] = [

@@ -1,5 +1,5 @@
 import { and, asc, eq } from 'drizzle-orm'
-import type { JobData } from '@wedgeline/contract'
+import { jobSettingsSchema, type JobData } from '@wedgeline/contract'
 import type { Connection } from '../../db/client'
 import { acceptedReading, company, job, jobFactor, jobMember, person } from '../../db/schema'
 import { created, ofJob, updated, type JobKey, type Stamp } from './job-key'
@@ -16,7 +16,17 @@ export function jobRow(db: Connection, key: JobKey) {
 /** A job as the layout file holds it. */
 export function jobData(db: Connection, key: JobKey): JobData {
   const { id, number, title, timeZone, basis, settings } = jobRow(db, key)
-  return { id, number, title, timeZone, basis, settings, factors: factorsOf(db, key), readings: readingsOf(db, key) }
+  return {
+    id,
+    number,
+    title,
+    timeZone,
+    basis,
+    // Settings that came after the row was stored take their usual value.
+    settings: jobSettingsSchema.parse(settings),
+    factors: factorsOf(db, key),
+    readings: readingsOf(db, key),
+  }
 }
 
 const factorsOf = (db: Connection, key: JobKey): JobData['factors'] =>

@@ -47,7 +47,15 @@ describe('EX17-L1: EN 1992-1-1 Eq. 6.58 (digest), 8.10.3(4) and 2.4.2.2(3) (from
 
 describe('EX19-L1, first half: EN 1992-1-1 5.10.2.1 and 5.10.3 (from memory)', () => {
   // One strand of 150 mm2: Fpk = 1860 * 150 = 279 kN, Fp0.1k = 1640 * 150 = 246 kN
-  const strand = { id: 's', name: '15.7', diameter: 15.7, area: 150, breakingLoad: 279_000, proofLoad: 246_000 }
+  const strand = {
+    id: 's',
+    name: '15.7',
+    diameter: 15.7,
+    area: 150,
+    breakingLoad: 279_000,
+    proofLoad: 246_000,
+    modulus: 195_000,
+  }
 
   test('jacking: min(0.8 fpk, 0.9 fp0.1k) = 1476 MPa, 885.6 kN in four strands', () => {
     const force = basis.jackingLimit(strand, 4).at(-1)?.value ?? 0

@@ -11,6 +11,7 @@ export const strandTypeSchema = z.strictObject({
   areaMm2: positive,
   breakingLoadKN: positive,
   proofLoadKN: positive,
+  modulusMPa: z.number().min(150_000).max(250_000).default(195_000),
 })
 
 export const jackSchema = z.strictObject({

@@ -19,6 +19,16 @@ export const LIMITS = { anchors: 20_000, pours: 200, edges: 2_000, corners: 200,
 const pointSchema = z.strictObject({ xMm: anywhere, yMm: anywhere })
 const outline = z.array(pointSchema).min(3, 'needs three points or more').max(LIMITS.corners)
 
+/** Friction of a tendon in its duct, from memory of EN 1992-1-1 5.10.5.2; low and high are what is still credible. */
+const friction = {
+  frictionMu: z.number().min(0.01).max(1).default(0.19),
+  frictionWobblePerM: z.number().min(0).max(0.1).default(0.0075),
+  frictionMuLow: z.number().min(0.01).max(1).default(0.15),
+  frictionWobbleLowPerM: z.number().min(0).max(0.1).default(0.005),
+  frictionMuHigh: z.number().min(0.01).max(1).default(0.25),
+  frictionWobbleHighPerM: z.number().min(0).max(0.1).default(0.01),
+}
+
 export const jobSettingsSchema = z.strictObject({
   pocketToFaceMinMm: notNegative.default(25),
   pocketToPocketMinMm: notNegative.default(25),
@@ -26,9 +36,23 @@ export const jobSettingsSchema = z.strictObject({
   nearFrom: z.number().min(0.9, 'must be 0.90 or more').max(1).default(0.95),
   fykMPa: z.number().min(200).max(700).default(500),
   stockLengthMm: z.number().min(3000).max(18000).default(12000),
-  barStandard: z.enum(['bs-8666-2020']).default('bs-8666-2020'),
+  barStandard: z.enum(['bs-8666-2020', 'bs-8666-2005']).default('bs-8666-2020'),
   reinforcementGrade: label(12).default('B500B'),
   wedgeSpreadDeg: z.number().min(15).max(60).nullable().default(null),
+  spreadStart: z.enum(['bearing-face', 'device-end']).default('bearing-face'),
+  frictionFamily: z.enum(['inside', 'outside']).default('inside'),
+  ...friction,
+  deadEndForce: z.enum(['jacking', 'after-friction']).default('jacking'),
+  crackWidthMm: z.number().min(0.1).max(0.4).default(0.3),
+  crackTensileMPa: z.number().min(0.5).max(8).nullable().default(null),
+  crackAgeDays: positive.max(365).nullable().default(null),
+  crackCompressionMPa: notNegative.max(10).default(0),
+  exposure: text(60).default(''),
+  restraint: text(120).default(''),
+  barSizesMm: z.array(barDiameter).min(1, 'needs at least one size').max(9).default([8, 10, 12, 16, 20]),
+  oneLengthWithinMm: notNegative.max(1000).default(100),
+  oneLengthMassKg: notNegative.max(200).default(5),
+  bentDeductionMm: notNegative.max(50).default(10),
 })
 
 export const acceptedReadingSchema = z.strictObject({
@@ -44,7 +68,7 @@ const factorSchema = z.strictObject({
   reason: label(500),
 })
 
-export const BASES = ['en-1992'] as const
+export const BASES = ['en-1992', 'as-3600'] as const
 const jobSchema = z.strictObject({
   id: idSchema,
   number: label(40),
@@ -122,6 +146,16 @@ const matLayerSchema = z.strictObject({
   spareBy: label(120).nullable().default(null),
 })
 
+/** Bars that reach the site together, by the edges and pans that they are for. */
+const deliverySchema = z.strictObject({
+  id: idSchema,
+  name: label(40),
+  /** Day of the year as ISO 8601 writes it; null where none is agreed. */
+  neededOn: z.iso.date().nullable().default(null),
+  edgeIds: z.array(idSchema).max(LIMITS.corners).default([]),
+  panIds: z.array(idSchema).max(5000).default([]),
+})
+
 const cornerSchema = z.strictObject({ id: idSchema, xMm: anywhere, yMm: anywhere })
 
 export const pourSchema = z.strictObject({
@@ -140,6 +174,9 @@ export const pourSchema = z.strictObject({
   regions: z.array(regionSchema).max(100).default([]),
   mats: z.array(matLayerSchema).max(12).default([]),
   stages: z.array(stageSchema).min(1, 'needs at least one stage').max(6),
+  markPrefix: z.string().trim().max(6).default(''),
+  firstMark: z.number().int('must be a whole number').min(1).max(9000).default(1),
+  deliveries: z.array(deliverySchema).max(20).default([]),
 })
 
 const edgeLengthSchema = z.strictObject({
@@ -177,6 +214,9 @@ export const panSchema = z.strictObject({
   jackTiltDeg: z.number().min(0).max(45).default(12),
   bentNoseDeg: z.number().min(0).max(45).default(0),
   headroomMm: notNegative.nullable().default(null),
+  /** The engineer's own tie force behind the pan, where a strut-and-tie model gives one. */
+  tieBackForceKN: positive.nullable().default(null),
+  tieBackReason: text(500).default(''),
 })
 
 export const tendonSchema = z.strictObject({

@@ -12,6 +12,8 @@ const UNITS = [
   ['Deg', TO_RADIANS],
   ['Mm', 1],
   ['KN', 1000],
+  ['PerM', 1e-3],
+  ['Kg', 1],
 ] as const
 
 type Bare<K> = K extends `${infer Name}Mm2`
@@ -24,7 +26,11 @@ type Bare<K> = K extends `${infer Name}Mm2`
         ? Name
         : K extends `${infer Name}KN`
           ? Name
-          : K
+          : K extends `${infer Name}PerM`
+            ? Name
+            : K extends `${infer Name}Kg`
+              ? Name
+              : K
 
 /** `T` with the unit taken off every name, all the way down. */
 type Si<T> = T extends readonly (infer Item)[]
@@ -33,7 +39,7 @@ type Si<T> = T extends readonly (infer Item)[]
     ? { readonly [K in keyof T as Bare<K>]: Si<T[K]> }
     : T
 
-/** Converts data whose names end in Mm, Mm2, MPa, KN or Deg into mm, mm2, MPa, N and rad, with bare names. */
+/** Converts data whose names end in Mm, Mm2, MPa, KN, PerM, Kg or Deg into mm, mm2, MPa, N, 1/mm, kg and rad, with bare names. */
 export function toSi<T>(data: T): Si<T> {
   return convert(data) as Si<T>
 }

@@ -70,6 +70,8 @@ export const steelShapeSchema = z.discriminatedUnion('kind', [
     lengthMm: positive,
     count: count.min(1),
     layers,
+    runs: z.enum(['along', 'across']).default('along'),
+    pitchMm: positive.default(100),
   }),
 ])
 

@@ -77,13 +77,22 @@ export interface WedgeBarsShape {
   readonly layers: 'top' | 'bottom' | 'both'
 }
 
-/** Bars placed round a pan or joint. */
+/**
+ * Straight bars round a pan or across a joint.
+ *
+ * Round a pan `along` is parallel to the jack's axis: tie-back and lap bars lie symmetrical about the tendon at
+ * `pitch`, their middle at the bearing face; trimmers lie half on each side of the recess, from its sides outwards at
+ * `pitch`; diagonals lie `count` at each corner at 45 degrees. At a joint bars run square to it, spread at `pitch`
+ * about its middle. `count` is per layer.
+ */
 export interface PlacedBarsShape {
   readonly kind: 'trimmers' | 'diagonals' | 'tie-back-bars' | 'lap-bars'
   readonly diameter: number
   readonly length: number
   readonly count: number
   readonly layers: 'top' | 'bottom' | 'both'
+  readonly runs: 'along' | 'across'
+  readonly pitch: number
 }
 
 export type SteelShape =

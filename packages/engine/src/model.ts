@@ -91,6 +91,36 @@ export interface JobSettings {
   readonly reinforcementGrade: string
   /** Angle of spread chosen for edge wedges; null takes the basis's own. */
   readonly wedgeSpread: number | null
+  /** Where the spread behind an anchor begins. */
+  readonly spreadStart: 'bearing-face' | 'device-end'
+  /** Wobble stands inside the bracket with mu (rad/mm), or beside it (1/mm). */
+  readonly frictionFamily: 'inside' | 'outside'
+  readonly frictionMu: number
+  readonly frictionWobble: number
+  /** The lowest credible pair leaves the most force at a dead end; the highest the least. */
+  readonly frictionMuLow: number
+  readonly frictionWobbleLow: number
+  readonly frictionMuHigh: number
+  readonly frictionWobbleHigh: number
+  /** Force for anchorage checks at a dead end; after friction with the lowest credible pair. */
+  readonly deadEndForce: 'jacking' | 'after-friction'
+  /** Crack width aimed at in edge wedges. */
+  readonly crackWidth: number
+  /** Tensile strength of the concrete when it is expected to crack; null takes the 28-day mean. */
+  readonly crackTensile: number | null
+  readonly crackAgeDays: number | null
+  /** Average compression that the engineer counts against cracking in edge wedges; 0 at edges and beside walls. */
+  readonly crackCompression: number
+  readonly exposure: string
+  readonly restraint: string
+  /** Bar sizes that a proposal may use. */
+  readonly barSizes: readonly number[]
+  /** Wedges whose bars differ by no more than this take one length. */
+  readonly oneLengthWithin: number
+  /** One length for all bars of a wedge unless it costs more than this, kg. */
+  readonly oneLengthMass: number
+  /** Taken off a bent bar that is made between two faces of concrete. */
+  readonly bentDeduction: number
 }
 
 export interface AcceptedReading {
@@ -125,6 +155,7 @@ export interface StrandType {
   readonly breakingLoad: number
   /** Characteristic 0.1 % proof load of one strand, N. */
   readonly proofLoad: number
+  readonly modulus: number
 }
 
 export interface Jack {
@@ -294,6 +325,20 @@ export interface Pour {
   readonly mats: readonly MatLayer[]
   /** In order of stressing; the last has share 1. */
   readonly stages: readonly Stage[]
+  /** Written before each bar mark's number. */
+  readonly markPrefix: string
+  readonly firstMark: number
+  readonly deliveries: readonly Delivery[]
+}
+
+/** Bars that reach the site together, by the edges and pans that they are for. */
+export interface Delivery {
+  readonly id: string
+  readonly name: string
+  /** Day as ISO 8601 writes it; null where none is agreed. */
+  readonly neededOn: string | null
+  readonly edgeIds: readonly string[]
+  readonly panIds: readonly string[]
 }
 
 export type LengthKind = 'free' | 'construction-joint' | 'movement-joint' | 'against-wall'
@@ -339,6 +384,9 @@ export interface Pan {
   readonly jackTilt: number
   readonly bentNose: number
   readonly headroom: number | null
+  /** The engineer's own tie force behind the pan, N; null takes the basis's reading. */
+  readonly tieBackForce: number | null
+  readonly tieBackReason: string
 }
 
 export interface Tendon {

@@ -122,7 +122,7 @@ describe('from steel to bars', () => {
       count: 6,
     },
     {
-      shape: { kind: 'diagonals', diameter: 12, length: 1200, count: 4, layers: 'both' },
+      shape: { kind: 'diagonals', diameter: 12, length: 1200, count: 4, layers: 'both', runs: 'along', pitch: 100 },
       code: '00',
       dimensions: { A: 1200 },
       count: 8,
@@ -149,7 +149,10 @@ describe('from steel to bars', () => {
       pans: [pan('PN1', { x: 5000, y: 5000 })],
       anchors: [inPan('PN1')],
       steel: [
-        steel({ kind: 'pan', panId: 'PN1' }, { kind: 'trimmers', diameter: 12, length: 2000, count: 2, layers: 'top' }),
+        steel(
+          { kind: 'pan', panId: 'PN1' },
+          { kind: 'trimmers', diameter: 12, length: 2000, count: 2, layers: 'top', runs: 'along', pitch: 100 },
+        ),
       ],
     }
     expect(shown(layout(parts))).toEqual(['PN1 01 B12 1 2 2 2000 00', 'PN1 02 B10 1 4 4 1050 51'])
