@@ -10,6 +10,8 @@ const FUNCTIONS = {
   sin: (value: number) => Math.sin(value),
   cos: (value: number) => Math.cos(value),
   abs: (value: number) => Math.abs(value),
+  exp: (value: number) => Math.exp(value),
+  log: (value: number) => Math.log(value),
 }
 
 /** Evaluates the printed text of a step with the values printed beside it. */
