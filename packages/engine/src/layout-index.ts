@@ -24,6 +24,8 @@ type Lists<T> = ReadonlyMap<string, readonly T[]>
 
 export interface LayoutIndex {
   readonly layout: Layout
+  /** One object for all indexes of a layout that differ in nothing but steel. */
+  readonly concrete: object
   readonly levels: ById<Level>
   readonly pours: ById<Pour>
   readonly edgeLines: ById<EdgeLine>
@@ -71,6 +73,7 @@ export function layoutIndex(layout: Layout): LayoutIndex {
   const anchorsOfEdge = grouped([...layout.anchors].sort(alongEdge), (anchor) => anchor.edgeId)
   return {
     layout,
+    concrete: {},
     levels: byId(layout.levels),
     pours,
     edgeLines,
@@ -94,6 +97,17 @@ export function layoutIndex(layout: Layout): LayoutIndex {
     anchorsOfTendon: grouped(layout.anchors, (anchor) => anchor.tendonId),
     steelOfZone: grouped(layout.steel, (steel) => steelKey(steel.zone)),
   }
+}
+
+/**
+ * The same index with other steel in some zones; everything that does not hang on steel is kept.
+ *
+ * @param changed the whole steel of each zone that changes, by the key of `steelKey`.
+ */
+export function withSteel(index: LayoutIndex, changed: ReadonlyMap<string, readonly Steel[]>): LayoutIndex {
+  const steelOfZone = new Map(index.steelOfZone)
+  for (const [key, steel] of changed) steelOfZone.set(key, steel)
+  return { ...index, steelOfZone, layout: { ...index.layout, steel: [...steelOfZone.values()].flat() } }
 }
 
 /** The zone id that a set of bars belongs to, the same as the id of its `Zone`. */

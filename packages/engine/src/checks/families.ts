@@ -3,7 +3,7 @@
 import { sitesOfEdge, type AnchorSite } from '../anchor-site'
 import { closeAnchors } from '../close-anchors'
 import { found, type LayoutIndex } from '../layout-index'
-import { perIndex } from '../memo'
+import { perConcrete } from '../memo'
 import type { Anchor } from '../model'
 import type { Check, Family, Zone, ZoneKind } from '../result'
 import { checkBearing } from './bearing'
@@ -73,8 +73,8 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
   anchorage: () => null,
 }
 
-const sitesOf = perIndex(sitesOfEdge)
-const closeOf = perIndex(closeAnchors)
+const sitesOf = perConcrete(sitesOfEdge)
+const closeOf = perConcrete(closeAnchors)
 
 type OfAnchor = (anchor: Anchor) => readonly Check[] | null
 
