@@ -1,6 +1,9 @@
+import { basisOf } from '../bases'
+import type { Basis } from '../bases/basis'
 import { layoutIndex, steelKey, type LayoutIndex } from '../layout-index'
 import type { Anchor, Edge, Layout, Pan, SteelKind, SteelShape, SteelZone } from '../model'
 import type { Zone } from '../result'
+import { edgeBarPieces, straightBarPieces, type BarPieces } from '../steel/bar-pieces'
 import { anchorMark, zonesOfPour } from '../zones'
 import type { BarShape, Dimensions } from './bar-standards'
 
@@ -22,6 +25,8 @@ export interface ZoneBars {
   readonly count: number
   /** Steel of the layout, or local steel that comes with the anchor's hardware. */
   readonly source: 'layout' | 'hardware'
+  /** How they were cut and lapped; whole sentences. */
+  readonly notes: readonly string[]
 }
 
 /** Steel whose place does not exist in the layout: a gap that an added anchor has split, say. */
@@ -37,17 +42,18 @@ export interface PourBars {
 
 /**
  * Every bar of a pour, zone by zone: the layout's steel, and the hardware's local steel at each anchor cast with the
- * pour that has no steel of that kind of its own.
+ * pour that has no steel of that kind of its own. Straight bars come in pieces within the stock length, lapped.
  */
 export function barsOf(layout: Layout, pourId: string): PourBars {
   const index = layoutIndex(layout)
+  const pieces = piecesFor(index, pourId)
   const zones = new Map(zonesOfPour(index, pourId).map((zone) => [zone.id, zone]))
   const bars: ZoneBars[] = []
   const unplaced: UnplacedSteel[] = []
   for (const steel of layout.steel) {
     if (steel.pourId !== pourId) continue
     const place = placeOf(steel.zone, zones, index)
-    if (place) bars.push(...zoneBars(place, steel.shape, 'layout'))
+    if (place) bars.push(...(pieces(place, steel.shape, steel.zone) ?? zoneBars(place, steel.shape, 'layout')))
     else unplaced.push({ steelId: steel.id, message: NO_PLACE[steel.zone.kind] })
   }
   return { bars: [...bars, ...hardwareBars(index, pourId)], unplaced }
@@ -107,13 +113,55 @@ function placeOf(steelZone: SteelZone, zones: ReadonlyMap<string, Zone>, index: 
 
 function zoneBars(place: Place, shape: SteelShape, source: ZoneBars['source']): readonly ZoneBars[] {
   const count = barCount(shape)
-  return count === 0 ? [] : [{ ...place, shape: bentShape(shape), kind: shape.kind, count, source }]
+  return count === 0 ? [] : [{ ...place, shape: bentShape(shape), kind: shape.kind, count, source, notes: [] }]
+}
+
+type PiecesOf = (place: Place, shape: SteelShape, zone: SteelZone) => readonly ZoneBars[] | null
+
+/** Edge bars, and other straight bars over the stock length, by the lengths of their pieces; null for all others. */
+function piecesFor(index: LayoutIndex, pourId: string): PiecesOf {
+  const { job } = index.layout
+  const basis = basisOf(job)
+  return (place, shape, zone) => {
+    const cut = cutOf({ index, basis, pourId }, shape, zone)
+    if (!cut) return null
+    const counts = new Map<number, number>()
+    for (const { from, to } of cut.pieces) {
+      const length = Math.round((to - from) * 10) / 10
+      counts.set(length, (counts.get(length) ?? 0) + 1)
+    }
+    return [...counts].map(([length, count]) => ({
+      ...place,
+      shape: { code: '00', diameter: shape.diameter, dimensions: { A: length }, typedLength: null, flatTurns: 0 },
+      kind: shape.kind,
+      count,
+      source: 'layout',
+      notes: cut.notes,
+    }))
+  }
+}
+
+interface Cutting {
+  readonly index: LayoutIndex
+  readonly basis: Basis
+  readonly pourId: string
+}
+
+function cutOf({ index, basis, pourId }: Cutting, shape: SteelShape, zone: SteelZone): BarPieces | null {
+  if (shape.kind === 'edge-bars') {
+    return zone.kind === 'edge' ? edgeBarPieces(index, basis, { shape, edgeId: zone.edgeId }) : null
+  }
+  const pour = index.pours.get(pourId)
+  if (!pour || !('layers' in shape) || shape.length <= index.layout.job.settings.stockLength) return null
+  const { diameter, length, count, layers } = shape
+  const [countTop, countBottom] = [layers === 'bottom' ? 0 : count, layers === 'top' ? 0 : count]
+  return straightBarPieces(index, basis, { diameter, length, pour, countTop, countBottom })
 }
 
 const LAYERS = { top: 1, bottom: 1, both: 2 } as const
 
 /** Bars of one set; where bars lie in layers there is one in each layer at every position. */
-function barCount(shape: SteelShape): number {
+export function barCount(shape: SteelShape): number {
   switch (shape.kind) {
     case 'spiral':
       return 1
@@ -132,7 +180,7 @@ function barCount(shape: SteelShape): number {
   }
 }
 
-function bentShape(shape: SteelShape): BarShape {
+export function bentShape(shape: SteelShape): BarShape {
   const bar = (code: string, dimensions: Dimensions, flatTurns = 0): BarShape => ({
     code,
     diameter: shape.diameter,
