@@ -1,10 +1,11 @@
 import { ENGINE_VERSION, toEngine, type LayoutFile } from '@wedgeline/contract'
-import { checkPour, type PourResult, type ZoneResult } from '@wedgeline/engine'
-import { write, type Connection, type Db } from '../db/client'
+import type { PourResult, ZoneResult } from '@wedgeline/engine'
+import { write, type Connection, type Db, type Tx } from '../db/client'
 import { countChange } from './stores/job'
 import type { JobKey } from './stores/job-key'
 import { loadLayout } from './stores/layout'
-import { jobsNotCheckedBy, poursAmong, putResult, resultsOf } from './stores/result'
+import { jobsNotCheckedBy, markOvertaken, poursAmong, putResult, resultsOf } from './stores/result'
+import type { CheckTask } from './workers/engine-pool'
 
 /** What the server found in some pours: what it stores is what counts. */
 export interface Checked {
@@ -23,26 +24,21 @@ export interface ToCheck {
   readonly atMs: number
 }
 
-/** Runs the engine over some pours of a layout and stores the results in place of older ones. */
-export function checkPours(db: Connection, key: JobKey, toCheck: ToCheck): Checked {
-  const found = resultsFor(toCheck)
-  putResults(db, key, { ...toCheck, found })
-  return toChecked(found)
+/** Where checks are stored, and what makes them. */
+export interface Checking {
+  readonly db: Db
+  readonly check: CheckTask
 }
 
 /**
- * The same for a layout that is stored already: the engine runs while nobody waits for the right to write, and the
- * results go in afterwards. Somebody may have stored another change meanwhile; theirs then stand.
+ * Checks some pours of a layout that is stored already: the engine runs while nobody waits for the right to write, and
+ * the results go in afterwards. Somebody may have stored another change meanwhile; theirs then stand.
  */
-export function checkStored(db: Db, key: JobKey, toCheck: ToCheck): Checked {
-  const found = resultsFor(toCheck)
+export async function checkStored({ db, check }: Checking, key: JobKey, toCheck: ToCheck): Promise<Checked> {
+  const { layout, pourIds } = toCheck
+  const found = pourIds.length === 0 ? [] : await check({ layout: toEngine(layout), pourIds })
   write(db, (tx) => putResults(tx, key, { ...toCheck, found }))
   return toChecked(found)
-}
-
-function resultsFor({ layout, pourIds }: ToCheck): PourResult[] {
-  const input = toEngine(layout)
-  return pourIds.map((pourId) => checkPour(input, { pourId, withSteps: false }))
 }
 
 interface Found extends Pick<ToCheck, 'changeNumber' | 'atMs'> {
@@ -71,22 +67,36 @@ const toChecked = (found: readonly Pick<PourResult, 'pourId' | 'zones' | 'counts
   counts: Object.fromEntries(found.map((result) => [result.pourId, result.counts])),
 })
 
-/** Checks a whole job again: after a change of its basis, its readings or its company's hardware, which counts. */
-export function recheckJob(db: Connection, key: JobKey, atMs: number): void {
-  const changeNumber = countChange(db, key)
-  const layout = loadLayout(db, key)
-  checkPours(db, key, { layout, pourIds: layout.pours.map(({ id }) => id), changeNumber, atMs })
+/**
+ * Says that no result of a job holds any longer: after a change of its basis, its readings or its company's hardware,
+ * which counts as a change of the job.
+ * @returns what is to be checked once the change is stored
+ */
+export function overtakeJob(tx: Tx, key: JobKey, atMs: number): ToCheck {
+  const changeNumber = countChange(tx, key)
+  const layout = loadLayout(tx, key)
+  const pourIds = layout.pours.map(({ id }) => id)
+  markOvertaken(tx, key, pourIds)
+  return { layout, pourIds, changeNumber, atMs }
 }
 
 /**
  * Checks every job again that holds results of another engine than this one, or none where the server stopped between
- * a change and its checks; each in a transaction of its own.
+ * a change and its checks.
  * @param onFailure told of a job that could not be checked; its old results stay, with the version that made them.
  */
-export function recheckOutdated(db: Db, atMs: number, onFailure: (key: JobKey, error: unknown) => void): void {
-  for (const key of jobsNotCheckedBy(db, ENGINE_VERSION)) {
+export async function recheckOutdated(
+  checking: Checking,
+  atMs: number,
+  onFailure: (key: JobKey, error: unknown) => void,
+): Promise<void> {
+  for (const key of jobsNotCheckedBy(checking.db, ENGINE_VERSION)) {
     try {
-      write(db, (tx) => recheckJob(tx, key, atMs))
+      await checkStored(
+        checking,
+        key,
+        write(checking.db, (tx) => overtakeJob(tx, key, atMs)),
+      )
     } catch (error) {
       onFailure(key, error)
     }

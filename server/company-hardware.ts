@@ -1,6 +1,6 @@
 import { fieldOf, hardwareProblems, type HardwareData, type JackData, type StrandTypeData } from '@wedgeline/contract'
 import { write, type Connection } from '../db/client'
-import { recheckJob } from './checking'
+import { checkStored, overtakeJob } from './checking'
 import { refused } from './failure'
 import { stampOf } from './job-call'
 import { recordAudit } from './stores/audit'
@@ -18,9 +18,9 @@ import type { CompanyCall } from './trpc/context'
 
 /** Storing what the company presses and bears on; every job that uses it is checked again. */
 
-export function saveHardware(ctx: CompanyCall, hardware: HardwareData): void {
+export async function saveHardware(ctx: CompanyCall, hardware: HardwareData): Promise<void> {
   assertSound('hardware', { hardware: [hardware], strandTypes: [] })
-  save(ctx, {
+  await save(ctx, {
     what: 'hardware.save',
     after: hardware,
     find: (company) => company.hardware.find(({ id }) => id === hardware.id),
@@ -34,8 +34,8 @@ export function saveHardware(ctx: CompanyCall, hardware: HardwareData): void {
   })
 }
 
-export function saveJack(ctx: CompanyCall, jack: JackData): void {
-  save(ctx, {
+export async function saveJack(ctx: CompanyCall, jack: JackData): Promise<void> {
+  await save(ctx, {
     what: 'hardware.saveJack',
     after: jack,
     find: (company) => company.jacks.find(({ id }) => id === jack.id),
@@ -43,9 +43,9 @@ export function saveJack(ctx: CompanyCall, jack: JackData): void {
   })
 }
 
-export function saveStrandType(ctx: CompanyCall, strandType: StrandTypeData): void {
+export async function saveStrandType(ctx: CompanyCall, strandType: StrandTypeData): Promise<void> {
   assertSound('strandType', { hardware: [], strandTypes: [strandType] })
-  save(ctx, {
+  await save(ctx, {
     what: 'hardware.saveStrandType',
     after: strandType,
     find: (company) => company.strandTypes.find(({ id }) => id === strandType.id),
@@ -68,16 +68,20 @@ interface Saving {
   readonly put: (tx: Connection, stamp: CompanyStamp) => void
 }
 
-function save(ctx: CompanyCall, { what, after, find, put }: Saving): void {
+async function save(ctx: CompanyCall, { what, after, find, put }: Saving): Promise<void> {
   const { db, company } = ctx
   const companyId = company.id
-  storing(() =>
+  const toCheck = storing(() =>
     write(db, (tx) => {
       const stamp = stampOf(ctx)
       const before = find(hardwareOf(tx, companyId)) ?? null
       put(tx, { companyId, ...stamp })
       recordAudit(tx, { companyId, jobId: null, ...stamp, what, before, after })
-      for (const jobId of jobsUsing(tx, companyId, after.id)) recheckJob(tx, { companyId, jobId }, stamp.atMs)
+      return jobsUsing(tx, companyId, after.id).map((jobId) => {
+        const key = { companyId, jobId }
+        return { key, ...overtakeJob(tx, key, stamp.atMs) }
+      })
     }),
   )
+  for (const { key, ...job } of toCheck) await checkStored(ctx, key, job)
 }

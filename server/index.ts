@@ -15,6 +15,7 @@ import { localOutbox } from './mail/local-outbox'
 import type { Mailer } from './mail/mailer'
 import { smtpMailer } from './mail/smtp'
 import { seedDemo } from './seed-demo'
+import { enginePool, type CheckTask } from './workers/engine-pool'
 
 /** Reads the environment, opens the database and listens. Everything else is in app.ts. */
 
@@ -33,28 +34,37 @@ async function serve(settings: Settings): Promise<void> {
   const log = serverLog({ level: settings.logLevel })
   mkdirSync(dirname(settings.databasePath), { recursive: true, mode: 0o700 })
   const db = openDatabase(settings.databasePath)
+  const engine = enginePool()
+  const { check } = engine
+  const server = createServer()
+  const stop = async () => {
+    server.closeAllConnections()
+    server.close()
+    await engine.close()
+    db.$client.close()
+  }
   try {
-    const server = createServer()
     const appUrl = settings.publicUrl ?? `http://localhost:${await listen(server, settings)}`
     const app = buildApp({
       db,
       files: localFiles(settings.filesDir),
       mail: mailerOf(settings, log),
       log,
+      check,
       now: Date.now,
       appUrl,
       dist: DIST,
       proxies: settings.proxies,
     })
     server.on('request', app)
-    recheckOutdated(db, Date.now(), ({ jobId }, error) =>
+    await recheckOutdated({ db, check }, Date.now(), ({ jobId }, error) =>
       log.error({ event: 'not checked', jobId, err: error }, 'A job could not be checked again'),
     )
-    stopOnSignal(server, () => db.$client.close())
-    await letFirstPeopleIn(db, { settings, appUrl })
+    stopOnSignal(server, stop)
+    await letFirstPeopleIn(db, { settings, appUrl, check })
     console.log(`Wedgeline is at ${appUrl}`)
   } catch (error) {
-    db.$client.close()
+    await stop()
     throw error
   }
 }
@@ -74,9 +84,12 @@ function listen(server: Server, { host, port }: Settings): Promise<number> {
 }
 
 /** An empty database gets the demo, or a link for its first person. Both are printed once. */
-async function letFirstPeopleIn(db: Db, { settings, appUrl }: { settings: Settings; appUrl: string }): Promise<void> {
+async function letFirstPeopleIn(
+  db: Db,
+  { settings, appUrl, check }: { settings: Settings; appUrl: string; check: CheckTask },
+): Promise<void> {
   const { isDemoWanted, publicUrl, smtpUrl, outboxDir } = settings
-  const signIns = isDemoWanted ? await seedDemo({ db, now: Date.now, publicUrl }) : null
+  const signIns = isDemoWanted ? await seedDemo({ db, check, now: Date.now, publicUrl }) : null
   if (signIns) {
     console.log('The demo is in the database. Its sign-ins, shown this once:')
     for (const { email, password, roles } of signIns) console.log(`  ${email}  ${password}  (${roles.join(', ')})`)
@@ -86,7 +99,7 @@ async function letFirstPeopleIn(db: Db, { settings, appUrl }: { settings: Settin
   if (!smtpUrl) console.log(`Mail is not sent: it goes into ${outboxDir}`)
 }
 
-function stopOnSignal(server: Server, close: () => void): void {
+function stopOnSignal(server: Server, close: () => Promise<void>): void {
   let isStopping = false
   const stop = () => {
     if (isStopping) return
@@ -94,8 +107,7 @@ function stopOnSignal(server: Server, close: () => void): void {
     const late = setTimeout(() => server.closeAllConnections(), STOP_MS)
     server.close(() => {
       clearTimeout(late)
-      close()
-      process.exit(0)
+      void close().finally(() => process.exit(0))
     })
     server.closeIdleConnections()
   }

@@ -1,7 +1,7 @@
 import { v7 as uuidv7 } from 'uuid'
 import { EDITABLE_TABLES, readLayout, type LayoutFile } from '@wedgeline/contract'
 import { write, type Connection } from '../db/client'
-import { checkPours } from './checking'
+import { checkStored, type Checking, type ToCheck } from './checking'
 import { Failure, forbidden } from './failure'
 import { stampOf, type StoringCall } from './job-call'
 import { renewIds, type KnownIds } from './layout-ids'
@@ -34,11 +34,18 @@ export interface Imported {
  * @throws Failure with every problem of a layout that cannot be read or contradicts itself, as the command line names
  * them; and for factors that are not the caller's to set.
  */
-export function importLayout(ctx: StoringCall, json: unknown): Imported {
+export async function importLayout(ctx: StoringCall & Checking, json: unknown): Promise<Imported> {
+  const { jobId, leftOut, toCheck } = storeImport(ctx, json)
+  await checkStored(ctx, { companyId: ctx.company.id, jobId }, toCheck)
+  return { jobId, leftOut }
+}
+
+/** The same without its checks, which wait until what is stored is there to stay. */
+export function storeImport(ctx: StoringCall, json: unknown): Imported & { readonly toCheck: ToCheck } {
   const { db, company, person } = ctx
   const { layout, leftOut } = permitted(ctx, soundLayout(json))
   const key: JobKey = { companyId: company.id, jobId: uuidv7() }
-  storing(() =>
+  const toCheck = storing(() =>
     write(db, (tx) => {
       const stamp = stampOf(ctx)
       const renewed = mergeHardware(tx, { jobId: key.jobId, layout, stamp: { companyId: company.id, ...stamp } })
@@ -57,10 +64,10 @@ export function importLayout(ctx: StoringCall, json: unknown): Imported {
         after: { number, title, rows, leftOut },
       })
       const pourIds = renewed.pours.map(({ id }) => id)
-      checkPours(tx, key, { layout: loadLayout(tx, key), pourIds, changeNumber: 1, atMs: stamp.atMs })
+      return { layout: loadLayout(tx, key), pourIds, changeNumber: 1, atMs: stamp.atMs }
     }),
   )
-  return { jobId: key.jobId, leftOut }
+  return { jobId: key.jobId, leftOut, toCheck }
 }
 
 function soundLayout(json: unknown): LayoutFile {

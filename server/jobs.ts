@@ -1,7 +1,7 @@
 import { isTimeZone, type JobData, type Role } from '@wedgeline/contract'
 import { BASIS_SOURCES, STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
 import { write, type Connection } from '../db/client'
-import { recheckJob } from './checking'
+import { checkStored, overtakeJob } from './checking'
 import { conflict, missing, refused } from './failure'
 import { keyOf, stampOf } from './job-call'
 import { companyAccess } from './stores/access'
@@ -139,16 +139,17 @@ export function renameJob(ctx: JobCall, change: { number: string; title: string 
  * Stores the job's basis with its factors and settings, and checks every pour again.
  * @throws Failure for a factor that the basis does not have or whose value lies outside its range.
  */
-export function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'settings' | 'factors'>): void {
+export async function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'settings' | 'factors'>): Promise<void> {
   const key = keyOf(ctx)
   assertFactors(change)
-  write(ctx.db, (tx) => {
+  const toCheck = write(ctx.db, (tx) => {
     const stamp = stampOf(ctx)
     const { basis, settings, factors } = jobData(tx, key)
     updateJobBasis(tx, key, { ...change, stamp })
     recordAudit(tx, { ...key, ...stamp, what: 'job.setBasis', before: { basis, settings, factors }, after: change })
-    recheckJob(tx, key, stamp.atMs)
+    return overtakeJob(tx, key, stamp.atMs)
   })
+  await checkStored(ctx, key, toCheck)
 }
 
 function assertFactors(job: Pick<JobData, 'basis' | 'factors'>): void {

@@ -37,11 +37,11 @@ export interface BatchAnswer extends Checked {
  * @throws Failure when the batch is stale (with both values), its id was used for something else, or the change is
  * not the person's to make; CommandError when a row cannot be taken.
  */
-export function applyBatch(ctx: JobCall, batch: Batch): BatchAnswer {
+export async function applyBatch(ctx: JobCall, batch: Batch): Promise<BatchAnswer> {
   const { db } = ctx
   const key = keyOf(ctx)
   const { versions, pourIds, toCheck } = storing(() => write(db, (tx) => storeBatch(ctx, tx, batch)))
-  const checked = toCheck ? checkStored(db, key, toCheck) : latestResults(db, key, pourIds)
+  const checked = toCheck ? await checkStored(ctx, key, toCheck) : latestResults(db, key, pourIds)
   return { versions, ...checked }
 }
 

@@ -1,6 +1,6 @@
 import { BASIS_SOURCES } from '@wedgeline/engine'
 import { write } from '../db/client'
-import { recheckJob } from './checking'
+import { checkStored, overtakeJob } from './checking'
 import { conflict, missing, refused } from './failure'
 import { keyOf, stampOf } from './job-call'
 import { recordAudit } from './stores/audit'
@@ -11,10 +11,13 @@ import type { JobCall } from './trpc/context'
  * Accepts a reading of the job's basis in the caller's name and checks every pour again.
  * @throws Failure for a reading that the basis does not offer or that is accepted already.
  */
-export function acceptReading(ctx: JobCall, { readingId, reason }: { readingId: string; reason: string }): void {
+export async function acceptReading(
+  ctx: JobCall,
+  { readingId, reason }: { readingId: string; reason: string },
+): Promise<void> {
   const { db, person } = ctx
   const key = keyOf(ctx)
-  write(db, (tx) => {
+  const toCheck = write(db, (tx) => {
     const { basis } = jobRow(tx, key)
     const offered = BASIS_SOURCES.find(({ id }) => id === basis)?.readings ?? []
     if (!offered.some(({ id }) => id === readingId)) {
@@ -30,19 +33,21 @@ export function acceptReading(ctx: JobCall, { readingId, reason }: { readingId: 
     const reading = { readingId, acceptedBy: person.name, acceptedAtMs: stamp.atMs, reason }
     insertReading(tx, key, { ...reading, personId: person.id })
     recordAudit(tx, { ...key, ...stamp, what: 'reading.accept', before: null, after: reading })
-    recheckJob(tx, key, stamp.atMs)
+    return overtakeJob(tx, key, stamp.atMs)
   })
+  await checkStored(ctx, key, toCheck)
 }
 
 /** @throws Failure for a reading that is not accepted. */
-export function withdrawReading(ctx: JobCall, readingId: string): void {
+export async function withdrawReading(ctx: JobCall, readingId: string): Promise<void> {
   const key = keyOf(ctx)
-  write(ctx.db, (tx) => {
+  const toCheck = write(ctx.db, (tx) => {
     const before = readingsOf(tx, key).find((each) => each.readingId === readingId)
     if (!before) throw missing('This reading is not accepted for this job.')
     const stamp = stampOf(ctx)
     deleteReading(tx, key, readingId)
     recordAudit(tx, { ...key, ...stamp, what: 'reading.withdraw', before, after: null })
-    recheckJob(tx, key, stamp.atMs)
+    return overtakeJob(tx, key, stamp.atMs)
   })
+  await checkStored(ctx, key, toCheck)
 }

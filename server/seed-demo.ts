@@ -1,12 +1,14 @@
 import { randomInt } from 'node:crypto'
 import { v7 as uuidv7 } from 'uuid'
-import { write, type Db, type Tx } from '../db/client'
+import { write, type Tx } from '../db/client'
 import { DEMO_COMPANY, DEMO_PEOPLE, type DemoPerson } from '../db/seed/demo-company'
 import { demoLayout } from '../db/seed/demo-layout'
-import { importLayout } from './job-import'
+import { checkStored, type Checking, type ToCheck } from './checking'
+import { storeImport } from './job-import'
 import { hashPassword } from './password'
 import { insertCompany } from './stores/company'
 import { insertJobMember } from './stores/job'
+import type { JobKey } from './stores/job-key'
 import { hasAnyPerson, insertPerson, setMember } from './stores/person'
 
 export interface DemoSignIn extends DemoPerson {
@@ -14,8 +16,7 @@ export interface DemoSignIn extends DemoPerson {
   readonly password: string
 }
 
-export interface DemoSeeding {
-  readonly db: Db
+export interface DemoSeeding extends Checking {
   readonly now: () => number
   /** Null unless other machines reach this server. */
   readonly publicUrl: string | null
@@ -27,11 +28,12 @@ export interface DemoSeeding {
  * @returns sign-ins to show once; null where there is anybody in the database already.
  * @throws where the server is reachable under a public address: the demo is not for there.
  */
-export async function seedDemo({ db, now, publicUrl }: DemoSeeding): Promise<readonly DemoSignIn[] | null> {
+export async function seedDemo({ db, check, now, publicUrl }: DemoSeeding): Promise<readonly DemoSignIn[] | null> {
   if (publicUrl !== null) throw new Error(`The demo does not go onto a server that is reachable at ${publicUrl}.`)
   if (hasAnyPerson(db)) return null
   const people = await Promise.all(DEMO_PEOPLE.map(withPassword))
-  write(db, (tx) => storeDemo(tx, { db, now }, people))
+  const { key, toCheck } = write(db, (tx) => storeDemo(tx, { db, now }, people))
+  await checkStored({ db, check }, key, toCheck)
   return people.map(({ name, email, roles, password }) => ({ name, email, roles, password }))
 }
 
@@ -51,7 +53,11 @@ const newPassword = (): string => Array.from({ length: 4 }, newGroup).join('-')
 const newGroup = (): string => Array.from({ length: 4 }, () => SIGNS[randomInt(SIGNS.length)]).join('')
 
 /** In one transaction; what the import does in its own becomes part of it. */
-function storeDemo(tx: Tx, { db, now }: Pick<DemoSeeding, 'db' | 'now'>, people: readonly NewPerson[]): void {
+function storeDemo(
+  tx: Tx,
+  { db, now }: Pick<DemoSeeding, 'db' | 'now'>,
+  people: readonly NewPerson[],
+): { key: JobKey; toCheck: ToCheck } {
   const companyId = uuidv7()
   const nowMs = now()
   insertCompany(tx, { id: companyId, ...DEMO_COMPANY, nowMs })
@@ -61,10 +67,11 @@ function storeDemo(tx: Tx, { db, now }: Pick<DemoSeeding, 'db' | 'now'>, people:
   }
   const detailer = people.find(({ roles }) => roles.includes('detailer'))
   if (!detailer) throw new Error('The demo has no detailer to make its job.')
-  const { jobId } = importLayout(
+  const { jobId, toCheck } = storeImport(
     { db, now, person: detailer, company: { id: companyId, roles: detailer.roles } },
     demoLayout(),
   )
   const stamp = { personId: detailer.id, atMs: now() }
   for (const { id } of people) insertJobMember(tx, { companyId, jobId }, { personId: id, stamp })
+  return { key: { companyId, jobId }, toCheck }
 }

@@ -5,6 +5,7 @@ import { recheckOutdated } from '@/server/checking'
 import { recordAudit } from '@/server/stores/audit'
 import { addCompany, openTestCompany, type Caller, type TestCompany } from './company'
 import { sampleLayout } from './layout-sample'
+import { checkHere } from './check-here'
 
 let company: TestCompany
 let detailer: Caller
@@ -116,7 +117,7 @@ describe('results of an older engine', () => {
     const sql = company.db.$client
     sql.exec(`update pour_result set engine_version = '0.0.0+old', counts = '{}'`)
     const failures: unknown[] = []
-    recheckOutdated(company.db, 1, (_key, error) => failures.push(error))
+    await recheckOutdated({ db: company.db, check: checkHere }, 1, (_key, error) => failures.push(error))
     expect(failures).toEqual([])
     expect(sql.prepare('select engine_version from pour_result').pluck().all()).toEqual([ENGINE_VERSION])
     expect((await detailer.job.list())[0]?.pours[0]?.counts).toHaveProperty('over')

@@ -10,6 +10,7 @@ import { checkStored, recheckOutdated } from '@/server/checking'
 import { batchFor, failure, first, setAnchor, type Seen } from './batches'
 import { companyOn, openTestCompany, type Caller, type TestCompany } from './company'
 import { sampleLayout } from './layout-sample'
+import { checkHere } from './check-here'
 
 let company: TestCompany
 let detailer: Caller
@@ -225,10 +226,15 @@ describe('results', () => {
     const key = { companyId: company.id, jobId }
     const pourIds = [first(seen.layout.pours).id]
     const check = (changeNumber: number) =>
-      checkStored(company.db, key, { layout: { ...seen.layout, anchors: [] }, pourIds, changeNumber, atMs: 0 })
-    check(later.change_number - 1)
+      checkStored({ db: company.db, check: checkHere }, key, {
+        layout: { ...seen.layout, anchors: [] },
+        pourIds,
+        changeNumber,
+        atMs: 0,
+      })
+    await check(later.change_number - 1)
     expect(storedResult()).toEqual(later)
-    check(later.change_number)
+    await check(later.change_number)
     expect(storedResult().counts).not.toBe(later.counts)
   })
 
@@ -237,7 +243,9 @@ describe('results', () => {
     const toCheck = { layout, pourIds: [first(layout.pours).id], changeNumber: 9, atMs: 0 }
     company.db.$client.exec('delete from pour_result')
     company.db.$client.exec(`pragma foreign_keys = off; update pour set id = 'other'; pragma foreign_keys = on`)
-    expect(checkStored(company.db, { companyId: company.id, jobId }, toCheck).results.length).toBeGreaterThan(0)
+    const checking = { db: company.db, check: checkHere }
+    const { results } = await checkStored(checking, { companyId: company.id, jobId }, toCheck)
+    expect(results.length).toBeGreaterThan(0)
     expect(storedResult()).toBeUndefined()
   })
 
@@ -251,7 +259,7 @@ describe('results', () => {
     expect(await detailer.layout.applyBatch(batch)).toEqual(answer)
     expect(storedResult().counts).toBe(right.counts)
     stopBefore()
-    recheckOutdated(company.db, 0, (_key, error) => {
+    await recheckOutdated({ db: company.db, check: checkHere }, 0, (_key, error) => {
       throw error
     })
     expect(storedResult()).toMatchObject({ engine_version: ENGINE_VERSION, counts: right.counts })

@@ -7,6 +7,7 @@ import { seedDemo } from '@/server/seed-demo'
 import { companiesOf, credentialsByEmail } from '@/server/stores/person'
 import { jobPeople, jobsOf } from '@/server/stores/job'
 import { loadLayout } from '@/server/stores/layout'
+import { checkHere } from './check-here'
 
 let db: Db
 beforeEach(() => {
@@ -18,7 +19,7 @@ const NOW = () => Date.UTC(2026, 0, 5, 8)
 
 describe('the demo in an empty database', () => {
   test('has one company, a person for each role and the job with all of them on it', async () => {
-    const signIns = (await seedDemo({ db, now: NOW, publicUrl: null })) ?? []
+    const signIns = (await seedDemo({ db, check: checkHere, now: NOW, publicUrl: null })) ?? []
     expect(signIns.map(({ email }) => email)).toEqual(DEMO_PEOPLE.map(({ email }) => email))
     expect(new Set(signIns.map(({ password }) => password)).size).toBe(5)
     for (const { email, password, roles } of signIns) {
@@ -34,7 +35,7 @@ describe('the demo in an empty database', () => {
   })
 
   test('keeps every row of the layout, and waits for the engineer: no reading is accepted', async () => {
-    await seedDemo({ db, now: NOW, publicUrl: null })
+    await seedDemo({ db, check: checkHere, now: NOW, publicUrl: null })
     const person = credentialsByEmail(db, DEMO_PEOPLE[0]?.email ?? '')
     const job = jobsOf(db, person?.id ?? '')[0]
     const company = companiesOf(db, person?.id ?? '')[0]
@@ -59,12 +60,14 @@ describe('the demo in an empty database', () => {
   })
 
   test('leaves a database with people in it alone', async () => {
-    await seedDemo({ db, now: NOW, publicUrl: null })
-    expect(await seedDemo({ db, now: NOW, publicUrl: null })).toBeNull()
+    await seedDemo({ db, check: checkHere, now: NOW, publicUrl: null })
+    expect(await seedDemo({ db, check: checkHere, now: NOW, publicUrl: null })).toBeNull()
   })
 
   test('is refused on a server with a public address, and stores nothing', async () => {
-    await expect(seedDemo({ db, now: NOW, publicUrl: 'https://floors.example' })).rejects.toThrow(/public|reachable/)
+    await expect(seedDemo({ db, check: checkHere, now: NOW, publicUrl: 'https://floors.example' })).rejects.toThrow(
+      /public|reachable/,
+    )
     expect(credentialsByEmail(db, DEMO_PEOPLE[0]?.email ?? '')).toBeUndefined()
   })
 })
