@@ -4,6 +4,17 @@ import type { Anchorage, AnchorageInput } from './basis'
 /** EN 1992-1-1:2004, 8.4 and 8.7: how far a bar must run on before it carries its stress. */
 const ANCHORAGE: Clause = { source: 'EN 1992-1-1:2004', section: '8.4.2 to 8.4.4', tag: 'digest' }
 
+/** Laps: Eq. 8.10 and 8.11; alpha 6 from memory. */
+export const LAP: Clause = { source: 'EN 1992-1-1:2004', section: '8.7.3', tag: 'memory' }
+
+const LINK_HOOK: Clause = { source: 'EN 1992-1-1:2004', section: '8.5, Fig. 8.5', tag: 'memory' }
+
+/** A link bent by 90 degrees runs on straight for 10 d and 70 mm at least (8.5, Fig. 8.5; from memory). */
+export const linkHook = (diameter: number): { readonly length: number; readonly clause: Clause } => ({
+  length: Math.max(10 * diameter, 70),
+  clause: LINK_HOOK,
+})
+
 interface BondFactors {
   readonly gammaC: number
   readonly alphaCt: number
@@ -19,7 +30,7 @@ const GOOD_BOND_DEPTH_MAX = 250
 export const isGoodBond = (depth: number): boolean => depth <= GOOD_BOND_DEPTH_MAX
 
 /** Mean tensile strength, MPa (Table 3.1). */
-const meanTensile = (fck: number): number =>
+export const meanTensile = (fck: number): number =>
   fck <= 50 ? 0.3 * Math.cbrt(fck) ** 2 : 2.12 * Math.log(1 + (fck + 8) / 10)
 
 const between = (least: number, value: number, most: number): number => Math.min(Math.max(value, least), most)

@@ -11,8 +11,22 @@ import type {
   TieInput,
   TieRule,
 } from './basis'
-import { anchorage, isGoodBond, lap } from './en-1992-anchorage'
-import { EN_OWN_PRISM, EN_READINGS, EN_STEEL_300, EN_STEEL_ALT, EN_WINDOW } from './en-1992-readings'
+import { LAP, linkHook, anchorage, isGoodBond, lap } from './en-1992-anchorage'
+import { crackChoices } from './en-1992-crack'
+import { faceSteel } from './en-1992-face'
+import {
+  EN_DEAD_END,
+  EN_JOINT,
+  EN_OWN_PRISM,
+  EN_READINGS,
+  EN_STEEL_300,
+  EN_STEEL_ALT,
+  EN_TIE_BACK,
+  EN_TIE_BACK_OWN,
+  EN_WINDOW,
+} from './en-1992-readings'
+import { transmission } from './en-1992-transmission'
+import { otherTieBacks, tieBack } from './tie-back'
 
 const SOURCE = 'EN 1992-1-1:2004'
 const clause = (section: string, tag: Clause['tag']): Clause => ({ source: SOURCE, section, tag })
@@ -135,6 +149,12 @@ export const EN_1992: BasisSource = {
   title: 'EN 1992-1-1:2004',
   factors: FACTORS,
   readings: EN_READINGS,
+  friction: {
+    family: 'inside',
+    mu: '0.15 to 0.25, nominal 0.19',
+    wobble: '0.005 to 0.01',
+    clause: clause('5.10.5.2 Eq. 5.45', 'memory'),
+  },
   make,
 }
 
@@ -162,9 +182,23 @@ function make(input: BasisInput): Basis {
     bearing: (one) => bearing(one, values),
     tie: (one) => tie(one, { values, fyk: input.fyk, steelReading }),
     window: (b) => ({ from: 0.2 * b, to: b }),
+    faceSteel: (one) => faceSteel(one, faceFactors(values, input.fyk, steelReading)),
+    planRow: { equalReadingId: null, isUnevenCovered: true, clause: TIE },
+    crackChoices: crackChoices(input.fyk),
+    tieBack: {
+      readingId: EN_TIE_BACK,
+      ownReadingId: EN_TIE_BACK_OWN,
+      rule: (one) => tieBack(one, input.fyk),
+      beside: otherTieBacks,
+    },
+    transmission: (one) => transmission(one, values),
+    deadEndReading: EN_DEAD_END,
+    jointReading: EN_JOINT,
     anchorage: (one) => anchorage(one, values),
     isGoodBond,
     lap: (one, share) => lap(one, share, values),
+    barStress: input.fyk / values.gammaS,
+    linkHook,
     spread: { value: Math.atan(2 / 3), clause: SPREAD },
     inclinationMax: { value: (20 * Math.PI) / 180, clause: INCLINATION },
     clauses: {
@@ -172,6 +206,7 @@ function make(input: BasisInput): Basis {
       tie: TIE,
       window: EN_READINGS.find(({ id }) => id === EN_WINDOW)?.clause ?? TIE,
       bearing: BEARING,
+      lap: LAP,
     },
   }
 }
@@ -182,6 +217,12 @@ function steelReadingOf(readings: readonly AcceptedReading[]): string {
     .filter(({ readingId }) => readingId === EN_STEEL_300 || readingId === EN_STEEL_ALT)
     .sort((one, other) => other.acceptedAtMs - one.acceptedAtMs)
   return last?.readingId ?? EN_STEEL_300
+}
+
+/** By the job's bursting reading: 300 MPa for the factored force, or the smaller of yield and 1.2 times 300 MPa. */
+function faceFactors({ gammaP, gammaS, sigmaS }: FactorValues, fyk: number, steelReading: string) {
+  const stress = steelReading === EN_STEEL_300 ? sigmaS : Math.min(fyk / gammaS, gammaP * sigmaS)
+  return { gammaP, gammaS, fyk, stress, stressClause: CRACK_STRESS }
 }
 
 /** The strand's characteristic strengths are given as loads of one strand, so stress limits become force limits. */
@@ -253,7 +294,13 @@ function bearing(input: BearingInput, { gammaP, gammaC, alphaCc }: FactorValues)
     { fcd: fcd.value, Ac1: supporting, Ac0: gross },
     (v) => Math.min(v.fcd * Math.sqrt(v.Ac1 / v.Ac0), 3 * v.fcd),
   )
-  return { demand: stress.value, limit: limit.value, clause: BEARING, steps: [F, ...areas, stress, fcd, limit] }
+  return {
+    demand: stress.value,
+    limit: limit.value,
+    clause: BEARING,
+    steps: [F, ...areas, stress, fcd, limit],
+    notes: [],
+  }
 }
 
 /** Gross, net and supporting area, mm2. */
@@ -320,7 +367,7 @@ function tie({ P, a, b }: TieInput, how: { values: FactorValues; fyk: number; st
       { T: T.value, sigmaS },
       (v) => v.T / v.sigmaS,
     )
-    return { area: As.value, stress: sigmaS, clause: TIE, steps: [F, T, As] }
+    return { area: As.value, stress: sigmaS, clause: TIE, steps: [F, T, As], notes: [] }
   }
   const fyd = step(
     { symbol: 'fyd', meaning: 'Design yield strength', formula: 'fyk / gammaS', unit: 'MPa', clause: YIELD },
@@ -338,5 +385,5 @@ function tie({ P, a, b }: TieInput, how: { values: FactorValues; fyk: number; st
     { T: T.value, fyd: fyd.value, gammaP, sigmaS },
     (v) => Math.max(v.T / v.fyd, v.T / v.gammaP / v.sigmaS),
   )
-  return { area: As.value, stress: T.value / As.value, clause: TIE, steps: [F, T, fyd, As] }
+  return { area: As.value, stress: T.value / As.value, clause: TIE, steps: [F, T, fyd, As], notes: [] }
 }

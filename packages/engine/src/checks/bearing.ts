@@ -47,7 +47,7 @@ function bearingByFormula(site: AnchorSite, stage: Stage, context: CheckContext)
     return refusal(head, { code: 'OUTSIDE_METHOD', field: 'hardware.hole', message })
   }
   const { rule, steps } = formula(site, stage, context)
-  const notes = ['The net area gives the pressure, the gross area the ratio of areas.']
+  const notes = ['The net area gives the pressure, the gross area the ratio of areas.', ...rule.notes]
   return byRatio(
     context,
     { ...head, clause: rule.clause, notes },

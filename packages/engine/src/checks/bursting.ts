@@ -118,7 +118,7 @@ function burst(asked: Asked, head: Head): Compared {
     .filter((answer) => answer !== governing)
     .map((answer) => otherNote(answer, governing, asked.plane))
   const face = faceNote(governing, basis.window(governing.prism.b.value))
-  const readings = [basis.windowReading, basis.steelReading, ...asked.readings]
+  const readings = [basis.windowReading, basis.steelReading, ...asked.readings].filter((id) => id !== null)
   const result = byRatio(
     context,
     {
@@ -126,7 +126,8 @@ function burst(asked: Asked, head: Head): Compared {
       stage: governing.stage.name,
       clause: governing.rule.clause,
       notes: [
-        `Rests on these readings: ${readings.map((id) => titleOf(basis, id)).join('; ')}.`,
+        ...restsOn(basis, readings),
+        ...governing.rule.notes,
         ...others,
         ...notes,
         ...steel.notes,
@@ -144,6 +145,9 @@ function burst(asked: Asked, head: Head): Compared {
   )
   return face === null ? result : judged(result)
 }
+
+const restsOn = (basis: Basis, readings: readonly string[]): readonly string[] =>
+  readings.length === 0 ? [] : [`Rests on these readings: ${readings.map((id) => titleOf(basis, id)).join('; ')}.`]
 
 const titleOf = ({ readings }: Basis, readingId: string): string =>
   readings.find(({ id }) => id === readingId)?.title ?? readingId
