@@ -165,6 +165,7 @@ describe('zones of a pour', () => {
       'E1 gap start to 03',
       'E1-03',
       'E1 gap 03 to 04',
+      'E1-03 to 04 together',
       'E1-04',
       'E1 gap 04 to end',
     ])

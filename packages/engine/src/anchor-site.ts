@@ -1,12 +1,14 @@
-/** Everything round one anchor at an edge that its checks ask for, gathered once. */
+/** Everything round one anchor, at an edge or in a pan, that its checks ask for, gathered once. */
 
 import { facesFromCentre, type NearFace } from './faces'
-import { jackingForce } from './force'
-import type { EdgeFrame } from './frame'
-import { cross, ROUNDING, subtract } from './geometry'
+import { anchorageForce, jackingForce, type AnchorageForce } from './force'
+import type { AnchorFrame, EdgeFrame } from './frame'
+import { cross, isInside, ROUNDING, subtract } from './geometry'
 import { found, type LayoutIndex } from './layout-index'
-import { neighboursOf } from './neighbours'
-import type { Anchor, Edge, Hardware, Pour, StrandType, Tendon } from './model'
+import { perConcrete } from './memo'
+import type { Anchor, Edge, Hardware, Pan, Pour, StrandType, Tendon } from './model'
+import { neighboursOf, rowOfPan } from './neighbours'
+import { panFrame } from './pan-frame'
 
 /** Another anchor of the same row, with the distances between the two centres. */
 interface Neighbour {
@@ -22,13 +24,19 @@ export interface AnchorSite {
   readonly tendon: Tendon
   readonly strand: StrandType
   readonly pour: Pour
-  readonly edge: Edge
-  readonly frame: EdgeFrame
+  /** Of edge and pan exactly one is there. */
+  readonly edge: Edge | null
+  readonly pan: Pan | null
+  readonly frame: AnchorFrame
+  /** While jacking, all stages done: what bearing, bursting and spalling are checked for. */
+  readonly force: AnchorageForce
   readonly top: number
   readonly soffit: number
   /** From the anchor's centre to the concrete above and below. */
   readonly toTop: number
   readonly toSoffit: number
+  /** From the centre down to the floor of the recess in front of a pan's bearing face; null at an edge. */
+  readonly toFloor: number | null
   /** From the centre to the ends of the edge; null where the slab goes on past that end. */
   readonly toStart: number | null
   readonly toEnd: number | null
@@ -40,14 +48,24 @@ export interface AnchorSite {
   /** Likewise to the next anchor across a pour boundary, once both pours are cast; null where none is there. */
   readonly jointGapBefore: number | null
   readonly jointGapAfter: number | null
+  /** Anchors of its row that a rule for few anchors has to do with, itself among them. */
+  readonly rowCount: number
   /** Stands inside a near-equal row: five or more anchors of one force, no gap over 1.2 of the smallest, not the outermost. */
   readonly isInEqualRow: boolean
   /** Anchors near enough for spread or spacing to matter, nearest along the edge first. */
   readonly neighbours: readonly Neighbour[]
 }
 
+/** The site of any anchor; made once for each. */
+export function siteOfAnchor(index: LayoutIndex, anchor: Anchor): AnchorSite {
+  if (anchor.edgeId === null) return siteInPan(index, anchor.id)
+  return found(sitesOfEdge(index, anchor.edgeId), anchor.id, 'anchor')
+}
+
 /** The sites of all anchors of an edge, by anchor id. */
-export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<string, AnchorSite> {
+export const sitesOfEdge = perConcrete(makeSites)
+
+function makeSites(index: LayoutIndex, edgeId: string): ReadonlyMap<string, AnchorSite> {
   const edge = found(index.edges, edgeId, 'edge')
   const frame = found(index.frames, edgeId, 'edge')
   const pour = found(index.pours, edge.pourId, 'pour')
@@ -58,22 +76,15 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
   const boundary = acrossBoundary(index, edge, frame)
   return new Map(
     anchors.map((anchor, at): [string, AnchorSite] => {
-      const tendon = found(index.tendons, anchor.tendonId, 'tendon')
-      const { topAt, soffitAt } = frame
       const [before, after] = [halfGap(anchors, at, -1), halfGap(anchors, at, 1)]
-      const [top, soffit] = [topAt(anchor.chainage), soffitAt(anchor.chainage)]
       const site: AnchorSite = {
-        anchor,
-        hardware: found(index.hardware, anchor.hardwareId, 'hardware'),
-        tendon,
-        strand: found(index.strandTypes, tendon.strandTypeId, 'strand type'),
+        ...partsOf(index, anchor),
+        ...heightsOf(frame, anchor),
         pour,
         edge,
+        pan: null,
         frame,
-        top,
-        soffit,
-        toTop: top - anchor.height,
-        toSoffit: anchor.height - soffit,
+        toFloor: null,
         toStart: goesOn.start ? null : anchor.chainage - frame.from,
         toEnd: goesOn.end ? null : frame.to - anchor.chainage,
         sideFace: facesFromCentre(index, anchor)[0] ?? null,
@@ -81,6 +92,7 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
         halfGapAfter: after,
         jointGapBefore: before === null ? gapAcross(anchor, boundary.before) : null,
         jointGapAfter: after === null ? gapAcross(anchor, boundary.after) : null,
+        rowCount: anchors.length,
         isInEqualRow: isEqual && at > 0 && at < anchors.length - 1,
         neighbours: nearRow(index, anchor, reach),
       }
@@ -89,14 +101,66 @@ export function sitesOfEdge(index: LayoutIndex, edgeId: string): ReadonlyMap<str
   )
 }
 
+/** Behind a pan's bearing face the slab has its whole thickness; its ends are faces of concrete beside the face. */
+const siteInPan = perConcrete((index, anchorId): AnchorSite => {
+  const anchor = found(index.anchors, anchorId, 'anchor')
+  const pan = found(index.pans, anchor.panId ?? '', 'pan')
+  const frame = panFrame(index, pan.id)
+  const row = rowOfPan(index, anchor)
+  const at = row.findIndex(({ id }) => id === anchorId)
+  const heights = heightsOf(frame, anchor)
+  return {
+    ...partsOf(index, anchor),
+    ...heights,
+    pour: found(index.pours, pan.pourId, 'pour'),
+    edge: null,
+    pan,
+    frame,
+    toFloor: anchor.height - (heights.top - pan.depth),
+    toStart: anchor.chainage - frame.from,
+    toEnd: frame.to - anchor.chainage,
+    sideFace: facesFromCentre(index, anchor)[0] ?? null,
+    halfGapBefore: halfGap(row, at, -1),
+    halfGapAfter: halfGap(row, at, 1),
+    jointGapBefore: null,
+    jointGapAfter: null,
+    rowCount: row.length,
+    isInEqualRow: false,
+    neighbours: nearRow(index, anchor, reachOf(index, row)),
+  }
+})
+
+function partsOf(index: LayoutIndex, anchor: Anchor) {
+  const tendon = found(index.tendons, anchor.tendonId, 'tendon')
+  return {
+    anchor,
+    hardware: found(index.hardware, anchor.hardwareId, 'hardware'),
+    tendon,
+    strand: found(index.strandTypes, tendon.strandTypeId, 'strand type'),
+    force: anchorageForce(index, anchor),
+  }
+}
+
+function heightsOf({ topAt, soffitAt }: AnchorFrame, { chainage, height }: Anchor) {
+  const [top, soffit] = [topAt(chainage), soffitAt(chainage)]
+  return { top, soffit, toTop: top - height, toSoffit: height - soffit }
+}
+
 /** Distance to the nearer of soffit and top. */
 export const nearerFace = ({ toTop, toSoffit }: AnchorSite): number => Math.min(toTop, toSoffit)
 
-/** Why no rule for a plate holds: another kind of hardware, or a centre that is not in the concrete; null where one may. */
+/** A dead end whose strands bond in the concrete: no plate bears, and rules for plates say nothing of it. */
+export const isBonded = ({ anchor, hardware }: Pick<AnchorSite, 'anchor' | 'hardware'>): boolean =>
+  anchor.end === 'dead' && hardware.kind === 'bonded-splay'
+
+/** Why no rule holds: hardware of another end, or a centre that is not in the concrete; null where one may. */
 export function whyNoRule(site: AnchorSite): { readonly field: string; readonly message: string } | null {
-  const { anchor, frame, hardware, top, soffit } = site
-  if (hardware.kind !== 'plate') {
+  const { anchor, frame, hardware, top, soffit, pan, pour } = site
+  if (hardware.kind !== 'plate' && !isBonded(site)) {
     return { field: 'hardwareId', message: `${hardware.name} is a bonded dead end; a live anchor needs a plate.` }
+  }
+  if (pan !== null && !isInside(pan, pour.outline)) {
+    return { field: 'pan.x', message: `The bearing face of pan ${pan.mark} is not within the outline of the pour.` }
   }
   if (nearerFace(site) <= 0) {
     const message = `The centre at height ${anchor.height} is not between soffit (${soffit}) and top (${top}).`

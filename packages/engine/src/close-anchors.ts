@@ -4,6 +4,7 @@ import { jackingForce } from './force'
 import type { EdgeFrame } from './frame'
 import { ROUNDING } from './geometry'
 import { found, type LayoutIndex } from './layout-index'
+import { perConcrete } from './memo'
 import type { Anchor } from './model'
 import { step, type Clause, type Step } from './step'
 
@@ -37,7 +38,8 @@ interface Pair {
  *
  * The larger of twice the wider plate and 0.3 of the prism that the pair would have as one anchor.
  */
-export function closeBelow({ plate, toOuterBefore, toOuterAfter }: Omit<Pair, 'spacing'>): Step {
+export function closeBelow(pair: Omit<Pair, 'spacing'>): Step {
+  const { plate, toOuterBefore, toOuterAfter } = pair
   return step(
     {
       symbol: 'sc',
@@ -47,18 +49,21 @@ export function closeBelow({ plate, toOuterBefore, toOuterAfter }: Omit<Pair, 's
       clause: PLAN,
     },
     { a: plate, l1: toOuterBefore, l2: toOuterAfter },
-    (v) => Math.max(PLATES_APART * v.a, PRISM_SHARE * 2 * Math.min(v.l1, v.l2)),
+    () => limitOf(pair),
   )
 }
 
+const limitOf = ({ plate, toOuterBefore, toOuterAfter }: Omit<Pair, 'spacing'>): number =>
+  Math.max(PLATES_APART * plate, PRISM_SHARE * 2 * Math.min(toOuterBefore, toOuterAfter))
+
 /** Whether a pair acts as one in plan. */
-export const actsAsOne = ({ spacing, ...pair }: Pair): boolean => spacing < closeBelow(pair).value - ROUNDING
+export const actsAsOne = (pair: Pair): boolean => pair.spacing < limitOf(pair) - ROUNDING
 
 /** Every group of two or more anchors of an edge that act as one, in plan and in the thickness. */
-export function closeAnchors(index: LayoutIndex, edgeId: string): CloseGroup[] {
+export const closeAnchors = perConcrete((index, edgeId): readonly CloseGroup[] => {
   const anchors = index.anchorsOfEdge.get(edgeId) ?? []
   return [...closeInPlan(index, edgeId, anchors), ...closeInThickness(index, edgeId, anchors)]
-}
+})
 
 // In plan -----------------------------------------------------------------------------------------------------------
 
@@ -109,27 +114,29 @@ function forceOf(index: LayoutIndex, anchor: Anchor): number {
   return jackingForce(tendon, strand).value
 }
 
-interface ClosePair {
+interface ClosePair extends Pair {
   /** Place of its first cluster. */
   readonly at: number
-  readonly spacing: number
-  readonly limit: Step
 }
 
+/** In numbers alone: a pair is looked at in every round, and written out as a step once, when it is joined. */
 function closePairs(frame: EdgeFrame, clusters: readonly Cluster[]): ClosePair[] {
-  return clusters.flatMap((first, at): ClosePair[] => {
+  const close: ClosePair[] = []
+  for (const [at, first] of clusters.entries()) {
     const second = clusters[at + 1]
-    if (!second) return []
+    if (!second) break
     const [before, after] = [clusters[at - 1], clusters[at + 2]]
     const centre = centreOf(first, second)
-    const spacing = second.from - first.to
-    const limit = closeBelow({
+    const pair: ClosePair = {
+      at,
+      spacing: second.from - first.to,
       plate: Math.max(first.plate, second.plate),
       toOuterBefore: centre - (before ? (before.to + first.from) / 2 : frame.from),
       toOuterAfter: (after ? (second.to + after.from) / 2 : frame.to) - centre,
-    })
-    return spacing < limit.value - ROUNDING ? [{ at, spacing, limit }] : []
-  })
+    }
+    if (actsAsOne(pair)) close.push(pair)
+  }
+  return close
 }
 
 /** Pairs equally near are joined in the same round, so that an edge read from its other end gives the same groups. */
@@ -143,7 +150,7 @@ function joined(clusters: readonly Cluster[], pairs: ReadonlyMap<number, ClosePa
   for (const [i, cluster] of clusters.entries()) {
     const pair = pairs.get(i - 1)
     const last = pair && result.pop()
-    result.push(pair && last ? join(last, cluster, pair.limit) : cluster)
+    result.push(pair && last ? join(last, cluster, closeBelow(pair)) : cluster)
   }
   return result
 }
@@ -171,18 +178,35 @@ function closeInThickness(index: LayoutIndex, edgeId: string, anchors: readonly 
   const frame = found(index.frames, edgeId, 'edge')
   const halfOf = (anchor: Anchor) => found(index.hardware, anchor.hardwareId, 'hardware').plate.width / 2
   const widest = anchors.reduce((most, anchor) => Math.max(most, halfOf(anchor)), 0)
-  const groups: CloseGroup[] = []
+  let groups: CloseGroup[] = []
   for (const [i, first] of anchors.entries()) {
-    const limit = depthStep(frame.topAt(first.chainage) - frame.soffitAt(first.chainage))
+    const depth = frame.topAt(first.chainage) - frame.soffitAt(first.chainage)
     for (let j = i + 1; j < anchors.length; j++) {
       const second = anchors[j]
       if (!second || second.chainage - first.chainage >= halfOf(first) + widest) break
       const isAbove = second.chainage - first.chainage < halfOf(first) + halfOf(second) - ROUNDING
-      const isClose = Math.abs(second.height - first.height) < limit.value - ROUNDING
-      if (isAbove && isClose) groups.push({ plane: 'thickness', anchorIds: [first.id, second.id], steps: [limit] })
+      const isClose = Math.abs(second.height - first.height) < DEPTH_SHARE * depth - ROUNDING
+      if (isAbove && isClose) groups = withPair(groups, [first.id, second.id], depthStep(depth))
     }
   }
-  return groups
+  const order = new Map(anchors.map(({ id }, at) => [id, at]))
+  const placeOf = (id: string) => order.get(id) ?? 0
+  return groups.map((group) => ({
+    ...group,
+    anchorIds: [...group.anchorIds].sort((one, other) => placeOf(one) - placeOf(other)),
+  }))
+}
+
+/** A pair joins the groups that hold either of its anchors into one. */
+function withPair(groups: readonly CloseGroup[], pair: readonly string[], limit: Step): CloseGroup[] {
+  const isTouched = ({ anchorIds }: CloseGroup) => pair.some((id) => anchorIds.includes(id))
+  const touched = groups.filter(isTouched)
+  const joint: CloseGroup = {
+    plane: 'thickness',
+    anchorIds: [...new Set([...touched.flatMap(({ anchorIds }) => anchorIds), ...pair])],
+    steps: [...touched.flatMap(({ steps }) => steps), limit],
+  }
+  return [...groups.filter((group) => !isTouched(group)), joint]
 }
 
 function depthStep(D: number): Step {

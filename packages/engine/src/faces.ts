@@ -1,7 +1,7 @@
-/** The faces of concrete beside an anchor, other than the edge that it stands at, and how far away they are. */
+/** The faces of concrete beside an anchor, other than the edge or recess that it stands at, and how far away they are. */
 
 import type { Box } from './bodies'
-import type { EdgeFrame } from './frame'
+import type { AnchorFrame } from './frame'
 import {
   distanceBetweenSegments,
   distanceToSegment,
@@ -14,6 +14,8 @@ import {
 } from './geometry'
 import { found, type LayoutIndex } from './layout-index'
 import type { Anchor, Edge, Point, Pour } from './model'
+import { besideFace, panFrame } from './pan-frame'
+import { panOutline } from './pan-outline'
 
 export interface NearFace {
   /** As a person says it: edge E7-ER, opening O2, side of the deeper length. */
@@ -62,15 +64,23 @@ export function nearestFace(index: LayoutIndex, anchor: Anchor, body: Box): Near
 }
 
 interface Place {
-  readonly edge: Edge
+  /** Id of the edge or pan. */
+  readonly id: string
+  /** Null for a pan. */
+  readonly edge: Edge | null
   readonly pour: Pour
-  readonly frame: EdgeFrame
+  readonly frame: AnchorFrame
 }
 
 function placeOf(index: LayoutIndex, anchor: Anchor): Place | null {
-  const edge = anchor.edgeId === null ? undefined : index.edges.get(anchor.edgeId)
-  if (!edge) return null
-  return { edge, pour: found(index.pours, edge.pourId, 'pour'), frame: found(index.frames, edge.id, 'edge') }
+  const edge = index.edges.get(anchor.edgeId ?? '')
+  if (edge) {
+    const [pour, frame] = [found(index.pours, edge.pourId, 'pour'), found(index.frames, edge.id, 'edge')]
+    return { id: edge.id, edge, pour, frame }
+  }
+  const pan = index.pans.get(anchor.panId ?? '')
+  if (!pan) return null
+  return { id: pan.id, edge: null, pour: found(index.pours, pan.pourId, 'pour'), frame: panFrame(index, pan.id) }
 }
 
 /**
@@ -90,13 +100,17 @@ function whereInside(
   return sides.filter((_, i) => (away[i] ?? Infinity) - radius <= least)
 }
 
-/** Kept beside an index, which never changes: every anchor of an edge asks for the same. */
+/** Kept beside an index, which never changes: every anchor of an edge asks for the same. By edge or pan. */
 const KEPT = new WeakMap<LayoutIndex, Map<string, readonly Side[]>>()
 
 function facesBeside(index: LayoutIndex, place: Place): readonly Side[] {
   const ofEdges = KEPT.get(index) ?? new Map<string, readonly Side[]>()
-  const sides = ofEdges.get(place.edge.id) ?? [...otherSides(index, place), ...openingSides(index, place)]
-  KEPT.set(index, ofEdges.set(place.edge.id, sides))
+  const sides = ofEdges.get(place.id) ?? [
+    ...otherSides(index, place),
+    ...openingSides(index, place),
+    ...panSides(index, place),
+  ]
+  KEPT.set(index, ofEdges.set(place.id, sides))
   return sides
 }
 
@@ -107,20 +121,36 @@ function otherSides(index: LayoutIndex, { edge, pour, frame }: Place): Side[] {
     const corner = pour.outline[i]
     const other = corner && edges.get(corner.id)
     const isInLine = ends.every((end) => Math.abs(frame.local(end).depth) <= ROUNDING)
-    if (isInLine || (edge.isChord && other?.isChord && turnsLittle(frame, ends))) return []
-    return [{ name: other ? `edge ${other.mark}` : 'the next side of the outline', ends }]
+    if (isInLine || (edge?.isChord && other?.isChord && turnsLittle(frame, ends))) return []
+    const seen = edge === null ? besideFace(frame, ends) : ends
+    return seen === null ? [] : [{ name: other ? `edge ${other.mark}` : 'the next side of the outline', ends: seen }]
   })
 }
 
-function turnsLittle(frame: EdgeFrame, [a, b]: readonly [Point, Point]): boolean {
+/** To an anchor in a pan the recesses of other pans are faces, as far as they stand beside and behind its bearing face. */
+function panSides(index: LayoutIndex, { id, edge, pour, frame }: Place): Side[] {
+  if (edge !== null) return []
+  const others = (index.pansOfPour.get(pour.id) ?? []).filter((pan) => pan.id !== id)
+  return others.flatMap((pan) =>
+    sidesOf(panOutline(pan)).flatMap((ends): Side[] => {
+      const seen = besideFace(frame, ends)
+      return seen === null ? [] : [{ name: `pan ${pan.mark}`, ends: seen }]
+    }),
+  )
+}
+
+function turnsLittle(frame: AnchorFrame, [a, b]: readonly [Point, Point]): boolean {
   return Math.abs(dot(unit(subtract(b, a)), frame.along)) > CHORD_TURN_COSINE
 }
 
 const openingsOf = (index: LayoutIndex, pour: Pour) => index.openingsOfLevel.get(pour.levelId) ?? []
 
-function openingSides(index: LayoutIndex, { pour }: Place): Side[] {
+function openingSides(index: LayoutIndex, { pour, edge, frame }: Place): Side[] {
   return openingsOf(index, pour).flatMap(({ mark, outline }) =>
-    sidesOf(outline).map((ends) => ({ name: `opening ${mark}`, ends })),
+    sidesOf(outline).flatMap((ends): Side[] => {
+      const seen = edge === null ? besideFace(frame, ends) : ends
+      return seen === null ? [] : [{ name: `opening ${mark}`, ends: seen }]
+    }),
   )
 }
 
@@ -133,7 +163,7 @@ function nearestOfEachName(faces: readonly NearFace[]): NearFace[] {
   return [...nearest.values()]
 }
 
-function rectangleOf(frame: EdgeFrame, { fromChainage, toChainage, fromDepth, toDepth }: Box): Point[] {
+function rectangleOf(frame: AnchorFrame, { fromChainage, toChainage, fromDepth, toDepth }: Box): Point[] {
   return [
     frame.pointAt(fromChainage, fromDepth),
     frame.pointAt(toChainage, fromDepth),
@@ -171,15 +201,20 @@ function outermost(outside: readonly Point[], sides: readonly Side[]): NearFace[
 type FaceRange = Pick<Box, 'fromChainage' | 'toChainage' | 'fromHeight' | 'toHeight'>
 
 /** Where the next length of the edge is less deep or less high, its neighbour's side is a face for what lies beyond. */
-function profileSides(frame: EdgeFrame, body: FaceRange): NearFace[] {
+function profileSides(frame: AnchorFrame, body: FaceRange): NearFace[] {
   const middle = (body.fromChainage + body.toChainage) / 2
   return frame.steps.flatMap((step) => {
     const isBefore = middle < step
-    const beyond = frame.lengthAt(isBefore ? step : step - ROUNDING)
+    const beyond = sectionAt(frame, isBefore ? step : step - ROUNDING)
     if (body.fromHeight >= beyond.soffit - ROUNDING && body.toHeight <= beyond.top + ROUNDING) return []
-    const own = frame.lengthAt(middle)
+    const own = sectionAt(frame, middle)
     if (beyond.soffit <= own.soffit && beyond.top >= own.top) return []
     const distance = isBefore ? step - body.toChainage : body.fromChainage - step
     return [{ name: 'the side of the next length of the edge', distance }]
   })
 }
+
+const sectionAt = (frame: AnchorFrame, chainage: number) => ({
+  top: frame.topAt(chainage),
+  soffit: frame.soffitAt(chainage),
+})

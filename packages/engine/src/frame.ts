@@ -10,9 +10,9 @@ export interface LocalPoint {
   readonly height: number
 }
 
-export interface EdgeFrame {
-  readonly edgeId: string
-  /** Chainage of the edge's two ends on its edge line, mm. */
+/** What the frame of an edge and that of a pan's bearing face have in common. */
+export interface AnchorFrame {
+  /** Chainage of the two ends: of the edge on its edge line, or of the concrete beside a pan's bearing face, mm. */
   readonly from: number
   readonly to: number
   /** Unit vector in which chainage grows. */
@@ -25,12 +25,16 @@ export interface EdgeFrame {
   readonly runsLeftToRight: boolean
   readonly pointAt: (chainage: number, depth: number) => Point
   readonly local: (point: Point) => { readonly chainage: number; readonly depth: number }
-  /** The length of the edge at a chainage; where two lengths meet, the one that begins there. */
-  readonly lengthAt: (chainage: number) => EdgeLength
   readonly topAt: (chainage: number) => number
   readonly soffitAt: (chainage: number) => number
   /** Chainages at which top or soffit steps, growing. */
   readonly steps: readonly number[]
+}
+
+export interface EdgeFrame extends AnchorFrame {
+  readonly edgeId: string
+  /** The length of the edge at a chainage; where two lengths meet, the one that begins there. */
+  readonly lengthAt: (chainage: number) => EdgeLength
 }
 
 /**
@@ -101,6 +105,6 @@ function lengthOf(edge: Edge, lengths: readonly EdgeLength[], chainage: number):
  * Skew turns the outward axis clockwise. Somebody outside who faces the slab then sees the tendon lean to the right as
  * it goes in, which is towards growing chainage where chainage runs from left to right.
  */
-export function leanOf(frame: EdgeFrame, skew: number): number {
+export function leanOf(frame: AnchorFrame, skew: number): number {
   return frame.runsLeftToRight ? skew : 0 - skew
 }

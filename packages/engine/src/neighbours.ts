@@ -1,7 +1,9 @@
-/** The anchors beside an anchor in its row: same edge line, same side, whatever pour. */
+/** The anchors beside an anchor: of its row at an edge, or those that face the same way beside its pan. */
 
-import type { LayoutIndex } from './layout-index'
-import type { Anchor } from './model'
+import { alongAzimuth, dot, ROUNDING } from './geometry'
+import { found, type LayoutIndex } from './layout-index'
+import type { Anchor, Pan, Point } from './model'
+import { panFrame } from './pan-frame'
 
 export interface Neighbours {
   /** The nearest to either side along the edge, those one above the other included. */
@@ -10,15 +12,55 @@ export interface Neighbours {
   readonly within: readonly Anchor[]
 }
 
-/** Neighbours of an anchor at an edge; none for an anchor in a pan. */
+/**
+ * Neighbours of an anchor: at an edge those on the same edge line and side, whatever their pour; beside a pan those of
+ * its pour that face the same way, with their chainage measured along the pan's bearing face.
+ */
 export function neighboursOf(index: LayoutIndex, anchor: Anchor, reach: number): Neighbours {
-  const row = index.rowOfEdge.get(anchor.edgeId ?? '') ?? []
+  const row = anchor.panId === null ? (index.rowOfEdge.get(anchor.edgeId ?? '') ?? []) : rowOfPan(index, anchor)
   const at = positionOf(row, anchor)
   const sides = [walk(row, { from: at, by: -1, anchor, reach }), walk(row, { from: at, by: 1, anchor, reach })]
   return {
     nearest: [-1, 1].flatMap((by) => row[at + by] ?? []),
     within: sides.flat(),
   }
+}
+
+/** Anchors turned from the pan by no more than this stand in one row with it. */
+const SAME_WAY_COSINE = Math.cos(Math.PI / 9)
+
+/**
+ * The anchor of a pan with all that stand beside it, by chainage along its bearing face.
+ *
+ * One further in front or behind than it is aside does not count: at 45 degrees neither force has spread to the other.
+ */
+export function rowOfPan(index: LayoutIndex, anchor: Anchor): readonly Anchor[] {
+  const pan = found(index.pans, anchor.panId ?? '', 'pan')
+  const frame = panFrame(index, pan.id)
+  const beside = facingAlike(index, pan).flatMap((other) => {
+    const { chainage, depth } = frame.local(placeOf(index, other))
+    return Math.abs(depth) <= Math.abs(chainage) + ROUNDING ? [{ ...other, chainage }] : []
+  })
+  const row = [anchor, ...beside.filter(({ id }) => id !== anchor.id)]
+  return row.sort((a, b) => a.chainage - b.chainage || a.height - b.height || (a.id < b.id ? -1 : 1))
+}
+
+function facingAlike(index: LayoutIndex, pan: Pan): Anchor[] {
+  const axis = alongAzimuth(pan.azimuth)
+  const isAlike = (outward: Point) => dot(axis, outward) >= SAME_WAY_COSINE
+  const pans = (index.pansOfPour.get(pan.pourId) ?? []).filter(({ azimuth }) => isAlike(alongAzimuth(azimuth)))
+  const edges = (index.edgesOfPour.get(pan.pourId) ?? []).filter(({ id }) =>
+    isAlike(alongAzimuth(found(index.frames, id, 'edge').outwardAzimuth)),
+  )
+  return [
+    ...pans.flatMap(({ id }) => index.anchorsOfPan.get(id) ?? []),
+    ...edges.flatMap(({ id }) => index.anchorsOfEdge.get(id) ?? []),
+  ]
+}
+
+function placeOf(index: LayoutIndex, { edgeId, panId, chainage, setBack }: Anchor): Point {
+  if (edgeId === null) return found(index.pans, panId ?? '', 'pan')
+  return found(index.frames, edgeId, 'edge').pointAt(chainage, setBack)
 }
 
 function walk(

@@ -29,7 +29,7 @@ export function sectionStepNear(site: AnchorSite, reach: number): SectionStep | 
 }
 
 function stepsAlong({ anchor, edge, hardware, top, soffit }: AnchorSite): SectionStep[] {
-  return edge.lengths
+  return (edge?.lengths ?? [])
     .filter((length) => length.top !== top || length.soffit !== soffit)
     .map((length) => {
       const aside = Math.max(length.from - anchor.chainage, anchor.chainage - length.to, 0)

@@ -1,6 +1,6 @@
 /** Top, soffit and cover of the concrete at a place in plan. */
 
-import type { EdgeFrame } from './frame'
+import type { AnchorFrame } from './frame'
 import { isInside } from './geometry'
 import type { Point, Pour, Region } from './model'
 
@@ -15,20 +15,20 @@ export interface Section {
 }
 
 /** The region of a pour at a place; where regions overlap the deepest, null where there is none. */
-function regionAt(pour: Pour, point: Point): Region | null {
+export function regionAt(pour: Pour, point: Point): Region | null {
   const here = pour.regions.filter((region) => isInside(point, region.outline))
   return here.sort((a, b) => b.top - b.soffit - (a.top - a.soffit))[0] ?? null
 }
 
 /**
- * The section behind an edge, at a chainage and a depth into the slab.
+ * The section behind an edge or a pan's bearing face, at a chainage and a depth into the slab.
  *
  * A region gives its own top, soffit and cover. Behind a region the slab's thickness counts; where the edge has no
  * region nothing says that its section changes further in, so the edge's own top and soffit count throughout.
  */
 export function sectionBehind(
   pour: Pour,
-  { frame, chainage, depth }: { readonly frame: EdgeFrame; readonly chainage: number; readonly depth: number },
+  { frame, chainage, depth }: { readonly frame: AnchorFrame; readonly chainage: number; readonly depth: number },
 ): Section {
   const region = regionAt(pour, frame.pointAt(chainage, depth))
   if (region) return regionSection(region)

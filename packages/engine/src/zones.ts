@@ -1,11 +1,12 @@
 /** The places of a pour that checks and bars belong to, with stable ids and the names that people use. */
 
+import { groupName, groupsOfEdge, outToOut } from './anchor-groups'
 import { gapsOfEdge, type Gap, type TendonEnd } from './gaps'
 import { found, type LayoutIndex } from './layout-index'
 import type { Anchor, Edge } from './model'
 import type { Zone } from './result'
 
-/** All zones of a pour: edge by edge along chainage, then pans with their anchors, joints and tendons. */
+/** All zones of a pour: edge by edge along chainage with anchors that act as one, then pans with their anchors, joints and tendons. */
 export function zonesOfPour(index: LayoutIndex, pourId: string): Zone[] {
   return [
     ...(index.edgesOfPour.get(pourId) ?? []).flatMap((edge) => zonesOfEdge(index, edge)),
@@ -53,7 +54,11 @@ function zonesOfEdge(index: LayoutIndex, edge: Edge): Zone[] {
   const gaps = gapsOfEdge(index, edge.id).map((gap) =>
     zone({ ...place, id: gap.id, kind: 'gap', name: gapName(index, gap), from: gap.from, to: gap.to }),
   )
-  return [whole, ...[...gaps, ...anchors].sort((a, b) => middle(a) - middle(b))]
+  const groups = groupsOfEdge(index, edge.id).map((group) => {
+    const { from, to } = outToOut(group.members).along
+    return zone({ ...place, id: group.id, kind: 'group', name: groupName(edge.mark, group), from, to })
+  })
+  return [whole, ...[...gaps, ...anchors, ...groups].sort((a, b) => middle(a) - middle(b))]
 }
 
 function panZones(index: LayoutIndex, pourId: string): Zone[] {

@@ -1,9 +1,8 @@
 /** The one place that maps a family of checks to its function, and says where each family applies. */
 
-import { sitesOfEdge, type AnchorSite } from '../anchor-site'
+import { siteOfAnchor, type AnchorSite } from '../anchor-site'
 import { closeAnchors } from '../close-anchors'
 import { found, type LayoutIndex } from '../layout-index'
-import { perConcrete } from '../memo'
 import type { Anchor } from '../model'
 import type { Check, Family, Zone, ZoneKind } from '../result'
 import { checkBearing } from './bearing'
@@ -13,7 +12,8 @@ import { notYetChecked } from './not-yet'
 import type { CheckContext } from './outcome'
 import { spacingChecks } from './spacing'
 import { straightLengthChecks } from './straight-length'
-import { checkJackingForce } from './tendon'
+import { forceChecks } from './tendon'
+import { tendonChecks } from './tendon-advice'
 
 /** Which families of checks belong to which kind of zone: the table of methods, in its order. */
 export const FAMILIES_OF_ZONE: Readonly<Record<ZoneKind, readonly Family[]>> = {
@@ -47,9 +47,9 @@ type FamilyChecks = (context: CheckContext, zone: Zone) => readonly Check[] | nu
 export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
   bearing: (context, zone) => atAnchor(context, zone, (anchor) => bearing(context, zone, anchor)),
   'bursting-thickness': (context, zone) =>
-    atSite(context, zone, (site) => [checkBurstingThickness(site, context, closeOf(context.index, site.edge.id))]),
+    atSite(context, zone, (site) => [checkBurstingThickness(site, context, closeOf(context.index, site))]),
   'bursting-plan': (context, zone) =>
-    atSite(context, zone, (site) => [checkBurstingPlan(site, context, closeOf(context.index, site.edge.id))]),
+    atSite(context, zone, (site) => [checkBurstingPlan(site, context, closeOf(context.index, site))]),
   spalling: () => null,
   'depth-change': () => null,
   cover: ({ index }, zone) => anchorAtEdge(index, zone, (anchor) => coverChecks(index, anchor)),
@@ -66,15 +66,17 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
       'A stressing pan is stored and drawn; access for the jack and the bars round it are not yet checked.',
     ),
   ],
-  tendon: (context, zone) => atAnchor(context, zone, (anchor) => forceChecks(context, zone, anchor)),
+  tendon: (context, zone) =>
+    zone.kind === 'tendon'
+      ? tendonChecks(context, zone)
+      : atAnchor(context, zone, (anchor) => forceChecks(context, zone.id, anchor)),
   'dead-end': (context, zone) => atAnchor(context, zone, (anchor) => deadEnd(zone, anchor)),
   precompression: () => null,
   fit: () => null,
   anchorage: () => null,
 }
 
-const sitesOf = perConcrete(sitesOfEdge)
-const closeOf = perConcrete(closeAnchors)
+const closeOf = (index: LayoutIndex, { edge }: AnchorSite) => (edge === null ? [] : closeAnchors(index, edge.id))
 
 type OfAnchor = (anchor: Anchor) => readonly Check[] | null
 
@@ -92,8 +94,8 @@ function atSite(
   make: (site: AnchorSite) => readonly Check[],
 ): readonly Check[] | null {
   if (zone.kind !== 'anchor') return null
-  const { id, edgeId, end } = anchorOf(index, zone)
-  return edgeId === null || end === 'dead' ? null : make(found(sitesOf(index, edgeId), id, 'anchor'))
+  const anchor = anchorOf(index, zone)
+  return anchor.edgeId === null || anchor.end === 'dead' ? null : make(siteOfAnchor(index, anchor))
 }
 
 const anchorOf = (index: LayoutIndex, { id }: Zone): Anchor =>
@@ -110,12 +112,4 @@ function deadEnd(zone: Zone, { end }: Anchor): readonly Check[] {
   if (end === 'live') return []
   const message = 'A dead end is stored and drawn; bearing, bursting and spread behind it are not yet checked.'
   return [notYetChecked(zone, 'dead-end', message)]
-}
-
-function forceChecks({ index, ...rest }: CheckContext, zone: Zone, anchor: Anchor): readonly Check[] {
-  if (anchor.end === 'dead') return []
-  const tendon = found(index.tendons, anchor.tendonId, 'tendon')
-  const strand = found(index.strandTypes, tendon.strandTypeId, 'strand type')
-  const stage = found(index.pours, zone.pourId, 'pour').stages.at(-1)?.name ?? null
-  return [checkJackingForce({ zoneId: zone.id, tendon, strand, stage }, { index, ...rest })]
 }
