@@ -3,7 +3,8 @@ import type { Layout } from '@wedgeline/engine'
 const LENGTHS =
   'x y thickness coverTop coverSoffit coverEdge from to top soffit chainage height setBack straightBehind width ' +
   'depth diameter linkDiameter hook first pitch outside length leg bend spacing along across spacingAlongMin ' +
-  'spacingHeightMin edgeAlongMin edgeHeightMin straightBehindMin cover pocketToFaceMin pocketToPocketMin clearGapMin'
+  'spacingHeightMin edgeAlongMin edgeHeightMin straightBehindMin cover pocketToFaceMin pocketToPocketMin clearGapMin ' +
+  'drawIn'
 
 /** The same layout with its lengths times k and its forces times k^2: every stress stays as it was. */
 export const scaled = (of: Layout, k: number): Layout =>
@@ -12,6 +13,9 @@ export const scaled = (of: Layout, k: number): Layout =>
     breakingLoad: k ** 2,
     proofLoad: k ** 2,
     area: k ** 2,
+    frictionWobble: 1 / k,
+    frictionWobbleLow: 1 / k,
+    frictionWobbleHigh: 1 / k,
   }) as Layout
 
 function grown(value: unknown, by: Readonly<Record<string, number>>, name = ''): unknown {

@@ -3,7 +3,7 @@
 import { found, type LayoutIndex } from './layout-index'
 import type { Anchor, Stage, StrandType, Tendon } from './model'
 import { step, type Clause, type Step } from './step'
-import { courseOf, forceAfterFriction, frictionExponent, frictionPair, isMissing } from './tendon/friction'
+import { courseOf, forceAfterFriction, frictionExponent, frictionPair, isNoForce } from './tendon/friction'
 
 const STATICS: Clause = { source: 'Statics', section: 'strands times force', tag: 'derived' }
 
@@ -53,7 +53,7 @@ export function anchorageForce(index: LayoutIndex, anchor: Anchor): AnchorageFor
   const whole = { value: jacking.value, steps: [jacking], notes: [] }
   if (anchor.end === 'live' || settings.deadEndForce === 'jacking') return whole
   const course = courseOf(index, tendon)
-  if (isMissing(course)) return { ...whole, notes: [`${course.message} Until then the jacking force counts here.`] }
+  if (isNoForce(course)) return { ...whole, notes: [`${course.message} Until then the jacking force counts here.`] }
   const exponent = frictionExponent(course, frictionPair(settings, 'low'))
   const far = forceAfterFriction(jacking.value, exponent)
   return {

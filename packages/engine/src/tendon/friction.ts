@@ -45,8 +45,9 @@ export function frictionPair(settings: JobSettings, name: PairName): FrictionPai
   }
 }
 
-/** What a force along the tendon cannot be worked out without: the field, and a sentence that says what is missing. */
-export interface Missing {
+/** Why no force along the tendon can be worked out: the field, and a sentence that says what would be right. */
+export interface NoForce {
+  readonly code: 'MISSING_INPUT' | 'OUTSIDE_METHOD'
   readonly field: string
   readonly message: string
 }
@@ -58,21 +59,23 @@ export interface Course {
   readonly steps: readonly Step[]
 }
 
-export const isMissing = <T extends object>(one: T | Missing): one is Missing => 'message' in one && 'field' in one
+export const isNoForce = <T extends object>(one: T | NoForce): one is NoForce => 'code' in one && 'message' in one
 
 /** The course of a tendon; what is missing where a length, an end or a drape is not entered: none is read as 0. */
-export function courseOf(index: LayoutIndex, tendon: Tendon): Course | Missing {
+export function courseOf(index: LayoutIndex, tendon: Tendon): Course | NoForce {
   const { length, drape, mark } = tendon
   if (length === null) {
     return {
+      code: 'MISSING_INPUT',
       field: 'tendon.length',
       message: `The length of tendon ${mark} is not entered. Enter its plan length between the two bearing faces.`,
     }
   }
   const bends = bendsOf(index, tendon)
-  if (isMissing(bends)) return bends
+  if (isNoForce(bends)) return bends
   if (drape === null) {
     return {
+      code: 'MISSING_INPUT',
       field: 'tendon.drape',
       message: `The drape of tendon ${mark} is not entered. Enter its total change of angle in height; 0 for a flat tendon.`,
     }
@@ -117,12 +120,13 @@ export function placeInPlan(index: LayoutIndex, anchor: Anchor): Point {
 }
 
 /** The turn at each bend of the path, rad, from the straight lines before and behind it. */
-export function bendsOf(index: LayoutIndex, tendon: Tendon): readonly number[] | Missing {
+export function bendsOf(index: LayoutIndex, tendon: Tendon): readonly number[] | NoForce {
   if (tendon.path.length === 0) return []
   const ends = index.anchorsOfTendon.get(tendon.id) ?? []
   const [first, last] = ends
   if (!first || !last || ends.length !== 2) {
     return {
+      code: 'MISSING_INPUT',
       field: 'tendon.path',
       message: `Tendon ${tendon.mark} has ${ends.length} of 2 ends: the angle of its path in plan needs both.`,
     }
