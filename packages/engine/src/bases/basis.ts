@@ -229,6 +229,8 @@ export interface Basis {
   /** The readings for bonded dead ends, and for the width of the strip without precompression at a joint. */
   readonly deadEndReading: string
   readonly jointReading: string
+  /** The reading by which bars take the place of a tendon that stops short of its edge. */
+  readonly shortfallReading: string
   readonly anchorage: (input: AnchorageInput) => Anchorage
   /** Whether every bar of a section this deep lies in good bond, whatever its height in it. */
   readonly isGoodBond: (depth: number) => boolean

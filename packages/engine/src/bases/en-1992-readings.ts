@@ -9,6 +9,7 @@ export const EN_TIE_BACK = 'en-tie-back'
 export const EN_TIE_BACK_OWN = 'en-tie-back-own'
 export const EN_DEAD_END = 'en-dead-end'
 export const EN_JOINT = 'en-joint-strip'
+export const EN_SHORTFALL = 'en-shortfall'
 export const EN_CRACK_EDGE_BARS = 'en-crack-edge-bars'
 export const EN_CRACK_MINIMUM = 'en-crack-minimum'
 export const EN_CRACK_STRONGER = 'en-crack-stronger'
@@ -101,6 +102,18 @@ export const EN_READINGS: readonly Reading[] = [
       'bearing face or its bond is set back.',
     range: 'Joints square to the tendons within 20 degrees whose edges on both sides are entered.',
     clause: { source: 'EN 1992-1-1:2004', section: '8.10.3(5), silent on joints', tag: 'derived' },
+    proposed: true,
+  },
+  {
+    id: EN_SHORTFALL,
+    title: 'Where a tendon stops short of its edge, bars for its force and its moment',
+    text:
+      'No clause says what takes the place of a tendon that stops in a pan. Across the strip between pan and edge, half ' +
+      'way to the next tendon on each side, bars of both faces yield at the tendon’s proof load together, the bars of ' +
+      'each face at its moment, and they are not less than the crack steel that the job has chosen. Partial factors ' +
+      'stand on both sides and fall out.',
+    range: 'Strips from a pan to an edge that the jack faces within 45 degrees, in a slab of constant depth.',
+    clause: { source: 'EN 1992-1-1:2004', section: 'silent on tendons that stop short', tag: 'derived' },
     proposed: true,
   },
   {
