@@ -183,13 +183,13 @@ describe('bars along and across', () => {
     }
     const edges = [edge(SOUTH, 'a', [length(0, 600, { soffit: -480 }), length(600, 19200)])]
     const placed = bars({ hardware: [plain], edges, steel: [steel('s', atEdge, shape)] })
-    // Top 220 - 30 - 8 = 182; bottom -480 + 30 + 8 = -442 up to 600, then 38
+    // Top 220 - 30 - 8 = 182; bottom -480 + 30 + 8 = -442 to a cover of 30 before the step at 600, then 38
     expect(placed.map((bar) => bar.path)).toEqual([
       line([100, 600], { depth: 60, height: 182 }),
       line([600, 19000], { depth: 60, height: 182 }),
-      line([100, 600], { depth: 60, height: -442 }),
+      line([100, 570], { depth: 60, height: -442 }),
       line([600, 19000], { depth: 60, height: 38 }),
-      line([100, 600], { depth: 140, height: -442 }),
+      line([100, 570], { depth: 140, height: -442 }),
       line([600, 19000], { depth: 140, height: 38 }),
     ])
   })

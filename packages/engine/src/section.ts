@@ -43,6 +43,14 @@ export function sectionBehind(
   }
 }
 
+/** The section at a place that belongs to no edge: its region's, or the slab's. */
+export function sectionAt(pour: Pour, point: Point): Section {
+  const region = regionAt(pour, point)
+  if (region) return regionSection(region)
+  const { thickness: top, coverTop, coverSoffit, coverEdge } = pour
+  return { top, soffit: 0, coverTop, coverSoffit, coverEdge, linkDiameter: 0 }
+}
+
 function regionSection({ top, soffit, cover, linkDiameter }: Region): Section {
   return { top, soffit, coverTop: cover, coverSoffit: cover, coverEdge: cover, linkDiameter }
 }

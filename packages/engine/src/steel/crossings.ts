@@ -7,7 +7,7 @@ import type {
   SteelShape,
   TransverseBarsShape,
 } from '../model'
-import { turnsOf } from '../placed'
+import { turnsOf } from '../placed/behind-face'
 
 export type Plane = 'thickness' | 'plan'
 
@@ -29,6 +29,8 @@ export interface CountPlace {
   /** Outward azimuth of the edge, rad. */
   readonly azimuth: number
   readonly mats: readonly MatLayer[]
+  /** From the plane to the middle of a set of bars behind an anchor: 0 but for anchors that act as one. */
+  readonly aside?: number
 }
 
 /** Bars of one set that cross a plane behind an anchor. */
@@ -50,8 +52,10 @@ interface NoCrossing {
   readonly reason: string | null
 }
 
-/** Where the bars of a set cross a longitudinal plane through the anchor's axis. */
+/** Where the bars of a set cross a longitudinal plane through the anchor's axis, or that of anchors that act as one. */
 export function crossingsOf(shape: SteelShape, plane: Plane, place: CountPlace): Crossings | NoCrossing {
+  const missed = missedBy(shape, plane, place.aside ?? 0)
+  if (missed !== null) return { reason: missed }
   switch (shape.kind) {
     case 'spiral':
       return spiralCrossings(shape)
@@ -75,6 +79,21 @@ export function crossingsOf(shape: SteelShape, plane: Plane, place: CountPlace):
     case 'lap-bars':
       return { reason: 'Bars round a pan or across a joint do not count against bursting.' }
   }
+}
+
+/** A closed or bent bar reaches as far aside as half its own size; beyond that it does not cross the plane. */
+function missedBy(shape: SteelShape, plane: Plane, aside: number): string | null {
+  const size = sizeAcross(shape, plane)
+  if (size === null || aside < size / 2) return null
+  const noun = shape.kind === 'spiral' ? 'A spiral stands' : `Some ${shape.kind} stand`
+  return `${noun} ${Math.round(aside)} beside the middle of the group and ${shape.kind === 'spiral' ? 'does' : 'do'} not cross it.`
+}
+
+function sizeAcross(shape: SteelShape, plane: Plane): number | null {
+  if (shape.kind === 'spiral') return shape.outside
+  if (shape.kind === 'links') return plane === 'plan' ? shape.width : shape.height
+  if (shape.kind === 'hairpins') return shape.bend
+  return null
 }
 
 const series = (count: number, at: (k: number) => number): readonly number[] =>
@@ -161,7 +180,7 @@ function transverseCrossings(shape: TransverseBarsShape, place: CountPlace): Cro
       shape.layers === 'both' ? [x, x] : [x],
     ),
     legs: 1,
-    pastLine: Math.max(0, Math.min(shape.length / 2, toEnd)),
+    pastLine: Math.max(0, Math.min(shape.length / 2 - (place.aside ?? 0), toEnd)),
     notes: [],
   }
 }
