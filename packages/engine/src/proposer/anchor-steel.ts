@@ -1,0 +1,128 @@
+/** Candidates of steel behind one anchor: through the thickness, in plan, or both. */
+
+import { siteOfAnchor, type AnchorSite } from '../anchor-site'
+import { found } from '../layout-index'
+import type { Stage, SteelShape } from '../model'
+import type { Compared, Zone } from '../result'
+import { sectionBehind } from '../section'
+import { contextWith, type Bench, type Place } from './bench'
+import type { Candidate } from './candidate'
+import { thicknessSets, type ThicknessNeed } from './thickness-steel'
+import { transverseBars, transverseSets, type StraightBar, type TransverseNeed } from './transverse-bars'
+import { needsOf, unmetOf } from './verdict'
+
+/** Sets through the thickness that are joined with bars in plan: the lightest of them. */
+const THICKNESS_KEPT = 10
+
+export interface AnchorSteel {
+  readonly candidates: readonly Candidate[]
+  /** Bars in plan that would suit this anchor, for others to share. */
+  readonly bars: readonly StraightBar[]
+}
+
+/** @param shared bars in plan that other anchors would like; tried beside the anchor's own. */
+export function anchorSteel(bench: Bench, place: Place, shared: readonly StraightBar[]): AnchorSteel {
+  const site = siteOf(bench, place.zone)
+  if (!site) return { candidates: [], bars: [] }
+  const needs = unmetOf(needsOf(bench.context, place.zone))
+  const thickness = needs.find(({ plane }) => plane === 'thickness')
+  const upright = thickness ? lightest(bench, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
+  const made = upright.map((shapes) => ({ shapes, ...planPart(bench, place, { site, shapes, shared }) }))
+  return {
+    candidates: made.flatMap(({ shapes, sets }) => sets.map((set) => ({ shapes: [...shapes, ...set] }))),
+    bars: made.flatMap(({ bars }) => bars),
+  }
+}
+
+/** The surroundings of an anchor; null for any other zone. */
+export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): AnchorSite | null {
+  return kind === 'anchor' ? siteOfAnchor(index, found(index.anchors, id.slice('anchor:'.length), 'anchor')) : null
+}
+
+function lightest(bench: Bench, sets: readonly SteelShape[]): SteelShape[][] {
+  const weighed = sets.map((shape, at) => ({ shape, at, mass: bench.weigh([shape]).mass }))
+  weighed.sort((a, b) => a.mass - b.mass || a.at - b.at)
+  const kept = new Map<string, SteelShape[]>()
+  for (const { shape } of weighed) {
+    const kinds = [...kept.keys()].filter((key) => key.startsWith(shape.kind)).length
+    if (kinds < THICKNESS_KEPT) kept.set(`${shape.kind}:${kinds}`, [shape])
+  }
+  return [...kept.values()]
+}
+
+/** Bars in plan beside what already stands upright, which may count in plan as well. */
+function planPart(
+  bench: Bench,
+  place: Place,
+  of: { readonly site: AnchorSite; readonly shapes: readonly SteelShape[]; readonly shared: readonly StraightBar[] },
+): { readonly sets: readonly SteelShape[][]; readonly bars: readonly StraightBar[] } {
+  const context = of.shapes.length > 0 ? contextWith(bench, place, of.shapes) : bench.context
+  const plan = unmetOf(needsOf(context, place.zone)).find((need) => need.plane === 'plan')
+  const need = plan && transverseNeed(bench, of.site, plan)
+  if (!need) return { sets: [[]], bars: [] }
+  const own = transverseBars(need)
+  const sets = unique([...own, ...of.shared]).flatMap((bar) => transverseSets(need, bar))
+  return { sets: sets.map((set) => [set]), bars: own }
+}
+
+export function unique(bars: readonly StraightBar[]): StraightBar[] {
+  return [...new Map(bars.map((bar) => [`${bar.diameter}x${bar.length}`, bar])).values()]
+}
+
+// Needs -------------------------------------------------------------------------------------------------------------
+
+/** The prism that a need was worked out with: its step `b`. */
+const prismOf = ({ steps }: Compared): number | null => steps.find(({ symbol }) => symbol === 'b')?.value ?? null
+
+const shortOf = ({ demand, limit }: Compared): number => Math.max(0, demand - limit)
+
+const stageOf = ({ pour }: AnchorSite, need: Compared): Stage | undefined =>
+  pour.stages.find(({ name }) => name === need.stage) ?? pour.stages.at(-1)
+
+function transverseNeed(bench: Bench, site: AnchorSite, need: Compared): TransverseNeed | null {
+  const b = prismOf(need)
+  const short = shortOf(need)
+  if (b === null || short <= 0) return null
+  return {
+    short,
+    window: bench.context.basis.window(b),
+    developed: developedAt(bench, site, need),
+    sizes: bench.sizes.map(({ diameter }) => diameter),
+    plateWidth: site.hardware.plate.width,
+    toEnd: Math.min(site.toStart ?? Infinity, site.toEnd ?? Infinity) - site.pour.coverEdge,
+    clearGap: clearGapOf(bench, site),
+  }
+}
+
+function thicknessNeed(bench: Bench, site: AnchorSite, need: Compared): ThicknessNeed {
+  const { frame, pour, anchor, hardware } = site
+  const { settings } = bench.context.index.layout.job
+  const section = sectionBehind(pour, { frame, chainage: anchor.chainage, depth: anchor.setBack })
+  const toCover = Math.min(site.toTop - section.coverTop, site.toSoffit - section.coverSoffit) - section.linkDiameter
+  const developed = developedAt(bench, site, need)
+  return {
+    short: shortOf(need),
+    window: bench.context.basis.window(prismOf(need) ?? site.top - site.soffit),
+    toCover,
+    plate: hardware.plate,
+    depth: site.top - site.soffit,
+    local: hardware.localSteel,
+    sizes: bench.sizes,
+    clearGap: clearGapOf(bench, site),
+    deduction: settings.bentDeduction,
+    legOf: (diameter) => developed(diameter).length,
+  }
+}
+
+/** Aggregate must pass: its size and 5 mm, not less than the job's own gap (EN 1992-1-1 8.2, from memory). */
+const clearGapOf = (bench: Bench, { pour }: AnchorSite): number => Math.max(bench.clearGap, pour.aggregate + 5)
+
+function developedAt(bench: Bench, site: AnchorSite, need: Compared): TransverseNeed['developed'] {
+  const { basis } = bench.context
+  const b = prismOf(need) ?? site.top - site.soffit
+  const a = need.plane === 'plan' ? site.hardware.plate.width : site.hardware.plate.height
+  const { stress } = basis.tie({ P: site.force.value, a: Math.min(a, b / 2), b })
+  const strength = stageOf(site, need)?.strength ?? site.pour.fck
+  const isGoodBond = basis.isGoodBond(site.top - site.soffit)
+  return (diameter) => basis.anchorage({ diameter, strength, stress, cd: null, isGoodBond, isBent: false })
+}

@@ -1,0 +1,42 @@
+/** The one place that maps a kind of zone to the steel that is tried in it. */
+
+import { anchorSteel, unique } from './anchor-steel'
+import type { Bench, Place } from './bench'
+import type { Candidate } from './candidate'
+import type { Situation } from './situations'
+import type { StraightBar } from './transverse-bars'
+
+export function candidatesFor(bench: Bench, place: Place, shared: readonly StraightBar[]): readonly Candidate[] {
+  switch (place.zone.kind) {
+    case 'anchor':
+      return anchorSteel(bench, place, shared).candidates
+    case 'edge':
+    case 'gap':
+    case 'joint':
+    case 'pan':
+    case 'group':
+    case 'corner':
+    case 'tendon':
+    case 'strip':
+      return []
+  }
+}
+
+/** Bars that are offered to every situation, so that a few marks can serve them all. */
+const SHARED_MAX = 24
+
+/** The bars that situations would like for themselves: those of most zones first. */
+export function sharedBars(bench: Bench, situations: readonly Situation[]): StraightBar[] {
+  const wanted = new Map<string, { readonly bar: StraightBar; zones: number }>()
+  for (const { example, places } of situations) {
+    for (const bar of unique(anchorSteel(bench, example, []).bars)) {
+      const key = `${bar.diameter}x${bar.length}`
+      const known = wanted.get(key) ?? { bar, zones: 0 }
+      wanted.set(key, { bar, zones: known.zones + places.length })
+    }
+  }
+  return [...wanted.values()]
+    .sort((a, b) => b.zones - a.zones || a.bar.diameter - b.bar.diameter || a.bar.length - b.bar.length)
+    .slice(0, SHARED_MAX)
+    .map(({ bar }) => bar)
+}

@@ -1,0 +1,82 @@
+/** Whether steel in a zone does, by the zone's own checks. */
+
+import { CHECKS_OF_FAMILY, FAMILIES_OF_ZONE } from '../checks/families'
+import type { CheckContext } from '../checks/outcome'
+import type { Check, Compared, Family, Zone } from '../result'
+import { bySeverity, worstOf } from '../severity'
+import type { WorstCheck } from './proposal'
+
+/** Families that ask for steel, then those that ask whether it holds and can be fixed: the quick ones first. */
+const NEEDS: readonly Family[] = [
+  'bursting-thickness',
+  'bursting-plan',
+  'dead-end',
+  'spalling',
+  'edge-wedge',
+  'joint',
+  'pan-bars',
+]
+const HOLDS: readonly Family[] = ['anchorage', 'fit']
+
+const ofZone = ({ kind }: Zone, families: readonly Family[]): readonly Family[] =>
+  families.filter((family) => FAMILIES_OF_ZONE[kind].includes(family))
+
+const checksOf = (context: CheckContext, zone: Zone, families: readonly Family[]): Check[] =>
+  ofZone(zone, families).flatMap((family) => CHECKS_OF_FAMILY[family](context, zone) ?? [])
+
+/** A comparison of steel: its demand falls to nobody but the bars of the zone. */
+export const isNeed = (check: Check): check is Compared =>
+  check.kind === 'compared' && check.compares === 'ratio' && check.unit.startsWith('mm2')
+
+const isMet = ({ statusOnceAccepted }: Compared): boolean =>
+  statusOnceAccepted === 'within' || statusOnceAccepted === 'near'
+
+/** Needs of a zone, met or not. */
+export const needsOf = (context: CheckContext, zone: Zone): readonly Compared[] =>
+  checksOf(context, zone, NEEDS).filter(isNeed)
+
+export const unmetOf = (needs: readonly Compared[]): readonly Compared[] => needs.filter((check) => !isMet(check))
+
+/** What was wrong with a zone's bars before anything was tried: it cannot be held against a candidate. */
+export function faultsBefore(context: CheckContext, zone: Zone): ReadonlySet<string> {
+  const faults = checksOf(context, zone, HOLDS).filter((check) => check.kind === 'compared' && !isMet(check))
+  return new Set(faults.map(signOf))
+}
+
+const signOf = (check: Check): string =>
+  check.kind === 'compared' ? `${check.family}|${check.name}|${check.demand}|${check.limit}` : ''
+
+/** The first check that stops steel in a zone; null where it passes them all. */
+export function stoppedBy(context: CheckContext, zone: Zone, before: ReadonlySet<string>): Compared | null {
+  for (const family of ofZone(zone, NEEDS)) {
+    const stopped = (CHECKS_OF_FAMILY[family](context, zone) ?? []).find((check) => isNeed(check) && !isMet(check))
+    if (stopped?.kind === 'compared') return stopped
+  }
+  for (const family of ofZone(zone, HOLDS)) {
+    const stopped = (CHECKS_OF_FAMILY[family](context, zone) ?? []).find(
+      (check) => check.kind === 'compared' && !isMet(check) && !before.has(signOf(check)),
+    )
+    if (stopped?.kind === 'compared') return stopped
+  }
+  return null
+}
+
+/** The worst of a zone's checks on which its bars bear. */
+export function worstCheck(context: CheckContext, zone: Zone): WorstCheck | null {
+  const checks = [...checksOf(context, zone, [...NEEDS, ...HOLDS])].sort(bySeverity)
+  const status = worstOf(checks)
+  const [worst] = checks
+  if (status === null || !worst || worst.kind === 'advice') return null
+  return { name: worst.name, status, by: worst.kind === 'refused' ? worst.message : outBy(worst) }
+}
+
+/** How a comparison stands, in words. */
+export function outBy({ compares, demand, limit, unit, utilisation, spare }: Compared): string {
+  if (compares !== 'ratio') {
+    const by = Math.round((spare ?? 0) * 10) / 10
+    return by < 0 ? `short by ${-by} ${unit}` : `spare ${by} ${unit}`
+  }
+  if (utilisation === null) return `${Math.ceil(demand)} ${unit} asked for, none there`
+  // A ratio shows rounded up, so that 1.00 never stands for more.
+  return `${(Math.ceil(utilisation * 100 - 1e-9) / 100).toFixed(2)}: ${Math.round(demand)} of ${Math.round(limit)} ${unit}`
+}
