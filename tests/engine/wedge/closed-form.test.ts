@@ -6,9 +6,9 @@ import {
   USUAL_SPREAD,
   type Anchor,
   type EdgeWedge,
-} from '../../packages/engine/src'
-import { anchor, B7, D4, deadEnd, inPan, layout, pan, S4, SOUTH, edge, length, type Parts } from './sample-layout'
-import { evaluated } from './step-text'
+} from '../../../packages/engine/src'
+import { anchor, B7, D4, deadEnd, inPan, layout, pan, S4, SOUTH, edge, length, type Parts } from '../sample-layout'
+import { evaluated } from '../step-text'
 
 /** EN 1992-1-1 8.10.3(5), from memory: tan(beta) = 2/3. */
 const EN = Math.atan(2 / 3)

@@ -5,10 +5,10 @@
  * part of the area, so that this depth is the larger one there.
  */
 
-import type { EdgeFrame } from './frame'
-import type { Gap, TendonEnd } from './gaps'
-import { ROUNDING, signedArea } from './geometry'
-import { step, type Clause, type Step } from './step'
+import type { EdgeFrame } from '../frame'
+import type { Gap, TendonEnd } from '../gaps'
+import { ROUNDING, signedArea } from '../geometry'
+import { step, type Clause, type Step } from '../step'
 
 const GEOMETRY: Clause = { source: 'Geometry of spread', section: 'closed form', tag: 'derived' }
 
