@@ -240,16 +240,18 @@ describe('rows', () => {
     expect(mass).toBeCloseTo(33.6004, 6)
   })
 
-  test('a bar over the stock length keeps its row and is an error with its mark', () => {
-    const { rows, problems } = scheduled({ anchors: [], steel: [steel(edgeZone, edgeBars(19_200))] })
-    expect(rows).toMatchObject([{ mark: '01', length: 19_200 }])
+  test('a bent bar over the stock length keeps its row and is an error with its mark', () => {
+    // 6000 + 150 + 6000 - 20 - 20 = 12110, up to 12125
+    const long = steel(at('E2-1'), hairpins({ leg: 6000 }))
+    const { rows, problems } = scheduled({ hardware: [{ ...S4, localSteel: null }], steel: [long] })
+    expect(rows).toMatchObject([{ mark: '01', length: 12_125 }])
     expect(problems).toEqual([
       {
         mark: '01',
-        where: 'E2 edge',
-        field: 'A',
+        where: 'E2-01',
+        field: 'length',
         severity: 'error',
-        message: '19200 is longer than the 12000 stock length; split it into lapped bars.',
+        message: '12125 is longer than the 12000 stock length; split it into lapped bars.',
       },
     ])
   })

@@ -63,13 +63,22 @@ const sizes2020: readonly BarSize[] = sizes2005.map((size) => ({
 
 const rounding = { dimensionStep: 5, lengthStep: 25, roundingClause: ROUNDING }
 
+const FROM_MEMORY =
+  'From memory: dimensions to the nearest 5 mm, lengths up to the next 25 mm, stock length 12 m, shorter side of a bent bar up to 2750 mm, type letters, order of columns.'
+const MASSES_READ = 'Masses per metre and areas are those of BS 4449, from agreeing published copies.'
+
 export const BS_8666_2005: BarStandard = {
   id: 'bs-8666-2005',
   name: 'BS 8666:2005',
   sizes: sizes2005,
   shapes: shapes2005,
   ...rounding,
-  provenance: ['Bend data and lengths are those of BS 8666:2005, Tables 2 and 3, from agreeing published copies.'],
+  provenance: [
+    'No table of BS 8666:2005 was read in the original print. Compare with the standard before relying on a shape.',
+    'Bend data and lengths are those of BS 8666:2005, Tables 2 and 3, from agreeing published copies.',
+    FROM_MEMORY,
+    MASSES_READ,
+  ],
 }
 
 export const BS_8666_2020: BarStandard = {
@@ -84,8 +93,8 @@ export const BS_8666_2020: BarStandard = {
     'Smallest ends of 12 and 16 mm bars are 130 and 140 mm, the larger of the 2005 table and the 2020 rule as two secondary sources give it.',
     'Lengths of shapes 00, 11, 12, 13, 15, 21, 25, 26, 31, 33, 41, 44, 51, 63 and 77 are unchanged since 2005 by one secondary source.',
     'Lengths of shapes 22 and 75 differ between the editions and rest on that one source. Shape 47 uses the 2005 form: that of 2020 is not known here.',
-    'From memory: dimensions to the nearest 5 mm, lengths up to the next 25 mm, stock length 12 m, type letters, order of columns.',
-    'Masses per metre and areas are those of BS 4449, from agreeing published copies.',
+    FROM_MEMORY,
+    MASSES_READ,
   ],
 }
 

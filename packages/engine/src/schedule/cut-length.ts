@@ -12,6 +12,7 @@ import {
   type ShapeRule,
   type ShapeValues,
 } from './bar-standards'
+import { overallSides } from './overall-sides'
 
 /** A length of a bar as scheduled: `length` is rounded up, `calculated` is not; mm, and kg for one bar. */
 export interface CutLength {
@@ -90,6 +91,7 @@ export function shapeProblems(bar: BarShape, standard: BarStandard, stockLength:
   return [
     ...rule.limits.flatMap((limit) => limitProblem(limit, values)),
     ...lengthProblems(bar, standard, stockLength),
+    ...overallProblems(bar),
     ...angleProblems(bar.code, bar.dimensions),
   ]
 }
@@ -143,6 +145,18 @@ function lengthProblems(bar: BarShape, standard: BarStandard, stockLength: numbe
   if (!cut || COIL_FED.includes(bar.code) || cut.length <= stockLength) return []
   const field = bar.code === '00' ? 'A' : 'length'
   return [error(field, `${cut.length} is longer than the ${stockLength} stock length; split it into lapped bars.`)]
+}
+
+/** A bent bar goes by road while the shorter side of the rectangle round it is no more than this, mm (from memory). */
+const SHORTER_SIDE_MAX = 2750
+
+function overallProblems({ code, dimensions }: BarShape): readonly ShapeProblem[] {
+  const sides = overallSides(code, dimensions)
+  if (!sides) return []
+  const [shorter] = [...sides].sort((a, b) => a.value - b.value)
+  if (!shorter || shorter.value <= SHORTER_SIDE_MAX) return []
+  const message = `The shorter side of the bent bar, ${shorter.field} ${shown(shorter.value)}, is more than ${SHORTER_SIDE_MAX} (from memory): it may not travel by road. Make ${shorter.field} ${SHORTER_SIDE_MAX} or less, lap two bars, or agree it with the yard.`
+  return [{ field: shorter.field, severity: 'warning', message }]
 }
 
 /** Up to here the formula of a sloping bar is close enough. */

@@ -1,56 +1,23 @@
-import type { BarMark, Layout } from '../model'
+import type { BarMark, Delivery, Layout, Pour } from '../model'
 import { FAMILIES, type Family } from '../result'
-import type { Step } from '../step'
 import { barKey, barOfKey, typeLetterOf, type TypedBar, type TypeLetter } from './bar-key'
-import { sizeOf, type BarStandard, type DimensionName, type Dimensions, type ShapeProblem } from './bar-standards'
+import type { BarStandard, DimensionName, Dimensions } from './bar-standards'
 import { barsOf, type Member, type ZoneBars } from './bars'
 import { barStandardById, BS_8666_2020 } from './bs-8666'
 import { cutLength, roundedShape, shapeProblems } from './cut-length'
-
-/** One line of a schedule: a mark in one member with one number in each; mm and kg. */
-export interface ScheduleRow {
-  /** Null for a cancelled mark, whose bars are no longer in the pour. */
-  readonly member: Member | null
-  readonly markNumber: number
-  /** Two digits or more, with leading zeros. */
-  readonly mark: string
-  readonly key: string
-  readonly letter: TypeLetter
-  readonly diameter: number
-  readonly typeAndSize: string
-  readonly members: number
-  readonly inEach: number
-  readonly total: number
-  /** Length of each bar; null where the shape has an error. */
-  readonly length: number | null
-  readonly code: string
-  readonly dimensions: Dimensions
-  /** Letter of the issue in which the row last changed; empty before the first issue. */
-  readonly revision: string
-  readonly massEach: number | null
-  /** Cut length as printed: formula, then rounded up. */
-  readonly steps: readonly Step[]
-  readonly notes: readonly string[]
-  /** Names of the zones that hold these bars. */
-  readonly zones: readonly string[]
-}
-
-export interface ScheduleProblem extends ShapeProblem {
-  /** Null where the steel has no mark. */
-  readonly mark: string | null
-  readonly where: string
-}
-
-export interface ScheduleTotal {
-  readonly typeAndSize: string
-  readonly letter: TypeLetter
-  readonly diameter: number
-  readonly massPerMetre: number
-  readonly bars: number
-  readonly metres: number
-  /** kg */
-  readonly mass: number
-}
+import { inText } from './in-text'
+import { oneLengthChances } from './one-length'
+import type { ScheduleProblem, ScheduleRow } from './schedule-row'
+import {
+  deliveryOf,
+  deliveryTotals,
+  kindTotals,
+  longestBar,
+  type ScheduleDelivery,
+  totalsOf,
+  type ScheduleKind,
+  type ScheduleTotal,
+} from './schedule-totals'
 
 export interface Schedule {
   readonly pourId: string
@@ -61,6 +28,12 @@ export interface Schedule {
   readonly totals: readonly ScheduleTotal[]
   readonly metres: number
   readonly mass: number
+  /** Empty where the pour has no deliveries. */
+  readonly deliveries: readonly ScheduleDelivery[]
+  readonly kinds: readonly ScheduleKind[]
+  readonly longest: { readonly mark: string; readonly length: number } | null
+  /** Where wedge bars could take one length; whole sentences. */
+  readonly chances: readonly string[]
   /** Families of checks that were not made on what is scheduled here. */
   readonly notYetChecked: readonly Family[]
   /** Where the tables come from and what else a reader must know. Whole sentences. */
@@ -84,8 +57,11 @@ export function scheduleOf(layout: Layout, pourId: string, notYetChecked: readon
   const { bars, unplaced } = barsOf(layout, pourId)
   const groups = [...groupsOf(bars, standard, letter)].sort(byMemberThenKey)
   const stored = layout.barMarks.filter((mark) => mark.pourId === pourId)
-  const marks = marksByKey(groups, stored)
-  const context = { standard, marks, stockLength: settings.stockLength }
+  const pour = layout.pours.find(({ id }) => id === pourId)
+  const deliveries = pour?.deliveries ?? []
+  const marks = marksByKey(groups, stored, pour?.firstMark ?? 1)
+  const markText = markTextOf(pour)
+  const context = { standard, marks, stockLength: settings.stockLength, deliveries, markText }
   const rows = [...groups.map((group) => rowOf(group, context)), ...cancelledRows(stored, groups, context)]
   rows.sort(byMemberThenMark)
   const totals = totalsOf(rows, standard)
@@ -102,12 +78,17 @@ export function scheduleOf(layout: Layout, pourId: string, notYetChecked: readon
       ...(rows.length > 0
         ? []
         : [layoutProblem('steel', 'The pour has no bars yet. Give it steel, then schedule it.')]),
-      ...repeatedMarks(stored),
+      ...repeatedMarks(stored, markText),
+      ...repeatedMembers(deliveries, groups),
       ...groups.flatMap((group) => groupProblems(group, context)),
     ],
     totals,
     metres: sum(totals.map((total) => total.metres)),
     mass: sum(totals.map((total) => total.mass)),
+    deliveries: deliveryTotals(deliveries, rows),
+    kinds: kindTotals(bars, standard),
+    longest: longestBar(rows),
+    chances: oneLengthChances(bars, standard, settings),
     notYetChecked,
     notes: notesOf(standard, letter, settings.reinforcementGrade),
   }
@@ -142,13 +123,13 @@ interface ZoneGroup extends Omit<Group, 'zones' | 'roundings'> {
 
 function groupsOf(bars: readonly ZoneBars[], standard: BarStandard, letter: TypeLetter): readonly Group[] {
   const perZone = new Map<string, ZoneGroup>()
-  for (const { member, zoneId, zoneName, shape, count } of bars) {
+  for (const { member, zoneId, zoneName, shape, count, notes } of bars) {
     const rounded = roundedShape(shape, standard)
     const bar = { letter, shape: rounded }
     const key = barKey(bar)
     const id = `${member.id}|${zoneId}|${key}`
     const before = perZone.get(id)
-    const roundings = [...(before?.roundings ?? []), ...roundingsOf(shape.dimensions, rounded.dimensions)]
+    const roundings = [...(before?.roundings ?? []), ...notes, ...roundingsOf(shape.dimensions, rounded.dimensions)]
     perZone.set(id, { member, bar, key, zoneName, inEach: (before?.inEach ?? 0) + count, roundings })
   }
   const groups = new Map<string, ZoneGroup[]>()
@@ -172,9 +153,6 @@ const roundingsOf = (asked: Dimensions, rounded: Dimensions): readonly string[] 
     .filter((name) => asked[name] !== rounded[name])
     .map((name) => `${name} ${Math.round((asked[name] ?? 0) * 10) / 10} is scheduled as ${rounded[name]}`)
 
-const TEXT_ORDER = new Intl.Collator('en', { numeric: true })
-const inText = (a: string, b: string): number => TEXT_ORDER.compare(a, b) || (a < b ? -1 : a > b ? 1 : 0)
-
 const byMember = (a: Member, b: Member): number =>
   Number(a.kind === 'pan') - Number(b.kind === 'pan') || inText(a.name, b.name) || inText(a.id, b.id)
 
@@ -192,13 +170,20 @@ function byMemberThenMark(a: ScheduleRow, b: ScheduleRow): number {
 
 // Marks -------------------------------------------------------------------------------------------------------------
 
-/** Stored marks first; then the next free numbers, above every number ever given, in order of shape, size and key. */
-function marksByKey(groups: readonly Group[], stored: readonly BarMark[]): ReadonlyMap<string, number> {
+/**
+ * Stored marks first; then the next free numbers, from the pour's first mark on and above every number ever given, in
+ * order of shape, size and key.
+ */
+function marksByKey(
+  groups: readonly Group[],
+  stored: readonly BarMark[],
+  firstMark: number,
+): ReadonlyMap<string, number> {
   const marks = new Map<string, number>()
   for (const { key, mark } of [...stored].sort((a, b) => a.mark - b.mark)) {
     if (!marks.has(key)) marks.set(key, mark)
   }
-  let next = stored.reduce((most, { mark }) => Math.max(most, mark), 0) + 1
+  let next = stored.reduce((most, { mark }) => Math.max(most, mark + 1), firstMark)
   const fresh = new Map(groups.filter(({ key }) => !marks.has(key)).map((group) => [group.key, group]))
   for (const { key } of [...fresh.values()].sort(inMarkOrder)) marks.set(key, next++)
   return marks
@@ -207,9 +192,26 @@ function marksByKey(groups: readonly Group[], stored: readonly BarMark[]): Reado
 const inMarkOrder = (a: Group, b: Group): number =>
   inText(a.bar.shape.code, b.bar.shape.code) || a.bar.shape.diameter - b.bar.shape.diameter || inText(a.key, b.key)
 
-const markText = (mark: number): string => String(mark).padStart(2, '0')
+type MarkText = (mark: number) => string
 
-function repeatedMarks(stored: readonly BarMark[]): readonly ScheduleProblem[] {
+const markTextOf =
+  (pour: Pour | undefined): MarkText =>
+  (mark) =>
+    `${pour?.markPrefix ?? ''}${String(mark).padStart(2, '0')}`
+
+/** An edge or a pan in two deliveries counts in the first of them; somebody must say which it is. */
+function repeatedMembers(deliveries: readonly Delivery[], groups: readonly Group[]): readonly ScheduleProblem[] {
+  const members = new Map(groups.map(({ member }) => [member.id, member]))
+  return [...members.values()].sort(byMember).flatMap((member): readonly ScheduleProblem[] => {
+    const of = deliveries.filter((delivery) => deliveryOf([delivery], member) !== null)
+    if (of.length < 2) return []
+    const names = of.map(({ name }) => name).join(' and ')
+    const message = `${member.name} stands in the deliveries ${names}; its bars are counted in the first. Take it out of the others.`
+    return [{ mark: null, where: 'pour', field: 'deliveries', severity: 'warning', message }]
+  })
+}
+
+function repeatedMarks(stored: readonly BarMark[], markText: MarkText): readonly ScheduleProblem[] {
   const keys = new Map<number, Set<string>>()
   for (const { mark, key } of stored) keys.set(mark, (keys.get(mark) ?? new Set()).add(key))
   return [...keys]
@@ -229,9 +231,11 @@ interface RowContext {
   readonly standard: BarStandard
   readonly marks: ReadonlyMap<string, number>
   readonly stockLength: number
+  readonly deliveries: readonly Delivery[]
+  readonly markText: MarkText
 }
 
-function rowOf(group: Group, { standard, marks }: RowContext): ScheduleRow {
+function rowOf(group: Group, { standard, marks, deliveries, markText }: RowContext): ScheduleRow {
   const bar = barColumns(group.bar, standard)
   const total = group.zones.length * group.inEach
   const mark = marks.get(group.key) ?? 0
@@ -244,10 +248,19 @@ function rowOf(group: Group, { standard, marks }: RowContext): ScheduleRow {
     members: group.zones.length,
     inEach: group.inEach,
     total,
-    notes: [...bar.notes, ...group.roundings],
+    notes: [...bar.notes, ...bundleNote(total * (bar.massEach ?? 0)), ...group.roundings],
     zones: group.zones,
+    deliveryId: deliveryOf(deliveries, group.member)?.id ?? null,
   }
 }
+
+/** Largest bundle that a crane and a lorry take, kg (from memory, unsure): said, and never a limit. */
+const BUNDLE_MAX = 2000
+
+const bundleNote = (mass: number): readonly string[] =>
+  mass > BUNDLE_MAX
+    ? [`${Math.round(mass)} kg: ${Math.ceil(mass / BUNDLE_MAX)} bundles of ${BUNDLE_MAX} kg or less`]
+    : []
 
 type BarColumns = Pick<
   ScheduleRow,
@@ -276,21 +289,24 @@ function barColumns({ letter, shape }: TypedBar, standard: BarStandard): BarColu
 function cancelledRows(
   stored: readonly BarMark[],
   groups: readonly Group[],
-  { standard, marks }: RowContext,
+  { standard, marks, markText }: RowContext,
 ): readonly ScheduleRow[] {
   const used = new Set(groups.map((group) => group.key))
   return stored.flatMap(({ key, mark }) => {
     const bar = barOfKey(key)
     if (used.has(key) || marks.get(key) !== mark || !bar) return []
     const columns = barColumns(bar, standard)
-    const none = { member: null, members: 0, inEach: 0, total: 0, zones: [] }
+    const none = { member: null, members: 0, inEach: 0, total: 0, zones: [], deliveryId: null }
     return [
       { ...columns, ...none, key, markNumber: mark, mark: markText(mark), notes: [...columns.notes, 'cancelled'] },
     ]
   })
 }
 
-function groupProblems(group: Group, { standard, marks, stockLength }: RowContext): readonly ScheduleProblem[] {
+function groupProblems(
+  group: Group,
+  { standard, marks, stockLength, markText }: RowContext,
+): readonly ScheduleProblem[] {
   const mark = markText(marks.get(group.key) ?? 0)
   return shapeProblems(group.bar.shape, standard, stockLength).map((problem) => ({
     ...problem,
@@ -313,24 +329,12 @@ const byWhere = (a: ScheduleProblem, b: ScheduleProblem): number => inText(a.whe
 
 const sum = (values: readonly number[]): number => values.reduce((all, value) => all + value, 0)
 
-function totalsOf(rows: readonly ScheduleRow[], standard: BarStandard): readonly ScheduleTotal[] {
-  const totals = new Map<string, ScheduleTotal>()
-  for (const { typeAndSize, letter, diameter, total, length } of rows) {
-    if (total === 0 || length === null) continue
-    const massPerMetre = sizeOf(standard, diameter)?.massPerMetre ?? 0
-    const before = totals.get(typeAndSize)
-    // Whole millimetres are added, so that no fraction creeps in and a spreadsheet's sum agrees to the last digit.
-    const metres = (Math.round((before?.metres ?? 0) * 1000) + total * length) / 1000
-    const bars = (before?.bars ?? 0) + total
-    totals.set(typeAndSize, { typeAndSize, letter, diameter, massPerMetre, bars, metres, mass: metres * massPerMetre })
-  }
-  return [...totals.values()].sort((a, b) => a.diameter - b.diameter || inText(a.letter, b.letter))
-}
-
 function notesOf(standard: BarStandard, letter: TypeLetter, grade: string): readonly string[] {
   return [
     ...standard.provenance,
     ...(letter === 'X' ? [`Type X is reinforcement of grade ${grade}.`] : []),
     'The cut length of a helix pays for its flat turns: C counts all turns.',
+    'Supports: chairs and spacers are not scheduled here; they are held to the cover of the pour and come with the mats.',
+    'From memory: each bundle is tagged with schedule reference, mark, size and number of bars, and weighs 2000 kg or less.',
   ]
 }
