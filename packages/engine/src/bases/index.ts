@@ -1,9 +1,10 @@
 import type { Job } from '../model'
+import { AS_3600 } from './as-3600'
 import type { Basis, BasisSource } from './basis'
 import { EN_1992 } from './en-1992'
 
 /** The list of bases; a new one is one file and one line here. */
-export const BASIS_SOURCES: readonly BasisSource[] = [EN_1992]
+export const BASIS_SOURCES: readonly BasisSource[] = [EN_1992, AS_3600]
 
 /** The job's basis with its factors and accepted readings; throws where the job names a basis that is not in the list. */
 export function basisOf(job: Pick<Job, 'basis' | 'factors' | 'readings' | 'settings'>): Basis {
