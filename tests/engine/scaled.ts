@@ -4,7 +4,8 @@ const LENGTHS =
   'x y thickness coverTop coverSoffit coverEdge from to top soffit chainage height setBack straightBehind width ' +
   'depth diameter linkDiameter hook first pitch outside length leg bend spacing along across spacingAlongMin ' +
   'spacingHeightMin edgeAlongMin edgeHeightMin straightBehindMin cover pocketToFaceMin pocketToPocketMin clearGapMin ' +
-  'drawIn'
+  'drawIn closedLength stroke strandTail handRoom bodyDiameter noseDiameter noseLength sideRoom roomAbove headroom ' +
+  'jackClear'
 
 /** The same layout with its lengths times k and its forces times k^2: every stress stays as it was. */
 export const scaled = (of: Layout, k: number): Layout =>

@@ -70,7 +70,7 @@ export function tendonEndsOfEdge(index: LayoutIndex, edgeId: string): TendonEnd[
 }
 
 /** The edge of its pour that a pan's jack points at: the first that its axis meets, and that it stands square to. */
-function edgeFacedBy(index: LayoutIndex, pan: Pan): string | null {
+export function edgeFacedBy(index: LayoutIndex, pan: Pan): string | null {
   const axis = alongAzimuth(pan.azimuth)
   const met = (index.edgesOfPour.get(pan.pourId) ?? []).flatMap((edge) => {
     const frame = found(index.frames, edge.id, 'edge')

@@ -10,6 +10,8 @@ import { checkBurstingPlan, checkBurstingThickness } from './bursting'
 import { coverChecks } from './cover'
 import { notYetChecked } from './not-yet'
 import type { CheckContext } from './outcome'
+import { jackAccessChecks, panAccessChecks } from './pan-access'
+import { panBarsChecks } from './pan-bars'
 import { spacingChecks } from './spacing'
 import { straightLengthChecks } from './straight-length'
 import { forceChecks } from './tendon'
@@ -26,6 +28,7 @@ export const FAMILIES_OF_ZONE: Readonly<Record<ZoneKind, readonly Family[]>> = {
     'cover',
     'spacing',
     'straight-length',
+    'pan-access',
     'tendon',
     'dead-end',
     'fit',
@@ -58,14 +61,10 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
     atAnchor(context, zone, (anchor) => straightLengthChecks(context.index, anchor)),
   'edge-wedge': () => null,
   joint: () => null,
-  'pan-access': () => null,
-  'pan-bars': (_, zone) => [
-    notYetChecked(
-      zone,
-      'pan-bars',
-      'A stressing pan is stored and drawn; access for the jack and the bars round it are not yet checked.',
-    ),
-  ],
+  'pan-access': (context, zone) =>
+    atPan(zone, (panId) => panAccessChecks(context.index, panId)) ??
+    atAnchor(context, zone, (anchor) => jackAccessChecks(context.index, anchor)),
+  'pan-bars': (context, zone) => atPan(zone, (panId) => panBarsChecks(context, panId)),
   tendon: (context, zone) =>
     zone.kind === 'tendon'
       ? tendonChecks(context, zone)
@@ -82,6 +81,9 @@ type OfAnchor = (anchor: Anchor) => readonly Check[] | null
 
 const atAnchor = ({ index }: CheckContext, zone: Zone, make: OfAnchor): readonly Check[] | null =>
   zone.kind === 'anchor' ? make(anchorOf(index, zone)) : null
+
+const atPan = ({ kind, panId }: Zone, make: (panId: string) => readonly Check[]): readonly Check[] | null =>
+  kind === 'pan' && panId !== null ? make(panId) : null
 
 const anchorAtEdge = (index: LayoutIndex, zone: Zone, make: OfAnchor): readonly Check[] | null => {
   const anchor = anchorOf(index, zone)
