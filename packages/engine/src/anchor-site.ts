@@ -162,11 +162,15 @@ export function whyNoRule(site: AnchorSite): { readonly field: string; readonly 
   if (pan !== null && !isInside(pan, pour.outline)) {
     return { field: 'pan.x', message: `The bearing face of pan ${pan.mark} is not within the outline of the pour.` }
   }
+  if (site.toFloor !== null && site.toFloor <= 0) {
+    const message = `The centre at height ${anchor.height} is not above the floor of the recess (${anchor.height - site.toFloor}).`
+    return { field: 'height', message }
+  }
   if (nearerFace(site) <= 0) {
     const message = `The centre at height ${anchor.height} is not between soffit (${soffit}) and top (${top}).`
     return { field: 'height', message }
   }
-  if (anchor.chainage > frame.from && anchor.chainage < frame.to) return null
+  if (pan !== null || (anchor.chainage > frame.from && anchor.chainage < frame.to)) return null
   const message = `Chainage ${anchor.chainage} is not on the edge, which runs from ${frame.from} to ${frame.to}.`
   return { field: 'chainage', message }
 }

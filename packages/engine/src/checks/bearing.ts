@@ -1,8 +1,8 @@
-/** Bearing behind the plate of a live anchor, at every stage of stressing. */
+/** Bearing behind the plate of an anchor, at every stage of stressing. */
 
-import { nearerFace, whyNoRule, type AnchorSite } from '../anchor-site'
+import { isBonded, nearerFace, whyNoRule, type AnchorSite } from '../anchor-site'
 import type { BearingRule } from '../bases/basis'
-import { jackingForce, stageForce } from '../force'
+import { stageForce } from '../force'
 import { ROUNDING } from '../geometry'
 import { approvalLine, distancesByStage, hardwareClause, largerOf } from '../hardware-distances'
 import type { Approval, ApprovalStrength, Hardware, Stage, SteelShape } from '../model'
@@ -11,8 +11,9 @@ import type { Clause, Step } from '../step'
 import { handSteelOf } from '../steel/steel-of-anchor'
 import { atLeast, byRatio, refusal, type CheckContext, type Head } from './outcome'
 
-/** One check a stage. Hardware with an approval answers to the approval alone; a plate without one to the basis. */
+/** One check a stage; none where strands bond in the concrete and no plate bears. Hardware with an approval answers to the approval alone; a plate without one to the basis. */
 export function checkBearing(site: AnchorSite, context: CheckContext): Check[] {
+  if (isBonded(site)) return []
   const outside = whyNoRule(site)
   return site.pour.stages.map((stage) => {
     const { approval } = site.hardware
@@ -47,7 +48,12 @@ function bearingByFormula(site: AnchorSite, stage: Stage, context: CheckContext)
     return refusal(head, { code: 'OUTSIDE_METHOD', field: 'hardware.hole', message })
   }
   const { rule, steps } = formula(site, stage, context)
-  const notes = ['The net area gives the pressure, the gross area the ratio of areas.', ...rule.notes]
+  const notes = [
+    'The net area gives the pressure, the gross area the ratio of areas.',
+    ...rule.notes,
+    ...site.force.notes,
+    ...recessNotes(site),
+  ]
   return byRatio(
     context,
     { ...head, clause: rule.clause, notes },
@@ -60,8 +66,7 @@ function formula(
   stage: Stage,
   { basis }: CheckContext,
 ): { rule: BearingRule; steps: readonly Step[] } {
-  const jacking = jackingForce(site.tendon, site.strand)
-  const force = stageForce(jacking.value, stage)
+  const force = stageForce(site.force.value, stage)
   const { width, height } = freeSpread(site)
   const rule = basis.bearing({
     P: force.value,
@@ -72,7 +77,13 @@ function formula(
     heightFree: height,
     strength: stage.strength,
   })
-  return { rule, steps: [jacking, force, ...rule.steps] }
+  return { rule, steps: [...site.force.steps, force, ...rule.steps] }
+}
+
+/** The wall of a recess ends at its floor, and with it the face that the plate bears on. */
+function recessNotes({ pan, toFloor }: AnchorSite): readonly string[] {
+  if (pan === null || toFloor === null) return []
+  return [`The supporting area ends at the floor of the recess, ${mm(toFloor)} below the anchor's centre.`]
 }
 
 function holeArea({ hole }: Hardware): number {
@@ -81,14 +92,15 @@ function holeArea({ hole }: Hardware): number {
 }
 
 /**
- * Width and height that the supporting area may take up round the plate's centre: the section, other faces,
+ * Width and height that the supporting area may take up round the plate's centre: the section, which in a pan's bearing
+ * face begins at the floor of the recess, other faces,
  * and a fair share of the distance to each neighbour, beside or above, whichever of the two leaves more.
  */
 function freeSpread(site: AnchorSite): { readonly width: number; readonly height: number } {
   const { plate } = site.hardware
   const side = site.sideFace
   let width = side ? 2 * side.distance : 3 * plate.width
-  let height = 2 * nearerFace(site)
+  let height = 2 * Math.min(nearerFace(site), site.toFloor ?? Infinity)
   for (const { hardware, along, inHeight } of site.neighbours) {
     const beside = along / ((plate.width + hardware.plate.width) / 2)
     const above = inHeight / ((plate.height + hardware.plate.height) / 2)

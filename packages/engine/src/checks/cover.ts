@@ -2,11 +2,11 @@
 
 import { faceClearance, plateBox, pocketBox, type Box } from '../bodies'
 import { nearestFace } from '../faces'
-import type { EdgeFrame } from '../frame'
-import { distancesByStage } from '../hardware-distances'
+import { distancesByStage, hardwareClause } from '../hardware-distances'
 import { found, type LayoutIndex } from '../layout-index'
 import type { Anchor, Hardware } from '../model'
 import { neighboursOf } from '../neighbours'
+import { panFrame } from '../pan-frame'
 import type { Advice, Check, Compared } from '../result'
 import { sectionBehind, type Section } from '../section'
 import { step, type Clause } from '../step'
@@ -30,22 +30,24 @@ interface Site {
   readonly index: LayoutIndex
   readonly anchor: Anchor
   readonly hardware: Hardware
-  readonly frame: EdgeFrame
+  /** Of a pan's bearing face, above the soffit datum; null at an edge. */
+  readonly floor: number | null
   readonly top: number
   readonly soffit: number
   /** Covers at the anchor. */
   readonly section: Section
 }
 
-/** Distances of one anchor at an edge to the concrete round it; an anchor in a pan has none here. */
+/** Distances of one anchor to the concrete round it. In a pan the recess takes the place of a pocket. */
 export function coverChecks(index: LayoutIndex, anchor: Anchor): Check[] {
   const site = siteOf(index, anchor)
   if (!site) return []
   const plate = plateBox(anchor, site.hardware)
-  const pocket = pocketBox(anchor, site.hardware)
+  const pocket = site.floor === null ? pocketBox(anchor, site.hardware) : null
   return [
     ...centreChecks(site),
     ...bodyChecks(site, { body: plate, name: 'Plate', ...coversOf(site.section) }),
+    ...plateOnWall(site, plate),
     ...(pocket ? bodyChecks(site, { body: pocket, name: 'Pocket', ...pocketLimits(site) }) : []),
     ...(pocket ? pocketToPocket(site, pocket) : []),
     positionAdvice(site),
@@ -53,20 +55,48 @@ export function coverChecks(index: LayoutIndex, anchor: Anchor): Check[] {
 }
 
 function siteOf(index: LayoutIndex, anchor: Anchor): Site | null {
-  const edge = anchor.edgeId === null ? undefined : index.edges.get(anchor.edgeId)
-  if (!edge) return null
-  const frame = found(index.frames, edge.id, 'edge')
-  const pour = found(index.pours, edge.pourId, 'pour')
+  const pan = index.pans.get(anchor.panId ?? '')
+  const edge = index.edges.get(anchor.edgeId ?? '')
+  const frame = pan ? panFrame(index, pan.id) : index.frames.get(anchor.edgeId ?? '')
+  const pour = index.pours.get(pan?.pourId ?? edge?.pourId ?? '')
+  if (!frame || !pour) return null
   const { chainage, setBack: depth } = anchor
+  const top = frame.topAt(chainage)
   return {
     index,
     anchor,
     hardware: found(index.hardware, anchor.hardwareId, 'hardware'),
-    frame,
-    top: frame.topAt(chainage),
+    floor: pan ? top - pan.depth : null,
+    top,
     soffit: frame.soffitAt(chainage),
     section: sectionBehind(pour, { frame, chainage, depth }),
   }
+}
+
+/** In a pan the plate stands on the wall of the recess, above its floor. */
+function plateOnWall(site: Site, plate: Box): Compared[] {
+  const { floor } = site
+  if (floor === null) return []
+  const clause = hardwareClause(site.hardware, 'plate')
+  const above = step(
+    { symbol: 'c', meaning: 'plate above the floor of the recess', formula: 'z - h / 2 - zf', unit: 'mm', clause },
+    { z: site.anchor.height, h: plate.toHeight - plate.fromHeight, zf: floor },
+    (v) => v.z - v.h / 2 - v.zf,
+  )
+  return [
+    distanceCheck({
+      ...headOf(site, 'Plate above the floor of the recess'),
+      stage: null,
+      limitKind: 'H',
+      clause,
+      demand: above.value,
+      limit: 0,
+      // A plate that stands on the floor is on the wall; one that reaches below it is not.
+      isClearance: above.value < 0,
+      steps: [above],
+      mend: { field: 'height', value: floor + (plate.toHeight - plate.fromHeight) / 2 },
+    }),
+  ]
 }
 
 /** The nearer of soffit and top, at each stage whose approval asks for another distance. */

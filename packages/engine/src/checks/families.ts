@@ -1,19 +1,23 @@
 /** The one place that maps a family of checks to its function, and says where each family applies. */
 
+import { groupsOfEdge } from '../anchor-groups'
 import { siteOfAnchor, type AnchorSite } from '../anchor-site'
-import { closeAnchors } from '../close-anchors'
 import { found, type LayoutIndex } from '../layout-index'
 import type { Anchor } from '../model'
 import type { Check, Family, Zone, ZoneKind } from '../result'
+import type { Plane } from '../steel/crossings'
 import { checkBearing } from './bearing'
 import { checkBurstingPlan, checkBurstingThickness } from './bursting'
+import { checkBurstingOfGroup } from './bursting-group'
 import { coverChecks } from './cover'
-import { notYetChecked } from './not-yet'
+import { deadEndChecks } from './dead-end'
+import { depthChangeChecks } from './depth-change'
 import type { CheckContext } from './outcome'
 import { jackAccessChecks, panAccessChecks } from './pan-access'
 import { panBarsChecks } from './pan-bars'
 import { spacingChecks } from './spacing'
 import { straightLengthChecks } from './straight-length'
+import { spallingChecks } from './spalling'
 import { forceChecks } from './tendon'
 import { tendonChecks } from './tendon-advice'
 
@@ -48,15 +52,15 @@ export const FAMILIES_OF_ZONE: Readonly<Record<ZoneKind, readonly Family[]>> = {
 type FamilyChecks = (context: CheckContext, zone: Zone) => readonly Check[] | null
 
 export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
-  bearing: (context, zone) => atAnchor(context, zone, (anchor) => bearing(context, zone, anchor)),
+  bearing: (context, zone) => atSite(context, zone, (site) => checkBearing(site, context)),
   'bursting-thickness': (context, zone) =>
-    atSite(context, zone, (site) => [checkBurstingThickness(site, context, closeOf(context.index, site))]),
+    atGroup(context, zone, 'thickness') ?? atSite(context, zone, (site) => [checkBurstingThickness(site, context)]),
   'bursting-plan': (context, zone) =>
-    atSite(context, zone, (site) => [checkBurstingPlan(site, context, closeOf(context.index, site))]),
-  spalling: () => null,
-  'depth-change': () => null,
-  cover: ({ index }, zone) => anchorAtEdge(index, zone, (anchor) => coverChecks(index, anchor)),
-  spacing: ({ index }, zone) => anchorAtEdge(index, zone, (anchor) => spacingChecks(index, anchor)),
+    atGroup(context, zone, 'plan') ?? atSite(context, zone, (site) => [checkBurstingPlan(site, context)]),
+  spalling: spallingChecks,
+  'depth-change': (context, zone) => atSite(context, zone, (site) => depthChangeChecks(site, context)),
+  cover: (context, zone) => atAnchor(context, zone, (anchor) => coverChecks(context.index, anchor)),
+  spacing: (context, zone) => atAnchor(context, zone, (anchor) => spacingChecks(context.index, anchor)),
   'straight-length': (context, zone) =>
     atAnchor(context, zone, (anchor) => straightLengthChecks(context.index, anchor)),
   'edge-wedge': () => null,
@@ -69,13 +73,11 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
     zone.kind === 'tendon'
       ? tendonChecks(context, zone)
       : atAnchor(context, zone, (anchor) => forceChecks(context, zone.id, anchor)),
-  'dead-end': (context, zone) => atAnchor(context, zone, (anchor) => deadEnd(zone, anchor)),
+  'dead-end': (context, zone) => atSite(context, zone, (site) => deadEndChecks(site, context)),
   precompression: () => null,
   fit: () => null,
   anchorage: () => null,
 }
-
-const closeOf = (index: LayoutIndex, { edge }: AnchorSite) => (edge === null ? [] : closeAnchors(index, edge.id))
 
 type OfAnchor = (anchor: Anchor) => readonly Check[] | null
 
@@ -85,33 +87,17 @@ const atAnchor = ({ index }: CheckContext, zone: Zone, make: OfAnchor): readonly
 const atPan = ({ kind, panId }: Zone, make: (panId: string) => readonly Check[]): readonly Check[] | null =>
   kind === 'pan' && panId !== null ? make(panId) : null
 
-const anchorAtEdge = (index: LayoutIndex, zone: Zone, make: OfAnchor): readonly Check[] | null => {
-  const anchor = anchorOf(index, zone)
-  return anchor.edgeId === null ? null : make(anchor)
-}
-
-function atSite(
-  { index }: CheckContext,
+const atSite = (
+  context: CheckContext,
   zone: Zone,
   make: (site: AnchorSite) => readonly Check[],
-): readonly Check[] | null {
-  if (zone.kind !== 'anchor') return null
-  const anchor = anchorOf(index, zone)
-  return anchor.edgeId === null || anchor.end === 'dead' ? null : make(siteOfAnchor(index, anchor))
+): readonly Check[] | null => atAnchor(context, zone, (anchor) => make(siteOfAnchor(context.index, anchor)))
+
+function atGroup(context: CheckContext, zone: Zone, plane: Plane): readonly Check[] | null {
+  if (zone.kind !== 'group') return null
+  const group = groupsOfEdge(context.index, zone.edgeId ?? '').find(({ id }) => id === zone.id)
+  return group ? checkBurstingOfGroup(group, plane, context) : null
 }
 
 const anchorOf = (index: LayoutIndex, { id }: Zone): Anchor =>
   found(index.anchors, id.slice('anchor:'.length), 'anchor')
-
-function bearing(context: CheckContext, zone: Zone, { panId }: Anchor): readonly Check[] | null {
-  if (panId === null) return atSite(context, zone, (site) => checkBearing(site, context))
-  const message =
-    'An anchor in a stressing pan is stored and drawn; bearing and bursting behind it are not yet checked.'
-  return [notYetChecked(zone, 'bearing', message)]
-}
-
-function deadEnd(zone: Zone, { end }: Anchor): readonly Check[] {
-  if (end === 'live') return []
-  const message = 'A dead end is stored and drawn; bearing, bursting and spread behind it are not yet checked.'
-  return [notYetChecked(zone, 'dead-end', message)]
-}

@@ -1,7 +1,6 @@
 /** The prisms of one anchor in both planes, and what its row would give. */
 
 import type { AnchorSite } from '../anchor-site'
-import { jackingForce } from '../force'
 import { ROUNDING } from '../geometry'
 import { step, type Clause, type Step } from '../step'
 
@@ -24,13 +23,15 @@ export interface Prism {
   readonly b: Step
 }
 
-/** Off centre the anchor's own prism is smaller than the section and asks for less; the prism at mid-thickness is there for comparison. */
-export function thicknessPrisms({ toTop, toSoffit, top, soffit, hardware }: AnchorSite): {
+/** `a` is the height of the plate, or of several from out to out. Off centre the anchor's own prism is smaller than the section and asks for less; the prism at mid-thickness is there for comparison. */
+export function thicknessPrisms(
+  a: number,
+  { toTop, toSoffit, top, soffit }: Pick<AnchorSite, 'toTop' | 'toSoffit' | 'top' | 'soffit'>,
+): {
   readonly own: Prism
   /** Null where the anchor stands at mid-thickness. */
   readonly middle: Prism | null
 } {
-  const a = hardware.plate.height
   const b = step(
     {
       symbol: 'b',
@@ -57,26 +58,53 @@ interface Sides {
   readonly after: number
 }
 
-/** On each side half the gap to the neighbour, or the distance to the end; where the slab goes on, the other side counts. */
-function sidesOf(site: AnchorSite): Sides {
-  const { anchor, frame } = site
-  const before = site.halfGapBefore ?? site.toStart
-  const after = site.halfGapAfter ?? site.toEnd
+/** How far the force may spread along the edge on each side of a place. */
+export interface PlanSides {
+  readonly own: Sides
+  /** Once the next pour is cast; the same where there is none. */
+  readonly joined: Sides
+  /** The end of the edge, and not a neighbour, stands on that side. */
+  readonly isEndBefore: boolean
+  readonly isEndAfter: boolean
+}
+
+/**
+ * On each side half the gap to the neighbour, or the distance to the end; where the slab goes on, the other side counts.
+ *
+ * For one anchor `first` and `last` are the same; of anchors that act as one they are the outermost, so that the gaps
+ * between its members do not limit the spread from `chainage`.
+ */
+export function planSides(first: AnchorSite, last: AnchorSite, chainage: number): PlanSides {
+  const [toFirst, toLast] = [chainage - first.anchor.chainage, last.anchor.chainage - chainage]
+  const plus = (distance: number | null, more: number) => (distance === null ? null : distance + more)
+  const before = plus(first.halfGapBefore ?? first.toStart, toFirst)
+  const after = plus(last.halfGapAfter ?? last.toEnd, toLast)
+  const own = {
+    before: before ?? after ?? chainage - first.frame.from,
+    after: after ?? before ?? first.frame.to - chainage,
+  }
   return {
-    before: before ?? after ?? anchor.chainage - frame.from,
-    after: after ?? before ?? frame.to - anchor.chainage,
+    own,
+    joined: {
+      before: plus(first.jointGapBefore, toFirst) ?? own.before,
+      after: plus(last.jointGapAfter, toLast) ?? own.after,
+    },
+    isEndBefore: first.halfGapBefore === null,
+    isEndAfter: last.halfGapAfter === null,
   }
 }
 
 /**
  * In plan twice the nearer half-gap or end of the edge. Beside a pour boundary the gap that runs across it gives
  * another prism once both pours are cast; null where it changes nothing.
+ *
+ * @param a width of the plate, or of several from out to out.
  */
-export function planPrisms(site: AnchorSite): { readonly own: Prism; readonly acrossBoundary: Prism | null } {
-  const a = site.hardware.plate.width
-  const sides = sidesOf(site)
+export function planPrisms(
+  a: number,
+  { own: sides, joined }: PlanSides,
+): { readonly own: Prism; readonly acrossBoundary: Prism | null } {
   const own = twiceNearer('Prism: twice the nearer half-gap or end of the edge', sides)
-  const joined = { before: site.jointGapBefore ?? sides.before, after: site.jointGapAfter ?? sides.after }
   const both = twiceNearer('Prism with the next pour cast: twice the nearer half-gap', joined)
   const isSame = Math.abs(both.value - own.value) <= ROUNDING
   return {
@@ -92,28 +120,26 @@ const twiceNearer = (meaning: string, { before, after }: Sides): Step =>
     (v) => 2 * Math.min(v.before, v.after),
   )
 
-/** What a reader must know of a prism in plan: a wide gap or the end of the edge that sets it, and what a row would give. */
-export function planNotes(site: AnchorSite, prism: Prism): readonly string[] {
-  const { before, after } = sidesOf(site)
+/** What a reader must know of a prism in plan: a wide gap or the end of the edge that sets it. */
+export function planNotes({ own: { before, after }, isEndBefore, isEndAfter }: PlanSides): readonly string[] {
   const [smaller, larger] = [Math.min(before, after), Math.max(before, after)]
   const notes: string[] = []
   if (larger > WIDE_GAP_MIN * smaller) {
     const sides = `${Math.round(smaller)} and ${Math.round(larger)} to its two sides`
     notes.push(`Beside a wide gap (${sides}) the prism rule is on the unsafe side; the elastic value is not yet made.`)
   }
-  const isByEnd =
-    (site.halfGapBefore === null && before === smaller) || (site.halfGapAfter === null && after === smaller)
+  const isByEnd = (isEndBefore && before === smaller) || (isEndAfter && after === smaller)
   if (isByEnd) notes.push('The end of the edge sets the prism: near a corner a small distance lowers the force.')
-  const row = rowNote(site, prism)
-  return row === null ? notes : [...notes, row]
+  return notes
 }
 
-/** What an endless row of the same anchors would give, beside the prism; null where the row is uneven. */
-function rowNote(site: AnchorSite, { a, b }: Prism): string | null {
+/** What an endless row of the same anchors would give, beside the prism; nothing where the row is uneven. */
+export function rowNotes(site: AnchorSite, { a, b }: Prism): readonly string[] {
   const share = onLine(a / b.value)
-  if (share === null || !site.isInEqualRow) return null
-  const P = jackingForce(site.tendon, site.strand).value
-  return `An endless row at this spacing gives ${share.toFixed(3)} P = ${(P * share * 1e-3).toFixed(1)} kN unfactored on the anchor's line (computed).`
+  if (share === null || !site.isInEqualRow) return []
+  const P = site.force.value
+  const row = `An endless row at this spacing gives ${share.toFixed(3)} P = ${(P * share * 1e-3).toFixed(1)} kN unfactored on the anchor's line (computed).`
+  return [row]
 }
 
 function onLine(ratio: number): number | null {

@@ -12,9 +12,8 @@ import { step } from '../step'
 import { anchorMark } from '../zones'
 import { distanceCheck } from './distance-check'
 
-/** Pairs with their neighbours in the row, and distances to other faces; an anchor in a pan has none here. */
+/** Pairs with their neighbours, in the row or beside a pan, and distances to other faces. */
 export function spacingChecks(index: LayoutIndex, anchor: Anchor): Check[] {
-  if (anchor.edgeId === null) return []
   const stages = distancesByStage(index, anchor)
   return [...pairChecks(index, anchor, stages), ...edgeDistances(index, anchor, stages)]
 }
@@ -158,7 +157,9 @@ function movedTo(index: LayoutIndex, anchor: Anchor, chainages: readonly number[
 }
 
 function conforms(index: LayoutIndex, anchor: Anchor, chainage: number): boolean {
-  const { from, to } = found(index.frames, anchor.edgeId ?? '', 'edge')
+  // An anchor in a pan moves with its pan, in plan.
+  if (anchor.edgeId === null) return false
+  const { from, to } = found(index.frames, anchor.edgeId, 'edge')
   const half = hardwareOf(index, anchor).plate.width / 2
   if (chainage - half < from || chainage + half > to) return false
   const moved = { ...anchor, chainage }

@@ -11,6 +11,8 @@ export interface CountInput {
   readonly window: Window
   readonly place: CountPlace
   readonly shapes: readonly SteelShape[]
+  /** From the plane to the anchor that each shape stands behind, in the same order; without it 0. */
+  readonly asides?: readonly number[]
   /** Anchorage that a straight bar of this diameter needs past the line. */
   readonly anchorageOf: (diameter: number) => Anchorage
 }
@@ -72,7 +74,7 @@ const barArea = (diameter: number): number => (Math.PI * diameter ** 2) / 4
 const planeName = (plane: Plane): string => (plane === 'plan' ? 'in plan' : 'in the thickness')
 
 function countSet(shape: SteelShape, input: CountInput, at: number): SetCount {
-  const set = crossingsOf(shape, input.plane, input.place)
+  const set = crossingsOf(shape, input.plane, { ...input.place, aside: input.asides?.[at] ?? 0 })
   if ('reason' in set) return { ...NOTHING, notes: set.reason === null ? [] : [set.reason] }
   const { window } = input
   const inside = set.positions.filter((x) => x >= window.from && x <= window.to)
