@@ -6,7 +6,7 @@ export interface FormulaPart {
   readonly below?: string
 }
 
-const FUNCTIONS = new Set(['min', 'max', 'sqrt', 'tan', 'sin', 'cos', 'abs', 'exp', 'log'])
+const FUNCTIONS = new Set(['min', 'max', 'sqrt', 'tan', 'sin', 'cos', 'abs', 'atan', 'exp', 'log'])
 const NAME = /[A-Za-z_][A-Za-z0-9_]*/g
 
 const GREEK: Readonly<Record<string, string>> = {

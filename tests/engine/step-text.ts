@@ -10,6 +10,7 @@ const FUNCTIONS = {
   sin: (value: number) => Math.sin(value),
   cos: (value: number) => Math.cos(value),
   abs: (value: number) => Math.abs(value),
+  atan: (value: number) => Math.atan(value),
   exp: (value: number) => Math.exp(value),
   log: (value: number) => Math.log(value),
 }

@@ -23,7 +23,7 @@ export interface Step {
 /**
  * Computes a step and keeps the text that it was computed from; a test evaluates the text and compares.
  *
- * The text may use + - * / ( ), numbers, the names in `values` and min, max, sqrt, tan, sin, cos, abs, exp, log
+ * The text may use + - * / ( ), numbers, the names in `values` and min, max, sqrt, tan, sin, cos, abs, atan, exp, log
  * (natural).
  */
 export function step<V extends Record<string, number>>(
