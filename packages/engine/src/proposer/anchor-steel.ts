@@ -1,6 +1,7 @@
 /** Candidates of steel behind one anchor: through the thickness, in plan, or both. */
 
 import { siteOfAnchor, type AnchorSite } from '../anchor-site'
+import type { Window } from '../bases/basis'
 import { found } from '../layout-index'
 import type { Stage, SteelShape } from '../model'
 import type { Compared, Zone } from '../result'
@@ -12,7 +13,7 @@ import { transverseBars, transverseSets, type StraightBar, type TransverseNeed }
 import { needsOf, unmetOf } from './verdict'
 
 /** Sets through the thickness that are joined with bars in plan: the lightest of them. */
-const THICKNESS_KEPT = 10
+const THICKNESS_KEPT = 5
 
 export interface AnchorSteel {
   readonly candidates: readonly Candidate[]
@@ -26,7 +27,7 @@ export function anchorSteel(bench: Bench, place: Place, shared: readonly Straigh
   if (!site) return { candidates: [], bars: [] }
   const needs = unmetOf(needsOf(bench.context, place.zone))
   const thickness = needs.find(({ plane }) => plane === 'thickness')
-  const upright = thickness ? lightest(bench, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
+  const upright = thickness ? lightest(bench, place, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
   const made = upright.map((shapes) => ({ shapes, ...planPart(bench, place, { site, shapes, shared }) }))
   return {
     candidates: made.flatMap(({ shapes, sets }) => sets.map((set) => ({ shapes: [...shapes, ...set] }))),
@@ -39,8 +40,8 @@ export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): Ancho
   return kind === 'anchor' ? siteOfAnchor(index, found(index.anchors, id.slice('anchor:'.length), 'anchor')) : null
 }
 
-function lightest(bench: Bench, sets: readonly SteelShape[]): SteelShape[][] {
-  const weighed = sets.map((shape, at) => ({ shape, at, mass: bench.weigh([shape]).mass }))
+function lightest(bench: Bench, { steelZone }: Place, sets: readonly SteelShape[]): SteelShape[][] {
+  const weighed = sets.map((shape, at) => ({ shape, at, mass: bench.weigh([shape], steelZone).mass }))
   weighed.sort((a, b) => a.mass - b.mass || a.at - b.at)
   const kept = new Map<string, SteelShape[]>()
   for (const { shape } of weighed) {
@@ -58,7 +59,7 @@ function planPart(
 ): { readonly sets: readonly SteelShape[][]; readonly bars: readonly StraightBar[] } {
   const context = of.shapes.length > 0 ? contextWith(bench, place, of.shapes) : bench.context
   const plan = unmetOf(needsOf(context, place.zone)).find((need) => need.plane === 'plan')
-  const need = plan && transverseNeed(bench, of.site, plan)
+  const need = plan && planNeed(bench, of.site, plan)
   if (!need) return { sets: [[]], bars: [] }
   const own = transverseBars(need)
   const sets = unique([...own, ...of.shared]).flatMap((bar) => transverseSets(need, bar))
@@ -74,21 +75,29 @@ export function unique(bars: readonly StraightBar[]): StraightBar[] {
 /** The prism that a need was worked out with: its step `b`. */
 const prismOf = ({ steps }: Compared): number | null => steps.find(({ symbol }) => symbol === 'b')?.value ?? null
 
+/** The basis's window behind a plate; behind a bonded end the check's own, which ends at its step `xTo`. */
+function windowOf({ context: { basis } }: Bench, { steps }: Compared, b: number): Window {
+  const to = steps.find(({ symbol }) => symbol === 'xTo')?.value
+  return to === undefined ? basis.window(b) : { from: 0, to }
+}
+
 const shortOf = ({ demand, limit }: Compared): number => Math.max(0, demand - limit)
 
 const stageOf = ({ pour }: AnchorSite, need: Compared): Stage | undefined =>
   pour.stages.find(({ name }) => name === need.stage) ?? pour.stages.at(-1)
 
-function transverseNeed(bench: Bench, site: AnchorSite, need: Compared): TransverseNeed | null {
+/** What bars in plan must do at an anchor; null where its check does not say with which prism it was worked out. */
+export function planNeed(bench: Bench, site: AnchorSite, need: Compared): TransverseNeed | null {
   const b = prismOf(need)
   const short = shortOf(need)
   if (b === null || short <= 0) return null
   return {
     short,
-    window: bench.context.basis.window(b),
+    window: windowOf(bench, need, b),
     developed: developedAt(bench, site, need),
     sizes: bench.sizes.map(({ diameter }) => diameter),
     plateWidth: site.hardware.plate.width,
+    aside: 0,
     toEnd: Math.min(site.toStart ?? Infinity, site.toEnd ?? Infinity) - site.pour.coverEdge,
     clearGap: clearGapOf(bench, site),
   }
@@ -102,7 +111,7 @@ function thicknessNeed(bench: Bench, site: AnchorSite, need: Compared): Thicknes
   const developed = developedAt(bench, site, need)
   return {
     short: shortOf(need),
-    window: bench.context.basis.window(prismOf(need) ?? site.top - site.soffit),
+    window: windowOf(bench, need, prismOf(need) ?? site.top - site.soffit),
     toCover,
     plate: hardware.plate,
     depth: site.top - site.soffit,

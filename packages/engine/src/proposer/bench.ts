@@ -7,9 +7,9 @@ import type { Zone } from '../result'
 import { typeLetterOf } from '../schedule/bar-key'
 import type { BarSize } from '../schedule/bar-standards'
 import { barStandardById, BS_8666_2020 } from '../schedule/bs-8666'
-import type { Candidate } from './candidate'
+import type { Candidate, Candidates } from './candidate'
 import type { Blocked } from './proposal'
-import { faultsBefore, outBy, stoppedBy } from './verdict'
+import { faultsBefore, needsOf, outBy, stoppedBy, unmetOf } from './verdict'
 import { weigherOf, type Weigher } from './weigh'
 import { inWords } from './words'
 
@@ -25,8 +25,11 @@ export interface Bench extends Weigher {
 
 /** A zone with the steel zone that its bars are entered for. */
 export interface Place {
+  /** Whose checks decide. */
   readonly zone: Zone
+  /** Where its bars are entered, and the key that steel is found by there. */
   readonly steelZone: SteelZone
+  readonly key: string
   readonly pourId: string
 }
 
@@ -49,7 +52,7 @@ export function benchOf(context: CheckContext): Bench {
   const sizes = standard.sizes.filter(({ diameter }) => settings.barSizes.includes(diameter))
   return {
     context,
-    ...weigherOf(layout),
+    ...weigherOf(context),
     letter: typeLetterOf(settings.reinforcementGrade),
     sizes: [...sizes].sort((a, b) => a.diameter - b.diameter),
     clearGap: settings.clearGapMin,
@@ -65,6 +68,18 @@ export function withPlaced(bench: Bench, placed: ReadonlyMap<string, readonly St
 
 const steelIn = (index: LayoutIndex, key: string): readonly Steel[] => index.steelOfZone.get(key) ?? []
 
+/** Steel by the key of the place that it is entered for; places that share one have theirs together. */
+export function byKey(
+  places: readonly Place[],
+  shapesOf: (place: Place) => readonly SteelShape[],
+): Map<string, Steel[]> {
+  const steel = new Map<string, Steel[]>()
+  for (const place of places) {
+    steel.set(place.key, [...(steel.get(place.key) ?? []), ...asSteel(place, shapesOf(place))])
+  }
+  return steel
+}
+
 /** Steel of a candidate as the layout would hold it; its ids stand for nothing outside a trial. */
 export const asSteel = ({ zone, steelZone, pourId }: Place, shapes: readonly SteelShape[]): Steel[] =>
   shapes.map((shape, i) => ({
@@ -78,7 +93,7 @@ export const asSteel = ({ zone, steelZone, pourId }: Place, shapes: readonly Ste
 
 /** The checks' context with a candidate in its zone. */
 export const contextWith = (bench: Bench, place: Place, shapes: readonly SteelShape[]): CheckContext =>
-  withPlaced(bench, new Map([[place.zone.id, asSteel(place, shapes)]])).context
+  withPlaced(bench, new Map([[place.key, asSteel(place, shapes)]])).context
 
 /** Distinct sets of marks that are kept for the choice over the pour. */
 const OPTIONS_KEPT = 8
@@ -86,13 +101,13 @@ const OPTIONS_KEPT = 8
 const BLOCKED_KEPT = 6
 
 /** Tries candidates in their zone, lightest first, by the real checks of the zone. */
-export function tryAll(bench: Bench, place: Place, candidates: readonly Candidate[]): Tried {
+export function tryAll(bench: Bench, place: Place, { candidates, blocked: impossible }: Candidates): Tried {
   const before = faultsBefore(bench.context, place.zone)
   const weighed = candidates
-    .map(({ shapes }, at) => ({ shapes, at, ...bench.weigh(shapes) }))
+    .map(({ shapes }, at) => ({ shapes, at, ...bench.weigh(shapes, place.steelZone) }))
     .sort((a, b) => a.mass - b.mass || a.shapes.length - b.shapes.length || a.at - b.at)
   const options = new Map<string, Option>()
-  const blocked: Blocked[] = []
+  const blocked: Blocked[] = [...impossible]
   for (const { shapes, mass, keys, problem } of weighed) {
     const id = keys.join('+')
     if (options.has(id)) continue
@@ -106,7 +121,17 @@ export function tryAll(bench: Bench, place: Place, candidates: readonly Candidat
     if (stopped) blocked.push({ candidate: words, check: stopped.name, by: outBy(stopped) })
     else options.set(id, { shapes, mass, keys })
   }
+  if (weighed.length === 0 && blocked.length === 0) blocked.push(...nothingToTry(bench, place))
   return { options: [...options.values()], blocked: spread(blocked) }
+}
+
+/** A need that no steel of this kind of zone meets is named by itself. */
+function nothingToTry(bench: Bench, { zone }: Place): Blocked[] {
+  return unmetOf(needsOf(bench.context, zone)).map((need) => ({
+    candidate: inWords([], bench.letter),
+    check: need.name,
+    by: outBy(need),
+  }))
 }
 
 /** One of each kind of reason first, then more of them. */

@@ -2,25 +2,33 @@
 
 import { anchorSteel, unique } from './anchor-steel'
 import type { Bench, Place } from './bench'
-import type { Candidate } from './candidate'
+import type { Candidate, Candidates } from './candidate'
+import { edgeSteel } from './edge-steel'
+import { groupSteel } from './group-steel'
+import { panSteel } from './pan-steel'
 import type { Situation } from './situations'
 import type { StraightBar } from './transverse-bars'
 
-export function candidatesFor(bench: Bench, place: Place, shared: readonly StraightBar[]): readonly Candidate[] {
+export function candidatesFor(bench: Bench, place: Place, shared: readonly StraightBar[]): Candidates {
   switch (place.zone.kind) {
     case 'anchor':
-      return anchorSteel(bench, place, shared).candidates
+      return unblocked(anchorSteel(bench, place, shared).candidates)
+    case 'pan':
+      return panSteel(bench, place)
+    case 'group':
+      return unblocked(groupSteel(bench, place, shared).candidates)
     case 'edge':
+      return unblocked(edgeSteel(bench, place))
     case 'gap':
     case 'joint':
-    case 'pan':
-    case 'group':
     case 'corner':
     case 'tendon':
     case 'strip':
-      return []
+      return unblocked([])
   }
 }
+
+const unblocked = (candidates: readonly Candidate[]): Candidates => ({ candidates, blocked: [] })
 
 /** Bars that are offered to every situation, so that a few marks can serve them all. */
 const SHARED_MAX = 24
@@ -29,7 +37,7 @@ const SHARED_MAX = 24
 export function sharedBars(bench: Bench, situations: readonly Situation[]): StraightBar[] {
   const wanted = new Map<string, { readonly bar: StraightBar; zones: number }>()
   for (const { example, places } of situations) {
-    for (const bar of unique(anchorSteel(bench, example, []).bars)) {
+    for (const bar of unique(ownBars(bench, example))) {
       const key = `${bar.diameter}x${bar.length}`
       const known = wanted.get(key) ?? { bar, zones: 0 }
       wanted.set(key, { bar, zones: known.zones + places.length })
@@ -40,3 +48,6 @@ export function sharedBars(bench: Bench, situations: readonly Situation[]): Stra
     .slice(0, SHARED_MAX)
     .map(({ bar }) => bar)
 }
+
+const ownBars = (bench: Bench, place: Place): readonly StraightBar[] =>
+  place.zone.kind === 'group' ? groupSteel(bench, place, []).bars : anchorSteel(bench, place, []).bars

@@ -8,23 +8,22 @@
 
 import { basisOf } from '../bases'
 import type { CheckContext } from '../checks/outcome'
-import { layoutIndex, withSteel } from '../layout-index'
+import { layoutIndex, withSteel, type LayoutIndex } from '../layout-index'
 import type { Layout, Steel, SteelShape } from '../model'
 import { barsOf } from '../schedule/bars'
-import { benchOf, contextWith, tryAll, withPlaced, asSteel, type Bench, type Place, type Tried } from './bench'
+import { benchOf, byKey, tryAll, withPlaced, type Bench, type Place, type Tried } from './bench'
 import { candidatesFor, sharedBars } from './candidates'
 import { cheapest, choices } from './choose'
 import { placesOf } from './places'
 import type { Blocked, Proposal, ProposeAsk, ProposedZone } from './proposal'
 import { situationsOf, type Situation } from './situations'
-import { faultsBefore, outBy, stoppedBy, worstCheck } from './verdict'
-import { inWords } from './words'
+import { faultsBefore, stoppedBy, worstCheck } from './verdict'
 
 /** What one different mark less is worth: bending, bundling, tagging and finding another bar (common practice), kg. */
 const MASS_PER_MARK = 5
 
-/** Order in which zones are given steel: bars along edges count at the anchors and gaps beside them. */
-const ORDER: readonly (readonly Place['zone']['kind'][])[] = [['edge'], ['anchor', 'gap', 'joint', 'pan']]
+/** Order in which zones are given steel: bars along edges count at anchors, those of anchors where several act as one. */
+const ORDER: readonly (readonly Place['zone']['kind'][])[] = [['edge'], ['anchor'], ['group', 'gap', 'joint', 'pan']]
 
 /**
  * @returns what to add and take out in each zone. Steel set by hand or locked stays and counts; steel proposed before is
@@ -68,8 +67,6 @@ interface Work {
   /** Without the steel that may be replaced. */
   readonly bare: Bench
   readonly places: readonly Place[]
-  /** By zone: all steel that stands there, and the part of it that may be replaced. */
-  readonly old: ReadonlyMap<string, readonly Steel[]>
 }
 
 export const isReplaceable = ({ source, isLocked }: Steel): boolean => source === 'proposed' && !isLocked
@@ -78,10 +75,11 @@ function workOf(layout: Layout, { pourId, zoneIds }: ProposeAsk): Work {
   const index = layoutIndex(layout)
   const before = { index, basis: basisOf(layout.job), nearFrom: layout.job.settings.nearFrom }
   const places = placesOf(index, pourId, zoneIds)
-  const old = new Map(places.map(({ zone }) => [zone.id, index.steelOfZone.get(zone.id) ?? []]))
-  const kept = new Map([...old].map(([id, steel]) => [id, steel.filter((one) => !isReplaceable(one))]))
-  return { before, places, old, bare: benchOf({ ...before, index: withSteel(index, kept) }) }
+  const kept = new Map(places.map((place) => [place.key, steelAt(index, place).filter((one) => !isReplaceable(one))]))
+  return { before, places, bare: benchOf({ ...before, index: withSteel(index, kept) }) }
 }
+
+const steelAt = (index: LayoutIndex, { key }: Place): readonly Steel[] => index.steelOfZone.get(key) ?? []
 
 // Choosing ----------------------------------------------------------------------------------------------------------
 
@@ -132,11 +130,12 @@ function triedOf(bench: Bench, places: readonly Place[]): { situation: Situation
 }
 
 function lightestPlaced(tried: readonly { situation: Situation; tried: Tried }[]): Map<string, Steel[]> {
-  return new Map(
+  const shapesOf = new Map(
     tried.flatMap(({ situation, tried: { options } }) =>
-      situation.places.map((place): [string, Steel[]] => [place.zone.id, asSteel(place, options[0]?.shapes ?? [])]),
+      situation.places.map((place): [Place, readonly SteelShape[]] => [place, options[0]?.shapes ?? []]),
     ),
   )
+  return byKey([...shapesOf.keys()], (place) => shapesOf.get(place) ?? [])
 }
 
 /** Marks that the pour has whatever is proposed: of steel that stays and of the hardware's own. */
@@ -172,7 +171,7 @@ interface Settled {
 const everythingIn = (work: Work, given: ReadonlyMap<string, Given>): Bench =>
   withPlaced(
     work.bare,
-    new Map(work.places.map((place) => [place.zone.id, asSteel(place, given.get(place.zone.id)?.shapes ?? [])])),
+    byKey(work.places, ({ zone }) => given.get(zone.id)?.shapes ?? []),
   )
 
 const isSet = (given: ReadonlyMap<string, Given>, { zone }: Place): boolean => given.get(zone.id)?.blocked.length === 0
@@ -186,10 +185,7 @@ function foundAlone(work: Work, given: ReadonlyMap<string, Given>, place: Place)
   const { options, blocked } = tryAll(bench, place, candidatesFor(bench, place, []))
   const [lightest] = options
   if (lightest) return { shapes: lightest.shapes, blocked: [] }
-  const shapes = given.get(place.zone.id)?.shapes ?? []
-  const stopped = stoppedBy(contextWith(bench, place, shapes), place.zone, new Set())
-  const own = stopped && { candidate: inWords(shapes, bench.letter), check: stopped.name, by: outBy(stopped) }
-  return { shapes: [], blocked: [...(own ? [own] : []), ...blocked] }
+  return { shapes: [], blocked }
 }
 
 // What is shown -----------------------------------------------------------------------------------------------------
@@ -197,7 +193,8 @@ function foundAlone(work: Work, given: ReadonlyMap<string, Given>, place: Place)
 function proposedZone(work: Work, { given, all }: Settled, place: Place): ProposedZone[] {
   const { zone } = place
   const { shapes = [], blocked = [] } = given.get(zone.id) ?? {}
-  const old = work.old.get(zone.id) ?? []
+  // Steel of anchors that act as one stands with one of them, and is shown as old there.
+  const old = zone.kind === 'group' ? [] : steelAt(work.before.index, place)
   // Where nothing passes, what was there stays.
   const removes = blocked.length > 0 ? [] : old.filter(isReplaceable).filter(({ pourId }) => pourId === place.pourId)
   const isSame = JSON.stringify(removes.map(({ shape }) => shape)) === JSON.stringify(shapes)
@@ -211,8 +208,11 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
       old,
       removes: removes.map(({ id }) => id),
       adds: shapes,
-      massOld: work.bare.weigh(old.map(({ shape }) => shape)).mass,
-      massNew: work.bare.weigh([...kept, ...shapes]).mass,
+      massOld: work.bare.weigh(
+        old.map(({ shape }) => shape),
+        place.steelZone,
+      ).mass,
+      massNew: work.bare.weigh([...kept, ...shapes], place.steelZone).mass,
       before: worstCheck(work.before, zone),
       after: worstCheck(all.context, zone),
       blocked,
@@ -223,7 +223,7 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
 
 function weighed(work: Work, zones: readonly ProposedZone[]): { readonly mass: number; readonly marks: number } {
   const there = marksThere(work, work.places[0]?.zone.pourId ?? '')
-  const all = zones.map(({ adds }) => work.bare.weigh(adds))
+  const all = zones.map(({ adds, place }) => work.bare.weigh(adds, place))
   const fresh = new Set(all.flatMap(({ keys }) => keys).filter((key) => !there.has(key)))
   return { mass: all.reduce((sum, { mass }) => sum + mass, 0), marks: fresh.size }
 }

@@ -12,6 +12,8 @@ export interface TransverseNeed {
   readonly developed: (diameter: number) => { readonly length: number; readonly least: number }
   readonly sizes: readonly number[]
   readonly plateWidth: number
+  /** From the anchor to the line that the bars cross: 0 but for anchors that act as one. */
+  readonly aside: number
   /** From the anchor to the cover at the nearer end of the edge; endless where the slab goes on. */
   readonly toEnd: number
   /** Least distance between two bars side by side, mm, beside their diameter. */
@@ -45,8 +47,9 @@ export function transverseBars(need: TransverseNeed): StraightBar[] {
 export function transverseSets(need: TransverseNeed, { diameter, length }: StraightBar): TransverseBarsShape[] {
   const { length: full, least } = need.developed(diameter)
   const isShort = length / 2 < Math.min(need.plateWidth / 2 + full, need.toEnd - LENGTH_STEP)
-  if (isShort || length > 2 * need.toEnd || length / 2 < least) return []
-  const share = Math.min(1, length / 2 / full)
+  const past = length / 2 - need.aside
+  if (isShort || length > 2 * need.toEnd || past < least) return []
+  const share = Math.min(1, past / full)
   const count = Math.ceil(need.short / (2 * area(diameter) * share) - 1e-9)
   const { from, to } = need.window
   const pitch = downTo((to - from) / count, PITCH_STEP)

@@ -2,8 +2,11 @@
 
 import { CHECKS_OF_FAMILY, FAMILIES_OF_ZONE } from '../checks/families'
 import type { CheckContext } from '../checks/outcome'
+import { found } from '../layout-index'
+import { perConcrete } from '../memo'
 import type { Check, Compared, Family, Zone } from '../result'
 import { bySeverity, worstOf } from '../severity'
+import { zonesOfPour } from '../zones'
 import type { WorstCheck } from './proposal'
 
 /** Families that ask for steel, then those that ask whether it holds and can be fixed: the quick ones first. */
@@ -21,8 +24,24 @@ const HOLDS: readonly Family[] = ['anchorage', 'fit']
 const ofZone = ({ kind }: Zone, families: readonly Family[]): readonly Family[] =>
   families.filter((family) => FAMILIES_OF_ZONE[kind].includes(family))
 
-const checksOf = (context: CheckContext, zone: Zone, families: readonly Family[]): Check[] =>
-  ofZone(zone, families).flatMap((family) => CHECKS_OF_FAMILY[family](context, zone) ?? [])
+/** Face tension at anchors and gaps is met by the bars along their edge: its needs are the edge's. */
+const zonesBeside = perConcrete((index, edgeId): readonly Zone[] => {
+  const { pourId } = found(index.edges, edgeId, 'edge')
+  return zonesOfPour(index, pourId).filter(
+    (zone) => zone.edgeId === edgeId && (zone.kind === 'anchor' || zone.kind === 'gap'),
+  )
+})
+
+function checksOf(context: CheckContext, zone: Zone, families: readonly Family[]): Check[] {
+  return ofZone(zone, families).flatMap((family) => ofFamily(context, zone, family))
+}
+
+function ofFamily(context: CheckContext, zone: Zone, family: Family): readonly Check[] {
+  const make = CHECKS_OF_FAMILY[family]
+  if (family !== 'spalling') return make(context, zone) ?? []
+  if (zone.kind !== 'edge') return []
+  return zonesBeside(context.index, zone.edgeId ?? '').flatMap((beside) => make(context, beside) ?? [])
+}
 
 /** A comparison of steel: its demand falls to nobody but the bars of the zone. */
 export const isNeed = (check: Check): check is Compared =>
@@ -49,11 +68,11 @@ const signOf = (check: Check): string =>
 /** The first check that stops steel in a zone; null where it passes them all. */
 export function stoppedBy(context: CheckContext, zone: Zone, before: ReadonlySet<string>): Compared | null {
   for (const family of ofZone(zone, NEEDS)) {
-    const stopped = (CHECKS_OF_FAMILY[family](context, zone) ?? []).find((check) => isNeed(check) && !isMet(check))
+    const stopped = ofFamily(context, zone, family).find((check) => isNeed(check) && !isMet(check))
     if (stopped?.kind === 'compared') return stopped
   }
   for (const family of ofZone(zone, HOLDS)) {
-    const stopped = (CHECKS_OF_FAMILY[family](context, zone) ?? []).find(
+    const stopped = ofFamily(context, zone, family).find(
       (check) => check.kind === 'compared' && !isMet(check) && !before.has(signOf(check)),
     )
     if (stopped?.kind === 'compared') return stopped
