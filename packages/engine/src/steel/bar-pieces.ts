@@ -3,6 +3,7 @@
 import type { AnchorageInput, Basis } from '../bases/basis'
 import { found, type LayoutIndex } from '../layout-index'
 import type { EdgeBarsShape, Pour } from '../model'
+import { edgeBars } from '../placed/along-edge'
 import { sectionBehind, type Section } from '../section'
 import { cutRun, lapsOf, type Cut, type Run, type Span } from './cut-run'
 import { handSteelOf } from './steel-of-anchor'
@@ -46,19 +47,27 @@ const LAP_STEP = 5
  */
 export function edgeBarPieces(index: LayoutIndex, basis: Basis, { shape, edgeId }: EdgeBars): BarPieces {
   const frame = found(index.frames, edgeId, 'edge')
+  const pour = found(index.pours, found(index.edges, edgeId, 'edge').pourId, 'pour')
   const [from, to] = [Math.min(shape.from, shape.to), Math.max(shape.from, shape.to)]
-  const steps = frame.steps.filter((at) => at > from && at < to)
-  const ends = [from, ...steps, to]
   const keepClear = anchorBodies(index, edgeId)
-  const parts = ends.slice(1).map((end, i): Part => {
-    const start = ends[i] ?? from
+  const partBetween = (start: number, end: number): Part => {
     const lapOf = (share: number) => edgeBarLap(index, basis, { shape, edgeId, at: (start + end) / 2, share })
     return partOf({ from: start, to: end, keepClear }, { counts: shape, lapOf, index })
+  }
+  const parts = new Map<string, Part>()
+  const runs = edgeBars({ ...shape, from, to }, { pour, frame }).map(({ layer, path }): LaidPart => {
+    const [start, end] = [path[0]?.chainage ?? from, path.at(-1)?.chainage ?? to]
+    const key = `${start} to ${end}`
+    const part = parts.get(key) ?? partBetween(start, end)
+    parts.set(key, part)
+    const bar = shape.pitch > 0 ? Math.round(((path[0]?.depth ?? shape.first) - shape.first) / shape.pitch) : 0
+    return { layer: layer === 'top' ? 'top' : 'bottom', bar, part }
   })
+  const steps = frame.steps.filter((at) => at > from && at < to)
   const stepNote =
     steps.length > 0 ? [`Cut where the edge steps, at chainage ${steps.map(Math.round).join(', ')}.`] : []
-  const { pieces, laps, ...rest } = assembled(shape, parts, index)
-  return { pieces, laps, ...rest, notes: [...stepNote, ...rest.notes] }
+  const made = assembled(shape, runs, index)
+  return { ...made, notes: [...stepNote, ...made.notes] }
 }
 
 interface LongBars extends Counts {
@@ -73,7 +82,10 @@ export function straightBarPieces(index: LayoutIndex, basis: Basis, bars: LongBa
   const lapOf = (share: number) =>
     basis.lap({ ...developed(basis, pour), diameter, cd: null, isGoodBond: basis.isGoodBond(pour.thickness) }, share)
   const part = partOf({ from: 0, to: length, keepClear: [] }, { counts: bars, lapOf, index })
-  return assembled(bars, [part], index)
+  const runs = (['top', 'bottom'] as const).flatMap((layer) =>
+    Array.from({ length: layer === 'top' ? bars.countTop : bars.countBottom }, (_, bar) => ({ layer, bar, part })),
+  )
+  return assembled(bars, runs, index)
 }
 
 /** Strength when the whole force acts first, and the stress of a bar that is used in full. */
@@ -176,28 +188,28 @@ function partOf(span: Pick<Run, 'from' | 'to' | 'keepClear'>, { counts, lapOf, i
   return first.cut?.isStaggered === false && several ? cutWith(1) : first
 }
 
-function assembled({ countTop, countBottom }: Counts, parts: readonly Part[], index: LayoutIndex): BarPieces {
-  const bars = (['top', 'bottom'] as const).flatMap((layer, row) =>
-    Array.from({ length: layer === 'top' ? countTop : countBottom }, (_, bar) => ({
-      layer,
-      bar,
-      isTurned: (bar + row) % 2 === 1,
-    })),
-  )
-  const laid = bars.flatMap(({ layer, bar, isTurned }) =>
-    parts.map(({ cut, from, to }) => {
-      const pieces = (isTurned ? cut?.mirrored : cut?.pieces) ?? [{ from, to }]
-      return { layer, bar, pieces, laps: lapsOf(pieces) }
-    }),
-  )
-  const lapped = parts.filter(({ cut }) => (cut?.pieces.length ?? 0) > 1)
+/** A length of one bar of a layer. */
+interface LaidPart {
+  readonly layer: BarPiece['layer']
+  readonly bar: number
+  readonly part: Part
+}
+
+/** In both layers every second bar is turned round, and those below the others. */
+function assembled({ countTop, countBottom }: Counts, runs: readonly LaidPart[], index: LayoutIndex): BarPieces {
+  const laid = runs.map(({ layer, bar, part: { cut, from, to } }) => {
+    const isTurned = (bar + Number(layer === 'bottom')) % 2 === 1
+    const pieces = (isTurned ? cut?.mirrored : cut?.pieces) ?? [{ from, to }]
+    return { layer, bar, pieces, laps: lapsOf(pieces) }
+  })
+  const lapped = [...new Set(runs.map(({ part }) => part))].filter(({ cut }) => (cut?.pieces.length ?? 0) > 1)
   return {
     pieces: laid.flatMap(({ layer, bar, pieces }) => pieces.map((piece) => ({ ...piece, layer, bar }))),
     laps: laid.flatMap(({ layer, bar, laps }) => laps.map((lap) => ({ ...lap, layer, bar }))),
     lapNeeded: lapped.length > 0 ? Math.max(...lapped.map(({ lap }) => lap)) : null,
     share: Math.max(0, ...lapped.map(({ share }) => share)),
     clearance: Math.min(Infinity, ...lapped.map(({ cut }) => cut?.clearance ?? Infinity)),
-    notes: lapped.flatMap((part) => notesOf(part, { isOne: countTop + countBottom === 1, index })),
+    notes: [...new Set(lapped.flatMap((part) => notesOf(part, { isOne: countTop + countBottom === 1, index })))],
   }
 }
 
