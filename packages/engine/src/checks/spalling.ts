@@ -86,9 +86,12 @@ function atAnchor(context: CheckContext, zone: Zone, site: AnchorSite): Check {
       place: placeAt(site, anchor.chainage, site.top - site.soffit),
       shapes: local.shapes.filter((shape) => shape.kind === 'edge-bars' || isFlat(shape)),
       reach,
+      isBonded: isBonded(site),
     },
   )
 }
+
+const isBonded = ({ hardware }: AnchorSite): boolean => hardware.kind === 'bonded-splay'
 
 const isFlat = (shape: SteelShape): boolean => shape.kind === 'hairpins' && shape.lies === 'flat'
 
@@ -100,26 +103,28 @@ function atGap(context: CheckContext, zone: Zone): readonly Check[] {
   const spacing = gap.to - gap.from
   const a = Math.min(...ends.map(({ width }) => width))
   const sites = ends.map(({ anchor }) => siteOfAnchor(index, anchor))
-  const [largest] = sites.sort((one, other) => other.force.value - one.force.value)
-  const why = whyUneven(index, gap)
+  const [largest] = [...sites].sort((one, other) => other.force.value - one.force.value)
+  const why = a < spacing ? whyUneven(index, gap) : 'The plates are wider than the gap.'
   if (why !== null || !largest) {
     const row = rowNotes({ P: largest?.force.value ?? 0, a, s: ends.length === 1 ? 2 * spacing : spacing })
     return [uneven(headOf(zone, NAMES.uneven, row), why ?? '')]
   }
   const chainage = (gap.from + gap.to) / 2
   const { frame } = largest
+  const setBack = Math.min(...ends.map((end) => end.setBack))
   const reach = FACE_SHARE * nearestSpacing(sites)
   return [
-    faceCheck(context, headOf(zone, NAMES.between, []), {
+    faceCheck(context, headOf(zone, NAMES.between, setBackNotes(gap)), {
       pour: largest.pour,
       force: largest.force.steps,
       forceAt: ({ value }) => {
         const steps = faceForce({ P: value, a, s: spacing })
         return { T: steps.at(-1)?.value ?? 0, P: value, steps }
       },
-      place: placeAt(largest, chainage, frame.topAt(chainage) - frame.soffitAt(chainage)),
+      place: { ...placeAt(largest, chainage, frame.topAt(chainage) - frame.soffitAt(chainage)), setBack },
       shapes: edgeBarsOf(index, gap.edgeId),
       reach,
+      isBonded: sites.some(isBonded),
     }),
   ]
 }
@@ -160,8 +165,14 @@ function whyUneven(index: LayoutIndex, { after, before, edgeId }: Gap): string |
   if (!isInside(after) || !isInside(before)) {
     return isInRow(index, edgeId) ? 'It is the outermost gap of its row.' : rowReason(index, edgeId)
   }
-  if (Math.abs(after.setBack - before.setBack) <= ROUNDING) return null
-  return `The two bearing faces stand at ${round(after.setBack)} and ${round(before.setBack)} from the edge, not in one face.`
+  return null
+}
+
+/** A row has one face. Of two that differ either way gives at most the row's force along bars that run on. */
+function setBackNotes({ after, before }: Gap): readonly string[] {
+  if (!after || !before || Math.abs(after.setBack - before.setBack) <= ROUNDING) return []
+  const both = `${round(after.setBack)} and ${round(before.setBack)}`
+  return [`The bearing faces stand at ${both} from the edge; the row takes both in the nearer one.`]
 }
 
 const round = (mm: number): number => Math.round(mm)
@@ -184,7 +195,7 @@ const uneven = (head: Head, reason: string): Refused =>
   refusal(head, {
     code: 'UNEVEN_ROW',
     field: 'chainage',
-    message: `Not covered: uneven row. ${reason} Such an edge acts as a deep beam and asks for an elastic analysis of its whole length.`,
+    message: `Uneven row. ${reason} Such an edge acts as a deep beam and asks for an elastic analysis of its whole length.`,
   })
 
 // Demand against steel -----------------------------------------------------------------------------------------------
@@ -198,6 +209,8 @@ interface FaceInput {
   readonly shapes: readonly SteelShape[]
   /** Distance from the bearing face within which bars count. */
   readonly reach: number
+  /** Rests on the reading for bonded dead ends: all force at the bulbs. */
+  readonly isBonded: boolean
 }
 
 interface Answer {
@@ -213,7 +226,8 @@ function faceCheck(context: CheckContext, head: Head, input: FaceInput): Compare
   const ratio = ({ rule, counted }: Answer) => (rule.area === 0 ? 0 : rule.area / counted.area)
   const worst = answers.reduce((one, other) => (ratio(other) >= ratio(one) ? other : one))
   const { basis } = context
-  const readings = [basis.planRow.equalReadingId, basis.steelReading].filter((id) => id !== null)
+  const bonded = input.isBonded ? basis.deadEndReading : null
+  const readings = [basis.planRow.equalReadingId, basis.steelReading, bonded].filter((id) => id !== null)
   const titles = readings.map((id) => basis.readings.find((reading) => reading.id === id)?.title ?? id)
   const rests = titles.length === 0 ? [] : [`Rests on these readings: ${titles.join('; ')}.`]
   return byRatio(

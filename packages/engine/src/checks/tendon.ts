@@ -81,7 +81,7 @@ function lockOffAgainst(limits: readonly Step[], of: AtAnchor, context: CheckCon
   const most = mostForces(context.index, of.tendon)
   if (isNoForce(most)) return refusal(head, most)
   const bound = answer(most, [
-    `${forces.message} Counted here with bends in plan and wobble alone, at the lowest credible friction: whatever the drape, the force is not more.`,
+    `${forces.message} Counted here with bends in plan and wobble alone: whatever the drape, the force is not more.`,
   ])
   return bound.status === 'over' ? refusal(head, forces) : bound
 }

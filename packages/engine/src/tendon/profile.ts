@@ -87,11 +87,10 @@ export const tendonForces = (index: LayoutIndex, tendonId: string, pair: PairNam
   kept[pair](index, tendonId)
 
 /**
- * Forces that are not exceeded at a live end whatever the tendon's drape is: bends in plan and wobble alone, with the low
- * pair. More friction makes draw-in be felt over less length, so that it takes more force at the anchor.
+ * Forces that are not exceeded at a live end whatever the tendon's drape is: bends in plan and wobble alone. More friction makes draw-in be felt over less length, so that it takes more force at the anchor.
  */
 export const mostForces = (index: LayoutIndex, tendon: Tendon): TendonForces | NoForce =>
-  forcesOf(index, { ...tendon, drape: 0 }, 'low')
+  forcesOf(index, { ...tendon, drape: 0 }, 'nominal')
 
 function forcesOf(index: LayoutIndex, tendon: Tendon, pair: PairName): TendonForces | NoForce {
   const ends = endsOf(index, tendon)
