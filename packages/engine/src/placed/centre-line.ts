@@ -7,8 +7,8 @@ export interface Vec {
   readonly z: number
 }
 
-/** Straight pieces in one bend: at 15 degrees each they leave a bend of radius 25 by 0.2 mm at most. */
-const PIECES_PER_BEND = 6
+/** Straight pieces in one bend: at 9 degrees each they leave a bend of radius 25 by 0.1 mm at most. */
+const PIECES_PER_BEND = 10
 
 /**
  * The path with each corner bent at a radius, mm, of the centre line; a corner whose sides are too short for it takes

@@ -1,0 +1,231 @@
+/** Whether the steel of a zone can be fixed: its cover, its gaps, and what stands in its way. */
+
+import { ROUNDING } from '../geometry'
+import { coversOf, type Cover } from '../fit/cover'
+import { memberKeyOf, memberOf } from '../fit/members'
+import { pairsOf, type Pair } from '../fit/pairs'
+import { found, type LayoutIndex } from '../layout-index'
+import { perIndex } from '../memo'
+import type { Check, Compared, Zone } from '../result'
+import type { Clause } from '../step'
+import { bendChecks, depthCheck, firstTurnCheck, type SetOfBars } from './fit-shape'
+import { comparison, type CheckContext } from './outcome'
+
+const COVER: Clause = { source: 'Nominal cover of the pour or region', section: 'as entered', tag: 'practice' }
+const GAP: Clause = {
+  source: 'Clear gap between bars',
+  section: 'largest of the bar, aggregate + 5, 20 and the job setting (EN 1992-1-1 8.2)',
+  tag: 'memory',
+}
+const ROOM: Clause = { source: 'Geometry', section: 'two bodies in one place', tag: 'derived' }
+
+/** Bars that stand in one another by no more than this touch: tolerance of bending and of ribs, mm (common practice). */
+const TOUCHING = 1
+
+/** Checks of the bars of one zone; none where it has no bars. */
+export function fitChecks(context: CheckContext, zone: Zone): readonly Check[] {
+  const key = memberKeyOf(zone)
+  if (key === null) return []
+  const { index } = context
+  const found = fitOfMember(index, key).get(zone.id)
+  const sets = setsOf(index, key, zone.id)
+  return [
+    ...(found?.cover ? [coverCheck(index, zone, found.cover)] : []),
+    ...(found?.gap ? [gapCheck(zone, found.gap)] : []),
+    ...(found?.clash ? [clashCheck(zone, found.clash)] : []),
+    ...sets.flatMap((set) => [
+      ...firstTurnCheck(zone, set),
+      ...depthCheck(index, zone, set),
+      ...bendChecks(index, zone, set),
+    ]),
+  ]
+}
+
+/** The worst of a kind, and how many are short besides. */
+interface Worst<T> {
+  readonly worst: T
+  readonly spare: number
+  readonly short: number
+}
+
+interface ZoneFit {
+  readonly cover?: Worst<Cover>
+  readonly gap?: Worst<Pair>
+  readonly clash?: Worst<Pair>
+}
+
+type Fits = Map<string, ZoneFit>
+
+/** Worked out once for all zones of an edge, a pan or a joint. */
+const fitOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<string, ZoneFit> => {
+  const member = memberOf(index, key)
+  const fits: Fits = new Map()
+  for (const bar of member.bars) {
+    for (const cover of coversOf(index, member, bar)) {
+      note(fits, bar.bar.zoneId, { kind: 'cover', worst: cover, spare: cover.measured - cover.need })
+    }
+  }
+  for (const pair of pairsOf(index, key)) {
+    const { bar, other, clear, need } = pair
+    const otherZone = other.kind === 'bar' ? other.bar.zoneId : other.zoneId
+    for (const zoneId of new Set([bar.bar.zoneId, otherZone])) {
+      if (zoneId === null) continue
+      const isClash = need === null || clear < -TOUCHING
+      const spare = isClash ? clear + TOUCHING : clear - need
+      note(fits, zoneId, { kind: isClash ? 'clash' : 'gap', worst: pair, spare })
+    }
+  }
+  return fits
+})
+
+type Noted =
+  | { readonly kind: 'cover'; readonly worst: Cover; readonly spare: number }
+  | { readonly kind: 'gap' | 'clash'; readonly worst: Pair; readonly spare: number }
+
+function note(fits: Fits, zoneId: string, noted: Noted): void {
+  const fit = fits.get(zoneId) ?? {}
+  if (noted.kind === 'cover') fits.set(zoneId, { ...fit, cover: worseOf(fit.cover, noted.worst, noted.spare) })
+  else fits.set(zoneId, { ...fit, [noted.kind]: worseOf(fit[noted.kind], noted.worst, noted.spare) })
+}
+
+function worseOf<T>(known: Worst<T> | undefined, worst: T, spare: number): Worst<T> {
+  const short = (known?.short ?? 0) + (spare < -ROUNDING ? 1 : 0)
+  return known && known.spare <= spare + ROUNDING ? { ...known, short } : { worst, spare, short }
+}
+
+/** The sets of bars of a zone, each by one of its bars. */
+function setsOf(index: LayoutIndex, key: string, zoneId: string): SetOfBars[] {
+  const member = memberOf(index, key)
+  const sets = new Map<string, SetOfBars>()
+  for (const bar of member.bars) {
+    if (bar.bar.zoneId !== zoneId || sets.has(bar.setId)) continue
+    const { anchorId, steelId } = bar.bar
+    const anchor = anchorId === null ? null : found(index.anchors, anchorId, 'anchor')
+    const entered = (index.steelOfZone.get(zoneId) ?? []).find(({ id }) => id === steelId)?.shape
+    const shape = entered ?? (anchor && found(index.hardware, anchor.hardwareId, 'hardware').localSteel)
+    if (shape) sets.set(bar.setId, { bar, member, anchor, shape })
+  }
+  return [...sets.values()]
+}
+
+// As results --------------------------------------------------------------------------------------------------------
+
+const shown = (mm: number): string => String(Math.round(mm * 10) / 10)
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1)
+
+const sentence = (what: string, measured: number, need: number): string => {
+  const spare = measured - need
+  const outcome = spare < -ROUNDING ? `short by ${shown(-spare)}` : `spare ${shown(spare)}`
+  return `${capital(what)} ${shown(measured)}, needs ${shown(need)}: ${outcome}.`
+}
+
+const others = (short: number, what: string): string[] =>
+  short > 1 ? [`${short - 1} more ${short === 2 ? `${what} is` : `${what}s are`} short; this is the worst.`] : []
+
+/** Cover that is left is over where it is short; none left is a bar outside the concrete. */
+function coverCheck(index: LayoutIndex, zone: Zone, { worst, spare, short }: Worst<Cover>): Compared {
+  const { bar, face, measured, need } = worst
+  const what = `${bar.name} to ${face}`
+  const isShort = spare < -ROUNDING
+  return compared(zone, {
+    name: `${capital(bar.name)} to ${face}`,
+    clause: COVER,
+    limitKind: 'C',
+    notes: [sentence(what, measured, need), ...others(short, 'cover')],
+    demand: measured,
+    limit: need,
+    status: isShort ? (measured <= ROUNDING ? 'stop' : 'over') : 'within',
+    mend: isShort ? heightMend(index, worst) : null,
+  })
+}
+
+/** An anchor's local steel moves up or down with it, where the section leaves room for that. */
+function heightMend(index: LayoutIndex, { bar, face, measured, need }: Cover): Compared['mend'] {
+  const { anchorId, layer } = bar.bar
+  if (anchorId === null || layer !== null || (face !== 'top' && face !== 'soffit')) return null
+  const { height } = found(index.anchors, anchorId, 'anchor')
+  const value = face === 'top' ? height - (need - measured) : height + (need - measured)
+  return roomAt(index, anchorId, value - height) ? { field: 'height', value } : null
+}
+
+function roomAt(index: LayoutIndex, anchorId: string, by: number): boolean {
+  const anchor = found(index.anchors, anchorId, 'anchor')
+  if (anchor.edgeId === null) return false
+  const member = memberOf(index, `edge:${anchor.edgeId}`)
+  const face = by > 0 ? 'top' : 'soffit'
+  return member.bars
+    .filter(({ bar }) => bar.anchorId === anchorId && bar.layer === null)
+    .flatMap((bar) => coversOf(index, member, bar))
+    .every((cover) => cover.face !== face || cover.measured - Math.abs(by) >= cover.need - ROUNDING)
+}
+
+function gapCheck(zone: Zone, { worst, spare, short }: Worst<Pair>): Compared {
+  const { bar, other, clear, need } = worst
+  const limit = need ?? 0
+  const what = nameOf(worst)
+  return compared(zone, {
+    name: `Clear gap, ${what}`,
+    clause: GAP,
+    limitKind: 'C',
+    notes: [
+      sentence(`clear gap, ${what}`, clear, limit),
+      ...(bar.bar.kind === 'links' && other.kind === 'bar' && bar.setId === other.setId
+        ? ['The hook at the closing corner lies beside its link and is taken off the gap.']
+        : []),
+      ...others(short, 'gap'),
+    ],
+    demand: clear,
+    limit,
+    status: spare < -ROUNDING ? 'over' : 'within',
+    mend: null,
+  })
+}
+
+/** Two bodies in one place cannot be fixed; up to the tolerance they touch, which tied bars do. */
+function clashCheck(zone: Zone, { worst, spare, short }: Worst<Pair>): Compared {
+  const isClash = spare < -ROUNDING
+  const demand = isClash ? worst.clear : Math.max(0, worst.clear)
+  const what = nameOf(worst)
+  const touching = `Up to ${TOUCHING} into one another counts as touching, which tied bars do.`
+  return compared(zone, {
+    name: isClash ? `In one place, ${what}` : `Clear of one another, ${what}`,
+    clause: ROOM,
+    limitKind: 'C',
+    notes: [
+      isClash
+        ? `${capital(what)} stand in one place by ${shown(-demand)}.`
+        : `${capital(what)} ${shown(demand)} apart.`,
+      touching,
+      ...(short > 1 ? [`${short - 1} more in one place; this is the worst.`] : []),
+    ],
+    demand,
+    limit: 0,
+    status: isClash ? 'stop' : 'within',
+    mend: null,
+  })
+}
+
+function nameOf({ bar, other }: Pair): string {
+  if (other.kind === 'bar' && other.setId === bar.setId) {
+    return bar.bar.kind === 'spiral' ? `turns of ${bar.name}` : `between bars, ${bar.name}`
+  }
+  return `${bar.name} and ${other.name}`
+}
+
+type Outcome = Pick<Compared, 'name' | 'clause' | 'limitKind' | 'notes' | 'demand' | 'limit' | 'status' | 'mend'>
+
+function compared(zone: Zone, { demand, limit, status, mend, ...head }: Outcome): Compared {
+  return comparison(
+    { zoneId: zone.id, family: 'fit', stage: null, ...head },
+    { demand, limit, unit: 'mm', steps: [] },
+    {
+      compares: 'at-least',
+      status,
+      statusOnceAccepted: status,
+      utilisation: null,
+      spare: demand - limit,
+      readingIds: [],
+      mend,
+    },
+  )
+}
