@@ -27,7 +27,7 @@ export function anchorSteel(bench: Bench, place: Place, shared: readonly Straigh
   if (!site) return { candidates: [], bars: [] }
   const needs = unmetOf(needsOf(bench.context, place.zone))
   const thickness = needs.find(({ plane }) => plane === 'thickness')
-  const upright = thickness ? lightest(bench, place, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
+  const upright = thickness ? lightest(bench, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
   const made = upright.map((shapes) => ({ shapes, ...planPart(bench, place, { site, shapes, shared }) }))
   return {
     candidates: made.flatMap(({ shapes, sets }) => sets.map((set) => ({ shapes: [...shapes, ...set] }))),
@@ -40,8 +40,8 @@ export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): Ancho
   return kind === 'anchor' ? siteOfAnchor(index, found(index.anchors, id.slice('anchor:'.length), 'anchor')) : null
 }
 
-function lightest(bench: Bench, { steelZone }: Place, sets: readonly SteelShape[]): SteelShape[][] {
-  const weighed = sets.map((shape, at) => ({ shape, at, mass: bench.weigh([shape], steelZone).mass }))
+function lightest(bench: Bench, sets: readonly SteelShape[]): SteelShape[][] {
+  const weighed = sets.map((shape, at) => ({ shape, at, mass: bench.roughly([shape]) }))
   weighed.sort((a, b) => a.mass - b.mass || a.at - b.at)
   const kept = new Map<string, SteelShape[]>()
   for (const { shape } of weighed) {

@@ -6,8 +6,10 @@ import type { Steel, SteelShape, SteelZone } from '../model'
 import type { Zone } from '../result'
 import { typeLetterOf } from '../schedule/bar-key'
 import type { BarSize } from '../schedule/bar-standards'
+import { bentShape } from '../schedule/bars'
 import { barStandardById, BS_8666_2020 } from '../schedule/bs-8666'
 import type { Candidate, Candidates } from './candidate'
+import { nearbyIndex } from './nearby'
 import type { Blocked } from './proposal'
 import { faultsBefore, needsOf, outBy, stoppedBy, unmetOf } from './verdict'
 import { weigherOf, type Weigher } from './weigh'
@@ -15,6 +17,8 @@ import { inWords } from './words'
 
 export interface Bench extends Weigher {
   readonly context: CheckContext
+  /** The layout round one zone, for what is worked out member by member. */
+  readonly near: (zone: Zone) => CheckContext
   /** Letter before a bar's size. */
   readonly letter: string
   /** Sizes that the job allows, as its bar standard has them, smallest first. */
@@ -52,6 +56,7 @@ export function benchOf(context: CheckContext): Bench {
   const sizes = standard.sizes.filter(({ diameter }) => settings.barSizes.includes(diameter))
   return {
     context,
+    near: nearOf(context),
     ...weigherOf(context),
     letter: typeLetterOf(settings.reinforcementGrade),
     sizes: [...sizes].sort((a, b) => a.diameter - b.diameter),
@@ -59,11 +64,26 @@ export function benchOf(context: CheckContext): Bench {
   }
 }
 
+/** Made once for each zone that asks, so that what does not hang on steel is worked out once for all its candidates. */
+function nearOf(context: CheckContext): Bench['near'] {
+  const made = new Map<string, CheckContext>()
+  return (zone) => {
+    const known = made.get(zone.id) ?? { ...context, index: nearbyIndex(context.index, zone) }
+    made.set(zone.id, known)
+    return known
+  }
+}
+
 /** The same bench with more steel in place. */
 export function withPlaced(bench: Bench, placed: ReadonlyMap<string, readonly Steel[]>): Bench {
-  const { index } = bench.context
+  const context = contextPlus(bench.context, placed)
+  return { ...bench, context, near: nearOf(context) }
+}
+
+function contextPlus(context: CheckContext, placed: ReadonlyMap<string, readonly Steel[]>): CheckContext {
+  const { index } = context
   const whole = new Map([...placed].map(([key, steel]) => [key, [...steelIn(index, key), ...steel]]))
-  return { ...bench, context: { ...bench.context, index: withSteel(index, whole) } }
+  return { ...context, index: withSteel(index, whole) }
 }
 
 const steelIn = (index: LayoutIndex, key: string): readonly Steel[] => index.steelOfZone.get(key) ?? []
@@ -93,7 +113,7 @@ export const asSteel = ({ zone, steelZone, pourId }: Place, shapes: readonly Ste
 
 /** The checks' context with a candidate in its zone. */
 export const contextWith = (bench: Bench, place: Place, shapes: readonly SteelShape[]): CheckContext =>
-  withPlaced(bench, new Map([[place.key, asSteel(place, shapes)]])).context
+  contextPlus(bench.context, new Map([[place.key, asSteel(place, shapes)]]))
 
 /** Distinct sets of marks that are kept for the choice over the pour. */
 const OPTIONS_KEPT = 8
@@ -102,27 +122,42 @@ const BLOCKED_KEPT = 6
 
 /** Tries candidates in their zone, lightest first, by the real checks of the zone. */
 export function tryAll(bench: Bench, place: Place, { candidates, blocked: impossible }: Candidates): Tried {
-  const before = faultsBefore(bench.context, place.zone)
-  const weighed = candidates
-    .map(({ shapes }, at) => ({ shapes, at, ...bench.weigh(shapes, place.steelZone) }))
+  const before = faultsBefore({ context: bench.context, near: bench.near(place.zone) }, place.zone)
+  const ordered = candidates
+    .map(({ shapes }, at) => ({ shapes, at, mass: bench.roughly(shapes) }))
     .sort((a, b) => a.mass - b.mass || a.shapes.length - b.shapes.length || a.at - b.at)
   const options = new Map<string, Option>()
   const blocked: Blocked[] = [...impossible]
-  for (const { shapes, mass, keys, problem } of weighed) {
-    const id = keys.join('+')
-    if (options.has(id)) continue
+  for (const { shapes } of ordered) {
     if (options.size >= OPTIONS_KEPT) break
-    const words = inWords(shapes, bench.letter)
-    if (problem !== null) {
-      blocked.push({ candidate: words, check: 'Bar shape', by: problem })
-      continue
+    const id = barsIn(shapes)
+    if (options.has(id)) continue
+    const refused = refusedBy(bench, place, { shapes, before })
+    if (refused) blocked.push({ candidate: inWords(shapes, bench.letter), ...refused })
+    else {
+      const { mass, keys } = bench.weigh(shapes, { zone: place.steelZone, pourId: place.pourId })
+      options.set(id, { shapes, mass, keys })
     }
-    const stopped = stoppedBy(contextWith(bench, place, shapes), place.zone, before)
-    if (stopped) blocked.push({ candidate: words, check: stopped.name, by: outBy(stopped) })
-    else options.set(id, { shapes, mass, keys })
   }
-  if (weighed.length === 0 && blocked.length === 0) blocked.push(...nothingToTry(bench, place))
+  if (ordered.length === 0 && blocked.length === 0) blocked.push(...nothingToTry(bench, place))
   return { options: [...options.values()], blocked: spread(blocked) }
+}
+
+/** Sets of the same bars, wherever they stand, have the same marks. */
+const barsIn = (shapes: readonly SteelShape[]): string => JSON.stringify(shapes.map(bentShape))
+
+/** The bar that cannot be bent, or the check that does not pass; null where the candidate does. */
+function refusedBy(
+  bench: Bench,
+  place: Place,
+  { shapes, before }: Candidate & { readonly before: ReadonlySet<string> },
+): Pick<Blocked, 'check' | 'by'> | null {
+  const placed = new Map([[place.key, asSteel(place, shapes)]])
+  const near = contextPlus(bench.near(place.zone), placed)
+  const stopped = stoppedBy({ context: contextPlus(bench.context, placed), near }, place.zone, before)
+  if (stopped) return { check: stopped.name, by: outBy(stopped) }
+  const { problem } = bench.weigh(shapes, { zone: place.steelZone, pourId: place.pourId })
+  return problem === null ? null : { check: 'Bar shape', by: problem }
 }
 
 /** A need that no steel of this kind of zone meets is named by itself. */

@@ -4,6 +4,7 @@ import { anchorSteel, unique } from './anchor-steel'
 import type { Bench, Place } from './bench'
 import type { Candidate, Candidates } from './candidate'
 import { edgeSteel } from './edge-steel'
+import { gapSteel } from './gap-steel'
 import { groupSteel } from './group-steel'
 import { panSteel } from './pan-steel'
 import type { Situation } from './situations'
@@ -20,6 +21,7 @@ export function candidatesFor(bench: Bench, place: Place, shared: readonly Strai
     case 'edge':
       return unblocked(edgeSteel(bench, place))
     case 'gap':
+      return unblocked(gapSteel(bench, place, shared).candidates)
     case 'joint':
     case 'corner':
     case 'tendon':
@@ -49,5 +51,7 @@ export function sharedBars(bench: Bench, situations: readonly Situation[]): Stra
     .map(({ bar }) => bar)
 }
 
-const ownBars = (bench: Bench, place: Place): readonly StraightBar[] =>
-  place.zone.kind === 'group' ? groupSteel(bench, place, []).bars : anchorSteel(bench, place, []).bars
+function ownBars(bench: Bench, place: Place): readonly StraightBar[] {
+  if (place.zone.kind === 'gap') return gapSteel(bench, place, []).bars
+  return place.zone.kind === 'group' ? groupSteel(bench, place, []).bars : anchorSteel(bench, place, []).bars
+}

@@ -176,8 +176,10 @@ const everythingIn = (work: Work, given: ReadonlyMap<string, Given>): Bench =>
 
 const isSet = (given: ReadonlyMap<string, Given>, { zone }: Place): boolean => given.get(zone.id)?.blocked.length === 0
 
+const whole = (context: CheckContext) => ({ context, near: context })
+
 const stopsIn = (work: Work, all: Bench, { zone }: Place): boolean =>
-  stoppedBy(all.context, zone, faultsBefore(work.bare.context, zone)) !== null
+  stoppedBy(whole(all.context), zone, faultsBefore(whole(work.bare.context), zone)) !== null
 
 function foundAlone(work: Work, given: ReadonlyMap<string, Given>, place: Place): Given {
   const others = new Map([...given].filter(([id]) => id !== place.zone.id))
@@ -200,6 +202,7 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
   const isSame = JSON.stringify(removes.map(({ shape }) => shape)) === JSON.stringify(shapes)
   if (isSame && blocked.length === 0) return []
   const kept = old.filter((steel) => !removes.includes(steel)).map(({ shape }) => shape)
+  const at = { zone: place.steelZone, pourId: place.pourId }
   return [
     {
       zone,
@@ -210,9 +213,9 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
       adds: shapes,
       massOld: work.bare.weigh(
         old.map(({ shape }) => shape),
-        place.steelZone,
+        at,
       ).mass,
-      massNew: work.bare.weigh([...kept, ...shapes], place.steelZone).mass,
+      massNew: work.bare.weigh([...kept, ...shapes], at).mass,
       before: worstCheck(work.before, zone),
       after: worstCheck(all.context, zone),
       blocked,
@@ -223,7 +226,7 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
 
 function weighed(work: Work, zones: readonly ProposedZone[]): { readonly mass: number; readonly marks: number } {
   const there = marksThere(work, work.places[0]?.zone.pourId ?? '')
-  const all = zones.map(({ adds, place }) => work.bare.weigh(adds, place))
+  const all = zones.map(({ adds, place, pourId }) => work.bare.weigh(adds, { zone: place, pourId }))
   const fresh = new Set(all.flatMap(({ keys }) => keys).filter((key) => !there.has(key)))
   return { mass: all.reduce((sum, { mass }) => sum + mass, 0), marks: fresh.size }
 }

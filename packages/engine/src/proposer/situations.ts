@@ -36,7 +36,7 @@ function keyOf(bench: Bench, place: Place): string | null {
     rounded(demand),
     rounded(limit),
   ])
-  const faults = [...faultsBefore(bench.context, place.zone)].sort()
+  const faults = [...faultsBefore({ context: bench.context, near: bench.near(place.zone) }, place.zone)].sort()
   const steel = (bench.context.index.steelOfZone.get(place.zone.id) ?? []).map(({ shape }) => shape)
   return JSON.stringify([place.zone.kind, asked, faults, steel, surroundings(bench, place.zone)])
 }

@@ -21,6 +21,12 @@ const NEEDS: readonly Family[] = [
 ]
 const HOLDS: readonly Family[] = ['anchorage', 'fit']
 
+/** Where checks are asked: the whole layout, and for what is worked out member by member the part round the zone. */
+export interface Ground {
+  readonly context: CheckContext
+  readonly near: CheckContext
+}
+
 const ofZone = ({ kind }: Zone, families: readonly Family[]): readonly Family[] =>
   families.filter((family) => FAMILIES_OF_ZONE[kind].includes(family))
 
@@ -57,8 +63,10 @@ export const needsOf = (context: CheckContext, zone: Zone): readonly Compared[] 
 export const unmetOf = (needs: readonly Compared[]): readonly Compared[] => needs.filter((check) => !isMet(check))
 
 /** What was wrong with a zone's bars before anything was tried: it cannot be held against a candidate. */
-export function faultsBefore(context: CheckContext, zone: Zone): ReadonlySet<string> {
-  const faults = checksOf(context, zone, HOLDS).filter((check) => check.kind === 'compared' && !isMet(check))
+export function faultsBefore(ground: Ground, zone: Zone): ReadonlySet<string> {
+  const faults = ofZone(zone, HOLDS)
+    .flatMap((family) => held(ground, zone, family))
+    .filter((check) => check.kind === 'compared' && !isMet(check))
   return new Set(faults.map(signOf))
 }
 
@@ -66,19 +74,22 @@ const signOf = (check: Check): string =>
   check.kind === 'compared' ? `${check.family}|${check.name}|${check.demand}|${check.limit}` : ''
 
 /** The first check that stops steel in a zone; null where it passes them all. */
-export function stoppedBy(context: CheckContext, zone: Zone, before: ReadonlySet<string>): Compared | null {
+export function stoppedBy(ground: Ground, zone: Zone, before: ReadonlySet<string>): Compared | null {
   for (const family of ofZone(zone, NEEDS)) {
-    const stopped = ofFamily(context, zone, family).find((check) => isNeed(check) && !isMet(check))
+    const stopped = ofFamily(ground.context, zone, family).find((check) => isNeed(check) && !isMet(check))
     if (stopped?.kind === 'compared') return stopped
   }
   for (const family of ofZone(zone, HOLDS)) {
-    const stopped = ofFamily(context, zone, family).find(
+    const stopped = held(ground, zone, family).find(
       (check) => check.kind === 'compared' && !isMet(check) && !before.has(signOf(check)),
     )
     if (stopped?.kind === 'compared') return stopped
   }
   return null
 }
+
+const held = ({ context, near }: Ground, zone: Zone, family: Family): readonly Check[] =>
+  ofFamily(family === 'fit' ? near : context, zone, family)
 
 /** The worst of a zone's checks on which its bars bear. */
 export function worstCheck(context: CheckContext, zone: Zone): WorstCheck | null {

@@ -4,10 +4,9 @@ import type { CheckContext } from '../checks/outcome'
 import type { SteelShape, SteelZone } from '../model'
 import { barKey, typeLetterOf } from '../schedule/bar-key'
 import type { BarShape } from '../schedule/bar-standards'
-import { barCount, bentShape } from '../schedule/bars'
+import { barCount, bentShape, cutOf } from '../schedule/bars'
 import { barStandardById, BS_8666_2020 } from '../schedule/bs-8666'
 import { cutLength, roundedShape, shapeProblems } from '../schedule/cut-length'
-import { edgeBarPieces } from '../steel/bar-pieces'
 
 export interface Weighed {
   /** kg, with the length of each bar rounded up as it is ordered. */
@@ -18,8 +17,16 @@ export interface Weighed {
   readonly problem: string | null
 }
 
+/** Where steel is entered, and the pour that it is scheduled with. */
+export interface WeighedPlace {
+  readonly zone: SteelZone
+  readonly pourId: string
+}
+
 export interface Weigher {
-  readonly weigh: (shapes: readonly SteelShape[], zone: SteelZone) => Weighed
+  readonly weigh: (shapes: readonly SteelShape[], place: WeighedPlace) => Weighed
+  /** Mass of bars as they are entered, kg: quick, and without the laps of bars that come in pieces. */
+  readonly roughly: (shapes: readonly SteelShape[]) => number
   /** What a bar's mark stands for: equal for bars that are the same in the yard. */
   readonly keyOf: (bar: BarShape) => string
 }
@@ -40,10 +47,18 @@ export function weigherOf(context: CheckContext): Weigher {
     const each = cutLength(rounded, standard)?.massEach ?? 0
     return { mass: count * each, keys: [barKey({ letter, shape: rounded })], problem: problem?.message ?? null }
   }
+  const massPerMetre = new Map(standard.sizes.map((size) => [size.diameter, size.massPerMetre]))
+  const roughly = (shape: SteelShape): number => {
+    const bar = bentShape(shape)
+    if (shape.kind !== 'edge-bars')
+      return barCount(shape) * (cutLength(roundedShape(bar, standard), standard)?.massEach ?? 0)
+    return (barCount(shape) * (bar.dimensions.A ?? 0) * (massPerMetre.get(shape.diameter) ?? 0)) / 1000
+  }
   return {
+    roughly: (shapes) => shapes.reduce((sum, shape) => sum + roughly(shape), 0),
     keyOf: (bar) => barKey({ letter, shape: roundedShape(bar, standard) }),
-    weigh: (shapes, zone) => {
-      const all = shapes.flatMap((shape) => barsOfSet(context, shape, zone)).map(weighOne)
+    weigh: (shapes, place) => {
+      const all = shapes.flatMap((shape) => barsOfSet(context, shape, place)).map(weighOne)
       return {
         mass: all.reduce((sum, { mass }) => sum + mass, 0),
         keys: [...new Set(all.flatMap(({ keys }) => keys))].sort(),
@@ -53,12 +68,10 @@ export function weigherOf(context: CheckContext): Weigher {
   }
 }
 
-/** Bars along an edge come in pieces, lapped; every other set in bars as they are. */
-function barsOfSet({ index, basis }: CheckContext, shape: SteelShape, zone: SteelZone): Bars[] {
+/** Bars along an edge, and straight ones over the stock length, come in pieces, lapped; every other set as it is. */
+function barsOfSet({ index, basis }: CheckContext, shape: SteelShape, { zone, pourId }: WeighedPlace): Bars[] {
   const bar = bentShape(shape)
-  if (shape.kind !== 'edge-bars' || zone.kind !== 'edge') return [{ bar, count: barCount(shape) }]
-  return edgeBarPieces(index, basis, { shape, edgeId: zone.edgeId }).pieces.map(({ from, to }) => ({
-    bar: { ...bar, dimensions: { A: to - from } },
-    count: 1,
-  }))
+  const cut = cutOf({ index, basis, pourId }, shape, zone)
+  if (!cut) return [{ bar, count: barCount(shape) }]
+  return cut.pieces.map(({ from, to }) => ({ bar: { ...bar, dimensions: { A: to - from } }, count: 1 }))
 }

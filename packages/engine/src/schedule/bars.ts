@@ -147,7 +147,8 @@ interface Cutting {
   readonly pourId: string
 }
 
-function cutOf({ index, basis, pourId }: Cutting, shape: SteelShape, zone: SteelZone): BarPieces | null {
+/** The pieces of edge bars and of other straight bars over the stock length; null for bars that come as they are. */
+export function cutOf({ index, basis, pourId }: Cutting, shape: SteelShape, zone: SteelZone): BarPieces | null {
   if (shape.kind === 'edge-bars') {
     return zone.kind === 'edge' ? edgeBarPieces(index, basis, { shape, edgeId: zone.edgeId }) : null
   }

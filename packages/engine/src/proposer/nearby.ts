@@ -1,0 +1,81 @@
+/**
+ * The part of a layout round one zone. Whether bars can be fixed is worked out for a whole member and those beside it;
+ * to try one zone's bars again and again only what could touch them is kept. The outcome is checked on the whole layout.
+ */
+
+import { distanceToSegment } from '../geometry'
+import { found, type LayoutIndex } from '../layout-index'
+import type { Anchor, Edge, Point } from '../model'
+import type { Zone } from '../result'
+
+/** Beyond this from a zone no bar of it meets another, mm: the longest bars behind an anchor and beside it. */
+const NEAR = 3500
+
+/** @returns the whole layout for zones that have no one place: joints, and edges from end to end. */
+export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
+  const line = lineOf(index, zone)
+  if (!line) return index
+  const isNear = (point: Point) => distanceToSegment(point, ...line) <= NEAR
+  const edges = index.layout.edges.filter((edge) => edge.id === zone.edgeId || isBeside(index, edge, line))
+  const edgeIds = new Set(edges.map(({ id }) => id))
+  const pans = index.layout.pans.filter(isNear)
+  const panIds = new Set(pans.map(({ id }) => id))
+  const anchorsOfEdge = new Map(
+    edges.map(({ id }) => [
+      id,
+      (index.anchorsOfEdge.get(id) ?? []).filter((anchor) => isNear(placeOf(index, anchor, id))),
+    ]),
+  )
+  const anchorsOfPan = new Map(pans.map(({ id }) => [id, index.anchorsOfPan.get(id) ?? []]))
+  const anchors = [...anchorsOfEdge.values(), ...anchorsOfPan.values()].flat()
+  const anchorIds = new Set(anchors.map(({ id }) => id))
+  const steel = index.layout.steel.filter(({ zone: at }) => {
+    if (at.kind === 'anchor') return anchorIds.has(at.anchorId)
+    if (at.kind === 'pan') return panIds.has(at.panId)
+    return at.kind === 'joint' ? false : edgeIds.has(at.edgeId)
+  })
+  return {
+    ...index,
+    concrete: {},
+    anchorsOfEdge,
+    anchorsOfPan,
+    steelOfZone: new Map([...index.steelOfZone].filter(([, [first]]) => first !== undefined && steel.includes(first))),
+    layout: {
+      ...index.layout,
+      edges,
+      pans,
+      joints: [],
+      anchors,
+      steel,
+      obstructions: index.layout.obstructions.filter(({ outline }) => outline.some(isNear)),
+    },
+  }
+}
+
+/** From one end of a zone to the other; a pan is a point. Null for a whole edge or a joint. */
+function lineOf(index: LayoutIndex, { kind, edgeId, panId, from, to }: Zone): [Point, Point] | null {
+  if (panId !== null) {
+    const pan = found(index.pans, panId, 'pan')
+    return [pan, pan]
+  }
+  if (edgeId === null || from === null || to === null || kind === 'edge' || kind === 'joint') return null
+  const { pointAt } = found(index.frames, edgeId, 'edge')
+  return [pointAt(from, 0), pointAt(to, 0)]
+}
+
+function placeOf(index: LayoutIndex, { chainage, setBack }: Anchor, edgeId: string): Point {
+  return found(index.frames, edgeId, 'edge').pointAt(chainage, setBack)
+}
+
+/** Bars along such an edge may come near. */
+function isBeside(index: LayoutIndex, { id }: Edge, [a, b]: readonly [Point, Point]): boolean {
+  const frame = found(index.frames, id, 'edge')
+  const [start, end] = [frame.pointAt(frame.from, 0), frame.pointAt(frame.to, 0)]
+  const away = [
+    distanceToSegment(a, start, end),
+    distanceToSegment(b, start, end),
+    distanceToSegment(start, a, b),
+    distanceToSegment(end, a, b),
+  ]
+  return Math.min(...away) <= NEAR
+}
