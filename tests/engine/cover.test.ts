@@ -265,8 +265,24 @@ describe('advice on the place in the thickness carries no status', () => {
   })
 })
 
-test('an anchor in a pan has no cover check here', () => {
-  expect(checks({ anchors: [inPan('PN01')], pans: [pan('PN01', {})] }, 'PN01-anchor')).toEqual([])
+describe('An anchor in a pan', () => {
+  const inSlab = (depth: number) => ({
+    anchors: [inPan('PN01')],
+    pans: [pan('PN01', { x: 9600, y: 8700, azimuth: 0, depth })],
+  })
+
+  // Slab 220, centre at 110, plate 80: its lower side at 70.
+  test.each([
+    { depth: 149, status: 'stop', demand: -1 },
+    { depth: 150, status: 'within', demand: 0 },
+    { depth: 151, status: 'within', demand: 1 },
+  ])('recess $depth deep: $demand from plate to floor is $status', ({ depth, ...figures }) => {
+    expect(named('Plate above the floor of the recess', inSlab(depth), 'PN01-anchor')).toMatchObject(figures)
+  })
+
+  test('has its recess in place of a pocket', () => {
+    expect(checks(inSlab(150), 'PN01-anchor').filter(({ name }) => name.startsWith('Pocket'))).toEqual([])
+  })
 })
 
 test('every printed line evaluates to the value beside it', () => {

@@ -92,7 +92,7 @@ function missedBy(shape: SteelShape, plane: Plane, aside: number): string | null
 function sizeAcross(shape: SteelShape, plane: Plane): number | null {
   if (shape.kind === 'spiral') return shape.outside
   if (shape.kind === 'links') return plane === 'plan' ? shape.width : shape.height
-  if (shape.kind === 'hairpins') return shape.bend
+  if (shape.kind === 'hairpins') return (shape.lies === 'upright') === (plane === 'thickness') ? shape.bend : null
   return null
 }
 
