@@ -9,6 +9,7 @@ import { recordAudit } from './stores/audit'
 import { companyById } from './stores/company'
 import {
   deleteJobMember,
+  deleteReading,
   insertJob,
   insertJobMember,
   jobById,
@@ -48,7 +49,7 @@ export function listJobs(db: Connection, personId: string) {
     const isWaiting = own.some(({ readingIds }) => readingIds?.some(isOpen))
     return {
       ...job,
-      readingsProposed: isWaiting ? proposedReadings(job.basis).filter(isOpen).length : 0,
+      readingsProposed: isWaiting ? openReadings(job.basis, isOpen) : 0,
       pours: own.map(({ id, mark, title, counts }): PourSummary => ({
         id,
         mark,
@@ -61,9 +62,17 @@ export function listJobs(db: Connection, personId: string) {
   })
 }
 
-/** A result names the first reading only that it waits for, so the basis says which there are. */
-const proposedReadings = (basis: string): string[] =>
-  (BASIS_SOURCES.find(({ id }) => id === basis)?.readings ?? []).filter(({ proposed }) => proposed).map(({ id }) => id)
+/**
+ * How many proposed readings of a basis wait. A result names the first reading only that it waits for, so the basis says
+ * which there are; a question that has another answer already waits no longer.
+ */
+function openReadings(basis: string, isOpen: (readingId: string) => boolean): number {
+  const offered = BASIS_SOURCES.find(({ id }) => id === basis)?.readings ?? []
+  const answered = new Set(offered.flatMap(({ id, choice }) => (choice === undefined || isOpen(id) ? [] : [choice])))
+  return offered.filter(
+    ({ id, proposed, choice }) => proposed && isOpen(id) && (choice === undefined || !answered.has(choice)),
+  ).length
+}
 
 /** A job with its people and what the caller is in its company. */
 export function describeJob(ctx: JobCall) {
@@ -136,7 +145,8 @@ export function renameJob(ctx: JobCall, change: { number: string; title: string 
 }
 
 /**
- * Stores the job's basis with its factors and settings, and checks every pour again.
+ * Stores the job's basis with its factors and settings, and checks every pour again. Readings of another basis hold no
+ * longer: they are withdrawn.
  * @throws Failure for a factor that the basis does not have or whose value lies outside its range.
  */
 export async function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'settings' | 'factors'>): Promise<void> {
@@ -144,13 +154,20 @@ export async function setBasis(ctx: JobCall, change: Pick<JobData, 'basis' | 'se
   assertFactors(change)
   const toCheck = write(ctx.db, (tx) => {
     const stamp = stampOf(ctx)
-    const { basis, settings, factors } = jobData(tx, key)
+    const { basis, settings, factors, readings } = jobData(tx, key)
     updateJobBasis(tx, key, { ...change, stamp })
+    for (const before of readings.filter(({ readingId }) => !isOffered(change.basis, readingId))) {
+      deleteReading(tx, key, before.readingId)
+      recordAudit(tx, { ...key, ...stamp, what: 'reading.withdraw', before, after: null })
+    }
     recordAudit(tx, { ...key, ...stamp, what: 'job.setBasis', before: { basis, settings, factors }, after: change })
     return overtakeJob(tx, key, stamp.atMs)
   })
   await checkStored(ctx, key, toCheck)
 }
+
+const isOffered = (basis: string, readingId: string): boolean =>
+  BASIS_SOURCES.some(({ id, readings }) => id === basis && readings.some((reading) => reading.id === readingId))
 
 function assertFactors(job: Pick<JobData, 'basis' | 'factors'>): void {
   const [problem] = factorProblems(job)

@@ -144,6 +144,52 @@ describe('a reading', () => {
   })
 })
 
+describe('a question with several answers', () => {
+  test('takes one answer at a time, and waits no longer once it has one', async () => {
+    const jobId = await importSample()
+    const waiting = async () => (await engineer.job.list())[0]?.readingsProposed
+    const before = await waiting()
+    await engineer.reading.accept({ jobId, readingId: 'en-crack-edge-bars', reason: 'Free to shorten.' })
+    // The proposed answer to the same question is not accepted, yet it is no longer asked for.
+    expect(await waiting()).toBe((before ?? 0) - 1)
+    await engineer.reading.accept({ jobId, readingId: 'en-crack-stronger', reason: 'Edge is seen.' })
+    const { readings } = await detailer.job.byId({ jobId })
+    expect(readings.map(({ readingId }) => readingId)).toEqual(['en-crack-stronger'])
+  })
+})
+
+describe('another basis', () => {
+  const change = (
+    jobId: string,
+    basis: 'en-1992' | 'as-3600',
+    factors: { name: string; value: number; reason: string }[],
+  ) => engineer.job.setBasis({ jobId, basis, settings: jobSettingsSchema.parse({}), factors })
+
+  test('withdraws the readings and drops the factors of the one before, and the record says so', async () => {
+    const jobId = await importSample()
+    await change(jobId, 'en-1992', [{ name: 'gammaP', value: 1.3, reason: 'National annex' }])
+    await engineer.reading.accept({ jobId, readingId: 'en-window', reason: 'As the elastic figures show.' })
+    expect(await codeOf(change(jobId, 'as-3600', [{ name: 'gammaP', value: 1.3, reason: 'Of the other' }]))).toBe(
+      'BAD_REQUEST',
+    )
+    expect((await detailer.job.byId({ jobId })).readings).toHaveLength(1)
+    await change(jobId, 'as-3600', [])
+    expect(await detailer.job.byId({ jobId })).toMatchObject({ basis: 'as-3600', readings: [], factors: [] })
+    const withdrawn = company.db.$client
+      .prepare("select count(*) from audit where what = 'reading.withdraw'")
+      .pluck()
+      .get()
+    expect(withdrawn).toBe(1)
+  })
+
+  test('the same basis again withdraws nothing', async () => {
+    const jobId = await importSample()
+    await engineer.reading.accept({ jobId, readingId: 'en-window', reason: 'As the elastic figures show.' })
+    await change(jobId, 'en-1992', [])
+    expect((await detailer.job.byId({ jobId })).readings).toHaveLength(1)
+  })
+})
+
 describe('hardware', () => {
   test('is stored by an admin and comes back as it was given', async () => {
     const { hardware, jacks, strandTypes } = sampleLayout()
