@@ -168,6 +168,7 @@ describe('zones of a pour', () => {
       'E1-03 to 04 together',
       'E1-04',
       'E1 gap 04 to end',
+      'E1 strip',
     ])
   })
 

@@ -1,15 +1,24 @@
 /** The places of a pour that checks and bars belong to, with stable ids and the names that people use. */
 
 import { groupName, groupsOfEdge, outToOut } from './anchor-groups'
+import { cornerId, cornersOfPour } from './corners'
 import { gapsOfEdge, type Gap, type TendonEnd } from './gaps'
 import { found, type LayoutIndex } from './layout-index'
 import type { Anchor, Edge } from './model'
 import type { Zone } from './result'
 
-/** All zones of a pour: edge by edge along chainage with anchors that act as one, then pans with their anchors, joints and tendons. */
+/** All zones of a pour: edge by edge along chainage with anchors that act as one, then corners, pans with their anchors, joints and tendons. */
 export function zonesOfPour(index: LayoutIndex, pourId: string): Zone[] {
   return [
     ...(index.edgesOfPour.get(pourId) ?? []).flatMap((edge) => zonesOfEdge(index, edge)),
+    ...cornersOfPour(index, pourId).map((corner) =>
+      zone({
+        id: cornerId(corner),
+        kind: 'corner',
+        name: `${corner.before.mark}/${corner.after.mark} corner`,
+        pourId,
+      }),
+    ),
     ...panZones(index, pourId),
     ...jointZones(index, pourId),
     ...(index.tendonsOfPour.get(pourId) ?? []).map((tendon) =>
@@ -58,7 +67,15 @@ function zonesOfEdge(index: LayoutIndex, edge: Edge): Zone[] {
     const { from, to } = outToOut(group.members).along
     return zone({ ...place, id: group.id, kind: 'group', name: groupName(edge.mark, group), from, to })
   })
-  return [whole, ...[...gaps, ...anchors, ...groups].sort((a, b) => middle(a) - middle(b))]
+  return [whole, ...[...gaps, ...anchors, ...groups].sort((a, b) => middle(a) - middle(b)), ...stripOf(index, edge)]
+}
+
+/** The strip behind the wedges of an edge at which tendons end. */
+function stripOf(index: LayoutIndex, edge: Edge): Zone[] {
+  const { from, to } = found(index.frames, edge.id, 'edge')
+  if (gapsOfEdge(index, edge.id).every(({ after, before }) => after === null && before === null)) return []
+  const name = `${edge.mark} strip`
+  return [zone({ id: `strip:${edge.id}`, kind: 'strip', name, pourId: edge.pourId, edgeId: edge.id, from, to })]
 }
 
 function panZones(index: LayoutIndex, pourId: string): Zone[] {

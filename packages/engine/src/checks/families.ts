@@ -12,11 +12,15 @@ import { checkBurstingOfGroup } from './bursting-group'
 import { coverChecks } from './cover'
 import { deadEndChecks } from './dead-end'
 import { depthChangeChecks } from './depth-change'
+import { cornerWedgeChecks, gapWedgeChecks } from './edge-wedge'
+import { jointChecks } from './joint'
+import { fitChecks } from './fit'
 import type { CheckContext } from './outcome'
 import { jackAccessChecks, panAccessChecks } from './pan-access'
 import { panBarsChecks } from './pan-bars'
 import { spacingChecks } from './spacing'
 import { straightLengthChecks } from './straight-length'
+import { precompressionChecks } from './precompression'
 import { spallingChecks } from './spalling'
 import { forceChecks } from './tendon'
 import { tendonChecks } from './tendon-advice'
@@ -63,8 +67,9 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
   spacing: (context, zone) => atAnchor(context, zone, (anchor) => spacingChecks(context.index, anchor)),
   'straight-length': (context, zone) =>
     atAnchor(context, zone, (anchor) => straightLengthChecks(context.index, anchor)),
-  'edge-wedge': () => null,
-  joint: () => null,
+  'edge-wedge': (context, zone) =>
+    zone.kind === 'corner' ? cornerWedgeChecks(context, zone) : gapWedgeChecks(context, zone),
+  joint: jointChecks,
   'pan-access': (context, zone) =>
     atPan(zone, (panId) => panAccessChecks(context.index, panId)) ??
     atAnchor(context, zone, (anchor) => jackAccessChecks(context.index, anchor)),
@@ -74,8 +79,8 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
       ? tendonChecks(context, zone)
       : atAnchor(context, zone, (anchor) => forceChecks(context, zone.id, anchor)),
   'dead-end': (context, zone) => atSite(context, zone, (site) => deadEndChecks(site, context)),
-  precompression: () => null,
-  fit: () => null,
+  precompression: precompressionChecks,
+  fit: fitChecks,
   anchorage: () => null,
 }
 
