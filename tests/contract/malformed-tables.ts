@@ -82,7 +82,7 @@ export const WRONG_FIELDS: readonly Wrong[] = wrong([
   ['a shape that is none', 'steel.0.shape.kind', 'helix', 'steel[0].shape.kind', /must be one of "spiral", "links"/],
   ['another version', 'version', 2, 'version', /must be 1, the only version/],
   ['another format', 'format', 'layout', 'format', /must be "wedgeline.layout"/],
-  ['an unknown basis', 'job.basis', 'en-1999', 'job.basis', /must be "en-1992"/],
+  ['an unknown basis', 'job.basis', 'en-1999', 'job.basis', /must be one of "en-1992", "as-3600"/],
   [
     'a factor that the basis does not have',
     'job.factors',
@@ -97,7 +97,7 @@ export const WRONG_FIELDS: readonly Wrong[] = wrong([
     'job.factors[0].value',
     /must lie in 1 to 2/,
   ],
-  ['an empty basis', 'job.basis', '', 'job.basis', /must be "en-1992"/],
+  ['an empty basis', 'job.basis', '', 'job.basis', /must be one of "en-1992", "as-3600"/],
   ['a misspelt end', 'anchors.0.end', 'alive', 'anchors[0].end', /must be one of "live", "dead"/],
   ['a time zone of no place', 'job.timeZone', 'Mars/Base', 'job.timeZone', /is no time zone; must be an IANA name/],
   ['no title', 'job.title', '', 'job.title', /must not be empty/],
