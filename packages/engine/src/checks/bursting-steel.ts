@@ -6,6 +6,7 @@ import { stageForce } from '../force'
 import type { Stage, SteelShape } from '../model'
 import type { Compared } from '../result'
 import { countSteel, type Counted } from '../steel/count'
+import { countPlaceOf } from '../steel/count-place'
 import type { CountPlace, Plane } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
 import { step, type Clause, type Step } from '../step'
@@ -108,23 +109,8 @@ function behindOf({ context, members, plane, centre }: Asked): Behind {
   return {
     shapes: sets.flatMap(({ shapes }) => shapes),
     asides: sets.flatMap(({ shapes, aside }) => shapes.map(() => aside)),
-    place: { ...placeOf(lead), chainage: centre.chainage, setBack },
+    place: { ...countPlaceOf(lead), chainage: centre.chainage, setBack },
     notes: [...new Set(sets.flatMap(({ notes }) => notes))],
-  }
-}
-
-function placeOf({ anchor, frame, hardware, pour, top, soffit }: AnchorSite): CountPlace {
-  return {
-    chainage: anchor.chainage,
-    edgeFrom: frame.from,
-    edgeTo: frame.to,
-    breaks: frame.steps,
-    cover: pour.coverEdge,
-    setBack: anchor.setBack,
-    plateWidth: hardware.plate.width,
-    depth: top - soffit,
-    azimuth: frame.outwardAzimuth,
-    mats: pour.mats,
   }
 }
 

@@ -6,6 +6,7 @@ import { found, type LayoutIndex } from '../layout-index'
 import type { Anchor } from '../model'
 import type { Check, Family, Zone, ZoneKind } from '../result'
 import type { Plane } from '../steel/crossings'
+import { anchorageChecks } from './anchorage'
 import { checkBearing } from './bearing'
 import { checkBurstingPlan, checkBurstingThickness } from './bursting'
 import { checkBurstingOfGroup } from './bursting-group'
@@ -81,7 +82,7 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
   'dead-end': (context, zone) => atSite(context, zone, (site) => deadEndChecks(site, context)),
   precompression: precompressionChecks,
   fit: fitChecks,
-  anchorage: () => null,
+  anchorage: anchorageChecks,
 }
 
 type OfAnchor = (anchor: Anchor) => readonly Check[] | null
