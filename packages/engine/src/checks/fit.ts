@@ -28,7 +28,7 @@ export function fitChecks(context: CheckContext, zone: Zone): readonly Check[] {
   if (key === null) return []
   const { index } = context
   const found = fitOfMember(index, key).get(zone.id)
-  const sets = setsOf(index, key, zone.id)
+  const sets = setsOfMember(index, key).get(zone.id) ?? []
   return [
     ...(found?.cover ? [coverCheck(index, zone, found.cover)] : []),
     ...(found?.gap ? [gapCheck(zone, found.gap)] : []),
@@ -41,72 +41,77 @@ export function fitChecks(context: CheckContext, zone: Zone): readonly Check[] {
   ]
 }
 
-/** The worst of a kind, and how many are short besides. */
+/** The worst of a kind, and how many are short in all. */
 interface Worst<T> {
-  readonly worst: T
-  readonly spare: number
-  readonly short: number
+  worst: T
+  spare: number
+  short: number
 }
 
 interface ZoneFit {
-  readonly cover?: Worst<Cover>
-  readonly gap?: Worst<Pair>
-  readonly clash?: Worst<Pair>
+  cover: Worst<Cover> | null
+  gap: Worst<Pair> | null
+  clash: Worst<Pair> | null
 }
-
-type Fits = Map<string, ZoneFit>
 
 /** Worked out once for all zones of an edge, a pan or a joint. */
 const fitOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<string, ZoneFit> => {
   const member = memberOf(index, key)
-  const fits: Fits = new Map()
+  const fits = new Map<string, ZoneFit>()
   for (const bar of member.bars) {
-    for (const cover of coversOf(index, member, bar)) {
-      note(fits, bar.bar.zoneId, { kind: 'cover', worst: cover, spare: cover.measured - cover.need })
-    }
+    const fit = fitOf(fits, bar.bar.zoneId)
+    for (const cover of coversOf(index, member, bar)) fit.cover = worse(fit.cover, cover, cover.measured - cover.need)
   }
   for (const pair of pairsOf(index, key)) {
     const { bar, other, clear, need } = pair
     const otherZone = other.kind === 'bar' ? other.bar.zoneId : other.zoneId
-    for (const zoneId of new Set([bar.bar.zoneId, otherZone])) {
-      if (zoneId === null) continue
-      const isClash = need === null || clear < -TOUCHING
-      const spare = isClash ? clear + TOUCHING : clear - need
-      note(fits, zoneId, { kind: isClash ? 'clash' : 'gap', worst: pair, spare })
-    }
+    const kind = need === null || clear < -TOUCHING ? 'clash' : 'gap'
+    const spare = need === null || kind === 'clash' ? clear + TOUCHING : clear - need
+    const fit = fitOf(fits, bar.bar.zoneId)
+    fit[kind] = worse(fit[kind], pair, spare)
+    if (otherZone === null || otherZone === bar.bar.zoneId) continue
+    const itsFit = fitOf(fits, otherZone)
+    itsFit[kind] = worse(itsFit[kind], pair, spare)
   }
   return fits
 })
 
-type Noted =
-  | { readonly kind: 'cover'; readonly worst: Cover; readonly spare: number }
-  | { readonly kind: 'gap' | 'clash'; readonly worst: Pair; readonly spare: number }
-
-function note(fits: Fits, zoneId: string, noted: Noted): void {
-  const fit = fits.get(zoneId) ?? {}
-  if (noted.kind === 'cover') fits.set(zoneId, { ...fit, cover: worseOf(fit.cover, noted.worst, noted.spare) })
-  else fits.set(zoneId, { ...fit, [noted.kind]: worseOf(fit[noted.kind], noted.worst, noted.spare) })
+function fitOf(fits: Map<string, ZoneFit>, zoneId: string): ZoneFit {
+  const known = fits.get(zoneId)
+  if (known) return known
+  const made: ZoneFit = { cover: null, gap: null, clash: null }
+  fits.set(zoneId, made)
+  return made
 }
 
-function worseOf<T>(known: Worst<T> | undefined, worst: T, spare: number): Worst<T> {
-  const short = (known?.short ?? 0) + (spare < -ROUNDING ? 1 : 0)
-  return known && known.spare <= spare + ROUNDING ? { ...known, short } : { worst, spare, short }
+/** Of two that are equally bad the first stays, so that the same layout names the same pair. */
+function worse<T>(known: Worst<T> | null, worst: T, spare: number): Worst<T> {
+  const isShort = spare < -ROUNDING ? 1 : 0
+  if (!known) return { worst, spare, short: isShort }
+  known.short += isShort
+  if (spare < known.spare - ROUNDING) Object.assign(known, { worst, spare })
+  return known
 }
 
-/** The sets of bars of a zone, each by one of its bars. */
-function setsOf(index: LayoutIndex, key: string, zoneId: string): SetOfBars[] {
+/** The sets of bars of each zone, each by one of its bars. */
+const setsOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<string, readonly SetOfBars[]> => {
   const member = memberOf(index, key)
-  const sets = new Map<string, SetOfBars>()
+  const zones = new Map<string, SetOfBars[]>()
+  const seen = new Set<string>()
   for (const bar of member.bars) {
-    if (bar.bar.zoneId !== zoneId || sets.has(bar.setId)) continue
-    const { anchorId, steelId } = bar.bar
+    const { anchorId, steelId, zoneId } = bar.bar
+    if (seen.has(bar.setId)) continue
+    seen.add(bar.setId)
     const anchor = anchorId === null ? null : found(index.anchors, anchorId, 'anchor')
     const entered = (index.steelOfZone.get(zoneId) ?? []).find(({ id }) => id === steelId)?.shape
     const shape = entered ?? (anchor && found(index.hardware, anchor.hardwareId, 'hardware').localSteel)
-    if (shape) sets.set(bar.setId, { bar, member, anchor, shape })
+    if (!shape) continue
+    const sets = zones.get(zoneId) ?? []
+    sets.push({ bar, member, anchor, shape })
+    zones.set(zoneId, sets)
   }
-  return [...sets.values()]
-}
+  return zones
+})
 
 // As results --------------------------------------------------------------------------------------------------------
 

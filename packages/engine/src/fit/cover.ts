@@ -95,8 +95,10 @@ const insideLinks = ({ bar }: FitBar, { linkDiameter }: Section): number =>
 function toTopAndSoffit({ member, pour, bar, straights, needs }: Asked): Cover[] {
   const links = insideLinks(bar, needs)
   let [toTop, toSoffit] = [Infinity, Infinity]
+  const isInOne = !isCut({ member, pour, bar })
   for (const straight of straights) {
-    for (const { a, b, section } of inOneSection({ member, pour, bar }, straight)) {
+    const parts = isInOne ? [{ ...straight, section: needs }] : inOneSection({ member, pour, bar }, straight)
+    for (const { a, b, section } of parts) {
       const thick = halfAcross(straight, { x: 0, y: 0, z: 1 }, bar.bar)
       toTop = Math.min(toTop, section.top - Math.max(a.z, b.z) - thick)
       toSoffit = Math.min(toSoffit, Math.min(a.z, b.z) - thick - section.soffit)
@@ -124,7 +126,10 @@ function inOneSection(
   { member, pour, bar }: Pick<Asked, 'member' | 'pour' | 'bar'>,
   { a, b }: Straight,
 ): (Straight & { readonly section: Section })[] {
-  const cuts = [0, ...cutsOf({ member, pour, bar }, { a, b }).sort((one, other) => one - other), 1]
+  const inside = cutsOf({ member, pour, bar }, { a, b })
+  if (inside.length === 0)
+    return [{ a, b, section: sectionOf(member, pour, { x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 }) }]
+  const cuts = [0, ...inside.sort((one, other) => one - other), 1]
   const at = (share: number): Vec => ({
     x: a.x + share * (b.x - a.x),
     y: a.y + share * (b.y - a.y),
@@ -144,21 +149,29 @@ function cutsOf({ member, pour, bar }: Pick<Asked, 'member' | 'pour' | 'bar'>, {
     frame ? [[frame.pointAt(chainage, 0), frame.pointAt(chainage, FAR)]] : [],
   )
   return [
-    ...sides.flatMap((side) => crossing(a, b, { side, isEndless: false })),
-    ...steps.flatMap((side) => crossing(a, b, { side, isEndless: true })),
+    ...sides.flatMap((side) => crossing({ a, b }, { side, isEndless: false })),
+    ...steps.flatMap((side) => crossing({ a, b }, { side, isEndless: true })),
   ]
 }
 
+/** Whether a side of a region or a step of the edge lies where the bar is. */
+function isCut({ member: { edgeFrame }, pour, bar }: Pick<Asked, 'member' | 'pour' | 'bar'>): boolean {
+  if (edgeFrame && edgeFrame.steps.length > 0) return true
+  return pour.regions.some(({ outline }) => sidesOf(outline).some((ends) => touchesInPlan(bar.box, ends)))
+}
+
 function touchesInPlan({ min, max }: Box3, [a, b]: readonly [Point, Point]): boolean {
-  const isBeside = (low: number, high: number, from: number, to: number) =>
-    Math.max(from, to) >= low && Math.min(from, to) <= high
-  return isBeside(min.x, max.x, a.x, b.x) && isBeside(min.y, max.y, a.y, b.y)
+  return (
+    Math.max(a.x, b.x) >= min.x &&
+    Math.min(a.x, b.x) <= max.x &&
+    Math.max(a.y, b.y) >= min.y &&
+    Math.min(a.y, b.y) <= max.y
+  )
 }
 
 /** Where on the way from a to b a side is crossed in plan. */
 function crossing(
-  a: Point,
-  b: Point,
+  { a, b }: Straight,
   { side: [c, d], isEndless }: { side: readonly [Point, Point]; isEndless: boolean },
 ): number[] {
   const [u, v, w] = [subtract(b, a), subtract(d, c), subtract(c, a)]

@@ -4,7 +4,7 @@ import type { PlacedBar } from '../placed/bar'
 import { roundedPath, type Vec } from '../placed/centre-line'
 import type { PlanFrame } from '../placed/pan-frame'
 import { convex, pieceToConvex, type Ends } from './convex'
-import { boxesNear, boxOf, segmentsApart, type Box3, type Piece } from './distance'
+import { boxOf, segmentsApart, type Box3, type Piece } from './distance'
 
 export interface FitBar {
   readonly kind: 'bar'
@@ -19,6 +19,9 @@ export interface FitBar {
   readonly box: Box3
   /** The centre line with its bends at their radius, cut into straight pieces. */
   readonly pieces: () => readonly Piece[]
+  /** The same with its bends square, and how far these may be from where the bend runs, mm. */
+  readonly square: () => readonly Piece[]
+  readonly cornerCut: number
 }
 
 export interface FitBody {
@@ -33,9 +36,16 @@ export interface FitBody {
 
 export type Item = FitBar | FitBody
 
-export const spaceOf =
-  (frame: PlanFrame) =>
-  (chainage: number, depth: number, height: number): Vec => ({ ...frame.pointAt(chainage, depth), z: height })
+/** Places in a frame's own coordinates as places in space. */
+export function spaceOf(frame: PlanFrame): (chainage: number, depth: number, height: number) => Vec {
+  const { x, y } = frame.pointAt(0, 0)
+  const { along, inward } = frame
+  return (chainage, depth, height) => ({
+    x: x + chainage * along.x + depth * inward.x,
+    y: y + chainage * along.y + depth * inward.y,
+    z: height,
+  })
+}
 
 interface BarPlace {
   readonly bar: PlacedBar
@@ -50,14 +60,29 @@ interface BarPlace {
 export function fitBar({ bar, frame, bendRadius, ...rest }: BarPlace): FitBar {
   const at = spaceOf(frame)
   const path = bar.path.map(({ chainage, depth, height }) => at(chainage, depth, height))
-  let kept: readonly Piece[] | null = null
-  const pieces = () => (kept ??= piecesOf(path, bar, bendRadius))
-  return { kind: 'bar', bar, path, box: boxOf(path, bar.diameter / 2), pieces, ...rest }
+  const radius = bar.diameter / 2
+  const isBent = path.length > 2
+  const line = () => (isBent && bar.kind !== 'spiral' ? roundedPath(path, bar.isClosed, bendRadius + radius) : path)
+  const pieces = once(() => piecesOf(line(), bar))
+  return {
+    kind: 'bar',
+    bar,
+    path,
+    box: boxOf(path, radius),
+    pieces,
+    square: bar.kind === 'spiral' ? pieces : once(() => piecesOf(path, bar)),
+    cornerCut: isBent ? (Math.SQRT2 - 1) * (bendRadius + radius) : 0,
+    ...rest,
+  }
 }
 
-function piecesOf(path: readonly Vec[], { kind, diameter, isClosed }: PlacedBar, bendRadius: number): Piece[] {
+function once<T>(make: () => T): () => T {
+  let kept: { readonly value: T } | null = null
+  return () => (kept ??= { value: make() }).value
+}
+
+function piecesOf(line: readonly Vec[], { diameter, isClosed }: PlacedBar): Piece[] {
   const radius = diameter / 2
-  const line = kind === 'spiral' ? path : roundedPath(path, isClosed, bendRadius + radius)
   const first = line[0]
   const points = isClosed && first ? [...line, first] : line
   const pieces = points.slice(1).flatMap((b, i): Piece[] => {
@@ -84,8 +109,7 @@ type Named = Pick<FitBody, 'what' | 'name' | 'zoneId'>
 
 /** A body with flat sides; its planes are worked out when something comes near. */
 export function flatBody(ends: Ends, named: Named): FitBody {
-  let kept: ReturnType<typeof convex> | null = null
-  const body = () => (kept ??= convex(ends))
+  const body = once(() => convex(ends))
   const box = boxOf([...ends.near, ...ends.far], 0)
   return { kind: 'body', ...named, box, clearOf: (piece) => pieceToConvex(piece, body()) }
 }
@@ -107,30 +131,58 @@ export const REACH = 50
 export const TO_BODY = 5
 
 /** Least clear distance between a bar and a body; infinite where they are farther apart than is looked for. */
-export const clearOfBody = (bar: FitBar, body: FitBody): number =>
-  piecesNear(bar, body.box, TO_BODY).reduce((least, piece) => Math.min(least, body.clearOf(piece)), Infinity)
+export function clearOfBody(bar: FitBar, body: FitBody): number {
+  if (!bar.square().some((piece) => isNear(piece, body.box, TO_BODY + bar.cornerCut))) return Infinity
+  const near = bar.pieces().filter((piece) => isNear(piece, body.box, TO_BODY))
+  return near.reduce((nearest, piece) => Math.min(nearest, body.clearOf(piece)), Infinity)
+}
 
-/** Least clear distance between those pieces of two bars that a rule lets count; infinite where there are none near. */
+/**
+ * Least clear distance between those pieces of two bars that a rule lets count; infinite where there are none near.
+ *
+ * First with the bends square, which is out by what a bend cuts off its corner: bars farther apart than `matters` even
+ * so are infinitely far.
+ */
 export function clearOfBar(
   one: FitBar,
   other: FitBar,
-  counts: (piece: Piece, otherPiece: Piece) => boolean = () => true,
+  { matters, counts = () => true }: { matters: number; counts?: (piece: Piece, otherPiece: Piece) => boolean },
 ): number {
-  const others = piecesNear(other, one.box, REACH)
-  let least = Infinity
-  for (const piece of piecesNear(one, other.box, REACH)) {
+  const cut = one.cornerCut + other.cornerCut
+  if (cut === 0) return least(one.pieces(), other.pieces(), counts)
+  if (least(one.square(), other.square(), counts) - cut > matters) return Infinity
+  return least(piecesNear(one, other.box), piecesNear(other, one.box), counts)
+}
+
+function least(
+  ones: readonly Piece[],
+  others: readonly Piece[],
+  counts: (piece: Piece, otherPiece: Piece) => boolean,
+): number {
+  let nearest = Infinity
+  for (const piece of ones) {
     for (const beside of others) {
       if (!counts(piece, beside)) continue
       const away = segmentsApart(piece.a, piece.b, [beside.a, beside.b]).distance - piece.radius - beside.radius
-      if (away < least) least = away
+      if (away < nearest) nearest = away
     }
   }
-  return least
+  return nearest
 }
 
-function piecesNear(bar: FitBar, box: Box3, within: number): readonly Piece[] {
+function piecesNear(bar: FitBar, box: Box3): readonly Piece[] {
   const pieces = bar.pieces()
-  return pieces.length === 1
-    ? pieces
-    : pieces.filter(({ a, b, radius }) => boxesNear(boxOf([a, b], radius), box, within))
+  return pieces.length === 1 ? pieces : pieces.filter((piece) => isNear(piece, box, REACH))
+}
+
+function isNear({ a, b, radius }: Piece, { min, max }: Box3, within: number): boolean {
+  const by = radius + within
+  return (
+    Math.min(a.x, b.x) - by <= max.x &&
+    Math.max(a.x, b.x) + by >= min.x &&
+    Math.min(a.y, b.y) - by <= max.y &&
+    Math.max(a.y, b.y) + by >= min.y &&
+    Math.min(a.z, b.z) - by <= max.z &&
+    Math.max(a.z, b.z) + by >= min.z
+  )
 }

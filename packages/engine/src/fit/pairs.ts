@@ -113,12 +113,16 @@ function ofBars(index: LayoutIndex, one: FitBar, other: FitBar): Pair | null {
   const [ones, others] = [isLocal(one), isLocal(other)]
   if (ones && others) {
     const isTied = one.bar.anchorId === other.bar.anchorId
-    return pair(one, other, { clear: clearOfBar(one, other), need: isTied ? null : gapOf(index, one, other) })
+    const need = isTied ? null : gapOf(index, one, other)
+    return pair(one, other, { clear: clearOfBar(one, other, { matters: need ?? TOUCHING }), need })
   }
   if (ones !== others) {
     const [local, straight] = ones ? [one, other] : [other, one]
     if (isSpread(straight)) return null
-    return pair(local, straight, { clear: clearOfBar(local, straight, notLaidOver), need: null })
+    return pair(local, straight, {
+      clear: clearOfBar(local, straight, { matters: TOUCHING, counts: notLaidOver }),
+      need: null,
+    })
   }
   return ofStraightBars(index, one, other)
 }
@@ -147,7 +151,7 @@ function ofStraightBars(index: LayoutIndex, one: FitBar, other: FitBar): Pair | 
   if (!isAlong && one.bar.layer === other.bar.layer) return null
   const isOneZone = one.bar.zoneId === other.bar.zoneId
   if (isAlong && !isOneZone && (isSpread(one) || isSpread(other))) return null
-  const clear = clearOfBar(one, other)
+  const clear = clearOfBar(one, other, { matters: REACH })
   if (isAlong && !isSideBySide(piece, beside, { clear, isOneZone })) return null
   return pair(one, other, { clear, need: isAlong ? gapOf(index, one, other) : null })
 }
@@ -224,7 +228,7 @@ function straightSet(index: LayoutIndex, set: readonly FitBar[]): Pair[] {
       if (!piece || !beside || !boxesNear(one.box, other.box, REACH)) return []
       const [u, v] = [wayOf(piece), wayOf(beside)]
       const isAlong = Math.abs(u.x * v.y - u.y * v.x) <= PARALLEL_SINE
-      const clear = clearOfBar(one, other)
+      const clear = clearOfBar(one, other, { matters: REACH })
       // Pieces of one run follow each other at a step of the edge.
       if (!isAlong || clear > REACH || !isSideBySide(piece, beside, { clear, isOneZone: true })) return []
       return [{ bar: one, other, clear, need: gapOf(index, one, other) }]
