@@ -50,10 +50,10 @@ describe('The zone of anchors that act as one', () => {
   test('has an id from its members, whatever the order of the list, and a name that people use', () => {
     const of = pair(400)
     expect(groupsOf(of).map(({ zone }) => zone)).toMatchObject([
-      { id: 'group:E4-2+E4-3', name: 'E4-02 to 03 together', edgeId: 'E4', from: 8890, to: 9510 },
+      { id: 'group:E4-2:E4-3', name: 'E4-02 to 03 together', edgeId: 'E4', from: 8890, to: 9510 },
     ])
     expect(groupsOf({ ...of, anchors: [...of.anchors].reverse() }).map(({ zone }) => zone.id)).toEqual([
-      'group:E4-2+E4-3',
+      'group:E4-2:E4-3',
     ])
   })
 
@@ -74,7 +74,7 @@ describe('Bursting of the group in plan: one plate from out to out with all the 
   test('its prism runs to the middle of the outer gaps', () => {
     // Members at 9000 and 9400: centre 9200; outer middles at 6500 and 11700; b = 2 * 2500 = 5000 by the nearer.
     // a = 400 + 220; T = 0.25 * 2 F * (5000 - 620) / 5000
-    const check = compared(at(pair(400), 'group:E4-2+E4-3'))
+    const check = compared(at(pair(400), 'group:E4-2:E4-3'))
     expect(check.steps.find(({ symbol }) => symbol === 'b')?.value).toBe(5000)
     expect(check.demand).toBeCloseTo((0.25 * 2 * F * (5000 - 620)) / 5000 / 300, 6)
   })
@@ -87,17 +87,15 @@ describe('Bursting of the group in plan: one plate from out to out with all the 
     expect(check.notes.join(' ')).toContain('E4-02 to 03 together')
   })
 
-  test('elastic: two anchors near each other take slightly less than one plate of the out-to-out width (EX18-M2)', () => {
-    // The single plate is the safe model: it never asks for less than the members do together with a plate each as
-    // wide as the whole, and for no more than their sum alone.
-    const group = compared(at(pair(400), 'group:E4-2+E4-3')).demand
+  test('it asks for more than either member alone, and for less than both alone together', () => {
+    const group = compared(at(pair(400), 'group:E4-2:E4-3')).demand
     const alone = ['anchor:E4-2', 'anchor:E4-3'].map((id) => compared(at(pair(400), id)).demand)
-    expect(group).toBeLessThanOrEqual(alone.reduce((sum, one) => sum + one, 0))
     expect(group).toBeGreaterThan(Math.max(...alone))
+    expect(group).toBeLessThan(alone.reduce((sum, one) => sum + one, 0))
   })
 
   test('a cage of links behind each does not carry it: links do not cross the line between', () => {
-    const check = compared(at(pair(400), 'group:E4-2+E4-3'))
+    const check = compared(at(pair(400), 'group:E4-2:E4-3'))
     expect(check).toMatchObject({ status: 'over', limit: 0 })
     expect(check.notes.join(' ')).toContain('200 beside the middle of the group')
   })
@@ -105,7 +103,7 @@ describe('Bursting of the group in plan: one plate from out to out with all the 
   test('transverse bars of its members count where they cross the line of the resultant', () => {
     // At 150, 300, ..., 3000 behind the face; in 1000 to 5000: 1050 to 3000, 14 places, two bars each, two members.
     const of = pair(400, { steel: [bars('E4-2'), bars('E4-3')] })
-    const check = compared(at(of, 'group:E4-2+E4-3'))
+    const check = compared(at(of, 'group:E4-2:E4-3'))
     expect(check.limit).toBeCloseTo(2 * 14 * 2 * A12, 4)
     // 2 F: 0.25 * 1413.12 kN * 0.876 / 300 = 1031.6 mm2 against 6333 mm2
     expect(check.status).toBe('within')
@@ -114,7 +112,7 @@ describe('Bursting of the group in plan: one plate from out to out with all the 
   test('a bar too short to reach past it does not count', () => {
     // Half of 620 less 200 aside leaves 110 past the line, under the least of 120 (10 diameters).
     const of = pair(400, { steel: [bars('E4-2', { length: 620 }), bars('E4-3', { length: 620 })] })
-    expect(compared(at(of, 'group:E4-2+E4-3')).limit).toBe(0)
+    expect(compared(at(of, 'group:E4-2:E4-3')).limit).toBe(0)
   })
 
   test('bars along the edge count once', () => {
@@ -134,7 +132,7 @@ describe('Bursting of the group in plan: one plate from out to out with all the 
       },
     })
     // Bearing face 110 in: 1190, 1390, 1590 behind it, in 1000 to 5000.
-    expect(compared(at(pair(400, { steel: [along('e')] }), 'group:E4-2+E4-3')).limit).toBeCloseTo(6 * A12, 6)
+    expect(compared(at(pair(400, { steel: [along('e')] }), 'group:E4-2:E4-3')).limit).toBeCloseTo(6 * A12, 6)
   })
 
   test.each([
@@ -144,7 +142,7 @@ describe('Bursting of the group in plan: one plate from out to out with all the 
     { first: 110, kind: 'refused' },
   ])('from $first to 520 beside the end of the edge: $kind', ({ first, kind }) => {
     const anchors = [first, 520, 4000].map((chainage, i) => anchor('E4', i + 1, { chainage }))
-    const check = at(layout({ anchors }), 'group:E4-1+E4-2')
+    const check = at(layout({ anchors }), 'group:E4-1:E4-2')
     expect(check.kind).toBe(kind)
     if (check.kind === 'refused') expect(check).toMatchObject({ code: 'OUTSIDE_METHOD', field: 'chainage' })
   })
@@ -171,14 +169,14 @@ describe('One above the other', () => {
     // Centre at -130, the middle of 220 and -480: b = 700; a = 200 + 80; T = 0.25 * 2 F * 420 / 700
     const groups = groupsOf(stacked(200))
     expect(groups).toHaveLength(1)
-    const check = compared(at(stacked(200), 'group:E4-1+E4-2', 'bursting-thickness'))
+    const check = compared(at(stacked(200), 'group:E4-1:E4-2', 'bursting-thickness'))
     expect(check.demand).toBeCloseTo((0.25 * 2 * F * 420) / 700 / 300, 6)
   })
 
   test('210 apart they do not, though they do in plan: one plate wide, twice the force', () => {
     const checks = groupsOf(accepted(stacked(210)))[0]?.checks ?? []
     expect(checks.some(({ family }) => family === 'bursting-thickness')).toBe(false)
-    const check = compared(at(stacked(210), 'group:E4-1+E4-2'))
+    const check = compared(at(stacked(210), 'group:E4-1:E4-2'))
     // 9000 to the nearer end of the edge: b = 18 000; a = 220.
     expect(check.demand).toBeCloseTo((0.25 * 2 * F * (18_000 - 220)) / 18_000 / 300, 6)
   })
@@ -186,7 +184,7 @@ describe('One above the other', () => {
   test('three in a stack, each 200 from the next, are one group', () => {
     const anchors = [-330, -130, 70].map((height, i) => anchor('E4', i + 1, { chainage: 9000, height }))
     const groups = groupsOf(layout({ edges: deep, anchors }))
-    expect(groups.map(({ zone }) => zone.id)).toEqual(['group:E4-1+E4-2+E4-3'])
+    expect(groups.map(({ zone }) => zone.id)).toEqual(['group:E4-1:E4-2:E4-3'])
   })
 })
 
@@ -253,7 +251,7 @@ describe('Properties', () => {
     }
     fc.assert(
       fc.property(ratio, ratio, (one, other) => {
-        const steel = (r: number) => compared(at(with3(r), 'group:E4-2+E4-3')).demand
+        const steel = (r: number) => compared(at(with3(r), 'group:E4-2:E4-3')).demand
         expect(steel(Math.max(one, other))).toBeGreaterThanOrEqual(steel(Math.min(one, other)))
       }),
       { numRuns: 10 },

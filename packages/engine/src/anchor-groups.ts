@@ -19,7 +19,7 @@ export interface AnchorGroup {
 export const groupsOfEdge = perConcrete((index, edgeId): readonly AnchorGroup[] => {
   const groups = new Map<string, AnchorGroup>()
   for (const close of closeAnchors(index, edgeId)) {
-    const id = `group:${[...close.anchorIds].sort().join('+')}`
+    const id = `group:${[...close.anchorIds].sort().join(':')}`
     const members = close.anchorIds.map((anchorId) => siteOfAnchor(index, found(index.anchors, anchorId, 'anchor')))
     groups.set(id, { id, edgeId, members, planes: [...(groups.get(id)?.planes ?? []), close] })
   }
