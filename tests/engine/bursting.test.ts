@@ -266,8 +266,9 @@ describe('Bursting in plan', () => {
   })
 
   test('inside a near-equal row the row value stands beside', () => {
-    // a / s = 220 / 1750 = 0.126: 0.2117 - (0.2117 - 0.161) * 0.257 = 0.199 P = 117.0 kN (computed row)
-    expect(plan('S4').notes.join(' ')).toContain('0.199 P = 117.0 kN')
+    // a / s = 220 / 1750 = 0.1257, b = pi a / s = 0.3949; the sum is greatest at x / s = 0.083 (computed row):
+    // 2 * 0.083 / 0.3949 * atan(sin b / (e^(2 pi 0.083) - cos b)) = 0.4203 * atan(0.3848 / 0.7616) = 0.1966 P = 115.8 kN
+    expect(plan('S4').notes.join(' ')).toContain('0.197 P = 115.8 kN')
   })
 
   test('skew beyond 20 degrees is refused (common practice)', () => {

@@ -194,3 +194,17 @@ describe('Elsewhere an uneven row is not covered, and the value of the row stand
     expect(face(of, 'anchor:PN1-anchor')).toMatchObject(uneven)
   })
 })
+
+describe('By AS 3600 (digest): the force unfactored at 150 MPa, no floor of its own', () => {
+  const as = (of: Layout): Layout => ({ ...of, job: { ...of.job, basis: 'as-3600' } })
+
+  test('between anchors T / 150, resting on the reading for a near-equal row', () => {
+    const check = compared(face(as(row('S4')), gap(3, 4)))
+    expect(check.demand).toBeCloseTo((tensionMidway(220 / 1750).share * 588_800) / 150, 6)
+    expect(check.readingIds.length).toBe(1)
+  })
+
+  test('beside an anchor alone nothing is asked for', () => {
+    expect(compared(face(as(row('S4')), 'anchor:E4-4'))).toMatchObject({ demand: 0, statusOnceAccepted: 'within' })
+  })
+})

@@ -189,6 +189,11 @@ describe('Force after lock-off against min(0.75 Fpk, 0.85 Fp0.1k) (EN 1992-1-1 5
     expect(lockOff(of)).toMatchObject({ kind: 'refused', code: 'MISSING_INPUT', field: 'tendon.drape' })
   })
 
+  test('a basis that sets no limit compares nothing', () => {
+    const given = oneTendon()
+    expect(lockOff({ ...given, job: { ...given.job, basis: 'as-3600' } })).toBeUndefined()
+  })
+
   test('each step evaluates to its value', () => {
     for (const settings of [allPairs(0, 0), allPairs(0.1, 0.002e-3), allPairs(0.3, 0.01e-3)]) {
       const check = lockOff(oneTendon({ settings }))

@@ -2,19 +2,13 @@
 
 import type { AnchorSite } from '../anchor-site'
 import { ROUNDING } from '../geometry'
+import { tensionOnLine } from '../row-series'
 import { step, type Clause, type Step } from '../step'
 
 const GEOMETRY: Clause = { source: 'Statics', section: 'symmetric prism', tag: 'derived' }
 
 /** From this on the wider side is called wide: above it a row is no longer near equal. */
 const WIDE_GAP_MIN = 1.2
-
-/** Exact row of equal anchors: tension on the anchor's line over P, by plate over spacing (computed). */
-const ROW_ON_LINE = [
-  [0.1, 0.2117],
-  [0.2, 0.161],
-  [0.3, 0.1242],
-] as const
 
 /** A prism in one plane: its dimension, and the plate's in that plane. */
 export interface Prism {
@@ -135,18 +129,9 @@ export function planNotes({ own: { before, after }, isEndBefore, isEndAfter }: P
 
 /** What an endless row of the same anchors would give, beside the prism; nothing where the row is uneven. */
 export function rowNotes(site: AnchorSite, { a, b }: Prism): readonly string[] {
-  const share = onLine(a / b.value)
-  if (share === null || !site.isInEqualRow) return []
+  if (!site.isInEqualRow || a >= b.value) return []
+  const { share } = tensionOnLine(a / b.value)
   const P = site.force.value
   const row = `An endless row at this spacing gives ${share.toFixed(3)} P = ${(P * share * 1e-3).toFixed(1)} kN unfactored on the anchor's line (computed).`
   return [row]
-}
-
-function onLine(ratio: number): number | null {
-  for (let i = 0; i + 1 < ROW_ON_LINE.length; i++) {
-    const [from, to] = [ROW_ON_LINE[i], ROW_ON_LINE[i + 1]]
-    if (!from || !to || ratio < from[0] || ratio > to[0]) continue
-    return from[1] + ((to[1] - from[1]) * (ratio - from[0])) / (to[0] - from[0])
-  }
-  return null
 }
