@@ -69,6 +69,16 @@ describe('Bonded dead end: all force at the bulbs, 0.25 P (1 - splay / s) (engin
     expect(checksAt(deadRow()).filter(({ family }) => family === 'bearing')).toEqual([])
   })
 
+  test('moving towards a face is never a gain', () => {
+    const ratio = (height: number) => at(deadRow({ height }), 'bursting-thickness').utilisation ?? Infinity
+    fc.assert(
+      fc.property(fc.integer({ min: 45, max: 109 }), (height) => {
+        expect(ratio(height)).toBeGreaterThanOrEqual(ratio(110) - 1e-12)
+      }),
+      { numRuns: 15 },
+    )
+  })
+
   test('more force never asks for less steel', () => {
     const withRatio = (jackingRatio: number) => {
       const of = deadRow()

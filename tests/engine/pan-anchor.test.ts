@@ -1,4 +1,5 @@
 import type { Anchor, Check, Layout, Obstruction, Pan } from '@wedgeline/engine'
+import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 import { accepted, checksAt, compared, K4 } from './anchor-checks'
 import { anchor, B7, D4, inPan, layout, pan, S4, type Parts } from './sample-layout'
@@ -28,6 +29,17 @@ describe('Bursting behind the bearing face of a pan', () => {
     expect(check.notes.join(' ')).toContain('By the own prism (200) alone')
     // Links of the hardware at 80, 130, 180 in 44 to 220.
     expect(check.limit).toBeCloseTo((3 * 2 * Math.PI * 100) / 4, 6)
+  })
+
+  test('moving towards a face is never a gain', () => {
+    const ratio = (height: number) =>
+      compared(at(inPans([{ depth: 200 }], { change: { height } }), 'bursting-thickness')).utilisation ?? Infinity
+    fc.assert(
+      fc.property(fc.integer({ min: 45, max: 175 }), (height) => {
+        expect(ratio(height)).toBeGreaterThanOrEqual(ratio(110) - 1e-12)
+      }),
+      { numRuns: 15 },
+    )
   })
 
   test('in plan: half the gap to the next pan that faces the same way', () => {
