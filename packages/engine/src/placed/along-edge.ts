@@ -1,7 +1,7 @@
 /** Straight bars along an edge and across its gaps. */
 
 import type { EdgeFrame } from '../frame'
-import { tendonEndsOfEdge } from '../gaps'
+import { tendonEndsOfEdge, type TendonEnd } from '../gaps'
 import type { LayoutIndex } from '../layout-index'
 import type { Anchor, EdgeBarsShape, Pour, SteelZone, TransverseBarsShape, WedgeBarsShape } from '../model'
 import { sectionBehind, type Section } from '../section'
@@ -77,7 +77,10 @@ function clearOfSteps(
   ]
 }
 
-/** Parallel to the tendons, spread evenly over the gap, from the edge's cover inward. */
+/**
+ * Parallel to the tendons, spread evenly over the gap, from the edge's cover inward; the outermost clear of a pocket that
+ * reaches to their height, and with cover at the end of the edge.
+ */
 export function wedgeBars(
   index: LayoutIndex,
   of: { shape: WedgeBarsShape; placing: Placing; zone: SteelZone & { kind: 'gap' } },
@@ -85,17 +88,36 @@ export function wedgeBars(
   const { shape, zone } = of
   const { pour, frame } = of.placing
   const ends = tendonEndsOfEdge(index, zone.edgeId)
-  const chainageOf = (anchorId: string | null, end: number) =>
-    anchorId === null ? end : (ends.find((candidate) => candidate.anchor.id === anchorId)?.chainage ?? end)
-  const from = chainageOf(zone.afterAnchorId, frame.from)
-  const pitch = (chainageOf(zone.beforeAnchorId, frame.to) - from) / shape.count
-  return evenly(shape.count, from + pitch / 2, pitch).flatMap((chainage) => {
-    const { coverEdge } = sectionBehind(pour, { frame, chainage, depth: 0 })
-    const depths = [coverEdge, coverEdge + shape.length]
-    const section = sectionBehind(pour, { frame, chainage, depth: coverEdge + shape.length / 2 })
-    return layersOf(section, { ...shape, way: frame.inward, mats: pour.mats }).map(({ face, height }) => ({
-      layer: face,
-      path: depths.map((depth) => ({ chainage, depth, height })),
-    }))
+  const endOf = (anchorId: string | null) => ends.find(({ anchor }) => anchor.id === anchorId)
+  const [after, before] = [endOf(zone.afterAnchorId), endOf(zone.beforeAnchorId)]
+  const [from, to] = [after?.chainage ?? frame.from, before?.chainage ?? frame.to]
+  const pitch = (to - from) / shape.count
+  const sectionOf = (chainage: number) =>
+    sectionBehind(pour, { frame, chainage, depth: coverOf(chainage) + shape.length / 2 })
+  const coverOf = (chainage: number) => sectionBehind(pour, { frame, chainage, depth: 0 }).coverEdge
+  const layersAt = (chainage: number) => layersOf(sectionOf(chainage), { ...shape, way: frame.inward, mats: pour.mats })
+  return layersAt((from + to) / 2).flatMap(({ face }) => {
+    const heightAt = (chainage: number) => layersAt(chainage).find((layer) => layer.face === face)?.height ?? 0
+    const clear = (end: TendonEnd | undefined, chainage: number) =>
+      clearAt(end, { bar: shape.diameter, height: heightAt(chainage), cover: coverOf(chainage) })
+    const first = Math.max(from + pitch / 2, from + clear(after, from + pitch / 2))
+    const last = Math.min(to - pitch / 2, to - clear(before, to - pitch / 2))
+    const step = shape.count > 1 ? (last - first) / (shape.count - 1) : 0
+    return evenly(shape.count, first, step).map((chainage) => {
+      const [height, depth] = [heightAt(chainage), coverOf(chainage)]
+      return { layer: face, path: [depth, depth + shape.length].map((at) => ({ chainage, depth: at, height })) }
+    })
   })
+}
+
+/** From the end of a gap to the axis of its first bar, at least, mm. */
+function clearAt(
+  end: TendonEnd | undefined,
+  { bar, height, cover }: { readonly bar: number; readonly height: number; readonly cover: number },
+): number {
+  if (!end) return cover + bar / 2
+  const { pocket } = end.hardware
+  if (end.panId !== null || !pocket) return 0
+  const isLevel = Math.abs(height - end.anchor.height) < (pocket.height + bar) / 2
+  return isLevel ? (pocket.width + bar) / 2 : 0
 }
