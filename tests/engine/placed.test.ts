@@ -251,6 +251,39 @@ describe('bars along and across', () => {
     ])
   })
 
+  test('with a mat each lies in the layer that runs its way, inside the outer bars where it crosses them (common practice)', () => {
+    const mat = (id: string, azimuth: number, isOuter: boolean) => ({
+      id,
+      face: 'top' as const,
+      azimuth,
+      diameter: 16,
+      spacing: 200,
+      isOuter,
+      spareShare: 0,
+      spareBy: null,
+    })
+    const heightOf = (outerAzimuth: number) => {
+      const mats = [mat('o', outerAzimuth, true), mat('i', outerAzimuth + Math.PI / 2, false)]
+      const zone: SteelZone = { kind: 'gap', edgeId: 'E2', afterAnchorId: null, beforeAnchorId: null }
+      const along: SteelShape = {
+        kind: 'edge-bars',
+        diameter: 12,
+        countTop: 1,
+        countBottom: 0,
+        first: 60,
+        pitch: 0,
+        from: 100,
+        to: 900,
+      }
+      const into: SteelShape = { kind: 'wedge-bars', diameter: 12, length: 900, count: 1, layers: 'top' }
+      const placed = bars({ pour: { mats }, steel: [steel('a', atEdge, along), steel('b', zone, into)] })
+      return placed.map((bar) => bar.path[0]?.height)
+    }
+    // The edge runs east. Outer bars north: the edge bar inside them, 220 - 30 - 16 - 6; the wedge bar 220 - 30 - 6.
+    expect(heightOf(0)).toEqual([168, 184])
+    expect(heightOf(Math.PI / 2)).toEqual([184, 168])
+  })
+
   test('wedge bars are spread evenly over their gap, from the cover inward', () => {
     const anchors = [...one, anchor('E2', 2, { chainage: 6000 })]
     const zone: SteelZone = { kind: 'gap', edgeId: 'E2', afterAnchorId: 'E2-1', beforeAnchorId: 'E2-2' }

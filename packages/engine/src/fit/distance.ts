@@ -37,7 +37,7 @@ export function segmentsApart(a: Vec, b: Vec, [c, d]: readonly [Vec, Vec]): Near
   // Nearly parallel: any place on the first will do to begin with.
   let s = cross > 1e-9 * uu * vv ? clamp((uv * vw - vv * uw) / cross) : 0
   let t = vv > 0 ? (uv * s + vw) / vv : 0
-  if (t < 0 || t > 1) {
+  if (t < 0 || t > 1 || vv === 0) {
     t = clamp(t)
     s = uu > 0 ? clamp((uv * t - uw) / uu) : 0
   }
