@@ -12,7 +12,7 @@ import { Failed, Waiting } from '@/components/ui/states'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { notYetText } from '../checks/words'
-import { calculationPathOf, edgePathOf, readingTitle } from '../checks/zone-words'
+import { calculationPathOf, pathOfZone, readingTitle } from '../checks/zone-words'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
 import { jobParents } from '../pour/pour-frame'
@@ -37,7 +37,7 @@ export function CalculationScreen({ jobId, zoneId }: { readonly jobId: string; r
     )
   }
   const base = `/jobs/${jobId}/pours/${pour.id}` as const
-  const edgePath = edgePathOf(jobId, place.zone)
+  const path = pathOfZone(jobId, place.zone)
   return (
     <Screen
       title={`Calculation, ${place.zone.name}`}
@@ -49,7 +49,7 @@ export function CalculationScreen({ jobId, zoneId }: { readonly jobId: string; r
       actions={
         <View style={styles.actions} dataSet={{ print: 'no' }}>
           <Neighbours jobId={jobId} place={place} />
-          {edgePath ? <Button label="On its edge" href={edgePath} /> : null}
+          {path ? <Button label={path.words} href={path.path} /> : null}
           <Button label="Print" icon={<Icon name="print" />} onPress={printPage} />
         </View>
       }

@@ -7,9 +7,17 @@ export function readingTitle(readingId: string): string {
   return readings.find(({ id }) => id === readingId)?.title ?? 'a reading of this basis'
 }
 
-/** Where a zone lies, as a path of the product: its edge with the zone picked; null for a zone at no edge. */
-export function edgePathOf(jobId: string, zone: Pick<Zone, 'id' | 'edgeId'>): `/jobs/${string}/edges/${string}` | null {
-  return zone.edgeId === null ? null : `/jobs/${jobId}/edges/${zone.edgeId}?zone=${encodeURIComponent(zone.id)}`
+export interface ZonePath {
+  readonly path: `/jobs/${string}/edges/${string}` | `/jobs/${string}/pans/${string}`
+  /** As a link says it: On its edge. */
+  readonly words: string
+}
+
+/** Where a zone lies, as a path of the product: its pan, or its edge with the zone picked; null for a zone at neither. */
+export function pathOfZone(jobId: string, zone: Pick<Zone, 'id' | 'edgeId' | 'panId'>): ZonePath | null {
+  if (zone.panId !== null) return { path: `/jobs/${jobId}/pans/${zone.panId}`, words: 'In its pan' }
+  if (zone.edgeId === null) return null
+  return { path: `/jobs/${jobId}/edges/${zone.edgeId}?zone=${encodeURIComponent(zone.id)}`, words: 'On its edge' }
 }
 
 export function calculationPathOf(jobId: string, zoneId: string): `/jobs/${string}/zones/${string}` {

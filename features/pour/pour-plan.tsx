@@ -28,10 +28,11 @@ export interface PourPlanProps {
   readonly index: LayoutIndex
   readonly pourId: string
   readonly onEdge: (edgeId: string) => void
+  readonly onPan: (panId: string) => void
 }
 
 /** A pour from above: its grid, outline, edges, tendons and their spread. Closer makes it larger and lets it scroll. */
-export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
+export function PourPlan({ index, pourId, onEdge, onPan }: PourPlanProps) {
   const isWide = useWide()
   const [width, setWidth] = useState(0)
   const [zoom, setZoom] = useState(1)
@@ -79,7 +80,14 @@ export function PourPlan({ index, pourId, onEdge }: PourPlanProps) {
               </G>
               <PlanGrid data={data} bounds={bounds} scale={scale} margin={margin} />
               {data.pans.map((pan) => (
-                <Path key={pan.id} d={areaOf(pan)} fill={colour.sheet} stroke={colour.ink} strokeWidth={1.2} />
+                <Path
+                  key={pan.id}
+                  d={areaOf(pan)}
+                  fill={colour.sheet}
+                  stroke={colour.ink}
+                  strokeWidth={1.2}
+                  onPress={() => onPan(pan.id)}
+                />
               ))}
               <PlanAnchors data={data} scale={scale} />
               {data.obstructions.map((thing) => (

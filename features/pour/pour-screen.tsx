@@ -15,6 +15,7 @@ import { usePourChecks } from '../editing/pour-checks'
 import { CountLinks } from './count-links'
 import { EdgeLengths } from './edge-lengths'
 import { EdgeList } from './edge-list'
+import { PanList } from './pan-list'
 import { PourDataForm } from './pour-data'
 import { PourFrame } from './pour-frame'
 import { PourPlan } from './pour-plan'
@@ -67,9 +68,14 @@ function PourParts({ jobId, pour }: { readonly jobId: string; readonly pour: Pou
       )}
       <View style={isBeside ? styles.beside : styles.stacked}>
         <View style={isBeside ? styles.plan : null}>
-          <PourPlan index={index} pourId={pour.id} onEdge={(edgeId) => router.push(`/jobs/${jobId}/edges/${edgeId}`)} />
+          <PourPlan
+            index={index}
+            pourId={pour.id}
+            onEdge={(edgeId) => router.push(`/jobs/${jobId}/edges/${edgeId}`)}
+            onPan={(panId) => router.push(`/jobs/${jobId}/pans/${panId}`)}
+          />
         </View>
-        <View style={isBeside ? styles.list : null}>
+        <View style={isBeside ? styles.list : styles.stacked}>
           <Section title="Edges">
             <EdgeList
               jobId={jobId}
@@ -80,6 +86,7 @@ function PourParts({ jobId, pour }: { readonly jobId: string; readonly pour: Pou
               isColumn={!isWide || isBeside}
             />
           </Section>
+          <PanList jobId={jobId} pourId={pour.id} index={index} result={result} />
         </View>
       </View>
       <PourDataForm pour={pour} />
@@ -121,5 +128,5 @@ const styles = StyleSheet.create({
   stacked: { gap: space.xl },
   beside: { flexDirection: 'row', alignItems: 'flex-start', gap: space.xl },
   plan: { flex: 1, minWidth: 0 },
-  list: { width: 440 },
+  list: { width: 440, gap: space.xl },
 })

@@ -9,7 +9,7 @@ import { Link } from '@/components/ui/link'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { clauseText, notYetText, outcomeText, shownQuantity, sidesText } from '../checks/words'
-import { calculationPathOf, edgePathOf } from '../checks/zone-words'
+import { calculationPathOf, pathOfZone } from '../checks/zone-words'
 import type { ZoneRow } from './zone-rows'
 
 export interface ZoneChecksProps {
@@ -28,7 +28,7 @@ export function ZoneChecks({ jobId, row, isNarrowed }: ZoneChecksProps) {
   const [isOpen, setOpen] = useState(false)
   const shown = isOpen ? row.checks : row.checks.slice(0, FOLDED)
   const hidden = row.checks.length - shown.length
-  const edgePath = edgePathOf(jobId, zone)
+  const path = pathOfZone(jobId, zone)
   const missing = notYetText(notYetChecked)
   return (
     <View>
@@ -40,9 +40,9 @@ export function ZoneChecks({ jobId, row, isNarrowed }: ZoneChecksProps) {
           <Link href={calculationPathOf(jobId, zone.id)} aria-label={`Calculation of ${zone.name}`}>
             Calculation
           </Link>
-          {edgePath ? (
-            <Link href={edgePath} aria-label={`${zone.name} on its edge`}>
-              On its edge
+          {path ? (
+            <Link href={path.path} aria-label={`${zone.name} ${path.words.toLowerCase()}`}>
+              {path.words}
             </Link>
           ) : null}
         </View>

@@ -13,7 +13,7 @@ import { Section } from '@/components/ui/screen'
 import { Empty, Failed, Waiting } from '@/components/ui/states'
 import { Text } from '@/components/ui/text'
 import { failureOf } from '@/lib/failure'
-import { edgePathOf } from '../checks/zone-words'
+import { pathOfZone, type ZonePath } from '../checks/zone-words'
 import { useJobDraft } from '../editing/job-draft'
 import { PourFrame } from '../pour/pour-frame'
 import { problemLines, type ProblemLine } from './schedule-words'
@@ -145,7 +145,7 @@ function Problems({ jobId, pourId, schedule }: PartsProps) {
     const zones = zonesOfPour(index, pourId)
     return {
       lines: problemLines(schedule, index, new Map(zones.map(({ id, name }) => [name, id]))),
-      edgeOf: new Map(zones.map((zone) => [zone.id, edgePathOf(jobId, zone)])),
+      edgeOf: new Map(zones.map((zone) => [zone.id, pathOfZone(jobId, zone)?.path ?? null])),
     }
   }, [layout, schedule, pourId, jobId])
   if (lines.length === 0) return null
@@ -165,7 +165,7 @@ function Problems({ jobId, pourId, schedule }: PartsProps) {
 
 interface ProblemProps {
   readonly line: ProblemLine
-  readonly href: ReturnType<typeof edgePathOf>
+  readonly href: ZonePath['path'] | null
 }
 
 function Problem({ line: { severity, about, message }, href }: ProblemProps) {

@@ -41,6 +41,24 @@ const LAYERS: SteelField = {
   ],
 }
 
+/** Straight bars round a pan: `usual` gives the range of each number. */
+const placed = (usual: Readonly<Record<'size' | 'count' | 'length' | 'pitch', string>>): readonly SteelField[] => [
+  size(usual.size),
+  { key: 'count', label: 'Bars in each layer', unit: null, usual: practice(usual.count) },
+  { key: 'lengthMm', label: 'Length', unit: 'mm', usual: practice(usual.length) },
+  { key: 'pitchMm', label: 'Pitch', unit: 'mm', usual: practice(usual.pitch) },
+  LAYERS,
+  {
+    key: 'runs',
+    label: 'They run',
+    unit: null,
+    choices: [
+      { value: 'along', label: 'along the jack' },
+      { value: 'across', label: 'across it' },
+    ],
+  },
+]
+
 const FIELDS: Readonly<Partial<Record<SteelKind, readonly SteelField[]>>> = {
   spiral: [
     size('8 to 16'),
@@ -104,6 +122,25 @@ const FIELDS: Readonly<Partial<Record<SteelKind, readonly SteelField[]>>> = {
     { key: 'fromMm', label: 'From chainage', unit: 'mm' },
     { key: 'toMm', label: 'To chainage', unit: 'mm' },
   ],
+  'tie-back-bars': placed({
+    size: '12 to 16',
+    count: 'an even number, clear of the recess at the top',
+    length: 'twice the anchorage',
+    pitch: 'width of the pan + 2 covers',
+  }),
+  trimmers: placed({
+    size: 'as the bars cut',
+    count: 'as many as are cut, half on each side',
+    length: 'pan + 2 anchorages',
+    pitch: '50 to 100',
+  }),
+  diagonals: placed({ size: '12', count: '2 at each corner', length: '1000 to 1200', pitch: '50 to 100' }),
+  'lap-bars': placed({
+    size: '12 to 20',
+    count: 'an even number',
+    length: 'twice the way to the edge',
+    pitch: '100 to 300',
+  }),
 }
 
 export const steelFields = (kind: SteelKind): readonly SteelField[] => FIELDS[kind] ?? []

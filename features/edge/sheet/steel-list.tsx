@@ -24,19 +24,23 @@ export interface SteelListProps {
   readonly zoneName: string
   readonly kinds: readonly SteelKind[]
   readonly place: Place
-  /** Other zones that may take the same bars: the live anchors of the edge. */
+  /** Other zones that may take the same bars: the live anchors of the edge, unless `likeWords` calls them otherwise. */
   readonly likeZones: readonly SteelZoneData[]
+  readonly likeWords?: string
+  /** What a set of bars begins with here, where the kind of zone has usual bars of its own. */
+  readonly usual?: (kind: SteelKind) => SteelShapeData | null
 }
 
 /** The bars of a zone: read, change, add, take away, or give the same to every like zone of the edge. */
-export function SteelList({ zone, zoneName, kinds, place, likeZones }: SteelListProps) {
+export function SteelList(props: SteelListProps) {
+  const { zone, zoneName, kinds, place, likeZones, likeWords = 'live anchors', usual } = props
   const { layout, canEdit, edit } = useJobDraft()
   const [open, setOpen] = useState<string | null>(null)
   const steel = steelOfZone(layout.steel, zone)
   const local = zone.kind === 'anchor' ? place.hardware?.localSteel : null
   const isLocalShown = local && !steel.some(({ shape }) => shape.kind === local.kind)
   const add = (kind: SteelKind) => {
-    const shape = usualSteel(kind, place)
+    const shape = usual ? usual(kind) : usualSteel(kind, place)
     if (!shape) return
     const row: SteelData = { id: newId(), pourId: place.pour.id, zone, shape, source: 'by-hand', isLocked: false }
     edit({ label: `${zoneName}: add ${STEEL_NAMES[kind]}`, commands: [{ type: 'insert', table: 'steel', row }] })
@@ -60,6 +64,7 @@ export function SteelList({ zone, zoneName, kinds, place, likeZones }: SteelList
           isOpen={open === row.id}
           onOpen={() => setOpen(open === row.id ? null : row.id)}
           likeZones={likeZones}
+          likeWords={likeWords}
         />
       ))}
       {steel.length === 0 && !isLocalShown ? <Text tone="soft">No bars yet.</Text> : null}
@@ -85,8 +90,9 @@ function SteelSet(props: {
   readonly isOpen: boolean
   readonly onOpen: () => void
   readonly likeZones: readonly SteelZoneData[]
+  readonly likeWords: string
 }) {
-  const { row, zoneName, isOpen, onOpen, likeZones } = props
+  const { row, zoneName, isOpen, onOpen, likeZones, likeWords } = props
   const { layout, canEdit, edit } = useJobDraft()
   const name = STEEL_NAMES[row.shape.kind]
   const set = (key: string, value: string | number | null) => {
@@ -108,7 +114,7 @@ function SteelSet(props: {
         { type: 'insert', table: 'steel', row: { ...row, id: newId(), zone } },
       ]
     })
-    edit({ label: `Same ${name} at ${likeZones.length + 1} anchors`, commands })
+    edit({ label: `Same ${name} at ${likeZones.length + 1} ${likeWords}`, commands })
   }
   return (
     <View>
@@ -150,7 +156,7 @@ function SteelSet(props: {
             )
           })}
           {likeZones.length > 0 ? (
-            <Button label={`Give the same to the other ${likeZones.length} live anchors`} onPress={giveToAll} />
+            <Button label={`Give the same to the other ${likeZones.length} ${likeWords}`} onPress={giveToAll} />
           ) : null}
         </View>
       ) : null}

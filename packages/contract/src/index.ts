@@ -23,6 +23,7 @@ export {
   type LayoutFile,
   type LayoutInput,
   type PourData,
+  type PanData,
   type TendonData,
 } from './layout'
 export {

@@ -294,6 +294,7 @@ export type JobData = z.output<typeof jobSchema>
 export type PourData = z.output<typeof pourSchema>
 export type EdgeData = z.output<typeof edgeSchema>
 export type EdgeLineData = z.output<typeof edgeLineSchema>
+export type PanData = z.output<typeof panSchema>
 export type TendonData = z.output<typeof tendonSchema>
 export type AnchorData = z.output<typeof anchorSchema>
 
