@@ -17,11 +17,12 @@ const GREEK: Readonly<Record<string, string>> = {
   theta: 'θ',
   lambda: 'λ',
   mu: 'μ',
+  pi: 'π',
   rho: 'ρ',
   sigma: 'σ',
   phi: 'φ',
 }
-const GREEK_NAME = /^(alpha|beta|gamma|eta|theta|lambda|mu|rho|sigma|phi)(?![a-z])/
+const GREEK_NAME = /^(alpha|beta|gamma|eta|theta|lambda|mu|pi|rho|sigma|phi)(?![a-z])/
 
 /** `gammaP` is γ with a P below, `AsCounted` A with s,counted; a whole word stays a word. */
 export function symbolPart(name: string): FormulaPart {

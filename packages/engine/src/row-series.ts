@@ -39,7 +39,7 @@ function onLine(depth: number, ratio: number): number {
   return ((2 * depth) / b) * Math.atan(Math.sin(b) / (Math.exp(2 * Math.PI * depth) - Math.cos(b)))
 }
 
-const ROUNDS = 60
+const ROUNDS = 40
 const GOLDEN = (Math.sqrt(5) - 1) / 2
 
 /** By golden section: both sums rise once and fall once, and have done so within half a spacing. */
@@ -66,7 +66,7 @@ export function faceForce({
 }): readonly Step[] {
   const depth = step(
     {
-      symbol: 'xface',
+      symbol: 'xFace',
       meaning: 'Depth over which the face is in tension midway, where the sum is greatest',
       formula: 'r * s',
       unit: 'mm',
@@ -79,14 +79,14 @@ export function faceForce({
     {
       symbol: 'T',
       meaning: 'Force along the face midway between the anchors, all stressed',
-      formula: '2 * P * xface / (pi * a) * atan(sin(pi * a / s) / (exp(2 * pi * xface / s) + cos(pi * a / s)))',
+      formula: '2 * P * xFace / (pi * a) * atan(sin(pi * a / s) / (exp(2 * pi * xFace / s) + cos(pi * a / s)))',
       unit: 'N',
       clause: ROW,
     },
-    { P, xface: depth.value, pi: Math.PI, a, s },
+    { P, xFace: depth.value, pi: Math.PI, a, s },
     (v) =>
-      ((2 * v.P * v.xface) / (v.pi * v.a)) *
-      Math.atan(Math.sin((v.pi * v.a) / v.s) / (Math.exp((2 * v.pi * v.xface) / v.s) + Math.cos((v.pi * v.a) / v.s))),
+      ((2 * v.P * v.xFace) / (v.pi * v.a)) *
+      Math.atan(Math.sin((v.pi * v.a) / v.s) / (Math.exp((2 * v.pi * v.xFace) / v.s) + Math.cos((v.pi * v.a) / v.s))),
   )
   return [depth, force]
 }

@@ -58,7 +58,7 @@ export function drawIn(input: DrawInInput): DrawIn {
   if (q.value >= 1 - Math.exp(-u)) return throughout(input, q)
   const reach = step(
     {
-      symbol: 'lset',
+      symbol: 'lSet',
       meaning: 'Length over which draw-in is felt',
       formula: '(0 - log(1 - q)) * L / u',
       unit: 'mm',
@@ -71,12 +71,12 @@ export function drawIn(input: DrawInInput): DrawIn {
     {
       symbol: 'Panchor',
       meaning: 'Force at the anchor after lock-off',
-      formula: 'P0 * exp(0 - 2 * u * lset / L)',
+      formula: 'P0 * exp(0 - 2 * u * lSet / L)',
       unit: 'N',
       clause: DRAW_IN,
     },
-    { P0: input.P0, u, lset: reach.value, L },
-    (v) => v.P0 * Math.exp(0 - (2 * v.u * v.lset) / v.L),
+    { P0: input.P0, u, lSet: reach.value, L },
+    (v) => v.P0 * Math.exp(0 - (2 * v.u * v.lSet) / v.L),
   )
   return { reach: reach.value, isWhole: false, locked: locked.value, steps: [q, reach, locked] }
 }
