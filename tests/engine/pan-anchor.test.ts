@@ -159,6 +159,13 @@ describe('Spacing in pans', () => {
 })
 
 describe('Bad input', () => {
+  test('a chainage or set-back given to an anchor in a pan moves it nowhere', () => {
+    const [given, plain] = [{ chainage: 700, setBack: 110 }, {}].map((change) =>
+      checksAt(inPans([{}, { x: 9600 + 1750 }], { change }), 'PN01-anchor'),
+    )
+    expect(given).toEqual(plain)
+  })
+
   test.each([
     { what: 'outside the pour', place: { x: -500 }, change: {}, field: 'pan.x' },
     { what: 'below the floor of the recess', place: { depth: 100 }, change: { height: 120 }, field: 'height' },

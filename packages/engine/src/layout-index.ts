@@ -70,7 +70,8 @@ export function layoutIndex(layout: Layout): LayoutIndex {
     }),
   ])
   const framesById = new Map(frames)
-  const anchorsOfEdge = grouped([...layout.anchors].sort(alongEdge), (anchor) => anchor.edgeId)
+  const anchors = layout.anchors.map(atPanFace)
+  const anchorsOfEdge = grouped([...anchors].sort(alongEdge), (anchor) => anchor.edgeId)
   return {
     layout,
     concrete: {},
@@ -82,7 +83,7 @@ export function layoutIndex(layout: Layout): LayoutIndex {
     joints: byId(layout.joints),
     pans: byId(layout.pans),
     tendons: byId(layout.tendons),
-    anchors: byId(layout.anchors),
+    anchors: byId(anchors),
     hardware: byId(layout.hardware),
     jacks: byId(layout.jacks),
     strandTypes: byId(layout.strandTypes),
@@ -93,8 +94,8 @@ export function layoutIndex(layout: Layout): LayoutIndex {
     tendonsOfPour: grouped(layout.tendons, (tendon) => tendon.pourId),
     anchorsOfEdge,
     rowOfEdge: rows(layout.edges, framesById, anchorsOfEdge),
-    anchorsOfPan: grouped(layout.anchors, (anchor) => anchor.panId),
-    anchorsOfTendon: grouped(layout.anchors, (anchor) => anchor.tendonId),
+    anchorsOfPan: grouped(anchors, (anchor) => anchor.panId),
+    anchorsOfTendon: grouped(anchors, (anchor) => anchor.tendonId),
     steelOfZone: grouped(layout.steel, (steel) => steelKey(steel.zone)),
   }
 }
@@ -136,6 +137,12 @@ export function found<T>(map: ById<T>, id: string, what: string): T {
   const record = map.get(id)
   if (record === undefined) throw new Error(`No ${what} has the id "${id}".`)
   return record
+}
+
+/** An anchor in a pan stands in the middle of the pan's bearing face, whatever its own chainage and set-back say. */
+function atPanFace(anchor: Anchor): Anchor {
+  const isThere = anchor.panId === null || (anchor.chainage === 0 && anchor.setBack === 0)
+  return isThere ? anchor : { ...anchor, chainage: 0, setBack: 0 }
 }
 
 /** Edges on the two sides of one line, as at a joint, face each other: their anchors stand in two rows. */
