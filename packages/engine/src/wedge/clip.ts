@@ -17,6 +17,20 @@ export function clippedTo(a: Point, b: Point, outline: readonly Point[]): readon
   })
 }
 
+/** Whether a place lies within an outline and not on its rim; quicker than `isInside`, for it measures no distances. */
+export function isWithin(x: number, y: number, outline: readonly Point[]): boolean {
+  let within = false
+  let before = outline.at(-1)
+  for (const corner of outline) {
+    if (before && before.y > y !== corner.y > y) {
+      const crossing = before.x + ((y - before.y) * (corner.x - before.x)) / (corner.y - before.y)
+      if (x < crossing) within = !within
+    }
+    before = corner
+  }
+  return within
+}
+
 /** Share of a run from `a` at which it crosses the segment from `c` to `d`. */
 function crossing({ a, run }: { readonly a: Point; readonly run: Point }, c: Point, d: Point): number[] {
   const side = subtract(d, c)

@@ -33,7 +33,7 @@ export function gapAcross(index: LayoutIndex, gap: Gap): JoinedGap | null {
   const [own, others] = [usedSpreads(index, edge.id), usedSpreads(index, other.id)]
   const bulbs = measuredWedge(joinedSpreads(own.fromBulbs, others.fromBulbs), range)
   const bond = own.fromBond && others.fromBond && measuredWedge(joinedSpreads(own.fromBond, others.fromBond), range)
-  const deeper = bond && bond.apex.depth > bulbs.apex.depth ? bond : bulbs
+  const deeper = bond ?? bulbs
   return {
     otherMark: other.mark,
     otherPour: found(index.pours, other.pourId, 'pour').mark,

@@ -84,8 +84,7 @@ function stripLengths(index: LayoutIndex, first: Edge, second: Edge): StripLengt
     const fromBulbs = widest(sides, range, ({ fromBulbs: bulbs }) => bulbs)
     const isBonded = sides.some(({ fromBond }) => fromBond !== null)
     const fromBond = isBonded ? widest(sides, range, (pair) => pair.fromBond ?? pair.fromBulbs) : null
-    const governing = fromBond && fromBond.width > fromBulbs.width ? fromBond : fromBulbs
-    return [{ ...range, gap, fromBulbs, fromBond, governing }]
+    return [{ ...range, gap, fromBulbs, fromBond, governing: fromBond ?? fromBulbs }]
   })
 }
 

@@ -1,6 +1,7 @@
 /** The line behind which an edge has precompression, over a gap or any other length of it. */
 
-import { isInside, ROUNDING } from '../geometry'
+import { ROUNDING } from '../geometry'
+import { isWithin } from './clip'
 import { boundsWithOther, type DepthBound, type EdgeSpreads, type Limit, type NearEnd } from './edge-spreads'
 import { cutDown, depthAt, flat, type Piece } from './envelope'
 
@@ -80,10 +81,11 @@ function firstAfter(ends: readonly NearEnd[], chainage: number): number {
   return low
 }
 
+/** On the rim of the other end's spread it says no, and the parts inside are then looked for one by one. */
 function isReachedFromBoth({ source: { end }, from, to, depthFrom, depthTo }: LinePiece): boolean {
   if (!end) return false
   const { other } = end
-  return other === null || (isInside({ x: from, y: depthFrom }, other) && isInside({ x: to, y: depthTo }, other))
+  return other === null || (isWithin(from, depthFrom, other) && isWithin(to, depthTo, other))
 }
 
 function partsOf(line: readonly LinePiece[], { from, to }: Range): LinePiece[] {

@@ -103,7 +103,8 @@ function wedgeBy(
   const { gap, spread, pair } = of
   const bulbs = measuredWedge(pair.fromBulbs, gap)
   const bond = pair.fromBond && measuredWedge(pair.fromBond, gap)
-  const deeper = bond && bond.apex.depth > bulbs.apex.depth ? bond : bulbs
+  // The spread that begins later lies within the one from the bulbs: its wedge is never the smaller one.
+  const deeper = bond ?? bulbs
   return {
     depth: {
       title: spread.title,
