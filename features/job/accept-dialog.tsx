@@ -11,8 +11,15 @@ import { useTRPC } from '@/lib/trpc'
 import { useJobDraft } from '../editing/job-draft'
 import { useReadingsChanged } from './reading-section'
 
+interface AcceptDialogProps {
+  readonly reading: Reading
+  /** The answer to the same question that it takes the place of; null where there is none. */
+  readonly replaces: Reading | null
+  readonly onClose: () => void
+}
+
 /** Asks an engineer for the reason, then records the reading in their name. */
-export function AcceptDialog({ reading, onClose }: { reading: Reading; onClose: () => void }) {
+export function AcceptDialog({ reading, replaces, onClose }: AcceptDialogProps) {
   const { jobId, flush } = useJobDraft()
   const trpc = useTRPC()
   const [reason, setReason] = useState('')
@@ -49,6 +56,7 @@ export function AcceptDialog({ reading, onClose }: { reading: Reading; onClose: 
       <Text kind="strong">{reading.title}</Text>
       <Text>{reading.text}</Text>
       <Text tone="soft">{`Holds for: ${reading.range}`}</Text>
+      {replaces ? <Text>{`It takes the place of: ${replaces.title}.`}</Text> : null}
       <TextField
         label="Reason"
         hint="Why it holds for this job. It stands in every calculation that rests on the reading."

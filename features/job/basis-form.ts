@@ -1,9 +1,10 @@
 import { jobBasisSchema, type JobData } from '@wedgeline/contract'
-import type { Factor } from '@wedgeline/engine'
+import type { BasisSource, Factor } from '@wedgeline/engine'
 import { BASIS_SOURCES } from '@wedgeline/engine/bases'
 
 /** What an engineer types on the basis page; null while a field is empty. */
 export interface BasisForm {
+  readonly basis: JobData['basis']
   readonly settings: Readonly<Record<keyof JobData['settings'], string | number | null | readonly number[]>>
   readonly factors: Readonly<Record<string, TypedFactor>>
 }
@@ -13,15 +14,54 @@ export interface TypedFactor {
   readonly reason: string
 }
 
-export const factorsOf = (basis: string): readonly Factor[] =>
-  BASIS_SOURCES.find(({ id }) => id === basis)?.factors ?? []
+/** @throws for a basis that is not in the list; the contract lets none through. */
+export function sourceOf(basis: string): BasisSource {
+  const source = BASIS_SOURCES.find(({ id }) => id === basis)
+  if (!source) throw new Error(`There is no basis "${basis}".`)
+  return source
+}
 
 export function basisFormOf({ basis, factors, settings }: JobData): BasisForm {
-  const typed = factorsOf(basis).map(({ name, recommended }): readonly [string, TypedFactor] => {
+  return { basis, settings, factors: typedFactors(basis, factors) }
+}
+
+function typedFactors(basis: string, factors: JobData['factors']): BasisForm['factors'] {
+  const typed = sourceOf(basis).factors.map(({ name, recommended }): readonly [string, TypedFactor] => {
     const set = factors.find((factor) => factor.name === name)
     return [name, { value: set?.value ?? recommended, reason: set?.reason ?? '' }]
   })
-  return { settings, factors: Object.fromEntries(typed) }
+  return Object.fromEntries(typed)
+}
+
+/** The form with another basis: its factors are those recommended, or those of the job where it has that basis. */
+export function withBasis(form: BasisForm, basis: JobData['basis'], job: JobData): BasisForm {
+  return { ...form, basis, factors: typedFactors(basis, basis === job.basis ? job.factors : []) }
+}
+
+/** What a job loses with another basis, as a sentence; null where the basis stays. */
+export function lossOf(job: JobData, basis: string): string | null {
+  if (basis === job.basis) return null
+  const before = sourceOf(job.basis)
+  const titles = (names: readonly string[], of: readonly { readonly key: string; readonly title: string }[]) =>
+    names.map((name) => of.find(({ key }) => key === name)?.title ?? name).join('; ')
+  const readings = titles(
+    job.readings.map(({ readingId }) => readingId),
+    before.readings.map(({ id, title }) => ({ key: id, title })),
+  )
+  const factors = titles(
+    job.factors.map(({ name }) => name),
+    before.factors.map(({ name, title }) => ({ key: name, title })),
+  )
+  return [
+    `Once kept, every pour is checked by ${sourceOf(basis).title} alone.`,
+    readings === ''
+      ? `No reading of ${before.title} is accepted.`
+      : `Accepted readings of ${before.title} count no longer and are withdrawn: ${readings}.`,
+    factors === '' ? '' : `Factors set for ${before.title} are dropped: ${factors}.`,
+    'The settings below stay as they are: look at friction and edge wedges.',
+  ]
+    .filter((sentence) => sentence !== '')
+    .join(' ')
 }
 
 export interface ReadBasis {
@@ -32,8 +72,9 @@ export interface ReadBasis {
 }
 
 /** Reads the form by the schema that the server reads as well. A factor as recommended is no setting of the job. */
-export function readBasisForm(form: BasisForm, { id: jobId, basis }: Pick<JobData, 'id' | 'basis'>): ReadBasis {
-  const known = factorsOf(basis)
+export function readBasisForm(form: BasisForm, { id: jobId }: Pick<JobData, 'id'>): ReadBasis {
+  const { basis } = form
+  const known = sourceOf(basis).factors
   const set = known.flatMap((factor) => {
     const typed = form.factors[factor.name]
     return typed && typed.value !== factor.recommended ? [{ factor, typed }] : []

@@ -4,18 +4,19 @@ import { StyleSheet, View } from 'react-native'
 import { space } from '@/components/theme'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
-import { NumberField } from '@/components/ui/number-field'
 import { Section } from '@/components/ui/screen'
+import { Select } from '@/components/ui/select'
 import { Text } from '@/components/ui/text'
-import { TextField } from '@/components/ui/text-field'
 import { useToast } from '@/components/ui/toast'
 import { failureOf } from '@/lib/failure'
 import { useTRPC } from '@/lib/trpc'
 import { useJobDraft } from '../editing/job-draft'
-import { basisFormOf, factorsOf, readBasisForm, type BasisForm } from './basis-form'
+import { BASIS_OPTIONS } from '../jobs/bases'
+import { basisFormOf, lossOf, readBasisForm, sourceOf, withBasis } from './basis-form'
 import { FactorEntry } from './factor-entry'
 import { JobFrame } from './job-frame'
-import { SETTING_FIELDS, type SettingField } from './setting-fields'
+import { SettingEntry } from './setting-entry'
+import { settingGroups } from './setting-fields'
 
 /** The code of practice with its factors, and what the pours of the job have in common. */
 export function JobBasisScreen({ jobId }: { jobId: string }) {
@@ -25,6 +26,7 @@ export function JobBasisScreen({ jobId }: { jobId: string }) {
   const canSet = roles.includes('engineer')
   const { change, errors } = readBasisForm(form, { ...layout.job, id: jobId })
   const save = useSaveBasis()
+  const loss = lossOf(layout.job, form.basis)
   const isChanged = JSON.stringify(form) !== JSON.stringify(basisFormOf(layout.job))
   const send = () => {
     setTried(true)
@@ -52,11 +54,21 @@ export function JobBasisScreen({ jobId }: { jobId: string }) {
       ) : null}
       {canSet ? null : <Text tone="soft">An engineer of the job sets these.</Text>}
       <Section title="Design basis">
-        <Text>EN 1992-1-1:2004. Every result names its clause, and how sure the clause is.</Text>
+        <View style={styles.cell}>
+          <Select
+            label="Code of practice"
+            hint="Every result names its clause, and how sure the clause is."
+            options={BASIS_OPTIONS}
+            value={form.basis}
+            onChange={(basis) => setForm(withBasis(form, basis, layout.job))}
+            disabled={!canSet}
+          />
+        </View>
+        {loss === null ? null : <Banner tone="near" isUrgent words={loss} />}
       </Section>
       <Section title="Factors">
         <View style={styles.grid}>
-          {factorsOf(layout.job.basis).map((factor) => (
+          {sourceOf(form.basis).factors.map((factor) => (
             <FactorEntry
               key={factor.name}
               factor={factor}
@@ -69,13 +81,20 @@ export function JobBasisScreen({ jobId }: { jobId: string }) {
         </View>
       </Section>
       <Section title="Settings of the job">
-        <View style={styles.grid}>
-          {SETTING_FIELDS.map((field) => (
-            <View key={field.name} style={styles.cell}>
-              <SettingEntry field={field} form={form} errors={shown} canSet={canSet} onChange={setForm} />
+        {settingGroups(form.basis).map(({ title, fields }) => (
+          <View key={title} style={styles.group}>
+            <Text kind="strong" level={3}>
+              {title}
+            </Text>
+            <View style={styles.grid}>
+              {fields.map((field) => (
+                <View key={field.name} style={styles.cell}>
+                  <SettingEntry field={field} form={form} errors={shown} canSet={canSet} onChange={setForm} />
+                </View>
+              ))}
             </View>
-          ))}
-        </View>
+          </View>
+        ))}
       </Section>
     </JobFrame>
   )
@@ -99,40 +118,8 @@ function useSaveBasis() {
   )
 }
 
-interface SettingEntryProps {
-  readonly field: SettingField
-  readonly form: BasisForm
-  readonly errors: Readonly<Record<string, string>>
-  readonly canSet: boolean
-  readonly onChange: (form: BasisForm) => void
-}
-
-function SettingEntry({ field, form, errors, canSet, onChange }: SettingEntryProps) {
-  const { name, kind, ...words } = field
-  const value = form.settings[name]
-  const set = (next: string | number | null) => onChange({ ...form, settings: { ...form.settings, [name]: next } })
-  const error = errors[`settings.${name}`]
-  return kind === 'text' ? (
-    <TextField
-      {...words}
-      value={typeof value === 'string' ? value : ''}
-      onChangeText={set}
-      error={error}
-      disabled={!canSet}
-    />
-  ) : (
-    <NumberField
-      {...words}
-      value={typeof value === 'number' ? value : null}
-      onCommit={set}
-      onType={set}
-      error={error}
-      disabled={!canSet}
-    />
-  )
-}
-
 const styles = StyleSheet.create({
+  group: { paddingTop: space.m },
   grid: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.xl, rowGap: space.l, paddingTop: space.s },
   cell: { width: 320, maxWidth: '100%' },
 })

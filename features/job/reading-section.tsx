@@ -1,5 +1,5 @@
 import type { Reading } from '@wedgeline/engine'
-import { BASIS_SOURCES } from '@wedgeline/engine/bases'
+import { BASIS_SOURCES, CRACK_CHOICE } from '@wedgeline/engine/bases'
 import { useMutation, useQueryClient } from '@tanstack/react-query'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
@@ -25,7 +25,10 @@ export function ReadingSection() {
   const { basis, readings } = layout.job
   const offered = BASIS_SOURCES.find(({ id }) => id === basis)?.readings ?? []
   const acceptedOf = ({ id }: Reading) => readings.find(({ readingId }) => readingId === id) ?? null
-  const ordered = [...offered].sort((a, b) => rank(a, acceptedOf(a)) - rank(b, acceptedOf(b)))
+  const alone = offered.filter(({ choice }) => choice === undefined)
+  const ordered = [...alone].sort((a, b) => rank(a, acceptedOf(a)) - rank(b, acceptedOf(b)))
+  const answers = offered.filter(({ choice }) => choice === CRACK_CHOICE)
+  const answer = answers.find(acceptedOf) ?? null
   return (
     <Section title="Readings">
       <Text tone="soft" style={styles.text}>
@@ -40,8 +43,44 @@ export function ReadingSection() {
           onAccept={() => setAsked(reading)}
         />
       ))}
-      {asked ? <AcceptDialog reading={asked} onClose={() => setAsked(null)} /> : null}
+      <CrackQuestion isAnswered={answer !== null} />
+      {answers.map((reading) => (
+        <ReadingEntry
+          key={reading.id}
+          reading={reading}
+          accepted={acceptedOf(reading)}
+          isAnswered={answer !== null}
+          onAccept={() => setAsked(reading)}
+        />
+      ))}
+      {asked ? (
+        <AcceptDialog
+          reading={asked}
+          replaces={asked.choice === CRACK_CHOICE ? answer : null}
+          onClose={() => setAsked(null)}
+        />
+      ) : null}
     </Section>
+  )
+}
+
+/** How much crack control edge wedges need: one answer for the job, given with its exposure and restraint in view. */
+function CrackQuestion({ isAnswered }: { isAnswered: boolean }) {
+  const { exposure, restraint } = useJobDraft().layout.job.settings
+  return (
+    <View style={styles.question}>
+      <Text kind="strong" level={3}>
+        Crack steel in edge wedges: one of these
+      </Text>
+      <Text style={styles.text}>
+        {isAnswered
+          ? 'Accepting another takes the place of the one accepted.'
+          : 'Until one is accepted, edge wedges need judgement and show the steel of each.'}
+      </Text>
+      <Text style={styles.text}>
+        {`Exposure: ${exposure === '' ? 'not given' : exposure}. Restraint: ${restraint === '' ? 'not given' : restraint}. Both stand on the page Basis and settings.`}
+      </Text>
+    </View>
   )
 }
 
@@ -51,22 +90,27 @@ const rank = ({ proposed }: Reading, accepted: Accepted | null): number => (acce
 interface ReadingEntryProps {
   readonly reading: Reading
   readonly accepted: Accepted | null
+  /** The question that it is an answer to has another one. */
+  readonly isAnswered?: boolean
   readonly onAccept: () => void
 }
 
-function ReadingEntry({ reading, accepted, onAccept }: ReadingEntryProps) {
+function ReadingEntry({ reading, accepted, isAnswered = false, onAccept }: ReadingEntryProps) {
   const { roles, layout } = useJobDraft()
+  const isWaiting = reading.proposed && !isAnswered
   const isEngineer = roles.includes('engineer')
   return (
     <View style={styles.reading}>
       <View style={styles.head}>
         <View style={styles.title}>
-          <Icon name={accepted ? 'check' : reading.proposed ? 'needs-judgement' : 'info'} />
+          <Icon name={accepted ? 'check' : isWaiting ? 'needs-judgement' : 'info'} />
           <Text kind="strong" level={3} style={styles.grow}>
             {reading.title}
           </Text>
         </View>
-        {isEngineer && !accepted ? <Button label="Accept …" onPress={onAccept} /> : null}
+        {isEngineer && !accepted ? (
+          <Button label={isAnswered ? 'Accept instead …' : 'Accept …'} onPress={onAccept} />
+        ) : null}
         {isEngineer && accepted ? <WithdrawButton reading={reading} /> : null}
       </View>
       <Text style={styles.text}>{reading.text}</Text>
@@ -76,7 +120,7 @@ function ReadingEntry({ reading, accepted, onAccept }: ReadingEntryProps) {
       <Text style={styles.text}>
         {accepted
           ? `Accepted by ${accepted.acceptedBy}, ${dateTimeText(accepted.acceptedAtMs, layout.job.timeZone)}: ${accepted.reason}`
-          : reading.proposed
+          : isWaiting
             ? `Proposed${isEngineer ? '.' : '; an engineer of the job accepts it.'}`
             : 'Can be chosen; not in use.'}
       </Text>
@@ -121,6 +165,7 @@ export function useReadingsChanged(): () => Promise<void> {
 
 const styles = StyleSheet.create({
   text: { maxWidth: 820 },
+  question: { gap: space.xs, paddingTop: space.m },
   reading: { gap: space.xs, paddingVertical: space.s, borderBottomWidth: 1, borderColor: colour.rule },
   head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', justifyContent: 'space-between', gap: space.s },
   title: { flexDirection: 'row', alignItems: 'center', gap: space.s, flexShrink: 1 },

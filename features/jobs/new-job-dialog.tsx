@@ -7,11 +7,12 @@ import { space } from '@/components/theme'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
 import { Dialog } from '@/components/ui/dialog'
-import { Text } from '@/components/ui/text'
+import { Select } from '@/components/ui/select'
 import { TextField } from '@/components/ui/text-field'
 import { failureOf } from '@/lib/failure'
 import type { Me } from '@/lib/session'
 import { useTRPC } from '@/lib/trpc'
+import { BASIS_OPTIONS } from './bases'
 import { CompanyChoice } from './company-choice'
 
 export interface JobDialogProps {
@@ -29,6 +30,7 @@ export function NewJobDialog({ companies, onClose }: JobDialogProps) {
   const [companyId, setCompanyId] = useState(companies[0]?.id ?? '')
   const [number, setNumber] = useState('')
   const [title, setTitle] = useState('')
+  const [basis, setBasis] = useState(BASIS_OPTIONS[0].value)
   const [isTried, setTried] = useState(false)
   const create = useMutation(
     trpc.job.create.mutationOptions({
@@ -43,7 +45,7 @@ export function NewJobDialog({ companies, onClose }: JobDialogProps) {
   const send = () => {
     setTried(true)
     if (number.trim() === '' || title.trim() === '' || create.isPending) return
-    create.mutate({ id, companyId, number, title, timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone })
+    create.mutate({ id, companyId, number, title, basis, timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone })
   }
   const needed = (text: string, words: string) => (isTried && text.trim() === '' ? words : undefined)
   return (
@@ -84,13 +86,14 @@ export function NewJobDialog({ companies, onClose }: JobDialogProps) {
           maxLength={120}
           required
         />
-        <View>
-          <Text kind="label">Design basis</Text>
-          <Text>EN 1992-1-1 with its recommended factors</Text>
-          <Text kind="small" tone="soft">
-            An engineer sets the factors of a country on the job’s basis page.
-          </Text>
-        </View>
+        <Select
+          label="Design basis"
+          hint="With its recommended factors; an engineer sets those of a country on the job’s basis page."
+          options={BASIS_OPTIONS}
+          value={basis}
+          onChange={setBasis}
+          required
+        />
       </View>
     </Dialog>
   )

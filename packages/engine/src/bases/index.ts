@@ -3,6 +3,8 @@ import { AS_3600 } from './as-3600'
 import type { Basis, BasisSource } from './basis'
 import { EN_1992 } from './en-1992'
 
+export { CRACK_CHOICE } from './basis'
+
 /** The list of bases; a new one is one file and one line here. */
 export const BASIS_SOURCES: readonly BasisSource[] = [EN_1992, AS_3600]
 
