@@ -2,8 +2,8 @@
 
 import { ROUNDING } from '../geometry'
 import { coversOf, type Cover } from '../fit/cover'
-import { memberKeyOf, memberOf } from '../fit/members'
-import { pairsOf, type Pair } from '../fit/pairs'
+import { barsOfZone, memberKeyOf, memberOf, type Member } from '../fit/members'
+import { itemsBeside, pairsAmong, pairsInSets, pairsOf, type Pair } from '../fit/pairs'
 import { found, type LayoutIndex } from '../layout-index'
 import { perIndex } from '../memo'
 import type { Check, Compared, Zone } from '../result'
@@ -27,12 +27,40 @@ export function fitChecks(context: CheckContext, zone: Zone): readonly Check[] {
   const key = memberKeyOf(zone)
   if (key === null) return []
   const { index } = context
-  const found = fitOfMember(index, key).get(zone.id)
+  const fit = fitOfMember(index, key).get(zone.id)
   const sets = setsOfMember(index, key).get(zone.id) ?? []
+  return checksFrom(index, zone, { fit, sets, mend: fit?.cover ? heightMend(index, fit.cover) : null })
+}
+
+/**
+ * The same for bars that are tried in a zone, without what would mend it: everything else is taken from `settled`, where
+ * it is worked out once.
+ *
+ * @param index differs from `settled` in the zone's own steel alone.
+ */
+export function fitChecksOfTrial(index: LayoutIndex, zone: Zone, settled: LayoutIndex): readonly Check[] {
+  const key = memberKeyOf(zone)
+  if (key === null) return []
+  const { bars: all, bodies, ...place } = memberOf(settled, key)
+  const bars = barsOfZone(index, key, zone.id)
+  const rest = all.filter(({ bar }) => bar.zoneId !== zone.id)
+  const pairs = pairsAmong(index, bars, [...rest, ...bodies, ...itemsBeside(settled, key)])
+  const member = { ...place, bars, bodies }
+  const fit = fitsOf(index, member, [...pairs, ...pairsInSets(index, bars)]).get(zone.id)
+  return checksFrom(index, zone, { fit, sets: setsOf(index, member).get(zone.id) ?? [], mend: null })
+}
+
+interface Found {
+  readonly fit: ZoneFit | undefined
+  readonly sets: readonly SetOfBars[]
+  readonly mend: Compared['mend']
+}
+
+function checksFrom(index: LayoutIndex, zone: Zone, { fit, sets, mend }: Found): Check[] {
   return [
-    ...(found?.cover ? [coverCheck(index, zone, found.cover)] : []),
-    ...(found?.gap ? [gapCheck(zone, found.gap)] : []),
-    ...(found?.clash ? [clashCheck(zone, found.clash)] : []),
+    ...(fit?.cover ? [coverCheck(zone, fit.cover, mend)] : []),
+    ...(fit?.gap ? [gapCheck(zone, fit.gap)] : []),
+    ...(fit?.clash ? [clashCheck(zone, fit.clash)] : []),
     ...sets.flatMap((set) => [
       ...firstTurnCheck(zone, set),
       ...depthCheck(index, zone, set),
@@ -55,14 +83,17 @@ interface ZoneFit {
 }
 
 /** Worked out once for all zones of an edge, a pan or a joint. */
-const fitOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<string, ZoneFit> => {
-  const member = memberOf(index, key)
+const fitOfMember = perIndex((index: LayoutIndex, key: string) =>
+  fitsOf(index, memberOf(index, key), pairsOf(index, key)),
+)
+
+function fitsOf(index: LayoutIndex, member: Member, pairs: readonly Pair[]): ReadonlyMap<string, ZoneFit> {
   const fits = new Map<string, ZoneFit>()
   for (const bar of member.bars) {
     const fit = fitOf(fits, bar.bar.zoneId)
     for (const cover of coversOf(index, member, bar)) fit.cover = worse(fit.cover, cover, cover.measured - cover.need)
   }
-  for (const pair of pairsOf(index, key)) {
+  for (const pair of pairs) {
     const { bar, other, clear, need } = pair
     const otherZone = other.kind === 'bar' ? other.bar.zoneId : other.zoneId
     const kind = need === null || clear < -TOUCHING ? 'clash' : 'gap'
@@ -74,7 +105,7 @@ const fitOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<stri
     itsFit[kind] = worse(itsFit[kind], pair, spare)
   }
   return fits
-})
+}
 
 function fitOf(fits: Map<string, ZoneFit>, zoneId: string): ZoneFit {
   const known = fits.get(zoneId)
@@ -94,8 +125,9 @@ function worse<T>(known: Worst<T> | null, worst: T, spare: number): Worst<T> {
 }
 
 /** The sets of bars of each zone, each by one of its bars. */
-const setsOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<string, readonly SetOfBars[]> => {
-  const member = memberOf(index, key)
+const setsOfMember = perIndex((index: LayoutIndex, key: string) => setsOf(index, memberOf(index, key)))
+
+function setsOf(index: LayoutIndex, member: Member): ReadonlyMap<string, readonly SetOfBars[]> {
   const zones = new Map<string, SetOfBars[]>()
   const seen = new Set<string>()
   for (const bar of member.bars) {
@@ -111,7 +143,7 @@ const setsOfMember = perIndex((index: LayoutIndex, key: string): ReadonlyMap<str
     zones.set(zoneId, sets)
   }
   return zones
-})
+}
 
 // As results --------------------------------------------------------------------------------------------------------
 
@@ -128,7 +160,7 @@ const others = (short: number, what: string): string[] =>
   short > 1 ? [`${short - 1} more ${short === 2 ? `${what} is` : `${what}s are`} short; this is the worst.`] : []
 
 /** Cover that is left is over where it is short; none left is a bar outside the concrete. */
-function coverCheck(index: LayoutIndex, zone: Zone, { worst, spare, short }: Worst<Cover>): Compared {
+function coverCheck(zone: Zone, { worst, spare, short }: Worst<Cover>, mend: Compared['mend']): Compared {
   const { bar, face, measured, need } = worst
   const what = `${bar.name} to ${face}`
   const isShort = spare < -ROUNDING
@@ -140,13 +172,15 @@ function coverCheck(index: LayoutIndex, zone: Zone, { worst, spare, short }: Wor
     demand: measured,
     limit: need,
     status: isShort ? (measured <= ROUNDING ? 'stop' : 'over') : 'within',
-    mend: isShort ? heightMend(index, worst) : null,
+    mend,
   })
 }
 
 /** An anchor's local steel moves up or down with it, where the section leaves room for that. */
-function heightMend(index: LayoutIndex, { bar, face, measured, need }: Cover): Compared['mend'] {
+function heightMend(index: LayoutIndex, { worst, spare }: Worst<Cover>): Compared['mend'] {
+  const { bar, face, measured, need } = worst
   const { anchorId, layer } = bar.bar
+  if (spare >= -ROUNDING) return null
   if (anchorId === null || layer !== null || (face !== 'top' && face !== 'soffit')) return null
   const { height } = found(index.anchors, anchorId, 'anchor')
   const value = face === 'top' ? height - (need - measured) : height + (need - measured)

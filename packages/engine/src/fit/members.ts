@@ -3,7 +3,7 @@
 import type { EdgeFrame } from '../frame'
 import { found, type LayoutIndex } from '../layout-index'
 import { perIndex } from '../memo'
-import type { SteelKind } from '../model'
+import type { Edge, SteelKind } from '../model'
 import { placedBars } from '../placed'
 import { barsOfJoint, edgeOfJoint } from '../placed/across-joint'
 import type { PlacedBar } from '../placed/bar'
@@ -54,60 +54,79 @@ export function memberKeyOf(zone: Zone): string | null {
 
 /** @throws where the key names nothing in the layout. */
 export const memberOf = perIndex((index: LayoutIndex, key: string): Member => {
-  const [kind, id] = [key.slice(0, key.indexOf(':')), key.slice(key.indexOf(':') + 1)]
-  if (kind === 'pan') {
-    const pan = found(index.pans, id, 'pan')
-    const place = { pourId: pan.pourId, frame: panFrame(pan), mark: pan.mark }
-    return member(index, key, {
-      ...place,
-      edgeFrame: null,
-      bars: barsOfPan(index, id),
-      bodies: bodiesOfPan(index, pan),
-    })
+  const { frame, mark, ...place } = placeOfMember(index, key)
+  return {
+    ...place,
+    bars: barsPlaced(index, key).map((bar) => asFitBar(index, bar, { frame, mark, pourId: place.pourId })),
+    bodies: bodiesOfMember(index, key),
   }
-  if (kind === 'joint') {
-    const joint = found(index.joints, id, 'joint')
-    const edge = edgeOfJoint(index, joint)
-    if (!edge) throw new Error(`No edge lies on the line of joint "${id}".`)
-    const frame = found(index.frames, edge.id, 'edge')
-    const mark = `joint ${found(index.edgeLines, joint.edgeLineId, 'edge line').mark}`
-    const place = { pourId: edge.pourId, frame, edgeFrame: frame, mark }
-    return member(index, key, { ...place, bars: barsOfJoint(index, id), bodies: [] })
-  }
-  const edge = found(index.edges, id, 'edge')
-  const frame = found(index.frames, id, 'edge')
-  const place = { pourId: edge.pourId, frame, edgeFrame: frame, mark: edge.mark }
-  return member(index, key, { ...place, bars: placedBars(index, id), bodies: bodiesOfEdge(index, edge) })
 })
 
-interface Placed {
-  readonly pourId: string
-  readonly frame: PlanFrame
-  readonly edgeFrame: EdgeFrame | null
-  readonly mark: string
-  readonly bars: readonly PlacedBar[]
-  readonly bodies: readonly FitBody[]
+/** The bars of one zone alone, as `memberOf` has them among all others. */
+export function barsOfZone(index: LayoutIndex, key: string, zoneId: string): FitBar[] {
+  const place = placeOfMember(index, key)
+  const anchorId = zoneId.startsWith('anchor:') ? zoneId.slice('anchor:'.length) : null
+  const anchorsOfEdge =
+    anchorId === null
+      ? index.anchorsOfEdge
+      : new Map([...index.anchorsOfEdge].map(([id, all]) => [id, all.filter((anchor) => anchor.id === anchorId)]))
+  const alone = { ...index, anchorsOfEdge, steelOfZone: new Map([[zoneId, index.steelOfZone.get(zoneId) ?? []]]) }
+  return barsPlaced(alone, key).flatMap((bar) => (bar.zoneId === zoneId ? [asFitBar(index, bar, place)] : []))
 }
 
-function member(index: LayoutIndex, key: string, { pourId, frame, edgeFrame, mark, bars, bodies }: Placed): Member {
-  const standard = barStandardById(index.layout.job.settings.barStandard)
-  return {
-    key,
-    pourId,
-    levelId: found(index.pours, pourId, 'pour').levelId,
-    edgeFrame,
-    bodies,
-    bars: bars.map((bar) =>
-      fitBar({
-        bar,
-        frame,
-        pourId,
-        setId: bar.steelId ?? `hardware:${bar.anchorId}:${bar.kind}`,
-        name: `${WORDS[bar.kind]} of ${placeOf(index, bar, mark)}`,
-        bendRadius: (standard && sizeOf(standard, bar.diameter)?.bendRadius) ?? USUAL_BEND * bar.diameter,
-      }),
-    ),
+interface PlaceOfMember extends Omit<Member, 'bars' | 'bodies'> {
+  readonly frame: PlanFrame
+  readonly mark: string
+}
+
+const idOf = (key: string): string => key.slice(key.indexOf(':') + 1)
+
+function placeOfMember(index: LayoutIndex, key: string): PlaceOfMember {
+  const levelOf = (pourId: string) => found(index.pours, pourId, 'pour').levelId
+  if (key.startsWith('pan:')) {
+    const pan = found(index.pans, idOf(key), 'pan')
+    const { pourId, mark } = pan
+    return { key, pourId, levelId: levelOf(pourId), edgeFrame: null, frame: panFrame(pan), mark }
   }
+  const edge = edgeOfMember(index, key)
+  const frame = found(index.frames, edge.id, 'edge')
+  const mark = key.startsWith('joint:')
+    ? `joint ${found(index.edgeLines, edge.edgeLineId, 'edge line').mark}`
+    : edge.mark
+  return { key, pourId: edge.pourId, levelId: levelOf(edge.pourId), edgeFrame: frame, frame, mark }
+}
+
+function edgeOfMember(index: LayoutIndex, key: string): Edge {
+  if (!key.startsWith('joint:')) return found(index.edges, idOf(key), 'edge')
+  const edge = edgeOfJoint(index, found(index.joints, idOf(key), 'joint'))
+  if (!edge) throw new Error(`No edge lies on the line of joint "${idOf(key)}".`)
+  return edge
+}
+
+function barsPlaced(index: LayoutIndex, key: string): readonly PlacedBar[] {
+  if (key.startsWith('pan:')) return barsOfPan(index, idOf(key))
+  return key.startsWith('joint:') ? barsOfJoint(index, idOf(key)) : placedBars(index, idOf(key))
+}
+
+function bodiesOfMember(index: LayoutIndex, key: string): readonly FitBody[] {
+  if (key.startsWith('pan:')) return bodiesOfPan(index, found(index.pans, idOf(key), 'pan'))
+  return key.startsWith('joint:') ? [] : bodiesOfEdge(index, found(index.edges, idOf(key), 'edge'))
+}
+
+function asFitBar(
+  index: LayoutIndex,
+  bar: PlacedBar,
+  { frame, pourId, mark }: Pick<PlaceOfMember, 'frame' | 'pourId' | 'mark'>,
+): FitBar {
+  const standard = barStandardById(index.layout.job.settings.barStandard)
+  return fitBar({
+    bar,
+    frame,
+    pourId,
+    setId: bar.steelId ?? `hardware:${bar.anchorId}:${bar.kind}`,
+    name: `${WORDS[bar.kind]} of ${placeOf(index, bar, mark)}`,
+    bendRadius: (standard && sizeOf(standard, bar.diameter)?.bendRadius) ?? USUAL_BEND * bar.diameter,
+  })
 }
 
 function placeOf(index: LayoutIndex, { anchorId, zoneId, path }: PlacedBar, mark: string): string {

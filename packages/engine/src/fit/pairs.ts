@@ -30,22 +30,31 @@ const LEVEL_SINE = 0.1
 
 /** Every pair with a bar of the member in it that lies near, once. */
 export const pairsOf = perIndex((index: LayoutIndex, key: string): readonly Pair[] => {
-  const member = memberOf(index, key)
-  const own: readonly Item[] = [...member.bars, ...member.bodies]
-  const round = boxRound(own)
-  if (!round) return []
+  const { bars, bodies } = memberOf(index, key)
+  return [...pairsAmong(index, [...bars, ...bodies], itemsBeside(index, key)), ...pairsInSets(index, bars)]
+})
+
+/** What stands beside a member and is no part of it. */
+export const itemsBeside = perIndex((index: LayoutIndex, key: string): readonly Item[] => {
   const beside = membersBeside(index, key).flatMap((other) => {
     const { bars, bodies } = memberOf(index, other)
     return [...bars, ...bodies]
   })
-  const others = [...beside, ...bodiesOfLevel(index, member.levelId)].filter(({ box }) => boxesNear(box, round, REACH))
+  return [...beside, ...bodiesOfLevel(index, memberOf(index, key).levelId)]
+})
+
+/** Pairs of two of the first items, or of one of them with one of the others. */
+export function pairsAmong(index: LayoutIndex, own: readonly Item[], others: readonly Item[]): Pair[] {
+  const round = boxRound(own)
+  if (!round) return []
+  const near = others.filter(({ box }) => boxesNear(box, round, REACH))
   const pairs: Pair[] = []
-  sweep(own, others, (one, other) => {
+  sweep(own, near, (one, other) => {
     const pair = pairOf(index, one, other)
     if (pair) pairs.push(pair)
   })
-  return [...pairs, ...pairsInSets(index, member.bars)]
-})
+  return pairs
+}
 
 function boxRound(items: readonly Item[]): Box3 | null {
   return items.length === 0
@@ -187,7 +196,7 @@ export function gapOf({ layout, pours }: LayoutIndex, one: FitBar, other: FitBar
 // Bars of one set ---------------------------------------------------------------------------------------------------
 
 /** Bars of a set against the others of it; in a spiral turn against turn. */
-function pairsInSets(index: LayoutIndex, bars: readonly FitBar[]): Pair[] {
+export function pairsInSets(index: LayoutIndex, bars: readonly FitBar[]): Pair[] {
   const sets = new Map<string, FitBar[]>()
   for (const bar of bars) {
     const set = sets.get(bar.setId)
