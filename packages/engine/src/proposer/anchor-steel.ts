@@ -6,14 +6,18 @@ import { found } from '../layout-index'
 import type { Stage, SteelShape } from '../model'
 import type { Compared, Zone } from '../result'
 import { sectionBehind } from '../section'
-import { contextWith, type Bench, type Place } from './bench'
+import { sectionStepNear } from '../section-step'
+import { contextWith, isFixable, type Bench, type Place } from './bench'
 import type { Candidate } from './candidate'
 import { thicknessSets, type ThicknessNeed } from './thickness-steel'
 import { transverseBars, transverseSets, type StraightBar, type TransverseNeed } from './transverse-bars'
 import { needsOf, unmetOf } from './verdict'
 
 /** Sets through the thickness that are joined with bars in plan: the lightest of them. */
-const THICKNESS_KEPT = 5
+const THICKNESS_KEPT = 4
+
+/** A step of the section this near may stand in the way of bars of one of the faces, mm. */
+const STEP_REACH = 2000
 
 export interface AnchorSteel {
   readonly candidates: readonly Candidate[]
@@ -27,7 +31,10 @@ export function anchorSteel(bench: Bench, place: Place, shared: readonly Straigh
   if (!site) return { candidates: [], bars: [] }
   const needs = unmetOf(needsOf(bench.context, place.zone))
   const thickness = needs.find(({ plane }) => plane === 'thickness')
-  const upright = thickness ? lightest(bench, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
+  const upright = thickness ? lightest(bench, place, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
+  if (thickness && !upright.some((shapes) => isFixable(bench, place, shapes))) {
+    return { candidates: upright.map((shapes) => ({ shapes })), bars: [] }
+  }
   const made = upright.map((shapes) => ({ shapes, ...planPart(bench, place, { site, shapes, shared }) }))
   return {
     candidates: made.flatMap(({ shapes, sets }) => sets.map((set) => ({ shapes: [...shapes, ...set] }))),
@@ -40,15 +47,19 @@ export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): Ancho
   return kind === 'anchor' ? siteOfAnchor(index, found(index.anchors, id.slice('anchor:'.length), 'anchor')) : null
 }
 
-function lightest(bench: Bench, sets: readonly SteelShape[]): SteelShape[][] {
-  const weighed = sets.map((shape, at) => ({ shape, at, mass: bench.roughly([shape]) }))
-  weighed.sort((a, b) => a.mass - b.mass || a.at - b.at)
-  const kept = new Map<string, SteelShape[]>()
-  for (const { shape } of weighed) {
-    const kinds = [...kept.keys()].filter((key) => key.startsWith(shape.kind)).length
-    if (kinds < THICKNESS_KEPT) kept.set(`${shape.kind}:${kinds}`, [shape])
+/** The lightest of each kind that can be fixed; where none can, the lightest one, for its reason to be named. */
+function lightest(bench: Bench, place: Place, sets: readonly SteelShape[]): SteelShape[][] {
+  const ordered = sets.map((shape, at) => ({ shape, at, mass: bench.roughly([shape]) }))
+  ordered.sort((a, b) => a.mass - b.mass || a.at - b.at)
+  const kept: SteelShape[][] = []
+  const counts = new Map<string, number>()
+  for (const { shape } of ordered) {
+    const count = counts.get(shape.kind) ?? 0
+    if (count >= THICKNESS_KEPT || !isFixable(bench, place, [shape])) continue
+    counts.set(shape.kind, count + 1)
+    kept.push([shape])
   }
-  return [...kept.values()]
+  return kept.length > 0 ? kept : ordered.slice(0, THICKNESS_KEPT).map(({ shape }) => [shape])
 }
 
 /** Bars in plan beside what already stands upright, which may count in plan as well. */
@@ -99,6 +110,7 @@ export function planNeed(bench: Bench, site: AnchorSite, need: Compared): Transv
     plateWidth: site.hardware.plate.width,
     aside: 0,
     toEnd: Math.min(site.toStart ?? Infinity, site.toEnd ?? Infinity) - site.pour.coverEdge,
+    layers: sectionStepNear(site, STEP_REACH) === null ? ['both'] : ['both', 'top', 'bottom'],
     clearGap: clearGapOf(bench, site),
   }
 }

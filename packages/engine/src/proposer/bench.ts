@@ -11,14 +11,14 @@ import { barStandardById, BS_8666_2020 } from '../schedule/bs-8666'
 import type { Candidate, Candidates } from './candidate'
 import { nearbyIndex } from './nearby'
 import type { Blocked } from './proposal'
-import { faultsBefore, needsOf, outBy, stoppedBy, unmetOf } from './verdict'
+import { faultsBefore, heldBy, needsOf, outBy, stoppedBy, unmetOf, type Ground } from './verdict'
 import { weigherOf, type Weigher } from './weigh'
 import { inWords } from './words'
 
 export interface Bench extends Weigher {
   readonly context: CheckContext
   /** The layout round one zone, for what is worked out member by member. */
-  readonly near: (zone: Zone) => CheckContext
+  readonly near: (zone: Zone) => LayoutIndex
   /** Letter before a bar's size. */
   readonly letter: string
   /** Sizes that the job allows, as its bar standard has them, smallest first. */
@@ -66,9 +66,9 @@ export function benchOf(context: CheckContext): Bench {
 
 /** Made once for each zone that asks, so that what does not hang on steel is worked out once for all its candidates. */
 function nearOf(context: CheckContext): Bench['near'] {
-  const made = new Map<string, CheckContext>()
+  const made = new Map<string, LayoutIndex>()
   return (zone) => {
-    const known = made.get(zone.id) ?? { ...context, index: nearbyIndex(context.index, zone) }
+    const known = made.get(zone.id) ?? nearbyIndex(context.index, zone)
     made.set(zone.id, known)
     return known
   }
@@ -80,10 +80,14 @@ export function withPlaced(bench: Bench, placed: ReadonlyMap<string, readonly St
   return { ...bench, context, near: nearOf(context) }
 }
 
-function contextPlus(context: CheckContext, placed: ReadonlyMap<string, readonly Steel[]>): CheckContext {
-  const { index } = context
+const contextPlus = (context: CheckContext, placed: ReadonlyMap<string, readonly Steel[]>): CheckContext => ({
+  ...context,
+  index: indexPlus(context.index, placed),
+})
+
+function indexPlus(index: LayoutIndex, placed: ReadonlyMap<string, readonly Steel[]>): LayoutIndex {
   const whole = new Map([...placed].map(([key, steel]) => [key, [...steelIn(index, key), ...steel]]))
-  return { ...context, index: withSteel(index, whole) }
+  return withSteel(index, whole)
 }
 
 const steelIn = (index: LayoutIndex, key: string): readonly Steel[] => index.steelOfZone.get(key) ?? []
@@ -115,6 +119,19 @@ export const asSteel = ({ zone, steelZone, pourId }: Place, shapes: readonly Ste
 export const contextWith = (bench: Bench, place: Place, shapes: readonly SteelShape[]): CheckContext =>
   contextPlus(bench.context, new Map([[place.key, asSteel(place, shapes)]]))
 
+/** Whether steel alone stands in nothing's way and has its cover, whatever its zone still needs beside it. */
+export const isFixable = (bench: Bench, place: Place, shapes: readonly SteelShape[]): boolean =>
+  heldBy(groundWith(bench, place, shapes), place.zone, faultsBefore(groundWith(bench, place, []), place.zone)) === null
+
+/** What the checks of a zone are asked with, a candidate in its place. */
+export function groundWith(bench: Bench, place: Place, shapes: readonly SteelShape[]): Ground {
+  const placed = new Map([[place.key, asSteel(place, shapes)]])
+  const settled = bench.near(place.zone)
+  // Bars for anchors that act as one stand with one of them.
+  const zone = { ...place.zone, id: place.key, kind: place.steelZone.kind }
+  return { context: contextPlus(bench.context, placed), near: { trial: indexPlus(settled, placed), settled, zone } }
+}
+
 /** Distinct sets of marks that are kept for the choice over the pour. */
 const OPTIONS_KEPT = 8
 /** Reasons that are worth reading where nothing passes. */
@@ -122,7 +139,7 @@ const BLOCKED_KEPT = 6
 
 /** Tries candidates in their zone, lightest first, by the real checks of the zone. */
 export function tryAll(bench: Bench, place: Place, { candidates, blocked: impossible }: Candidates): Tried {
-  const before = faultsBefore({ context: bench.context, near: bench.near(place.zone) }, place.zone)
+  const before = faultsBefore(groundWith(bench, place, []), place.zone)
   const ordered = candidates
     .map(({ shapes }, at) => ({ shapes, at, mass: bench.roughly(shapes) }))
     .sort((a, b) => a.mass - b.mass || a.shapes.length - b.shapes.length || a.at - b.at)
@@ -152,9 +169,7 @@ function refusedBy(
   place: Place,
   { shapes, before }: Candidate & { readonly before: ReadonlySet<string> },
 ): Pick<Blocked, 'check' | 'by'> | null {
-  const placed = new Map([[place.key, asSteel(place, shapes)]])
-  const near = contextPlus(bench.near(place.zone), placed)
-  const stopped = stoppedBy({ context: contextPlus(bench.context, placed), near }, place.zone, before)
+  const stopped = stoppedBy(groundWith(bench, place, shapes), place.zone, before)
   if (stopped) return { check: stopped.name, by: outBy(stopped) }
   const { problem } = bench.weigh(shapes, { zone: place.steelZone, pourId: place.pourId })
   return problem === null ? null : { check: 'Bar shape', by: problem }

@@ -6,6 +6,7 @@ import type { Candidate, Candidates } from './candidate'
 import { edgeSteel } from './edge-steel'
 import { gapSteel } from './gap-steel'
 import { groupSteel } from './group-steel'
+import { jointSteel } from './joint-steel'
 import { panSteel } from './pan-steel'
 import type { Situation } from './situations'
 import type { StraightBar } from './transverse-bars'
@@ -23,6 +24,7 @@ export function candidatesFor(bench: Bench, place: Place, shared: readonly Strai
     case 'gap':
       return unblocked(gapSteel(bench, place, shared).candidates)
     case 'joint':
+      return unblocked(jointSteel(bench, place))
     case 'corner':
     case 'tendon':
     case 'strip':

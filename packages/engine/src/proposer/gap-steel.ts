@@ -14,6 +14,9 @@ const LENGTH_STEP = 25
 /** Places for bars that a rule's largest spacing may ask for beyond the area. */
 const COUNT_MAX = 200
 
+/** Largest spacings that rules ask for, mm; a place or two more move bars clear of a step. */
+const SPACINGS = [300, 200] as const
+
 export interface GapSteel {
   readonly candidates: readonly Candidate[]
   readonly bars: readonly StraightBar[]
@@ -55,8 +58,6 @@ function setOf(bench: Bench, place: Place, { diameter, length }: StraightBar): C
   const perPlace = (2 * area(diameter) * 1000) / width
   const count = 1 + Math.ceil((need.demand - need.limit) / perPlace - 1e-9)
   if (!(count <= COUNT_MAX)) return []
-  // A largest spacing may ask for more places than the area does.
-  return [count, Math.ceil(width / 300), Math.ceil(width / 200)]
-    .filter((places, i) => i === 0 || places > count)
-    .map((places) => ({ shapes: [shapeOf(places)] }))
+  const spacings = SPACINGS.map((spacing) => Math.ceil(width / spacing)).filter((places) => places > count + 2)
+  return [count, count + 1, count + 2, ...spacings].map((places) => ({ shapes: [shapeOf(places)] }))
 }

@@ -8,8 +8,8 @@ import { found, type LayoutIndex } from '../layout-index'
 import type { Anchor, Edge, Point } from '../model'
 import type { Zone } from '../result'
 
-/** Beyond this from a zone no bar of it meets another, mm: the longest bars behind an anchor and beside it. */
-const NEAR = 3500
+/** Bars of places farther than this from a zone hardly ever meet its own, mm. */
+const NEAR = 1500
 
 /** @returns the whole layout for zones that have no one place: joints, and edges from end to end. */
 export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
@@ -29,7 +29,9 @@ export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
   const anchorsOfPan = new Map(pans.map(({ id }) => [id, index.anchorsOfPan.get(id) ?? []]))
   const anchors = [...anchorsOfEdge.values(), ...anchorsOfPan.values()].flat()
   const anchorIds = new Set(anchors.map(({ id }) => id))
-  const steel = index.layout.steel.filter(({ zone: at }) => {
+  const steel = index.layout.steel.filter(({ zone: at, shape }) => {
+    // Wedge bars are moved clear of what they meet.
+    if (shape.kind === 'wedge-bars') return false
     if (at.kind === 'anchor') return anchorIds.has(at.anchorId)
     if (at.kind === 'pan') return panIds.has(at.panId)
     return at.kind === 'joint' ? false : edgeIds.has(at.edgeId)

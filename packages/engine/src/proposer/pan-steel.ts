@@ -10,6 +10,8 @@ import type { Candidates } from './candidate'
 /** Ties are set out further from the tendon by these, until they pass the trimmers, mm. */
 const ASIDE = [0, 25, 50, 75, 100, 125, 150, 200, 250, 300] as const
 
+const SHORTER = [0, 5, 10, 15, 20] as const
+
 export function panSteel(bench: Bench, { zone }: Place): Candidates {
   if (zone.panId === null) return { candidates: [], blocked: [] }
   const there = placedAt(bench.context.index, zone.panId)
@@ -46,9 +48,10 @@ function tiesAside(tie: PanNeed, { diameter }: BarSize): PlacedBarsShape[][] {
   return shape ? ASIDE.map((aside) => [{ ...shape, pitch: shape.pitch + 2 * aside }]) : []
 }
 
+/** Bars that end at the cover of the edge are cut to the step of the schedule, not to that of lengths. */
 function stripsOf(needs: readonly PanNeed[], { diameter }: BarSize): PlacedBarsShape[][] {
   const set = setOf(needs, diameter)
-  return set ? [set] : []
+  return set ? SHORTER.map((by) => set.map((shape) => ({ ...shape, length: shape.length - by }))) : []
 }
 
 /** Bars of one size for each need; null where one of them has none. */

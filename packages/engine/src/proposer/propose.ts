@@ -10,6 +10,7 @@ import { basisOf } from '../bases'
 import type { CheckContext } from '../checks/outcome'
 import { layoutIndex, withSteel, type LayoutIndex } from '../layout-index'
 import type { Layout, Steel, SteelShape } from '../model'
+import type { Zone } from '../result'
 import { barsOf } from '../schedule/bars'
 import { benchOf, byKey, tryAll, withPlaced, type Bench, type Place, type Tried } from './bench'
 import { candidatesFor, sharedBars } from './candidates'
@@ -86,6 +87,8 @@ const steelAt = (index: LayoutIndex, { key }: Place): readonly Steel[] => index.
 interface Given {
   readonly shapes: readonly SteelShape[]
   readonly blocked: readonly Blocked[]
+  /** Where steel was tried for all zones in the same situation. */
+  readonly lookedAt?: Zone
 }
 
 interface Chosen {
@@ -115,7 +118,9 @@ function chooseAll(work: Work, ask: ProposeAsk): Chosen {
   }
   for (const { situation, tried } of found) {
     if (tried.options.length > 0) continue
-    for (const { zone } of situation.places) given.set(zone.id, { shapes: [], blocked: tried.blocked })
+    for (const { zone } of situation.places) {
+      given.set(zone.id, { shapes: [], blocked: tried.blocked, lookedAt: situation.example.zone })
+    }
   }
   return { given, curve: curve.map(({ marks, mass }) => ({ marks, mass })), isExact }
 }
@@ -176,7 +181,7 @@ const everythingIn = (work: Work, given: ReadonlyMap<string, Given>): Bench =>
 
 const isSet = (given: ReadonlyMap<string, Given>, { zone }: Place): boolean => given.get(zone.id)?.blocked.length === 0
 
-const whole = (context: CheckContext) => ({ context, near: context })
+const whole = (context: CheckContext) => ({ context, near: null })
 
 const stopsIn = (work: Work, all: Bench, { zone }: Place): boolean =>
   stoppedBy(whole(all.context), zone, faultsBefore(whole(work.bare.context), zone)) !== null
@@ -194,7 +199,7 @@ function foundAlone(work: Work, given: ReadonlyMap<string, Given>, place: Place)
 
 function proposedZone(work: Work, { given, all }: Settled, place: Place): ProposedZone[] {
   const { zone } = place
-  const { shapes = [], blocked = [] } = given.get(zone.id) ?? {}
+  const { shapes = [], blocked = [], lookedAt } = given.get(zone.id) ?? {}
   // Steel of anchors that act as one stands with one of them, and is shown as old there.
   const old = zone.kind === 'group' ? [] : steelAt(work.before.index, place)
   // Where nothing passes, what was there stays.
@@ -219,7 +224,7 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
       before: worstCheck(work.before, zone),
       after: worstCheck(all.context, zone),
       blocked,
-      notes: [],
+      notes: lookedAt && lookedAt.id !== zone.id ? [`Tried once for all places like it, at ${lookedAt.name}.`] : [],
     },
   ]
 }

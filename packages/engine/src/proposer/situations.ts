@@ -2,7 +2,7 @@
 
 import type { Zone } from '../result'
 import { siteOf } from './anchor-steel'
-import type { Bench, Place } from './bench'
+import { groundWith, type Bench, type Place } from './bench'
 import { faultsBefore, needsOf, unmetOf } from './verdict'
 
 export interface Situation {
@@ -36,7 +36,7 @@ function keyOf(bench: Bench, place: Place): string | null {
     rounded(demand),
     rounded(limit),
   ])
-  const faults = [...faultsBefore({ context: bench.context, near: bench.near(place.zone) }, place.zone)].sort()
+  const faults = [...faultsBefore(groundWith(bench, place, []), place.zone)].sort()
   const steel = (bench.context.index.steelOfZone.get(place.zone.id) ?? []).map(({ shape }) => shape)
   return JSON.stringify([place.zone.kind, asked, faults, steel, surroundings(bench, place.zone)])
 }

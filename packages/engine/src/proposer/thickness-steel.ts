@@ -32,7 +32,7 @@ const LEG_STEP = 25
 const FIRST_LINK = 30
 const LINK_PITCHES = [50, 75, 100] as const
 /** Beyond the plate on either side (common practice). */
-const BESIDE_PLATE = 40
+const BESIDE_PLATE = [40, 20] as const
 const SPIRAL_PITCHES = [40, 50, 60] as const
 /** A spiral fits a plate that is nearly square. */
 const SQUARE_RATIO_MAX = 1.5
@@ -50,19 +50,29 @@ export function thicknessSets(need: ThicknessNeed): (HairpinShape | LinksShape |
 /** Outside height between the covers, centred on the anchor. */
 const heightOf = ({ toCover, deduction }: ThicknessNeed): number => downTo(2 * toCover - deduction, STEP)
 
+/** Inside upright hairpins that the hardware brings, links stand between their legs. */
+const linkHeights = (need: ThicknessNeed): number[] =>
+  need.local?.kind === 'hairpins'
+    ? [heightOf(need), downTo(need.local.bend - 2 * need.local.diameter, STEP)]
+    : [heightOf(need)]
+
 function links(need: ThicknessNeed, { diameter, linkEndMin }: BarSize): LinksShape[] {
   const hook = upTo(linkEndMin, STEP)
-  const height = heightOf(need)
-  const width = Math.max(upTo(need.plate.width + 2 * BESIDE_PLATE, 10), hook)
-  if (height < hook) return []
-  return LINK_PITCHES.flatMap((pitch) => {
-    if (pitch - diameter < need.clearGap) return []
-    const inside = Math.ceil(need.short / (2 * area(diameter)) - 1e-9)
-    const before = Math.max(0, Math.ceil((need.window.from - FIRST_LINK) / pitch))
-    const count = before + inside
-    if (FIRST_LINK + (count - 1) * pitch > need.window.to) return []
-    return [{ kind: 'links', diameter, width, height, hook, count, first: FIRST_LINK, pitch } as const]
-  })
+  const inside = Math.ceil(need.short / (2 * area(diameter)) - 1e-9)
+  return linkHeights(need)
+    .filter((height) => height >= hook)
+    .flatMap((height) =>
+      BESIDE_PLATE.flatMap((beside) =>
+        LINK_PITCHES.flatMap((pitch): LinksShape[] => {
+          const width = Math.max(upTo(need.plate.width + 2 * beside, 10), hook)
+          const count = Math.max(0, Math.ceil((need.window.from - FIRST_LINK) / pitch)) + inside
+          // At its closing corner the hook of a link lies beside it and takes one bar more of the gap.
+          const isTight = pitch - 2 * diameter < need.clearGap
+          if (isTight || FIRST_LINK + (count - 1) * pitch > need.window.to) return []
+          return [{ kind: 'links', diameter, width, height, hook, count, first: FIRST_LINK, pitch }]
+        }),
+      ),
+    )
 }
 
 function spirals(need: ThicknessNeed, diameter: number): SpiralShape[] {
@@ -82,13 +92,13 @@ function spirals(need: ThicknessNeed, diameter: number): SpiralShape[] {
 }
 
 /** Two heights: against the covers, and inside the links that the hardware brings. */
-function hairpins(need: ThicknessNeed, { diameter, betweenBendsMin, endMin }: BarSize): HairpinShape[] {
+function hairpins(need: ThicknessNeed, { diameter, betweenBendsMin, endMin, bendRadius }: BarSize): HairpinShape[] {
   const count = Math.ceil(need.short / area(diameter) - 1e-9)
   const pitch = upTo(diameter + need.clearGap, PITCH_STEP)
   const reach = need.plate.width / 2 + need.depth / 2
   if (((count - 1) * pitch) / 2 > reach) return []
   const inner = need.local?.kind === 'links' ? [downTo(need.local.height - 2 * need.local.diameter, STEP)] : []
-  const leg = upTo(Math.max(need.legOf(diameter), endMin), LEG_STEP)
+  const leg = upTo(Math.max(need.legOf(diameter) + bendRadius + diameter, endMin), LEG_STEP)
   return [heightOf(need), ...inner]
     .filter((bend) => bend >= betweenBendsMin)
     .flatMap((bend) =>

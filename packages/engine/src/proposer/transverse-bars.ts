@@ -16,6 +16,8 @@ export interface TransverseNeed {
   readonly aside: number
   /** From the anchor to the cover at the nearer end of the edge; endless where the slab goes on. */
   readonly toEnd: number
+  /** Layers that the bars may lie in: bars of both faces stop at a step of the soffit, those of one face may pass it. */
+  readonly layers: readonly TransverseBarsShape['layers'][]
   /** Least distance between two bars side by side, mm, beside their diameter. */
   readonly clearGap: number
 }
@@ -43,23 +45,32 @@ export function transverseBars(need: TransverseNeed): StraightBar[] {
   }))
 }
 
-/** The set of one bar that covers the need, set out in the window alone and from the bearing face on. */
+/** The sets of one bar that cover the need, set out in the window alone and from the bearing face on. */
 export function transverseSets(need: TransverseNeed, { diameter, length }: StraightBar): TransverseBarsShape[] {
   const { length: full, least } = need.developed(diameter)
-  const isShort = length / 2 < Math.min(need.plateWidth / 2 + full, need.toEnd - LENGTH_STEP)
   const past = length / 2 - need.aside
+  const isShort = length / 2 < Math.min(need.plateWidth / 2 + full, need.toEnd - LENGTH_STEP)
   if (isShort || length > 2 * need.toEnd || past < least) return []
   const share = Math.min(1, past / full)
-  const count = Math.ceil(need.short / (2 * area(diameter) * share) - 1e-9)
-  const { from, to } = need.window
-  const pitch = downTo((to - from) / count, PITCH_STEP)
-  if (pitch < diameter + need.clearGap) return []
-  const set = { kind: 'transverse-bars', diameter, length, layers: 'both', pitch } as const
-  const first = upTo(from + (to - from - (count - 1) * pitch) / 2, FIRST_STEP)
+  return need.layers.flatMap((layers) => {
+    const perPlace = (layers === 'both' ? 2 : 1) * area(diameter) * share
+    return spreadOut(need, { diameter, length, layers, count: Math.ceil(need.short / perPlace - 1e-9) })
+  })
+}
+
+function spreadOut(
+  { window, clearGap }: TransverseNeed,
+  bars: Pick<TransverseBarsShape, 'diameter' | 'length' | 'layers' | 'count'>,
+): TransverseBarsShape[] {
+  const { from, to } = window
+  const pitch = downTo((to - from) / bars.count, PITCH_STEP)
+  if (pitch < bars.diameter + clearGap) return []
+  const set = { kind: 'transverse-bars', ...bars, pitch } as const
+  const first = upTo(from + (to - from - (bars.count - 1) * pitch) / 2, FIRST_STEP)
   const fromFace = upTo(pitch / 2, FIRST_STEP)
-  const reaching = Math.ceil((from - fromFace) / pitch) + count
+  const reaching = Math.ceil((from - fromFace) / pitch) + bars.count
   return [
-    { ...set, count, first },
+    { ...set, first },
     { ...set, count: reaching, first: fromFace },
   ]
 }

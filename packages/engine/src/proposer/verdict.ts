@@ -1,8 +1,9 @@
 /** Whether steel in a zone does, by the zone's own checks. */
 
 import { CHECKS_OF_FAMILY, FAMILIES_OF_ZONE } from '../checks/families'
+import { fitChecksOfTrial } from '../checks/fit'
 import type { CheckContext } from '../checks/outcome'
-import { found } from '../layout-index'
+import { found, type LayoutIndex } from '../layout-index'
 import { perConcrete } from '../memo'
 import type { Check, Compared, Family, Zone } from '../result'
 import { bySeverity, worstOf } from '../severity'
@@ -21,10 +22,11 @@ const NEEDS: readonly Family[] = [
 ]
 const HOLDS: readonly Family[] = ['anchorage', 'fit']
 
-/** Where checks are asked: the whole layout, and for what is worked out member by member the part round the zone. */
+/** Where checks are asked: the whole layout, and for the fit of bars that are tried the part round their zone. */
 export interface Ground {
   readonly context: CheckContext
-  readonly near: CheckContext
+  /** Null checks the fit in the whole layout. */
+  readonly near: { readonly trial: LayoutIndex; readonly settled: LayoutIndex; readonly zone: Zone } | null
 }
 
 const ofZone = ({ kind }: Zone, families: readonly Family[]): readonly Family[] =>
@@ -79,6 +81,11 @@ export function stoppedBy(ground: Ground, zone: Zone, before: ReadonlySet<string
     const stopped = ofFamily(ground.context, zone, family).find((check) => isNeed(check) && !isMet(check))
     if (stopped?.kind === 'compared') return stopped
   }
+  return heldBy(ground, zone, before)
+}
+
+/** The first check of anchorage, laps and fit that stops steel in a zone. */
+export function heldBy(ground: Ground, zone: Zone, before: ReadonlySet<string>): Compared | null {
   for (const family of ofZone(zone, HOLDS)) {
     const stopped = held(ground, zone, family).find(
       (check) => check.kind === 'compared' && !isMet(check) && !before.has(signOf(check)),
@@ -88,8 +95,10 @@ export function stoppedBy(ground: Ground, zone: Zone, before: ReadonlySet<string
   return null
 }
 
-const held = ({ context, near }: Ground, zone: Zone, family: Family): readonly Check[] =>
-  ofFamily(family === 'fit' ? near : context, zone, family)
+function held({ context, near }: Ground, zone: Zone, family: Family): readonly Check[] {
+  if (family !== 'fit' || near === null) return ofFamily(context, zone, family)
+  return fitChecksOfTrial(near.trial, near.zone, near.settled)
+}
 
 /** The worst of a zone's checks on which its bars bear. */
 export function worstCheck(context: CheckContext, zone: Zone): WorstCheck | null {
