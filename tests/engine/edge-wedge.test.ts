@@ -46,7 +46,7 @@ function steelAt(parts: Parts, ids: readonly string[] = [LEAST], zoneId = GAP): 
   return check
 }
 
-const adviceAt = (made: Layout, zoneId: string, name: RegExp, pourId?: string): Advice | undefined =>
+const adviceAt = (made: Layout, [zoneId, pourId]: readonly [string, string?], name: RegExp): Advice | undefined =>
   checksAt(made, zoneId, pourId).find((one): one is Advice => one.kind === 'advice' && name.test(one.name))
 
 describe('crack steel of a gap of 1750, slab 220 with cover 30, C32/40 (EN 1992-1-1 7.3.2, table from memory)', () => {
@@ -131,8 +131,8 @@ describe('the job’s choice', () => {
     const with4 = accepted(layout({ anchors: PAIR, steel: [edgeBars(2, 2)] }), EDGE_BARS_ONLY)
     const with3 = accepted(layout({ anchors: PAIR, steel: [edgeBars(2, 1)] }), EDGE_BARS_ONLY)
     expect(checksAt(with4, GAP).find(({ kind }) => kind === 'compared')).toMatchObject({ status: 'within', demand: 0 })
-    expect(adviceAt(with4, GAP, /^Edge bars/)).toMatchObject({ measured: 4, isUsual: true, limitKind: 'P' })
-    expect(adviceAt(with3, GAP, /^Edge bars/)).toMatchObject({ measured: 3, isUsual: false })
+    expect(adviceAt(with4, [GAP], /^Edge bars/)).toMatchObject({ measured: 4, isUsual: true, limitKind: 'P' })
+    expect(adviceAt(with3, [GAP], /^Edge bars/)).toMatchObject({ measured: 3, isUsual: false })
   })
 
   test('behind a bonded dead end the reading for it must be accepted as well', () => {
@@ -150,13 +150,13 @@ describe('spacing of tendons is advice (ACI 318M-19 7.7.6.3, secondary)', () => 
     { spacing: 1801, isUsual: false, isAdded: true },
   ])('$spacing', ({ spacing, isUsual, isAdded }) => {
     const anchors = [PAIR[0], anchor('E2', 2, { chainage: 5000 + spacing, setBack: 0 })].flatMap((one) => one ?? [])
-    const advice = adviceAt(layout({ anchors }), GAP, /^Tendon spacing$/)
+    const advice = adviceAt(layout({ anchors }), [GAP], /^Tendon spacing$/)
     expect(advice).toMatchObject({ measured: spacing, isUsual, limitKind: 'P' })
     expect((advice?.notes ?? []).length > 0).toBe(isAdded)
   })
 
   test('from the last tendon to the end of the edge there is none', () => {
-    expect(adviceAt(layout({ anchors: PAIR }), 'gap:E2:start:E2-1', /^Tendon spacing/)).toBeUndefined()
+    expect(adviceAt(layout({ anchors: PAIR }), ['gap:E2:start:E2-1'], /^Tendon spacing/)).toBeUndefined()
   })
 })
 
@@ -168,8 +168,8 @@ describe('the podium', () => {
     { edgeId: 'E4-P2', after: 'L1P2-N04N', before: 'L1P2-N06N', depth: 2407 },
   ])('the tendon that was left out shows at $edgeId: 3500 between neighbours', ({ edgeId, after, before, depth }) => {
     const zoneId = `gap:${edgeId}:${after}:${before}`
-    expect(adviceAt(demo, zoneId, /^Tendon spacing$/, 'P2')).toMatchObject({ measured: 3500, isUsual: false })
-    expect(adviceAt(demo, zoneId, /^Depth of the edge wedge$/, 'P2')?.measured).toBeCloseTo(depth, -1)
+    expect(adviceAt(demo, [zoneId, 'P2'], /^Tendon spacing$/)).toMatchObject({ measured: 3500, isUsual: false })
+    expect(adviceAt(demo, [zoneId, 'P2'], /^Depth of the edge wedge$/)?.measured).toBeCloseTo(depth, -1)
     const chosen = checksAt(accepted(demo, LEAST, 'en-dead-end'), zoneId, 'P2')
     expect(chosen.find(({ kind }) => kind === 'compared')).toMatchObject({ status: 'over', limit: 0 })
   })

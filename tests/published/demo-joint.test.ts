@@ -1,5 +1,5 @@
 import { toEngine } from '@wedgeline/contract'
-import { checkPour, jointStrips, layoutIndex, type Compared, type Layout } from '@wedgeline/engine'
+import { jointStrips, layoutIndex, type Layout } from '@wedgeline/engine'
 import { describe, expect, test } from 'vitest'
 import { demoLayout } from '../../db/seed/demo-layout'
 import { EXPECTED_STRIP } from './demo-wedges'

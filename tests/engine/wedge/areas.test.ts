@@ -43,19 +43,22 @@ function laid(parts: Parts, settings: Partial<JobSettings> = {}): Layout {
   }
 }
 
-function wedgeAt(parts: Parts, edgeId: string, at: number, settings?: Partial<JobSettings>): GapWedge {
-  const index = layoutIndex(laid(parts, settings))
+/** The wedge of the gap at a place along an edge, counted from 0. */
+function wedgeAt(parts: Parts & { settings?: Partial<JobSettings> }, edgeId: string, at: number): GapWedge {
+  const index = layoutIndex(laid(parts, parts.settings))
   const gap = gapsOfEdge(index, edgeId)[at]
   const wedge = gap && wedgesOfEdge(index, edgeId).get(gap.id)
   if (!wedge) throw new Error('no wedge')
   return wedge
 }
 
-const plate = (edgeId: string, number: number, chainage: number, change: Partial<Anchor> = {}) =>
-  anchor(edgeId, number, { chainage, setBack: 0, ...change })
+const plate = (name: string, chainage: number, change: Partial<Anchor> = {}) => {
+  const [edgeId = '', number = ''] = name.split('/')
+  return anchor(edgeId, Number(number), { chainage, setBack: 0, ...change })
+}
 
 describe('two plates of 220, spread at 45 degrees', () => {
-  const pair = [plate('E2', 1, 5000), plate('E2', 2, 6750)]
+  const pair = [plate('E2/1', 5000), plate('E2/2', 6750)]
 
   test('at the edge: a triangle on the 1530 between them', () => {
     const wedge = wedgeAt({ anchors: pair }, 'E2', 1)
@@ -68,7 +71,7 @@ describe('two plates of 220, spread at 45 degrees', () => {
 
   test('set back 110 and 300: uneven sides', () => {
     // Clear 1530; (1530 + 110 + 300) / 2 = 970, apex 860 from the first plate and 670 from the second.
-    const anchors = [plate('E2', 1, 5000, { setBack: 110 }), plate('E2', 2, 6750, { setBack: 300 })]
+    const anchors = [plate('E2/1', 5000, { setBack: 110 }), plate('E2/2', 6750, { setBack: 300 })]
     const wedge = wedgeAt({ anchors }, 'E2', 1)
     expect(wedge.depth).toBeCloseTo(970, 6)
     expect(wedge.apex.chainage).toBeCloseTo(5110 + 860, 6)
@@ -78,11 +81,11 @@ describe('two plates of 220, spread at 45 degrees', () => {
 
   test('the spread may start at the end of the device: 60 deeper', () => {
     const parts = { anchors: pair, hardware: [{ ...S4, deviceLength: 60 }] }
-    expect(wedgeAt(parts, 'E2', 1, { spreadStart: 'device-end' }).depth).toBeCloseTo(825, 6)
+    expect(wedgeAt({ ...parts, settings: { spreadStart: 'device-end' } }, 'E2', 1).depth).toBeCloseTo(825, 6)
   })
 
   test('every angle is shown, the job’s own first; each printed line gives its depth', () => {
-    const wedge = wedgeAt({ anchors: pair }, 'E2', 1, { wedgeSpread: Math.atan(0.5) })
+    const wedge = wedgeAt({ anchors: pair, settings: { wedgeSpread: Math.atan(0.5) } }, 'E2', 1)
     // 1530 / (2 * 0.5) = 1530; EN 1530 * 0.75 = 1147.5; 45 degrees 765
     expect(wedge.depthBySpread.map(({ depth }) => Math.round(depth * 10) / 10)).toEqual([1530, 1147.5, 765])
     expect(wedge.depth).toBe(wedge.depthBySpread[0]?.depth)
@@ -92,7 +95,7 @@ describe('two plates of 220, spread at 45 degrees', () => {
   })
 
   test('without an angle of its own the job takes the basis’s, and 45 degrees beside it', () => {
-    const wedge = wedgeAt({ anchors: pair }, 'E2', 1, { wedgeSpread: null })
+    const wedge = wedgeAt({ anchors: pair, settings: { wedgeSpread: null } }, 'E2', 1)
     expect(wedge.depthBySpread.map(({ depth }) => Math.round(depth * 10) / 10)).toEqual([1147.5, 765])
   })
 })
@@ -101,7 +104,7 @@ describe('spreads that overlap', () => {
   test('behind two pans the spread of the edge’s own anchors comes first', () => {
     // Plates at 4000 and 8000 at the edge, pans between them 3400 in. Depth c - 4110 and 7890 - c, meeting at 6000.
     const parts = {
-      anchors: [plate('E4', 1, 4000), plate('E4', 2, 8000), inPan('PN01'), inPan('PN02')],
+      anchors: [plate('E4/1', 4000), plate('E4/2', 8000), inPan('PN01'), inPan('PN02')],
       pans: [pan('PN01', { x: 5500, y: 14000 }), pan('PN02', { x: 6500, y: 14000 })],
     }
     const between = wedgeAt(parts, 'E4', 2)
@@ -131,13 +134,13 @@ describe('spreads that overlap', () => {
         edge(WEST, 'd', [length(0, 17400)]),
         edge(bevel, 'b', [length(0, 10000)]),
       ],
-      anchors: [plate('E2', 1, 6000), ...more],
+      anchors: [plate('E2/1', 6000), ...more],
     })
     const alone = wedgeAt(parts([]), 'E2', 1)
     // Plate's side at 6110, end of the edge 3890 from it.
     expect(alone.depth).toBeCloseTo(3890, 6)
-    expect(wedgeAt(parts([plate('E9', 1, 500)]), 'E2', 1).depth).toBeLessThan(3000)
-    expect(wedgeAt(parts([plate('E1', 1, 500)]), 'E2', 1).depth).toBeCloseTo(3890, 6)
+    expect(wedgeAt(parts([plate('E9/1', 500)]), 'E2', 1).depth).toBeLessThan(3000)
+    expect(wedgeAt(parts([plate('E1/1', 500)]), 'E2', 1).depth).toBeCloseTo(3890, 6)
   })
 })
 
@@ -148,8 +151,8 @@ describe('both ends of a tendon', () => {
     edges: [edge(SOUTH, 'a', [length(0, 19200)]), edge(NORTH, 'c', [length(0, 19200)])],
   }
   const through = (n: number, chainage: number) => [
-    plate('E2', n, chainage, { tendonId: `T${n}` }),
-    plate('E4', n, chainage, { tendonId: `T${n}` }),
+    plate(`E2/${n}`, chainage, { tendonId: `T${n}` }),
+    plate(`E4/${n}`, chainage, { tendonId: `T${n}` }),
   ]
 
   test('short tendons far apart leave a length that goes through from edge to edge', () => {
@@ -173,9 +176,9 @@ describe('both ends of a tendon', () => {
     // Left of 8490 the tendon at 4000 counts: 8490 - 4110 = 4380; without the other end it would be 2690.
     const parts: Parts = {
       anchors: [
-        plate('E2', 1, 4000),
-        plate('E2', 2, 9600, { tendonId: 'T2' }),
-        plate('E2', 3, 15200),
+        plate('E2/1', 4000),
+        plate('E2/2', 9600, { tendonId: 'T2' }),
+        plate('E2/3', 15200),
         { ...inPan('PN01'), tendonId: 'T2' },
       ],
       pans: [pan('PN01', { x: 9600, y: 2000 })],
@@ -255,7 +258,7 @@ describe('corners', () => {
         edge(inner, 'c', [length(12600, 17400)]),
         edge(side, 'd', [length(10800, 17400)]),
       ],
-      anchors: [plate('E4', 1, 12000), plate('E7-NR', 1, 14600)],
+      anchors: [plate('E4/1', 12000), plate('E7-NR/1', 14600)],
     }
     // From the corner at 12600 and from the plate's side at 14490: 1890 / 2 = 945, area 945^2 + 0.
     const wedge = wedgeAt(parts, 'E7-NR', 0)
@@ -270,7 +273,7 @@ describe('corners', () => {
 
 test('across a pour boundary two end gaps are one once both pours are stressed', () => {
   const index = layoutIndex(
-    laid(twoPours([plate('E2', 1, 18400), { ...plate('E2-P2', 1, 19800), castWithPourId: 'P2' }])),
+    laid(twoPours([plate('E2/1', 18400), { ...plate('E2-P2/1', 19800), castWithPourId: 'P2' }])),
   )
   const [, last] = gapsOfEdge(index, 'E2')
   if (!last) throw new Error('no gap')
