@@ -60,6 +60,7 @@ function partOf(layout: Layout, pour: Pour, { by, timeZone }: { by: string; time
     preparedAtMs: now,
     checkedBy: null,
     approval: null,
+    accepted: layout.job.readings,
     engineVersion: ENGINE_VERSION,
   }
 }

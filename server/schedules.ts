@@ -102,6 +102,7 @@ async function workbookOf(
     preparedAtMs: atMs,
     checkedBy: null,
     approval: null,
+    accepted: layout.job.readings,
     engineVersion: ENGINE_VERSION,
   })
   return { bytes, name: `${reference.replace(/[^A-Za-z0-9._-]+/g, '-')} bar schedule.xlsx` }

@@ -40,11 +40,22 @@ export interface PageSetup {
   readonly footer: string
 }
 
+export interface Picture {
+  readonly png: Uint8Array
+  /** As shown, in pixels. */
+  readonly width: number
+  readonly height: number
+}
+
 export interface SheetWriter {
   /** Columns and rows count from 1. */
   put(row: number, column: number, cell: { readonly value: CellValue; readonly style?: CellStyle }): void
   table(block: TableBlock): void
   widths(widths: readonly number[]): void
+  /** Height of a row in points, whatever its texts need. */
+  rowHeight(row: number, points: number): void
+  /** A picture in a cell, moving with it. */
+  picture(row: number, column: number, picture: Picture): void
   freeze(rows: number): void
   page(setup: PageSetup): void
 }

@@ -17,13 +17,13 @@ export function excelBook(properties: BookProperties): BookWriter {
   book.created = at
   book.modified = at
   return {
-    sheet: (name) => sheetWriter(book.addWorksheet(name)),
+    sheet: (name) => sheetWriter(book, book.addWorksheet(name)),
     name: (name, range) => book.definedNames.add(range, name),
     finish: async () => Buffer.from(await book.xlsx.writeBuffer()),
   }
 }
 
-function sheetWriter(sheet: ExcelJS.Worksheet): SheetWriter {
+function sheetWriter(book: ExcelJS.Workbook, sheet: ExcelJS.Worksheet): SheetWriter {
   return {
     put(row, column, { value, style }) {
       const cell = sheet.getCell(row, column)
@@ -35,6 +35,14 @@ function sheetWriter(sheet: ExcelJS.Worksheet): SheetWriter {
       widths.forEach((width, k) => {
         sheet.getColumn(k + 1).width = width
       }),
+    rowHeight(row, points) {
+      sheet.getRow(row).height = points
+    },
+    picture(row, column, { png, width, height }) {
+      const imageId = book.addImage({ base64: Buffer.from(png).toString('base64'), extension: 'png' })
+      const place = { tl: { col: column - 1 + 0.1, row: row - 1 + 0.05 }, ext: { width, height } }
+      sheet.addImage(imageId, { ...place, editAs: 'oneCell' })
+    },
     freeze(rows) {
       sheet.views = [{ state: 'frozen', xSplit: 0, ySplit: rows }]
     },
@@ -70,7 +78,7 @@ function fitRows(sheet: ExcelJS.Worksheet): void {
       lines = Math.max(lines, linesOf(cell.value, width * (cell.font?.bold ? PER_DIGIT.bold : PER_DIGIT.plain)))
     })
     if (lines === 1) return
-    row.height = lines * LINE_PT
+    row.height = Math.max(row.height ?? 0, lines * LINE_PT)
     row.eachCell((cell) => {
       if (cell.alignment?.vertical === undefined) {
         cell.style = { ...cell.style, alignment: { ...cell.alignment, vertical: 'top' } }

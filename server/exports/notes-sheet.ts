@@ -30,7 +30,11 @@ function noteLines(input: ScheduleWorkbookInput): readonly Line[] {
     ['Reinforcement', schedule.grade],
     ['Concrete', `${pour.concrete}, slab ${pour.thickness} mm`],
     ['Cover', `top ${pour.coverTop}, soffit ${pour.coverSoffit}, edge ${pour.coverEdge} mm, as the pour has them`],
-    ['Laps', 'No laps are placed: each bar is one length. Bars over the stock length are not scheduled.'],
+    [
+      'Laps',
+      `Straight bars over the stock length of ${schedule.stockLength} mm are split and lapped by the basis, for full stress at the strength of the last stage; every second bar the other way round, and clear of anchors where there is room.`,
+    ],
+    ...schedule.chances.map((text): Line => ['One length', text]),
     ['Counting', 'Where bars lie in two layers, top and bottom are counted together. A member is an edge or a pan.'],
     ...[...ofMarks].map(([mark, notes]): Line => [`Mark ${mark}`, [...notes].join('; ')]),
     ...schedule.problems.map(({ mark, message }): Line => [`Mark ${mark ?? '-'}`, message]),

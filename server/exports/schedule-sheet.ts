@@ -17,7 +17,7 @@ const COLUMNS: readonly Column[] = [
   { title: 'Rev letter', width: 8, style: { align: 'center' } },
 ]
 /** Beside the table and outside the print: what the frozen numbers come from. */
-const BESIDE = ['Length by formula (mm)', 'Mass (kg)', 'Mass by formula (kg)', 'Notes'] as const
+const BESIDE = ['Length by formula (mm)', 'Mass (kg)', 'Mass by formula (kg)', 'Notes', 'Delivery'] as const
 const BESIDE_FROM = COLUMNS.length + 2
 
 export const SCHEDULE_SHEET = 'Schedule'
@@ -28,7 +28,7 @@ export function writeSchedule(book: BookWriter, input: WorkbookPart): void {
   const { rows } = input.schedule
   const name = input.sheetName(SCHEDULE_SHEET)
   const sheet = book.sheet(name)
-  sheet.widths([...COLUMNS.map((column) => column.width), 3, 13, 11, 13, 40])
+  sheet.widths([...COLUMNS.map((column) => column.width), 3, 13, 11, 13, 40, 20])
   writeHeader(sheet, input)
   sheet.table({
     name: input.rangeName('BarSchedule'),
@@ -38,7 +38,8 @@ export function writeSchedule(book: BookWriter, input: WorkbookPart): void {
   })
   const head = { isHead: true, isBold: true, isWrapped: true, align: 'center' } as const
   BESIDE.forEach((title, k) => sheet.put(HEAD_ROW, BESIDE_FROM + k, { value: title, style: head }))
-  rows.forEach((row, k) => writeBeside(sheet, row, HEAD_ROW + 1 + k))
+  const deliveries = new Map(input.schedule.deliveries.map(({ id, name }) => [id, name]))
+  rows.forEach((row, k) => writeBeside(sheet, { row, at: HEAD_ROW + 1 + k, deliveries }))
   sheet.freeze(HEAD_ROW)
   const lastRow = HEAD_ROW + rows.length
   sheet.page({
@@ -56,6 +57,8 @@ const RANGES = [
   ['BarTypes', 'C'],
   ['BarTotals', 'F'],
   ['BarLengths', 'G'],
+  ['BarMasses', 'Q'],
+  ['BarDeliveries', 'T'],
 ] as const
 
 function writeHeader(sheet: SheetWriter, input: ScheduleWorkbookInput): void {
@@ -112,7 +115,14 @@ function tableRow(row: ScheduleRow, at: number): readonly CellValue[] {
   ]
 }
 
-function writeBeside(sheet: SheetWriter, row: ScheduleRow, at: number): void {
+interface Beside {
+  readonly row: ScheduleRow
+  readonly at: number
+  /** Names of deliveries by their ids; empty where the pour has none. */
+  readonly deliveries: ReadonlyMap<string | null, string>
+}
+
+function writeBeside(sheet: SheetWriter, { row, at, deliveries }: Beside): void {
   const [calculated] = row.steps
   const mass = row.massEach === null ? null : row.massEach * row.total
   const perMetre = row.length !== null && row.massEach !== null ? (row.massEach * 1000) / row.length : 0
@@ -122,8 +132,9 @@ function writeBeside(sheet: SheetWriter, row: ScheduleRow, at: number): void {
     mass,
     mass === null ? null : { formula: `F${at}*G${at}/1000*${kgPerMetre}`, result: mass },
     row.notes.length > 0 ? row.notes.join('; ') : null,
+    row.member === null ? null : (deliveries.get(row.deliveryId) ?? null),
   ]
-  const formats = [undefined, '0.00', '0.00', undefined]
+  const formats = [undefined, '0.00', '0.00', undefined, undefined]
   cells.forEach((value, k) => {
     const format = formats[k]
     sheet.put(at, BESIDE_FROM + k, { value, style: format === undefined ? {} : { format } })

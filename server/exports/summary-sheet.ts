@@ -1,5 +1,5 @@
-import { onSheet, type BookWriter, type CellValue, type Column } from './book-writer'
-import { statusLine } from './wording'
+import { onSheet, type BookWriter, type CellValue, type Column, type SheetWriter } from './book-writer'
+import { KIND_WORDS, statusLine } from './wording'
 import type { WorkbookPart } from './workbook'
 
 const COLUMNS: readonly Column[] = [
@@ -41,10 +41,33 @@ export function writeSummary(book: BookWriter, input: WorkbookPart): void {
     book.name(input.rangeName('AllMetres'), onSheet(input.sheetName('Summary'), `$C$${sumRow}`))
     book.name(input.rangeName('AllMass'), onSheet(input.sheetName('Summary'), `$E$${sumRow}`))
   }
+  const lastRow = writeKinds(sheet, input, sumRow + 2)
   sheet.freeze(HEAD_ROW)
   sheet.page({
-    area: `A1:E${sumRow}`,
+    area: `A1:E${lastRow}`,
     titleRows: `${HEAD_ROW}:${HEAD_ROW}`,
     footer: `${input.reference} ${statusLine(input)}`,
   })
+}
+
+const KIND_COLUMNS: readonly Column[] = [
+  { title: 'Kind of bar', width: 16 },
+  { title: 'Bars of it', width: 12, style: { format: '0' } },
+  { title: 'Metres of it', width: 14, style: { format: '0.00' } },
+  { title: 'Mass of it (kg)', width: 14, style: { format: '0.00' } },
+]
+
+/** By kind of bar, and the longest bar; answers the last row. */
+function writeKinds(sheet: SheetWriter, input: WorkbookPart, from: number): number {
+  const { kinds, longest } = input.schedule
+  const rows = kinds.map(({ kind, bars, metres, mass }): readonly CellValue[] => [KIND_WORDS[kind], bars, metres, mass])
+  if (rows.length > 0) sheet.table({ name: input.rangeName('BarKinds'), row: from, columns: KIND_COLUMNS, rows })
+  if (!longest) return from + rows.length
+  const [totals, lengths] = ['BarTotals', 'BarLengths'].map(input.rangeName)
+  const at = from + rows.length + 2
+  sheet.put(at, 1, { value: 'Longest bar (mm)', style: { isBold: true } })
+  const formula = `SUMPRODUCT(MAX((${totals}>0)*${lengths}))`
+  sheet.put(at, 2, { value: { formula, result: longest.length }, style: { format: '0' } })
+  sheet.put(at, 3, { value: `mark ${longest.mark}` })
+  return at
 }

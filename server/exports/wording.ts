@@ -1,4 +1,4 @@
-import type { Family, PourResult, Status } from '@wedgeline/engine'
+import type { Family, PourResult, Status, SteelKind } from '@wedgeline/engine'
 import type { ScheduleWorkbookInput } from './workbook'
 
 export const CAUTIONS = [
@@ -13,6 +13,19 @@ export const STATUS_WORDS: Readonly<Record<Status, string>> = {
   'needs-judgement': 'needs judgement',
   near: 'near',
   within: 'within',
+}
+
+export const KIND_WORDS: Readonly<Record<SteelKind, string>> = {
+  spiral: 'spirals',
+  links: 'links',
+  hairpins: 'hairpins',
+  'edge-bars': 'edge bars',
+  'transverse-bars': 'transverse bars',
+  'wedge-bars': 'wedge bars',
+  trimmers: 'trimmers',
+  diagonals: 'diagonal bars',
+  'tie-back-bars': 'tie-back bars',
+  'lap-bars': 'lap bars',
 }
 
 export const statusLine = ({ approval }: ScheduleWorkbookInput): string =>

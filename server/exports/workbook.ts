@@ -1,9 +1,13 @@
-import type { Pour, PourResult, Schedule, ScheduleProblem } from '@wedgeline/engine'
+import type { AcceptedReading, Pour, PourResult, Schedule, ScheduleProblem } from '@wedgeline/engine'
 import { writeChecks } from './checks-sheet'
+import { writeDeliveries } from './deliveries-sheet'
 import { excelBook } from './excel-book'
 import { writeNotes } from './notes-sheet'
+import { writeRevisions } from './revisions-sheet'
 import { writeSchedule } from './schedule-sheet'
+import { writeShapes } from './shapes-sheet'
 import { writeSummary } from './summary-sheet'
+import { writeZones } from './zones-sheet'
 
 /** Everything that the workbook shows; nothing is looked up or timed here, so that the same input gives the same cells. */
 export interface ScheduleWorkbookInput {
@@ -20,6 +24,8 @@ export interface ScheduleWorkbookInput {
   readonly checkedBy: string | null
   /** Null until an engineer has approved the revision. */
   readonly approval: { readonly by: string; readonly on: string } | null
+  /** Readings that the job has accepted. */
+  readonly accepted: readonly AcceptedReading[]
   readonly engineVersion: string
 }
 
@@ -70,8 +76,12 @@ export async function scheduleWorkbook(
     }
     writeSchedule(book, part)
     writeSummary(book, part)
+    writeDeliveries(book, part)
+    writeShapes(book, part)
+    writeZones(book, part)
     writeChecks(book, part)
     writeNotes(book, part)
+    writeRevisions(book, part)
   })
   return book.finish()
 }

@@ -12,7 +12,7 @@ export const steel = (id: string, anchorId: string, shape: SteelShape): Steel =>
 })
 
 /** Two anchors with links, one with a helix, hairpins, transverse and edge bars. */
-const SAMPLE: Layout = layout({
+export const SAMPLE: Layout = layout({
   anchors: [
     anchor('E2', 1, { chainage: 2000 }),
     anchor('E2', 2, { chainage: 4000 }),
@@ -64,7 +64,7 @@ const checkHead = {
   notes: ['Net area.'],
 } as const
 
-const OVER: Check = {
+export const OVER: Check = {
   ...checkHead,
   kind: 'compared',
   name: 'Bearing under the plate',
@@ -126,6 +126,7 @@ export const input = (change: Partial<ScheduleWorkbookInput> = {}): ScheduleWork
   preparedAtMs: Date.UTC(2026, 2, 2, 9, 30),
   checkedBy: null,
   approval: null,
+  accepted: [],
   engineVersion: '0.1.0+abcdef012345',
   ...change,
 })

@@ -4,7 +4,7 @@ import { describe, expect, test } from 'vitest'
 import { scheduleOf, STATUSES, type SteelShape } from '@wedgeline/engine'
 import { scheduleWorkbook, ScheduleBlockedError, type ScheduleWorkbookInput } from '@/server/exports/workbook'
 import { anchor, layout, POUR } from '../../engine/sample-layout'
-import { steel, WITHIN, results, input } from './workbook-sample'
+import { steel, OVER, SAMPLE, WITHIN, results, input } from './workbook-sample'
 
 async function readBack(change: Partial<ScheduleWorkbookInput> = {}): Promise<ExcelJS.Workbook> {
   const book = new ExcelJS.Workbook()
@@ -208,11 +208,103 @@ describe('Checks and Notes sheets', () => {
     const all = text.join('\n')
     expect(all).toContain('Cover|top 30, soffit 30, edge 30 mm')
     expect(all).toContain('Concrete|C32/40, slab 220 mm')
-    expect(all).toContain('Laps|No laps are placed')
+    expect(all).toContain('Laps|Straight bars over the stock length of 12000 mm are split and lapped')
+    expect(all).toContain('Source|Supports: chairs and spacers are not scheduled here')
     expect(all).toContain('Caution|Local codes and licensed practice govern.')
     expect(all).toContain('Mark 05|6 turns of which 2 flat')
     expect(all).toContain('Source|From memory: dimensions to the nearest 5 mm')
     expect(all).toContain('0.1.0+abcdef012345')
+  })
+})
+
+describe('Deliveries, Shapes, Zones and Revisions sheets', () => {
+  const DELIVERIES = [
+    { id: 'a', name: 'First week', neededOn: '2026-03-09', edgeIds: ['E2'], panIds: [] },
+    { id: 'b', name: 'Second week', neededOn: null, edgeIds: ['E1'], panIds: [] },
+  ]
+  const delivered = () =>
+    readBack({
+      schedule: scheduleOf(
+        { ...SAMPLE, pours: SAMPLE.pours.map((pour) => ({ ...pour, deliveries: DELIVERIES })) },
+        'P1',
+      ),
+    })
+
+  test('bars by delivery, what is not assigned last, and their sum', async () => {
+    const book = await delivered()
+    const sheet = sheetOf(book, 'Deliveries')
+    const line = (at: number) => [1, 2, 3, 4, 6].map((column) => seen(sheet.getCell(at, column)))
+    // E2: 10 x 1.4 + 2 x 9.6 = 33.2 m x 0.888 + (2 x 1.325 + 8 x 1.05) x 0.616 = 29.4816 + 6.8068
+    expect(line(5)).toEqual(['First week', '2026-03-09', 'E2', 22, expect.closeTo(36.2884, 9)])
+    expect(line(6)).toEqual(['Second week', 'no day agreed', 'no bars', 0, 0])
+    // the helix of E4: 4.125 x 0.888
+    expect(line(7)).toEqual(['not assigned', 'no day agreed', 'E4', 1, expect.closeTo(3.663, 9)])
+    expect(line(8)[4]).toBeCloseTo(39.9514, 9)
+    expect(sheet.getCell('D5').formula).toBe('SUMIFS(BarTotals,BarDeliveries,A5)')
+    expect(sheetOf(book, 'Schedule').getCell('T10').value).toBe('First week')
+  })
+
+  test('without deliveries there is no sheet of them', async () => {
+    expect((await readBack()).worksheets.map(({ name }) => name)).toEqual([
+      'Schedule',
+      'Summary',
+      'Shapes',
+      'Zones',
+      'Checks',
+      'Notes',
+      'Revisions',
+    ])
+  })
+
+  test('every shape with its title, a picture of its own, its formula and its marks', async () => {
+    const sheet = sheetOf(await readBack(), 'Shapes')
+    expect([5, 6, 7, 8].map((at) => [sheet.getCell(at, 1).value, sheet.getCell(at, 2).value])).toEqual([
+      ['00', 'straight'],
+      ['21', 'hairpin'],
+      ['51', 'closed link'],
+      ['77', 'helix'],
+    ])
+    expect(sheet.getCell('E5').value).toBe('01, 02')
+    expect(sheet.getImages().map(({ range }) => range.tl.nativeRow)).toEqual([4, 5, 6, 7])
+  })
+
+  test('the worst check of each zone and its counts; readings with their state', async () => {
+    const rests = { ...OVER, readingIds: ['en-own-prism'] }
+    const sheet = sheetOf(await readBack({ checks: results([rests, WITHIN]) }), 'Zones')
+    // 588800 / 588200 = 1.00102, shown as 1.01; over 1, within 1
+    expect([1, 2, 3, 4].map((column) => sheet.getCell(5, column).value)).toEqual([
+      'E2-01',
+      'over',
+      'Bearing under the plate',
+      1.01,
+    ])
+    expect([6, 7, 8, 9, 10, 11].map((column) => sheet.getCell(5, column).value)).toEqual([0, 0, 1, 0, 0, 1])
+    expect(sheet.getCell('H6').formula).toBe('SUM(H5:H5)')
+    expect([2, 4].map((column) => sheet.getCell(9, column).value)).toEqual(['not accepted yet', 1])
+  })
+
+  test('one line for what is not issued yet', async () => {
+    const sheet = sheetOf(await readBack(), 'Revisions')
+    expect([1, 2, 3, 4].map((column) => sheet.getCell(4, column).value)).toEqual([
+      '-',
+      '2026-03-02',
+      'D. Rafter (invented)',
+      'First draft: not issued, without a revision letter.',
+    ])
+  })
+
+  test('by kind of bar and the longest bar', async () => {
+    const sheet = sheetOf(await readBack(), 'Summary')
+    const line = (at: number) => [1, 2, 3].map((column) => seen(sheet.getCell(at, column)))
+    expect([10, 11, 12, 13, 14].map((at) => line(at)[0])).toEqual([
+      'spirals',
+      'links',
+      'hairpins',
+      'transverse bars',
+      'edge bars',
+    ])
+    expect(line(14)).toEqual(['edge bars', 2, 19.2])
+    expect(line(16)).toEqual(['Longest bar (mm)', 9600, 'mark 02'])
   })
 })
 

@@ -22,6 +22,9 @@ import {
 export interface Schedule {
   readonly pourId: string
   readonly edition: string
+  readonly standardId: string
+  /** Longest straight bar that is ordered, mm. */
+  readonly stockLength: number
   readonly grade: string
   readonly rows: readonly ScheduleRow[]
   readonly problems: readonly ScheduleProblem[]
@@ -68,6 +71,8 @@ export function scheduleOf(layout: Layout, pourId: string, notYetChecked: readon
   return {
     pourId,
     edition: standard.name,
+    standardId: standard.id,
+    stockLength: settings.stockLength,
     grade: settings.reinforcementGrade,
     rows,
     problems: [
