@@ -117,10 +117,12 @@ describe('Nothing reads within that was not checked', () => {
 
   /** Far from a step in depth; a live anchor under dead ends; bonded strands under bearing; a group in the other plane. */
   function nothingToSay({ kind, edgeId }: Zone, isBonded: boolean): readonly string[] {
+    // Bars stand at anchors alone here: elsewhere there is nothing to fit or to anchor.
+    const noBars = ['fit', 'anchorage']
     // At an edge without anchors nothing pulls on the face.
-    if ((kind === 'edge' || kind === 'gap') && edgeId !== 'E4') return ['spalling']
-    if (kind === 'group') return ['bursting-thickness']
-    if (kind !== 'anchor') return []
+    if ((kind === 'edge' || kind === 'gap') && edgeId !== 'E4') return ['spalling', ...noBars]
+    if (kind === 'group') return ['bursting-thickness', ...noBars]
+    if (kind !== 'anchor') return noBars
     return ['depth-change', ...(isBonded ? ['bearing', 'tendon', 'pan-access'] : ['dead-end'])]
   }
 

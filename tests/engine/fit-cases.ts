@@ -29,7 +29,9 @@ export const steel = (id: string, zone: SteelZone, shape: SteelShape): Steel => 
 export const ofAnchor = (number = 1): SteelZone => ({ kind: 'anchor', anchorId: `E2-${number}` })
 export const ofEdge = (edgeId = 'E2'): SteelZone => ({ kind: 'edge', edgeId })
 
-export const spiralOf = (change: Partial<SteelShape & { kind: 'spiral' }> = {}): SteelShape => ({
+export type Of<K extends SteelShape['kind']> = Extract<SteelShape, { readonly kind: K }>
+
+export const spiralOf = (change: Partial<Of<'spiral'>> = {}): Of<'spiral'> => ({
   kind: 'spiral',
   diameter: 10,
   outside: 150,
@@ -39,7 +41,7 @@ export const spiralOf = (change: Partial<SteelShape & { kind: 'spiral' }> = {}):
   first: 0,
   ...change,
 })
-export const linksOf = (change: Partial<SteelShape & { kind: 'links' }> = {}): SteelShape => ({
+export const linksOf = (change: Partial<Of<'links'>> = {}): Of<'links'> => ({
   kind: 'links',
   diameter: 10,
   width: 300,
@@ -50,7 +52,7 @@ export const linksOf = (change: Partial<SteelShape & { kind: 'links' }> = {}): S
   pitch: 50,
   ...change,
 })
-export const hairpinsOf = (change: Partial<SteelShape & { kind: 'hairpins' }> = {}): SteelShape => ({
+export const hairpinsOf = (change: Partial<Of<'hairpins'>> = {}): Of<'hairpins'> => ({
   kind: 'hairpins',
   diameter: 10,
   leg: 600,
@@ -61,7 +63,7 @@ export const hairpinsOf = (change: Partial<SteelShape & { kind: 'hairpins' }> = 
   pitch: 0,
   ...change,
 })
-export const edgeBarsOf = (change: Partial<SteelShape & { kind: 'edge-bars' }> = {}): SteelShape => ({
+export const edgeBarsOf = (change: Partial<Of<'edge-bars'>> = {}): Of<'edge-bars'> => ({
   kind: 'edge-bars',
   diameter: 12,
   countTop: 1,
@@ -72,7 +74,7 @@ export const edgeBarsOf = (change: Partial<SteelShape & { kind: 'edge-bars' }> =
   to: 6000,
   ...change,
 })
-export const wedgeBarsOf = (change: Partial<SteelShape & { kind: 'wedge-bars' }> = {}): SteelShape => ({
+export const wedgeBarsOf = (change: Partial<Of<'wedge-bars'>> = {}): Of<'wedge-bars'> => ({
   kind: 'wedge-bars',
   diameter: 12,
   length: 1500,
@@ -119,5 +121,5 @@ export function fit(parts: Parts, zoneId: string, name: RegExp) {
 /** Whether any check of a zone is over or a stop. */
 export const faultsOf = (parts: Parts, zoneId: string): string[] =>
   fitOf(layout(parts), zoneId).flatMap((check) =>
-    check.status === 'stop' || check.status === 'over' ? [check.name] : [],
+    check.kind === 'compared' && check.status !== 'within' ? [check.name] : [],
   )

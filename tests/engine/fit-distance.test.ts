@@ -4,7 +4,7 @@ import { segmentsApart } from '../../packages/engine/src/fit/distance'
 import { roundedPath, type Vec } from '../../packages/engine/src/placed/centre-line'
 
 const v = (x: number, y: number, z: number): Vec => ({ x, y, z })
-const apart = (a: Vec, b: Vec, c: Vec, d: Vec) => segmentsApart(a, b, [c, d]).distance
+const apart = (...[a, b, c, d]: readonly [Vec, Vec, Vec, Vec]) => segmentsApart(a, b, [c, d]).distance
 
 describe('segments', () => {
   test('crossing 7 above one another', () => {

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest'
-import type { SteelShape } from '../../packages/engine/src'
+import type { PlacedBarsShape, SteelShape } from '../../packages/engine/src'
 import {
   at,
   edgeBarsOf,
@@ -309,7 +309,7 @@ describe('bodies in one place', () => {
   })
 
   test('local steel that comes with the hardware is a body too', () => {
-    const hardware = [{ ...PLAIN, localSteel: { ...linksOf(), isTested: true } as typeof PLAIN.localSteel }]
+    const hardware = [{ ...PLAIN, localSteel: { ...linksOf(), isTested: true } }]
     const parts = { hardware, anchors: [at(5000), at(5300, {}, 2)] }
     // 300 wide at 300: they touch.
     expect(fit(parts, ANCHOR, /^Clear gap, links/)).toEqual({ status: 'over', there: 0, asked: 25 })
@@ -355,8 +355,15 @@ describe('pans and joints', () => {
     pans: [pan('PN1', { x: 5000, y: 5000, ...change })],
     steel: [steel('s', { kind: 'pan', panId: 'PN1' }, shape)],
   })
-  const placed = (change: Partial<SteelShape & { kind: 'trimmers' }> & { kind: SteelShape['kind'] }): SteelShape =>
-    ({ diameter: 12, length: 1500, count: 2, layers: 'top', runs: 'along', pitch: 100, ...change }) as SteelShape
+  const placed = (change: Partial<PlacedBarsShape> & Pick<PlacedBarsShape, 'kind'>): SteelShape => ({
+    diameter: 12,
+    length: 1500,
+    count: 2,
+    layers: 'top',
+    runs: 'along',
+    pitch: 100,
+    ...change,
+  })
 
   // Middle of the recess at 5500: to 6250. Up to 1 into the wall counts as touching.
   test.each([
