@@ -1,4 +1,4 @@
-import { isTimeZone, type JobData, type Role } from '@wedgeline/contract'
+import { isTimeZone, jobSettingsSchema, type JobData, type Role } from '@wedgeline/contract'
 import { BASIS_SOURCES, STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
 import { write, type Connection } from '../db/client'
 import { checkStored, overtakeJob } from './checking'
@@ -93,6 +93,22 @@ function peopleOf(db: Connection, key: JobKey): { id: string; name: string; role
 }
 
 export type NewJob = Pick<JobData, 'id' | 'number' | 'title' | 'timeZone' | 'basis'>
+
+/** What a job of this basis begins with: the usual settings, and the friction usual in its code. */
+export function settingsOf(basis: NewJob['basis']): JobData['settings'] {
+  const friction = BASIS_SOURCES.find(({ id }) => id === basis)?.friction
+  if (!friction) return jobSettingsSchema.parse({})
+  const { nominal, low, high } = friction.begin
+  return jobSettingsSchema.parse({
+    frictionFamily: friction.family,
+    frictionMu: nominal.mu,
+    frictionWobblePerM: nominal.wobblePerM,
+    frictionMuLow: low.mu,
+    frictionWobbleLowPerM: low.wobblePerM,
+    frictionMuHigh: high.mu,
+    frictionWobbleHighPerM: high.wobblePerM,
+  })
+}
 
 /**
  * Stores a new job; whoever makes it is on it.

@@ -70,8 +70,8 @@ function Sizes({ field, chosen, canSet, error, onChange }: SizesProps) {
   const { label, sizes, unit, usual } = field
   return (
     <View role="group" aria-label={label} style={styles.group}>
-      <Text kind="label">{unit === undefined ? label : `${label} (${unit})`}</Text>
-      {usual ? <Text kind="small" tone="soft">{`Usual: ${usual.range}; ${usual.source}`}</Text> : null}
+      <Text kind="label">{unit === undefined ? label : `${label}, ${unit}`}</Text>
+      {usual ? <Text kind="small" tone="soft">{`Usually ${usual.range} (${usual.source}).`}</Text> : null}
       <View style={styles.sizes}>
         {sizes.map((size) => (
           <Checkbox

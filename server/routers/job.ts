@@ -3,12 +3,20 @@ import {
   importLayoutSchema,
   jobBasisSchema,
   jobMemberSchema,
-  jobSettingsSchema,
   jobTitleSchema,
   newJobSchema,
 } from '@wedgeline/contract'
 import { importLayout } from '../job-import'
-import { addJobMember, createJob, describeJob, listJobs, removeJobMember, renameJob, setBasis } from '../jobs'
+import {
+  addJobMember,
+  createJob,
+  describeJob,
+  listJobs,
+  removeJobMember,
+  renameJob,
+  setBasis,
+  settingsOf,
+} from '../jobs'
 import { companyProcedure, jobPeopleProcedure, jobProcedure, router, signedIn } from '../trpc/builders'
 
 export const jobRouter = router({
@@ -18,9 +26,7 @@ export const jobRouter = router({
     .query(({ ctx }) => describeJob(ctx)),
   create: companyProcedure(['detailer', 'engineer'])
     .input(newJobSchema)
-    .mutation(({ ctx, input: { companyId: _, ...job } }) =>
-      createJob(ctx, { job, settings: jobSettingsSchema.parse({}) }),
-    ),
+    .mutation(({ ctx, input: { companyId: _, ...job } }) => createJob(ctx, { job, settings: settingsOf(job.basis) })),
   importLayout: companyProcedure(['detailer', 'engineer'])
     .input(importLayoutSchema)
     .mutation(({ ctx, input }) => importLayout(ctx, input.layout)),

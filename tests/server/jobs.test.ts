@@ -159,6 +159,16 @@ describe('a question with several answers', () => {
 })
 
 describe('another basis', () => {
+  test('a job begins with the friction usual in its own code (AS 3600 3.4.2.4, EN 1992-1-1 5.10.5.2; from memory)', async () => {
+    const frictionOf = async (basis: 'en-1992' | 'as-3600') => {
+      const { id: jobId } = await detailer.job.create({ ...newJob(), basis })
+      const { frictionMu, frictionWobblePerM } = (await detailer.job.byId({ jobId })).settings
+      return [frictionMu, frictionWobblePerM]
+    }
+    expect(await frictionOf('en-1992')).toEqual([0.19, 0.0075])
+    expect(await frictionOf('as-3600')).toEqual([0.2, 0.02])
+  })
+
   const change = (
     jobId: string,
     basis: 'en-1992' | 'as-3600',

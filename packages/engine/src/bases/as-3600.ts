@@ -94,6 +94,11 @@ export const AS_3600: BasisSource = {
     family: 'inside',
     mu: 'flat duct 0.20, round metal duct 0.15 to 0.20, greased strand 0.15',
     wobble: '0.016 to 0.024',
+    begin: {
+      nominal: { mu: 0.2, wobblePerM: 0.02 },
+      low: { mu: 0.15, wobblePerM: 0.016 },
+      high: { mu: 0.2, wobblePerM: 0.024 },
+    },
     clause: clause('3.4.2.4', 'memory'),
   },
   make,

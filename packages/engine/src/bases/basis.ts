@@ -170,6 +170,8 @@ export interface UsualFriction {
   readonly family: 'inside' | 'outside'
   readonly mu: string
   readonly wobble: string
+  /** With what a job of this basis begins: mu in 1/rad, wobble per metre. */
+  readonly begin: Readonly<Record<'nominal' | 'low' | 'high', { readonly mu: number; readonly wobblePerM: number }>>
   readonly clause: Clause
 }
 

@@ -154,6 +154,11 @@ export const EN_1992: BasisSource = {
     family: 'inside',
     mu: '0.15 to 0.25, nominal 0.19',
     wobble: '0.005 to 0.01',
+    begin: {
+      nominal: { mu: 0.19, wobblePerM: 0.0075 },
+      low: { mu: 0.15, wobblePerM: 0.005 },
+      high: { mu: 0.25, wobblePerM: 0.01 },
+    },
     clause: clause('5.10.5.2 Eq. 5.45', 'memory'),
   },
   make,
