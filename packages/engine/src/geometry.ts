@@ -46,13 +46,19 @@ export function azimuthOf(vector: Point): number {
   return azimuth < 0 ? azimuth + 4 * QUARTER_TURN : azimuth
 }
 
-/** The sides of a closed outline, each from its corner to the next. */
-export function sidesOf(outline: readonly Point[]): [Point, Point][] {
-  return outline.flatMap((corner, i): [Point, Point][] => {
+/** The sides of a closed outline, each from its corner to the next; made once for each outline, which never changes. */
+export function sidesOf(outline: readonly Point[]): readonly (readonly [Point, Point])[] {
+  const known = sidesMade.get(outline)
+  if (known) return known
+  const sides = outline.flatMap((corner, i): [Point, Point][] => {
     const next = outline[(i + 1) % outline.length]
     return next ? [[corner, next]] : []
   })
+  sidesMade.set(outline, sides)
+  return sides
 }
+
+const sidesMade = new WeakMap<readonly Point[], readonly (readonly [Point, Point])[]>()
 
 /** Area in mm2 by the shoelace rule: positive where the corners run counter-clockwise. */
 export function signedArea(outline: readonly Point[]): number {

@@ -49,12 +49,19 @@ export function pairsAmong(index: LayoutIndex, own: readonly Item[], others: rea
   if (!round) return []
   const near = others.filter(({ box }) => boxesNear(box, round, REACH))
   const pairs: Pair[] = []
-  sweep(own, near, (one, other) => {
+  const met = (one: Item, other: Item) => {
     const pair = pairOf(index, one, other)
     if (pair) pairs.push(pair)
-  })
+  }
+  sweep(own, own.length > FEW ? near : [], met)
+  for (const one of own.length > FEW ? [] : own) {
+    for (const other of near) if (boxesNear(one.box, other.box, reachOf(one, other))) met(one, other)
+  }
   return pairs
 }
+
+/** Up to so many items are held against every other one: sorting those takes longer. */
+const FEW = 100
 
 function boxRound(items: readonly Item[]): Box3 | null {
   return items.length === 0
