@@ -17,8 +17,8 @@ import { pathOfZone, type ZonePath } from '../checks/zone-words'
 import { useJobDraft } from '../editing/job-draft'
 import { PourFrame } from '../pour/pour-frame'
 import { problemLines, type ProblemLine } from './schedule-words'
-import { ScheduleTable, TotalsTable } from './schedule-table'
-import { ShapeFigure } from './shape-figure'
+import { DeliveriesTable, KindsTable, ScheduleTables, TotalsTable } from './schedule-table'
+import { DeliveriesSection } from './deliveries-section'
 import { useSchedule, useWorkbookExport } from './use-schedule'
 
 /** The bar schedule of a pour, and its workbook. */
@@ -83,7 +83,6 @@ interface PartsProps {
 }
 
 function ScheduleParts({ jobId, pourId, schedule }: PartsProps) {
-  const codes = [...new Set(schedule.rows.filter(({ member }) => member).map(({ code }) => code))].sort()
   if (schedule.rows.length === 0) {
     return (
       <Empty
@@ -97,29 +96,22 @@ function ScheduleParts({ jobId, pourId, schedule }: PartsProps) {
     <>
       <Problems jobId={jobId} pourId={pourId} schedule={schedule} />
       <Section title="Bar marks">
-        <ScheduleTable schedule={schedule} />
+        <ScheduleTables schedule={schedule} />
       </Section>
-      <View style={styles.halves}>
-        <View style={styles.half}>
-          <Section title="Totals">
-            <TotalsTable schedule={schedule} />
-          </Section>
-        </View>
-        <View style={styles.half}>
-          <Section title="Shapes, not to scale">
-            <View style={styles.shapes}>
-              {codes.map((code) => (
-                <View key={code} style={styles.shape}>
-                  <ShapeFigure code={code} size={1.2} />
-                  <Text kind="small">{`Shape ${code}`}</Text>
-                </View>
-              ))}
-            </View>
-          </Section>
-        </View>
-      </View>
+      <Totals schedule={schedule} />
+      {schedule.chances.length > 0 ? (
+        <Section title="Bars that could take one length">
+          {schedule.chances.map((chance) => (
+            <Text key={chance}>{chance}</Text>
+          ))}
+        </Section>
+      ) : null}
+      <DeliveriesSection pourId={pourId} />
       <Section title="Notes">
         <Text>{`Shapes, dimensions and lengths follow ${schedule.edition}; reinforcement ${schedule.grade}.`}</Text>
+        {rowNotes(schedule).map((note) => (
+          <Text key={note}>{note}</Text>
+        ))}
         {schedule.notes.map((note) => (
           <Text key={note} tone="soft">
             {note}
@@ -135,6 +127,32 @@ function ScheduleParts({ jobId, pourId, schedule }: PartsProps) {
         </Text>
       </Section>
     </>
+  )
+}
+
+function Totals({ schedule }: { readonly schedule: Schedule }) {
+  const { longest } = schedule
+  return (
+    <View style={styles.halves}>
+      <View style={styles.half}>
+        <Section title="Totals">
+          <TotalsTable schedule={schedule} />
+          {longest ? <Text>{`Longest bar: ${longest.length} mm, mark ${longest.mark}.`}</Text> : null}
+        </Section>
+      </View>
+      <View style={styles.half}>
+        <Section title="By kind of bar">
+          <KindsTable schedule={schedule} />
+        </Section>
+      </View>
+      {schedule.deliveries.length > 0 ? (
+        <View style={styles.half}>
+          <Section title="By delivery">
+            <DeliveriesTable schedule={schedule} />
+          </Section>
+        </View>
+      ) : null}
+    </View>
   )
 }
 
@@ -181,11 +199,18 @@ function Problem({ line: { severity, about, message }, href }: ProblemProps) {
   )
 }
 
+/** What a mark's bars need to be known by: turns, roundings, how they were split and lapped. */
+const rowNotes = ({ rows }: Schedule): readonly string[] => {
+  const notes = new Map<string, Set<string>>()
+  for (const { mark, notes: own } of rows) {
+    for (const note of own) notes.set(note, (notes.get(note) ?? new Set<string>()).add(mark))
+  }
+  return [...notes].map(([note, marks]) => `Mark ${[...marks].join(', ')}: ${note}`)
+}
+
 const styles = StyleSheet.create({
   halves: { flexDirection: 'row', flexWrap: 'wrap', gap: space.xl },
   half: { flexGrow: 1, flexBasis: 320, minWidth: 0 },
-  shapes: { flexDirection: 'row', flexWrap: 'wrap', gap: space.l },
-  shape: { alignItems: 'center', gap: space.xs },
   problem: { flexDirection: 'row', gap: space.s, paddingVertical: space.xs },
   words: { flex: 1, minWidth: 0, gap: 2 },
 })

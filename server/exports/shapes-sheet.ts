@@ -52,6 +52,6 @@ function shapeRow(code: string, rows: readonly ScheduleRow[], standard: BarStand
   const own = rows.filter((row) => row.code === code && row.member !== null)
   const formulas = [...new Set(own.flatMap(({ steps: [first] }) => (first ? [first.formula] : [])))]
   const rule = standard?.shapes.find((shape) => shape.code === code)
-  const marks = [...new Set(own.map(({ mark }) => mark))]
-  return [code, rule?.title ?? '', null, formulas.join('; '), marks.join(', ')]
+  const marks = [...new Map(own.map(({ markNumber, mark }) => [markNumber, mark]))].sort(([a], [b]) => a - b)
+  return [code, rule?.title ?? '', null, formulas.join('; '), marks.map(([, mark]) => mark).join(', ')]
 }
