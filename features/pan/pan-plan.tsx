@@ -11,7 +11,6 @@ import { comparedBy, type PanView, type Spot } from './pan-view'
 
 export interface PanPlanProps {
   readonly view: PanView
-  readonly bars: readonly PlacedBar[]
   readonly checks: readonly Check[]
 }
 
@@ -19,7 +18,7 @@ const HEAD_PX = 8
 const FOOT_PX = 28
 
 /** A pan from above, its jack to the right: recess, plate, tendon, bars, the jack's body and what stands in its way. */
-export function PanPlan({ view, bars, checks }: PanPlanProps) {
+export function PanPlan({ view, checks }: PanPlanProps) {
   const [width, setWidth] = useState(0)
   const clip = useId().replace(/[^a-zA-Z0-9]/g, '')
   const scale = width / (view.to - view.from)
@@ -50,7 +49,7 @@ export function PanPlan({ view, bars, checks }: PanPlanProps) {
               <Path key={pan.name} d={pathOf(pan.outline)} fill={colour.sheet} stroke={colour.soft} strokeWidth={1} />
             ))}
             <Recess view={view} draw={draw} />
-            {bars.map((bar, i) => (
+            {view.bars.map((bar, i) => (
               <BarInPlan key={i} bar={bar} draw={draw} />
             ))}
             <Tendon view={view} draw={draw} />
@@ -192,19 +191,16 @@ function Names({ view, draw: { x, y } }: Part) {
   return (
     <G>
       {[...view.obstructions, ...view.otherPans].flatMap(({ name, outline }) => {
-        const along = clamp(middle(outline.map((spot) => spot.along)), view.from, view.to)
-        const across = clamp(middle(outline.map((spot) => spot.across)), -view.side, view.side)
         if (!isSeen(view, outline)) return []
-        const [cx, cy] = [
-          clamp(x(along), x(view.from) + 40, x(view.to) - 40),
-          clamp(y(across), y(view.side) + 14, y(-view.side) - 14),
-        ]
-        const width = name.length * 6.4 + 8
+        const words = name === view.beside?.name ? `${name}, ${Math.round(view.beside.distance)} beside the jack` : name
+        const width = words.length * 6.4 + 8
+        const cx = clamp(x(middle(outline.map((spot) => spot.along))), width / 2, x(view.to) - width / 2)
+        const cy = clamp(y(middle(outline.map((spot) => spot.across))), y(view.side) + 14, y(-view.side) - 14)
         return [
           <G key={name}>
             <Rect x={cx - width / 2} y={cy - 9} width={width} height={16} fill={colour.sheet} />
             <DrawingText x={cx} y={cy + 3} textAnchor="middle">
-              {name}
+              {words}
             </DrawingText>
           </G>,
         ]

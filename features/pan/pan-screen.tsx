@@ -1,6 +1,6 @@
 import { toEngine, type PanData, type PourData, type SteelZoneData } from '@wedgeline/contract'
 import type { Check, LayoutIndex, ZoneResult } from '@wedgeline/engine'
-import { barsOfPan, gridReference, layoutIndex } from '@wedgeline/engine/geometry'
+import { gridReference, layoutIndex } from '@wedgeline/engine/geometry'
 import { useMemo, type ReactNode } from 'react'
 import { ScrollView, StyleSheet, View } from 'react-native'
 import { Button } from '@/components/ui/button'
@@ -49,7 +49,7 @@ function OpenPan({ jobId, pan, pour }: OpenPanProps) {
   const isWide = useWide()
   const checks = usePourChecks(pour.id)
   const index = useMemo(() => layoutIndex(toEngine(layout)), [layout])
-  const view = useMemo(() => panView(index, pan.id), [index, pan.id])
+  const view = useMemo(() => panView(index, pan.id, isWide ? 'wide' : 'phone'), [index, pan.id, isWide])
   const results = useMemo(
     () => checks.result?.zones.filter(({ zone }) => zone.panId === pan.id) ?? [],
     [checks.result, pan.id],
@@ -139,7 +139,6 @@ interface DrawingsProps {
 /** Plan and section one above the other at one scale, with what they show in a line. */
 function Drawings({ index, view, checks }: DrawingsProps) {
   const { pan, jack } = view.place
-  const bars = useMemo(() => barsOfPan(index, pan.id), [index, pan.id])
   const tendon = tendonMark(index, view.place)
   const words = [
     tendon ? `Tendon ${tendon}` : 'No tendon ends here',
@@ -150,7 +149,7 @@ function Drawings({ index, view, checks }: DrawingsProps) {
     <View style={styles.drawn}>
       <Text tone="soft">{words.filter(Boolean).join(' · ')}</Text>
       <View style={styles.sheet}>
-        <PanPlan view={view} bars={bars} checks={checks} />
+        <PanPlan view={view} checks={checks} />
         <PanSection view={view} />
       </View>
       <Text kind="small" tone="soft">

@@ -5,6 +5,9 @@ import { Dimension } from '@/components/drawing/dimension'
 import { colour } from '@/components/theme'
 import type { PanView } from './pan-view'
 
+/** Tendon drawn behind the plate where its straight length is not given, mm. */
+const STRAIGHT = 500
+
 /** Height shown above the slab, and room for the figures below it. */
 const ABOVE_MM = 520
 const FOOT_PX = 30
@@ -18,6 +21,7 @@ export function PanSection({ view }: { readonly view: PanView }) {
   const y = (height: number) => (top + ABOVE_MM - height) * scale
   const slabEnd = Math.min(view.to, beyond(view))
   const left = top - pan.depth - soffit
+  const straight = Math.max(view.from, -(at?.anchor.straightBehind ?? STRAIGHT))
   return (
     <View onLayout={(event) => setWidth(event.nativeEvent.layout.width)}>
       {width === 0 ? null : (
@@ -51,8 +55,8 @@ export function PanSection({ view }: { readonly view: PanView }) {
           {at ? (
             <G>
               <Line
-                x1={x(view.from)}
-                y1={y(at.anchor.height + Math.tan(at.anchor.elevation) * view.from)}
+                x1={x(straight)}
+                y1={y(at.anchor.height + Math.tan(at.anchor.elevation) * straight)}
                 x2={x(0)}
                 y2={y(at.anchor.height)}
                 stroke={colour.steel}
@@ -69,8 +73,8 @@ export function PanSection({ view }: { readonly view: PanView }) {
             </G>
           ) : null}
           <Dimension
-            from={{ x: x(view.from) + 60, y: y(soffit) }}
-            to={{ x: x(view.from) + 60, y: y(top) }}
+            from={{ x: x(view.from) + 14, y: y(soffit) }}
+            to={{ x: x(view.from) + 14, y: y(top) }}
             label={String(top - soffit)}
             side="right"
           />

@@ -1,9 +1,10 @@
-import { ahead, beside, found, jackLength, panOutline, panPlace } from '@wedgeline/engine/geometry'
-import type { Check, Compared, InTheWay, LayoutIndex, PanPlace, Point } from '@wedgeline/engine'
+import { ahead, barsOfPan, beside, found, jackLength, panOutline, panPlace } from '@wedgeline/engine/geometry'
+import type { Check, Compared, InTheWay, LayoutIndex, PanPlace, PlacedBar, Point } from '@wedgeline/engine'
 
 /** What the drawings of a pan show: the pan lies with its jack's axis to the right, north-up forgotten. */
 export interface PanView {
   readonly place: PanPlace
+  readonly bars: readonly PlacedBar[]
   /** Range along the axis from the bearing face, and to each side of it, mm. */
   readonly from: number
   readonly to: number
@@ -30,14 +31,16 @@ export interface Body {
   readonly isStanding: boolean
 }
 
-/** Slab shown behind the bearing face, and beyond whatever ends the drawing in front, mm. */
-const BEHIND = 1500
-const BEYOND = 350
-const IN_FRONT_MAX = 3600
-const SIDE_MIN = 620
+/** Slab shown behind the bearing face, and beyond whatever ends the drawing in front, mm; less of it on a phone. */
+const BEHIND = { wide: 1500, phone: 550 }
+const BEYOND = { wide: 350, phone: 200 }
+const IN_FRONT_MAX = { wide: 3600, phone: 1900 }
+const SIDE = { least: 620, most: 1000, beyondBars: 60 }
 
-export function panView(index: LayoutIndex, panId: string): PanView {
+export function panView(index: LayoutIndex, panId: string, size: 'wide' | 'phone'): PanView {
   const place = panPlace(index, panId)
+  const bars = barsOfPan(index, panId)
+  const reach = Math.max(0, ...bars.flatMap(({ path }) => path.map(({ chainage }) => Math.abs(chainage))))
   const { pan, pour, jack, local } = place
   const needMm = jack ? jackLength(jack).value : null
   const half = (jack?.bodyDiameter ?? 0) / 2
@@ -46,9 +49,10 @@ export function panView(index: LayoutIndex, panId: string): PanView {
   const spots = (outline: readonly Point[]) => outline.map(local)
   return {
     place,
-    from: -BEHIND,
-    to: Math.min(wanted, IN_FRONT_MAX) + BEYOND,
-    side: Math.max(SIDE_MIN, pan.across / 2 + 400),
+    bars,
+    from: -BEHIND[size],
+    to: Math.min(wanted, Math.max(IN_FRONT_MAX[size], needMm ?? 0)) + BEYOND[size],
+    side: Math.max(SIDE.least, pan.across / 2 + 400, Math.min(SIDE.most, reach + SIDE.beyondBars)),
     slab: spots(pour.outline),
     obstructions: index.layout.obstructions
       .filter(({ levelId }) => levelId === pour.levelId)

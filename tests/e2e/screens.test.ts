@@ -28,7 +28,11 @@ afterAll(async () => {
 })
 
 /** Names of the cases do not hang on the demo's ids, so they can be listed before it is there. */
-const NO_DEMO: Demo = { jobId: '', companyId: '', layout: { pours: [], edges: [], anchors: [], hardware: [] } }
+const NO_DEMO: Demo = {
+  jobId: '',
+  companyId: '',
+  layout: { pours: [], edges: [], pans: [], anchors: [], hardware: [] },
+}
 const NAMES = screenCases(NO_DEMO).map(({ name }) => name)
 
 function caseOf(name: string): ScreenCase {

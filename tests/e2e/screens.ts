@@ -16,7 +16,7 @@ export interface ScreenCase {
 export interface Demo {
   readonly jobId: string
   readonly companyId: string
-  readonly layout: Pick<LayoutFile, 'pours' | 'edges' | 'anchors' | 'hardware'>
+  readonly layout: Pick<LayoutFile, 'pours' | 'edges' | 'pans' | 'anchors' | 'hardware'>
 }
 
 const JOB = '(work)/jobs/[jobId]'
@@ -34,7 +34,7 @@ const openMenu = async (page: Page) => {
 
 /** Screens that need somebody signed in. */
 export function screenCases(demo: Demo): readonly ScreenCase[] {
-  return [...jobCases(demo), ...pourCases(demo), ...edgeCases(demo), ...companyCases(demo)]
+  return [...jobCases(demo), ...pourCases(demo), ...edgeCases(demo), ...panCases(demo), ...companyCases(demo)]
 }
 
 function jobCases({ jobId }: Demo): readonly ScreenCase[] {
@@ -94,6 +94,12 @@ function edgeCases({ jobId, layout }: Demo): readonly ScreenCase[] {
   ]
 }
 
+function panCases({ jobId, layout }: Demo): readonly ScreenCase[] {
+  const pan = layout.pans.find(({ mark }) => mark === 'PN03')
+  const path = `/jobs/${jobId}/pans/${pan?.id}`
+  return [{ name: 'pan', route: `${JOB}/pans/[panId].tsx`, path, heading: /^Pan PN03$/, role: 'detailer' }]
+}
+
 function companyCases({ companyId, layout }: Demo): readonly ScreenCase[] {
   const company = `/companies/${companyId}`
   const hardware = `${company}/hardware`
@@ -134,6 +140,7 @@ export function madeUpPaths({ jobId, companyId }: Demo): readonly MadeUp[] {
     { path: '/jobs/nonsense', says: noJob },
     { path: `/jobs/${NOBODY}/edges/${NOBODY}`, says: noJob },
     { path: `${job}/edges/${NOBODY}`, says: /This edge is not in the job/ },
+    { path: `${job}/pans/${NOBODY}`, says: /This pan is not in the job/ },
     { path: `${job}/pours/${NOBODY}`, says: noPour },
     { path: `${job}/pours/${NOBODY}/zones`, says: noPour },
     { path: `${job}/pours/${NOBODY}/schedule`, says: noPour },
