@@ -28,20 +28,28 @@ export interface Imported {
 }
 
 /**
- * Makes a job from a layout file, under new ids. Hardware, jacks and strand types that the company has with the same
+ * Makes a job from a layout file, under new ids; with `isUnfiled` a quick edge. Hardware, jacks and strand types that the company has with the same
  * name and content are used; others are added to it.
  * @param json the layout as its file holds it, of whatever shape
  * @throws Failure with every problem of a layout that cannot be read or contradicts itself, as the command line names
  * them; and for factors that are not the caller's to set.
  */
-export async function importLayout(ctx: StoringCall & Checking, json: unknown): Promise<Imported> {
-  const { jobId, leftOut, toCheck } = storeImport(ctx, json)
+export async function importLayout(
+  ctx: StoringCall & Checking,
+  json: unknown,
+  options: { readonly isUnfiled?: boolean } = {},
+): Promise<Imported> {
+  const { jobId, leftOut, toCheck } = storeImport(ctx, json, options)
   await checkStored(ctx, { companyId: ctx.company.id, jobId }, toCheck)
   return { jobId, leftOut }
 }
 
 /** The same without its checks, which wait until what is stored is there to stay. */
-export function storeImport(ctx: StoringCall, json: unknown): Imported & { readonly toCheck: ToCheck } {
+export function storeImport(
+  ctx: StoringCall,
+  json: unknown,
+  { isUnfiled = false }: { readonly isUnfiled?: boolean } = {},
+): Imported & { readonly toCheck: ToCheck } {
   const { db, company, person } = ctx
   const { layout, leftOut } = permitted(ctx, soundLayout(json))
   const key: JobKey = { companyId: company.id, jobId: uuidv7() }
@@ -49,11 +57,12 @@ export function storeImport(ctx: StoringCall, json: unknown): Imported & { reado
     write(db, (tx) => {
       const stamp = stampOf(ctx)
       const renewed = mergeHardware(tx, { jobId: key.jobId, layout, stamp: { companyId: company.id, ...stamp } })
-      insertJob(tx, { companyId: company.id, data: renewed.job, stamp })
+      insertJob(tx, { companyId: company.id, data: renewed.job, isUnfiled, stamp })
       insertJobMember(tx, key, { personId: person.id, stamp })
       const units = unitsOf(renewed)
       storeChange(tx, { ...key, before: withoutRows(renewed), after: renewed, units, changeNumber: 1, stamp })
-      insertBarMarks(tx, key, { marks: renewed.barMarks, atMs: stamp.atMs })
+      // Nobody has been handed a mark of a quick edge.
+      insertBarMarks(tx, key, { marks: isUnfiled ? [] : renewed.barMarks, atMs: stamp.atMs })
       const { number, title } = renewed.job
       const rows = Object.fromEntries(EDITABLE_TABLES.map((table) => [table, renewed[table].length]))
       recordAudit(tx, {
@@ -61,7 +70,7 @@ export function storeImport(ctx: StoringCall, json: unknown): Imported & { reado
         ...stamp,
         what: 'job.importLayout',
         before: null,
-        after: { number, title, rows, leftOut },
+        after: { number, title, isUnfiled, rows, leftOut },
       })
       const pourIds = renewed.pours.map(({ id }) => id)
       return { layout: loadLayout(tx, key), pourIds, changeNumber: 1, atMs: stamp.atMs }
@@ -157,7 +166,7 @@ function sorted(value: unknown): unknown {
   )
 }
 
-const unitsOf = ({ pours, edges, pans, tendons }: LayoutFile): string[] => [
+export const unitsOf = ({ pours, edges, pans, tendons }: LayoutFile): string[] => [
   'job',
   ...pours.map(({ id }) => `pour:${id}`),
   ...edges.map(({ id }) => `edge:${id}`),
@@ -165,7 +174,8 @@ const unitsOf = ({ pours, edges, pans, tendons }: LayoutFile): string[] => [
   ...tendons.map(({ id }) => `tendon:${id}`),
 ]
 
-const withoutRows = (layout: LayoutFile): LayoutFile => ({
+/** The job with nothing in it. */
+export const withoutRows = (layout: LayoutFile): LayoutFile => ({
   ...layout,
   ...Object.fromEntries(EDITABLE_TABLES.map((table) => [table, []])),
 })

@@ -1,5 +1,13 @@
 import { isTimeZone, jobSettingsSchema, type JobData, type Role } from '@wedgeline/contract'
-import { BASIS_SOURCES, STATUSES, factorProblems, type PourResult } from '@wedgeline/engine'
+import {
+  BASIS_SOURCES,
+  STATUSES,
+  bySeverity,
+  factorProblems,
+  onProposedReadings,
+  type PourResult,
+  type Status,
+} from '@wedgeline/engine'
 import { write, type Connection } from '../db/client'
 import { checkStored, overtakeJob } from './checking'
 import { conflict, missing, refused } from './failure'
@@ -22,7 +30,7 @@ import {
 } from './stores/job'
 import type { JobKey } from './stores/job-key'
 import { membersOf } from './stores/person'
-import { acceptedReadingIds, anchorCounts, pourSummaries } from './stores/result'
+import { acceptedReadingIds, anchorCounts, pourSummaries, resultsOf } from './stores/result'
 import type { CompanyCall, JobCall } from './trpc/context'
 
 type Counts = PourResult['counts']
@@ -34,6 +42,14 @@ export interface PourSummary {
   readonly state: 'draft'
   readonly anchors: number
   readonly counts: Counts
+  /** Of a quick edge, whose counts are on readings that are not accepted; null elsewhere and where all is within. */
+  readonly worst: WorstHere | null
+}
+
+interface WorstHere {
+  readonly zone: string
+  readonly check: string
+  readonly status: Status
 }
 
 const NO_COUNTS = Object.fromEntries(STATUSES.map((status) => [status, 0])) as Counts
@@ -57,9 +73,24 @@ export function listJobs(db: Connection, personId: string) {
         state: 'draft',
         anchors: anchors.get(`${job.id} ${id}`) ?? 0,
         counts: counts ?? NO_COUNTS,
+        worst: null,
+        ...(job.isUnfiled ? quickSummary(db, { companyId: job.companyId, jobId: job.id }, id) : {}),
       })),
     }
   })
+}
+
+/** A quick edge runs on the proposed readings: its counts as they are with those, and its worst check. */
+function quickSummary(db: Connection, key: JobKey, pourId: string): Partial<Pick<PourSummary, 'counts' | 'worst'>> {
+  const [stored] = resultsOf(db, key, [pourId])
+  if (!stored) return {}
+  const { zones, counts } = onProposedReadings({ ...stored, basis: '' })
+  const checks = zones.flatMap(({ zone, checks: [first] }) =>
+    first && first.kind !== 'advice' ? [{ zone: zone.name, check: first }] : [],
+  )
+  const [worst] = checks.sort((one, other) => bySeverity(one.check, other.check))
+  if (!worst || worst.check.status === 'within') return { counts, worst: null }
+  return { counts, worst: { zone: worst.zone, check: worst.check.name, status: worst.check.status } }
 }
 
 /**
@@ -80,6 +111,7 @@ export function describeJob(ctx: JobCall) {
   const key = keyOf(ctx)
   return {
     ...jobData(db, key),
+    isUnfiled: jobRow(db, key).isUnfiled,
     companyId: key.companyId,
     companyName: companyById(db, key.companyId)?.name ?? '',
     members: peopleOf(db, key),
@@ -150,13 +182,15 @@ function assertTimeZone(timeZone: string): void {
   if (!isTimeZone(timeZone)) throw refused(`"${timeZone}" is no time zone; write one as Europe/London.`, 'timeZone')
 }
 
+/** Gives a job its number and title; a quick edge becomes an ordinary job by it. */
 export function renameJob(ctx: JobCall, change: { number: string; title: string }): void {
   const key = keyOf(ctx)
   write(ctx.db, (tx) => {
     const stamp = stampOf(ctx)
-    const { number, title } = jobRow(tx, key)
-    updateJobTitle(tx, key, { ...change, stamp })
-    recordAudit(tx, { ...key, ...stamp, what: 'job.update', before: { number, title }, after: change })
+    const { number, title, isUnfiled } = jobRow(tx, key)
+    const after = { ...change, isUnfiled: false }
+    updateJobTitle(tx, key, { ...after, stamp })
+    recordAudit(tx, { ...key, ...stamp, what: 'job.update', before: { number, title, isUnfiled }, after })
   })
 }
 

@@ -141,7 +141,7 @@ const TABLE_LIMITS = {
 } as const
 
 /** @throws for what would make the layout contradict itself; what was so before stays to be mended. */
-function assertNoNewProblem(before: LayoutFile, after: LayoutFile): void {
+export function assertNoNewProblem(before: LayoutFile, after: LayoutFile): void {
   for (const [table, limit] of Object.entries(TABLE_LIMITS)) {
     const count = after[table as keyof typeof TABLE_LIMITS].length
     if (count > limit)

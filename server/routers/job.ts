@@ -1,5 +1,6 @@
 import {
   byJobSchema,
+  fileQuickEdgeSchema,
   importLayoutSchema,
   jobBasisSchema,
   jobMemberSchema,
@@ -17,6 +18,7 @@ import {
   setBasis,
   settingsOf,
 } from '../jobs'
+import { fileQuickEdge } from '../quick-edge'
 import { companyProcedure, jobPeopleProcedure, jobProcedure, router, signedIn } from '../trpc/builders'
 
 export const jobRouter = router({
@@ -29,10 +31,13 @@ export const jobRouter = router({
     .mutation(({ ctx, input: { companyId: _, ...job } }) => createJob(ctx, { job, settings: settingsOf(job.basis) })),
   importLayout: companyProcedure(['detailer', 'engineer'])
     .input(importLayoutSchema)
-    .mutation(({ ctx, input }) => importLayout(ctx, input.layout)),
+    .mutation(({ ctx, input }) => importLayout(ctx, input.layout, input)),
   update: jobProcedure(['detailer', 'engineer'])
     .input(jobTitleSchema)
     .mutation(({ ctx, input: { number, title } }) => renameJob(ctx, { number, title })),
+  fileQuickEdge: jobProcedure(['detailer', 'engineer'])
+    .input(fileQuickEdgeSchema)
+    .mutation(({ ctx, input: { jobId: _, ...into } }) => fileQuickEdge(ctx, into)),
   setBasis: jobProcedure(['engineer'])
     .input(jobBasisSchema)
     .mutation(({ ctx, input: { jobId: _, ...change } }) => setBasis(ctx, change)),

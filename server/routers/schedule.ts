@@ -1,12 +1,12 @@
 import { byPourSchema } from '@wedgeline/contract'
 import { exportSchedule, scheduleOfPour } from '../schedules'
-import { jobProcedure, router } from '../trpc/builders'
+import { issueProcedure, jobProcedure, router } from '../trpc/builders'
 
 export const scheduleRouter = router({
   byPour: jobProcedure()
     .input(byPourSchema)
     .query(({ ctx, input }) => scheduleOfPour(ctx, input.pourId)),
-  export: jobProcedure(['drafter', 'detailer', 'engineer'])
+  export: issueProcedure(['drafter', 'detailer', 'engineer'])
     .input(byPourSchema)
     .mutation(({ ctx, input }) => exportSchedule(ctx, input.pourId)),
 })

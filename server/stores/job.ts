@@ -63,6 +63,7 @@ export const jobsOf = (db: Connection, personId: string) =>
       number: job.number,
       title: job.title,
       basis: job.basis,
+      isUnfiled: job.isUnfiled,
       updatedAtMs: job.updatedAtMs,
     })
     .from(jobMember)
@@ -75,12 +76,17 @@ export const jobsOf = (db: Connection, personId: string) =>
 
 export function insertJob(
   db: Connection,
-  { companyId, data, stamp }: { companyId: string; data: JobData; stamp: Stamp },
+  {
+    companyId,
+    data,
+    isUnfiled = false,
+    stamp,
+  }: { companyId: string; data: JobData; isUnfiled?: boolean; stamp: Stamp },
 ): void {
   const { id, number, title, timeZone, basis, settings, factors, readings } = data
   const key = { companyId, jobId: id }
   db.insert(job)
-    .values({ companyId, id, number, title, timeZone, basis, settings, ...created(stamp) })
+    .values({ companyId, id, number, title, timeZone, basis, settings, isUnfiled, ...created(stamp) })
     .run()
   putFactors(db, key, factors)
   for (const reading of readings) insertReading(db, key, { ...reading, personId: stamp.personId })
@@ -96,7 +102,7 @@ export function countChange(db: Connection, key: JobKey): number {
 export function updateJobTitle(
   db: Connection,
   key: JobKey,
-  { stamp, ...change }: { number: string; title: string; stamp: Stamp },
+  { stamp, ...change }: { number: string; title: string; isUnfiled: boolean; stamp: Stamp },
 ): void {
   db.update(job)
     .set({ ...change, ...updated(stamp) })
@@ -152,6 +158,11 @@ export function deleteJobMember(db: Connection, key: JobKey, personId: string): 
   db.delete(jobMember)
     .where(and(ofJob(jobMember, key), eq(jobMember.personId, personId)))
     .run()
+}
+
+/** Takes everybody off a job: nobody's list has it any more. */
+export function deleteJobMembers(db: Connection, key: JobKey): void {
+  db.delete(jobMember).where(ofJob(jobMember, key)).run()
 }
 
 // Readings ----------------------------------------------------------------------------------------------------------

@@ -80,7 +80,19 @@ export const byJobSchema = z.strictObject({ jobId: idSchema })
 export const byPourSchema = z.strictObject({ jobId: idSchema, pourId: idSchema })
 export const companyNameSchema = z.strictObject({ companyId: idSchema, name: label(120), note: text(500).default('') })
 /** `layout` is read by readLayout, whose messages name its fields as the file's writer knows them. */
-export const importLayoutSchema = z.strictObject({ companyId: idSchema, layout: z.unknown() })
+export const importLayoutSchema = z.strictObject({
+  companyId: idSchema,
+  layout: z.unknown(),
+  /** A quick edge: kept, and in no job of its own yet. */
+  isUnfiled: z.boolean().default(false),
+})
+/** Puts the pour of a quick edge into another job, on a level of it or on a new one. */
+export const fileQuickEdgeSchema = z.strictObject({
+  jobId: idSchema,
+  intoJobId: idSchema,
+  mark: label(12),
+  level: z.union([z.strictObject({ id: idSchema }), z.strictObject({ mark: label(12) })]),
+})
 /** A page of what was done on a job, newest first; `before` is the last entry that was seen. */
 export const auditListSchema = z.strictObject({
   jobId: idSchema,

@@ -48,6 +48,7 @@ export {
   byJobSchema,
   byPourSchema,
   companyNameSchema,
+  fileQuickEdgeSchema,
   importLayoutSchema,
   invitationSchema,
   invitationTokenSchema,

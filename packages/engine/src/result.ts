@@ -103,6 +103,8 @@ export interface Compared extends CheckHead {
   readonly readingIds: readonly string[]
   /** What the status is once the readings are accepted; equal to status otherwise. */
   readonly statusOnceAccepted: Exclude<Status, 'not-covered'>
+  /** Set where `status` is the one on readings that are proposed and not accepted (`onProposedReadings`). */
+  readonly isOnProposed?: true
   /** The layout field that mends it, where one does, with the value that would just do; named as in a refusal. */
   readonly mend: { readonly field: string; readonly value: number } | null
 }
