@@ -153,7 +153,7 @@ function DeliveryFields({ delivery, members, disabled, onSet, onRemove }: Delive
 }
 
 const styles = StyleSheet.create({
-  fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m, alignItems: 'flex-end' },
+  fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.m, alignItems: 'flex-start' },
   field: { flexGrow: 1, flexBasis: 220, maxWidth: 360, minWidth: 0 },
   delivery: { gap: space.s, paddingTop: space.m, borderTopWidth: 1, borderTopColor: colour.line },
   members: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l },

@@ -17,7 +17,7 @@ const columns: readonly Column<ScheduleRow>[] = [
   { key: 'total', head: 'Total', align: 'end', cell: ({ total }) => total },
   { key: 'length', head: 'Length, mm', align: 'end', cell: ({ length }) => length ?? 'see problems' },
   { key: 'code', head: 'Code', align: 'end', cell: ({ code }) => code },
-  { key: 'shape', head: 'Shape', cell: ({ code }) => <ShapeFigure code={code} size={0.6} /> },
+  { key: 'shape', head: 'Shape', cell: ({ code }) => <ShapeFigure code={code} size={0.8} /> },
   ...DIMENSIONS.map((name): Column<ScheduleRow> => ({
     key: name,
     head: name,

@@ -19,7 +19,7 @@ export function ShapeFigure({ code, size = 1 }: { readonly code: string; readonl
     >
       <Path d={`M${line}`} stroke={colour.rust} strokeWidth={2} fill="none" />
       {drawing.labels.map(({ name, x, y }) => (
-        <DrawingText key={name} x={x} y={y + 4} size={11} textAnchor="middle">
+        <DrawingText key={name} x={x} y={y + 4} size={size < 1 ? 13 : 11} textAnchor="middle">
           {name}
         </DrawingText>
       ))}
