@@ -95,11 +95,15 @@ export function wedgeBars(
   const sectionOf = (chainage: number) =>
     sectionBehind(pour, { frame, chainage, depth: coverOf(chainage) + shape.length / 2 })
   const coverOf = (chainage: number) => sectionBehind(pour, { frame, chainage, depth: 0 }).coverEdge
+  const coverInside = (chainage: number) => {
+    const { coverEdge, linkDiameter } = sectionBehind(pour, { frame, chainage, depth: 0 })
+    return coverEdge + linkDiameter
+  }
   const layersAt = (chainage: number) => layersOf(sectionOf(chainage), { ...shape, way: frame.inward, mats: pour.mats })
   return layersAt((from + to) / 2).flatMap(({ face }) => {
     const heightAt = (chainage: number) => layersAt(chainage).find((layer) => layer.face === face)?.height ?? 0
     const clear = (end: TendonEnd | undefined, chainage: number) =>
-      clearAt(end, { bar: shape.diameter, height: heightAt(chainage), cover: coverOf(chainage) })
+      clearAt(end, { bar: shape.diameter, height: heightAt(chainage), cover: coverInside(chainage) })
     const first = Math.max(from + pitch / 2, from + clear(after, from + pitch / 2))
     const last = Math.min(to - pitch / 2, to - clear(before, to - pitch / 2))
     const step = shape.count > 1 ? (last - first) / (shape.count - 1) : 0

@@ -109,10 +109,16 @@ export function planNeed(bench: Bench, site: AnchorSite, need: Compared): Transv
     sizes: bench.sizes.map(({ diameter }) => diameter),
     plateWidth: site.hardware.plate.width,
     aside: 0,
-    toEnd: Math.min(site.toStart ?? Infinity, site.toEnd ?? Infinity) - site.pour.coverEdge,
+    toEnd: Math.min(site.toStart ?? Infinity, site.toEnd ?? Infinity) - coverInside(site),
     layers: sectionStepNear(site, STEP_REACH) === null ? ['both'] : ['both', 'top', 'bottom'],
     clearGap: clearGapOf(bench, site),
   }
+}
+
+/** Cover of bar ends at a side of the concrete, inside a region's links. */
+function coverInside({ pour, frame, anchor }: AnchorSite): number {
+  const { coverEdge, linkDiameter } = sectionBehind(pour, { frame, chainage: anchor.chainage, depth: anchor.setBack })
+  return coverEdge + linkDiameter
 }
 
 function thicknessNeed(bench: Bench, site: AnchorSite, need: Compared): ThicknessNeed {

@@ -133,7 +133,9 @@ export function groundWith(bench: Bench, place: Place, shapes: readonly SteelSha
 }
 
 /** Distinct sets of marks that are kept for the choice over the pour. */
-const OPTIONS_KEPT = 8
+const OPTIONS_KEPT = 5
+/** Candidates that are tried in one zone: where so many of the lightest do not pass, heavier ones are stopped by the same. */
+const TRIES_MAX = 60
 /** Reasons that are worth reading where nothing passes. */
 const BLOCKED_KEPT = 6
 
@@ -146,7 +148,7 @@ export function tryAll(bench: Bench, place: Place, { candidates, blocked: imposs
   const options = new Map<string, Option>()
   const blocked: Blocked[] = [...impossible]
   for (const { shapes } of ordered) {
-    if (options.size >= OPTIONS_KEPT) break
+    if (options.size >= OPTIONS_KEPT || blocked.length - impossible.length >= TRIES_MAX) break
     const id = barsIn(shapes)
     if (options.has(id)) continue
     const refused = refusedBy(bench, place, { shapes, before })

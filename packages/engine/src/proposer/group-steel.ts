@@ -7,6 +7,9 @@ import { planNeed } from './anchor-steel'
 import { transverseBars, transverseSets, type StraightBar } from './transverse-bars'
 import { needsOf, unmetOf } from './verdict'
 
+/** Moved so far into the slab they stand clear of the member's own bars, mm. */
+const ASIDE = [0, 35, -35] as const
+
 export interface GroupSteel {
   readonly candidates: readonly Candidate[]
   readonly bars: readonly StraightBar[]
@@ -24,5 +27,6 @@ export function groupSteel(bench: Bench, { zone, steelZone }: Place, shared: rea
   const need = { ...alone, aside, plateWidth: 2 * reach }
   const own = transverseBars(need)
   const sets = [...own, ...shared].flatMap((bar) => transverseSets(need, bar))
-  return { candidates: sets.map((set) => ({ shapes: [set] })), bars: own }
+  const moved = sets.flatMap((set) => ASIDE.map((by) => ({ ...set, first: set.first + by })))
+  return { candidates: moved.map((set) => ({ shapes: [set] })), bars: own }
 }

@@ -11,7 +11,7 @@ import type { Zone } from '../result'
 /** Bars of places farther than this from a zone hardly ever meet its own, mm. */
 const NEAR = 1500
 
-/** @returns the whole layout for zones that have no one place: joints, and edges from end to end. */
+/** @returns the whole layout for an edge, whose bars run from end to end. */
 export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
   const line = lineOf(index, zone)
   if (!line) return index
@@ -34,7 +34,7 @@ export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
     if (shape.kind === 'wedge-bars') return false
     if (at.kind === 'anchor') return anchorIds.has(at.anchorId)
     if (at.kind === 'pan') return panIds.has(at.panId)
-    return at.kind === 'joint' ? false : edgeIds.has(at.edgeId)
+    return at.kind === 'joint' ? `joint:${at.jointId}` === zone.id : edgeIds.has(at.edgeId)
   })
   return {
     ...index,
@@ -46,7 +46,7 @@ export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
       ...index.layout,
       edges,
       pans,
-      joints: [],
+      joints: index.layout.joints.filter(({ id }) => `joint:${id}` === zone.id),
       anchors,
       steel,
       obstructions: index.layout.obstructions.filter(({ outline }) => outline.some(isNear)),
@@ -54,13 +54,13 @@ export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
   }
 }
 
-/** From one end of a zone to the other; a pan is a point. Null for a whole edge or a joint. */
+/** From one end of a zone to the other; a pan is a point. Null for a whole edge. */
 function lineOf(index: LayoutIndex, { kind, edgeId, panId, from, to }: Zone): [Point, Point] | null {
   if (panId !== null) {
     const pan = found(index.pans, panId, 'pan')
     return [pan, pan]
   }
-  if (edgeId === null || from === null || to === null || kind === 'edge' || kind === 'joint') return null
+  if (edgeId === null || from === null || to === null || kind === 'edge') return null
   const { pointAt } = found(index.frames, edgeId, 'edge')
   return [pointAt(from, 0), pointAt(to, 0)]
 }

@@ -4,7 +4,7 @@ import type { PlacedBarsShape } from '../model'
 import type { BarSize } from '../schedule/bar-standards'
 import { panNeeds, type PanNeed } from '../pan-needs'
 import { placedAt } from '../checks/pan-bars'
-import type { Bench, Place } from './bench'
+import { isFixable, type Bench, type Place } from './bench'
 import type { Candidates } from './candidate'
 
 /** Ties are set out further from the tendon by these, until they pass the trimmers, mm. */
@@ -12,18 +12,29 @@ const ASIDE = [0, 25, 50, 75, 100, 125, 150, 200, 250, 300] as const
 
 const SHORTER = [0, 5, 10, 15, 20] as const
 
-export function panSteel(bench: Bench, { zone }: Place): Candidates {
+export function panSteel(bench: Bench, place: Place): Candidates {
+  const { zone } = place
   if (zone.panId === null) return { candidates: [], blocked: [] }
   const there = placedAt(bench.context.index, zone.panId)
   const needs = panNeeds(bench.context.index, bench.context.basis, zone.panId)
   const unmet = needs.filter((need) => need.area > need.count(there).area)
   const strips = unmet.filter(({ purpose }) => purpose === 'strip')
   const cuts = unmet.filter(({ purpose }) => purpose === 'cut-bars')
+  // Of sets of one size the first that can be fixed; where none can, the first, for its reason to be named.
+  const fixable = (sets: readonly PlacedBarsShape[][]) => {
+    const first = sets.find((set) => isFixable(bench, place, set)) ?? sets[0]
+    return first ? [first] : []
+  }
   const parts = [
-    ...worstTie(unmet).map((tie) => ({ needs: [tie], sets: bench.sizes.flatMap((size) => tiesAside(tie, size)) })),
+    ...worstTie(unmet).map((tie) => ({
+      needs: [tie],
+      sets: bench.sizes.flatMap((size) => fixable(tiesAside(tie, size))),
+    })),
     ...cuts.map((cut) => ({ needs: [cut], sets: [setOf([cut], cut.diameter ?? 0)].filter((set) => set !== null) })),
     // Bars of one size at both faces: one mark.
-    ...(strips.length > 0 ? [{ needs: strips, sets: bench.sizes.flatMap((size) => stripsOf(strips, size)) }] : []),
+    ...(strips.length > 0
+      ? [{ needs: strips, sets: bench.sizes.flatMap((size) => fixable(stripsOf(strips, size))) }]
+      : []),
   ]
   const without = parts.filter(({ sets }) => sets.length === 0).flatMap((part) => part.needs)
   return {

@@ -32,7 +32,7 @@ const LEG_STEP = 25
 const FIRST_LINK = 30
 const LINK_PITCHES = [50, 75, 100] as const
 /** Beyond the plate on either side (common practice). */
-const BESIDE_PLATE = [40, 20] as const
+const BESIDE_PLATE = [40, 20, 0] as const
 const SPIRAL_PITCHES = [40, 50, 60] as const
 /** A spiral fits a plate that is nearly square. */
 const SQUARE_RATIO_MAX = 1.5
