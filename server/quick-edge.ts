@@ -114,6 +114,12 @@ function addedRows(quick: LayoutFile, job: LayoutFile, { mark, level, into }: Fi
   const renewed = renewIds(quick, { jobId: into.jobId, ...companyIds(quick) })
   const known = 'id' in level ? job.levels.find(({ id }) => id === level.id) : undefined
   if ('id' in level && !known) throw refused('That level is not in the job any more. Choose another.', 'level')
+  if (known && job.pours.some((other) => other.levelId === known.id && other.mark === mark)) {
+    throw refused(`Level ${known.mark} has a pour ${mark} already. Choose another mark.`, 'mark')
+  }
+  if ('mark' in level && job.levels.some((other) => other.mark === level.mark)) {
+    throw refused(`The job has a level ${level.mark} already. Choose it, or another mark.`, 'level')
+  }
   const home = known ?? { id: renewed.levels[0]?.id ?? '', mark: 'mark' in level ? level.mark : '', title: '' }
   const named = withFreeMarks(withLevel(renewed, home.id), job, home.id)
   const placed = shifted(named, downBeside(named.pours, job, home.id))
@@ -142,26 +148,38 @@ function withLevel(layout: LayoutFile, levelId: string): LayoutFile {
   }
 }
 
-/** Edges and their lines take the next free number of the level where theirs is taken there. */
+/** Edges, their lines and pans take the next free number of the level where their mark is taken there. */
 function withFreeMarks(layout: LayoutFile, job: LayoutFile, levelId: string): LayoutFile {
   const pours = new Set(job.pours.filter((pour) => pour.levelId === levelId).map(({ id }) => id))
-  const taken = new Set([
-    ...job.edgeLines.filter((line) => line.levelId === levelId).map(({ mark }) => mark),
-    ...job.edges.filter(({ pourId }) => pours.has(pourId)).map(({ mark }) => mark),
-  ])
+  const here = <T extends { readonly pourId: string }>(rows: readonly T[]) =>
+    rows.filter(({ pourId }) => pours.has(pourId))
+  const lines = job.edgeLines.filter((line) => line.levelId === levelId)
+  const edges = freeMarks([...layout.edgeLines, ...layout.edges], [...lines, ...here(job.edges)], 'E')
+  const pans = freeMarks(layout.pans, here(job.pans), 'P')
+  return {
+    ...layout,
+    edgeLines: layout.edgeLines.map(edges),
+    edges: layout.edges.map(edges),
+    pans: layout.pans.map(pans),
+  }
+}
+
+interface Marked {
+  readonly mark: string
+}
+
+/** Gives a row its new mark; one mark is renamed to the same mark wherever it stands. */
+function freeMarks(rows: readonly Marked[], there: readonly Marked[], prefix: string) {
+  const taken = new Set(there.map(({ mark }) => mark))
   const marks = new Map<string, string>()
-  for (const { mark } of [...layout.edgeLines, ...layout.edges]) {
+  for (const { mark } of rows) {
     if (marks.has(mark)) continue
     let free = mark
-    for (let number = 1; taken.has(free); number++) free = `E${number}`
+    for (let number = 1; taken.has(free); number++) free = `${prefix}${number}`
     taken.add(free)
     marks.set(mark, free)
   }
-  const renamed = <T extends { readonly mark: string }>(row: T): T => ({
-    ...row,
-    mark: marks.get(row.mark) ?? row.mark,
-  })
-  return { ...layout, edgeLines: layout.edgeLines.map(renamed), edges: layout.edges.map(renamed) }
+  return <T extends Marked>(row: T): T => ({ ...row, mark: marks.get(row.mark) ?? row.mark })
 }
 
 /** Left between the pour and what its level holds already, mm. */

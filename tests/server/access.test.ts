@@ -78,6 +78,7 @@ const EXPECTED: Record<string, Record<CallerName, Verdict>> = {
   'job.importLayout': inCompany('detailer', 'engineer'),
   'job.byId': onJob(...ALL),
   'job.update': onJob('detailer', 'engineer'),
+  'job.fileQuickEdge': onJob('detailer', 'engineer'),
   'job.setBasis': onJob('engineer'),
   'job.addMember': peopleOfJob('detailer', 'engineer', 'admin'),
   'job.removeMember': peopleOfJob('detailer', 'engineer', 'admin'),

@@ -50,7 +50,11 @@ export async function openPopulated(): Promise<Populated> {
   const { jobId } = await detailer.job.importLayout({ companyId: company.id, layout: sampleLayout() })
   const people = addOthers(server)
   const onJob = [...ROLES.filter((role) => role !== 'detailer'), 'everything' as const]
-  for (const name of onJob) await detailer.job.addMember({ jobId, personId: people[name] })
+  const quick = await detailer.job.importLayout({ companyId: company.id, layout: sampleLayout(), isUnfiled: true })
+  for (const name of onJob) {
+    await detailer.job.addMember({ jobId, personId: people[name] })
+    await detailer.job.addMember({ jobId: quick.jobId, personId: people[name] })
+  }
   const { layout, versions } = await detailer.layout.byJob({ jobId })
   await company.as('engineer').reading.accept({ jobId, readingId: READING, reason: 'As the test needs.' })
   return {
@@ -58,7 +62,7 @@ export async function openPopulated(): Promise<Populated> {
     jobId,
     fileId: await addRecords(server, jobId),
     people,
-    inputs: validInputs({ companyId: company.id, jobId, layout, versions }),
+    inputs: validInputs({ companyId: company.id, jobId, quickId: quick.jobId, layout, versions }),
     call(name, path, input) {
       const caller = createCaller(contextFor(server, name === 'nobody' ? null : people[name])) as unknown as AnyCaller
       const [area = '', procedure = ''] = path.split('.')
@@ -78,6 +82,8 @@ export async function openPopulated(): Promise<Populated> {
 interface Loaded {
   readonly companyId: string
   readonly jobId: string
+  /** A quick edge with the same people on it. */
+  readonly quickId: string
   readonly layout: LayoutFile
   readonly versions: Readonly<Record<string, number>>
 }
@@ -131,7 +137,7 @@ async function addRecords({ db, company, files }: TestServer, jobId: string): Pr
 }
 
 /** An input for each procedure that a caller with the right to it gets an answer to. */
-function validInputs({ companyId, jobId, layout, versions }: Loaded): Record<string, unknown> {
+function validInputs({ companyId, jobId, quickId, layout, versions }: Loaded): Record<string, unknown> {
   const pourId = layout.pours[0]?.id
   const anchor = layout.anchors[0]
   const sample = sampleLayout()
@@ -160,6 +166,7 @@ function validInputs({ companyId, jobId, layout, versions }: Loaded): Record<str
     'job.importLayout': { companyId, layout: sample },
     'job.byId': { jobId },
     'job.update': { jobId, number: '8', title: 'Eight' },
+    'job.fileQuickEdge': { jobId: quickId, intoJobId: jobId, mark: 'Q1', level: { mark: 'Q' } },
     'job.setBasis': { jobId, basis: 'en-1992', settings: layout.job.settings, factors: [] },
     'job.addMember': { jobId, personId: 'leaver' },
     'job.removeMember': { jobId, personId: 'north-inspector' },
