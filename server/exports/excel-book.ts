@@ -1,12 +1,13 @@
 import ExcelJS from 'exceljs'
 import type { BookProperties, BookWriter, CellStyle, CellValue, SheetWriter, TableBlock } from './book-writer'
+import { withoutTimes } from './zip-times'
 
 const FONT = 'Calibri'
 const A4 = 9
 const FILL = 'FFE7E2D6'
 const RULE = 'FFD2CCBD'
 
-/** An Excel workbook in memory. The same calls give the same cells. */
+/** An Excel workbook in memory. The same calls give the same bytes. */
 export function excelBook(properties: BookProperties): BookWriter {
   const book = new ExcelJS.Workbook()
   const at = new Date(properties.atMs)
@@ -19,7 +20,7 @@ export function excelBook(properties: BookProperties): BookWriter {
   return {
     sheet: (name) => sheetWriter(book, book.addWorksheet(name)),
     name: (name, range) => book.definedNames.add(range, name),
-    finish: async () => Buffer.from(await book.xlsx.writeBuffer()),
+    finish: async () => withoutTimes(Buffer.from(await book.xlsx.writeBuffer())),
   }
 }
 

@@ -151,7 +151,7 @@ const deliverySchema = z.strictObject({
   id: idSchema,
   name: label(40),
   /** Day of the year as ISO 8601 writes it; null where none is agreed. */
-  neededOn: z.iso.date().nullable().default(null),
+  neededOn: z.iso.date('must be a day such as 2026-03-09').nullable().default(null),
   edgeIds: z.array(idSchema).max(LIMITS.corners).default([]),
   panIds: z.array(idSchema).max(5000).default([]),
 })
