@@ -1,6 +1,6 @@
 import { toEngine, type PanData, type PourData, type SteelZoneData } from '@wedgeline/contract'
 import type { Check, LayoutIndex, ZoneResult } from '@wedgeline/engine'
-import { gridReference, layoutIndex } from '@wedgeline/engine/geometry'
+import { gridReference, layoutIndex, slabBeyond } from '@wedgeline/engine/geometry'
 import { useMemo, type ReactNode } from 'react'
 import { ScrollView, StyleSheet, View } from 'react-native'
 import { Button } from '@/components/ui/button'
@@ -200,7 +200,7 @@ function Parts({ jobId, pan, pour, view, own, anchorResult }: PartsProps) {
             .filter(({ id, pourId }) => pourId === pour.id && id !== pan.id)
             .map(({ id }) => ({ kind: 'pan', panId: id }))}
           likeWords="pans of the pour"
-          usual={(kind) => usualPanSteel(kind, { pan, pour })}
+          usual={(kind) => usualPanSteel(kind, { pan, pour, toEdgeMm: slabBeyond(view.place) })}
         />
       </Part>
       {at ? (

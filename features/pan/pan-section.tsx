@@ -8,6 +8,9 @@ import type { PanView } from './pan-view'
 /** Tendon drawn behind the plate where its straight length is not given, mm. */
 const STRAIGHT = 500
 
+/** The depth of the slab stands at the left end of the section, mm. */
+const CLEAR_OF_FIGURES = 160
+
 /** Height shown above the slab, and room for the figures below it. */
 const ABOVE_MM = 520
 const FOOT_PX = 30
@@ -21,7 +24,7 @@ export function PanSection({ view }: { readonly view: PanView }) {
   const y = (height: number) => (top + ABOVE_MM - height) * scale
   const slabEnd = Math.min(view.to, beyond(view))
   const left = top - pan.depth - soffit
-  const straight = Math.max(view.from, -(at?.anchor.straightBehind ?? STRAIGHT))
+  const straight = Math.max(view.from + CLEAR_OF_FIGURES, -(at?.anchor.straightBehind ?? STRAIGHT))
   return (
     <View onLayout={(event) => setWidth(event.nativeEvent.layout.width)}>
       {width === 0 ? null : (
