@@ -1,46 +1,61 @@
-import type { Layout, PourResult } from '@wedgeline/engine'
-import { checkDirectly } from './engine-direct'
-import type { CheckReply, CheckRequest } from './engine.worker'
+import type { Layout, PourResult, Proposal, ProposeAsk, Schedule } from '@wedgeline/engine'
+import { answerDirectly } from './engine-direct'
+import type { EngineAnswer, EngineReply, EngineRequest, EngineTask } from './engine-request'
 
 /**
- * Asks the engine for a pour's checks while somebody types. The latest edit wins: while one request runs only the
- * newest waiting one of each pour is kept, and an older answer is never shown over a newer one.
+ * Asks the engine while somebody types. The latest edit wins: while one request runs only the newest waiting one of each
+ * kind and pour is kept, and an older answer is never shown over a newer one.
  */
 export class EngineClient {
   private readonly worker: Worker | null
   private running: Pending | null = null
-  /** By pour, in the order in which they were asked for. */
+  /** By kind and pour, in the order in which they were asked for. */
   private readonly waiting = new Map<string, Pending>()
   private nextId = 1
 
   constructor(makeWorker: (() => Worker) | null) {
     this.worker = makeWorker?.() ?? null
-    if (this.worker) this.worker.onmessage = (event: MessageEvent<CheckReply>) => this.answered(event.data)
+    if (this.worker) this.worker.onmessage = (event: MessageEvent<EngineReply>) => this.answered(event.data)
   }
 
-  /** Answers null when a newer request took this one's place. */
-  check(layout: Layout, pourId: string): Promise<PourResult | null> {
-    if (!this.worker) return direct(layout, pourId)
-    return new Promise((resolve, reject) => {
-      this.waiting.get(pourId)?.resolve(null)
-      this.waiting.set(pourId, { request: { id: this.nextId++, layout, pourId }, resolve, reject })
-      this.start()
-    })
+  /** The checks of a pour. Answers null when a newer request took this one's place, as the others do. */
+  async check(layout: Layout, pourId: string): Promise<PourResult | null> {
+    return (await this.ask({ layout, pourId, task: { does: 'check' } })) as PourResult | null
+  }
+
+  async propose(layout: Layout, ask: ProposeAsk): Promise<Proposal | null> {
+    return (await this.ask({ layout, pourId: ask.pourId, task: { does: 'propose', ask } })) as Proposal | null
+  }
+
+  /** The bars of a pour by mark. What was not checked is not asked here. */
+  async schedule(layout: Layout, pourId: string): Promise<Schedule | null> {
+    return (await this.ask({ layout, pourId, task: { does: 'schedule' } })) as Schedule | null
   }
 
   close(): void {
     this.worker?.terminate()
   }
 
+  private ask({ layout, pourId, task }: Asked): Promise<EngineAnswer | null> {
+    const request = { id: this.nextId++, layout, pourId, ...task }
+    if (!this.worker) return direct(request)
+    return new Promise((resolve, reject) => {
+      const place = `${task.does} ${pourId}`
+      this.waiting.get(place)?.resolve(null)
+      this.waiting.set(place, { place, request, resolve, reject })
+      this.start()
+    })
+  }
+
   private start(): void {
     const [next] = this.waiting.values()
     if (this.running || !next) return
-    this.waiting.delete(next.request.pourId)
+    this.waiting.delete(next.place)
     this.running = next
     this.worker?.postMessage(next.request)
   }
 
-  private answered(reply: CheckReply): void {
+  private answered(reply: EngineReply): void {
     const done = this.running
     if (!done || done.request.id !== reply.id) return
     this.running = null
@@ -50,14 +65,21 @@ export class EngineClient {
   }
 }
 
-function direct(layout: Layout, pourId: string): Promise<PourResult> {
-  if (checkDirectly) return Promise.resolve(checkDirectly(layout, pourId))
-  return Promise.reject(new Error('This browser has no workers, which the checks run in. Use a current browser.'))
+interface Asked {
+  readonly layout: Layout
+  readonly pourId: string
+  readonly task: EngineTask
+}
+
+async function direct(request: EngineRequest): Promise<EngineAnswer> {
+  if (answerDirectly) return Promise.resolve(answerDirectly(request))
+  throw new Error('This browser has no workers, which the checks run in. Use a current browser.')
 }
 
 interface Pending {
-  readonly request: CheckRequest
-  readonly resolve: (result: PourResult | null) => void
+  readonly place: string
+  readonly request: EngineRequest
+  readonly resolve: (result: EngineAnswer | null) => void
   readonly reject: (error: Error) => void
 }
 

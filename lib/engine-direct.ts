@@ -1,5 +1,5 @@
-import { checkPour, type Layout, type PourResult } from '@wedgeline/engine'
+import { engineAnswer } from './engine-answer'
+import type { EngineAnswer, EngineRequest } from './engine-request'
 
 /** The engine on the thread that asks, where the platform has no workers. */
-export const checkDirectly: ((layout: Layout, pourId: string) => PourResult) | null = (layout, pourId) =>
-  checkPour(layout, { pourId, withSteps: true })
+export const answerDirectly: ((request: EngineRequest) => EngineAnswer) | null = engineAnswer

@@ -1,4 +1,4 @@
-import type { Layout, PourResult } from '@wedgeline/engine'
+import type { EngineAnswer, EngineRequest } from './engine-request'
 
 /** Every browser has workers: the engine is left out of the page's own code, where it would be loaded twice. */
-export const checkDirectly: ((layout: Layout, pourId: string) => PourResult) | null = null
+export const answerDirectly: ((request: EngineRequest) => EngineAnswer) | null = null

@@ -1,21 +1,15 @@
-import { checkPour, type Layout, type PourResult } from '@wedgeline/engine'
+import { engineAnswer } from './engine-answer'
+import type { EngineReply, EngineRequest } from './engine-request'
 
-/** Runs the engine off the main thread: plain data in, plain data out. */
-export interface CheckRequest {
-  readonly id: number
-  readonly layout: Layout
-  readonly pourId: string
-}
-export type CheckReply =
-  { readonly id: number; readonly result: PourResult } | { readonly id: number; readonly failure: string }
-
-self.onmessage = ({ data }: MessageEvent<CheckRequest>) => {
+/** Runs the engine off the main thread. */
+self.onmessage = ({ data }: MessageEvent<EngineRequest>) => {
   self.postMessage(reply(data))
 }
 
-function reply({ id, layout, pourId }: CheckRequest): CheckReply {
+function reply(request: EngineRequest): EngineReply {
+  const { id } = request
   try {
-    return { id, result: checkPour(layout, { pourId, withSteps: true }) }
+    return { id, result: engineAnswer(request) }
   } catch (error) {
     return { id, failure: error instanceof Error ? error.message : String(error) }
   }

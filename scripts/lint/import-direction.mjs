@@ -26,8 +26,8 @@ const ALLOWED = {
 /** Pairs that are allowed for types alone; the contract may also take the engine's small entries. */
 const TYPES_ONLY = { [CONTRACT]: [ENGINE], components: [ENGINE] }
 
-/** The engine as a whole runs in these files of the client; screens take its types and its small entries. */
-const RUNS_ENGINE = /^lib\/engine(\.worker|-direct)\.ts$/
+/** The engine as a whole runs in this file of the client; screens take its types and its small entries. */
+const RUNS_ENGINE = /^lib\/engine-answer\.ts$/
 const SMALL_ENTRIES = ['@wedgeline/engine/geometry', '@wedgeline/engine/result', '@wedgeline/engine/bases']
 
 const SERVER_PACKAGES =
@@ -74,7 +74,7 @@ function areaProblem({ from, area, to, specifier, isType }) {
     return `${area}/ takes types alone from ${toArea}/: write import type.`
   const isScreen = CLIENT.includes(area) && !RUNS_ENGINE.test(from)
   if (isScreen && toArea === ENGINE && !SMALL_ENTRIES.includes(specifier)) {
-    return `The engine runs in lib/engine.worker.ts and lib/engine-direct.ts; elsewhere import types or ${SMALL_ENTRIES.join(', ')}.`
+    return `The engine runs in lib/engine-answer.ts; elsewhere import types or ${SMALL_ENTRIES.join(', ')}.`
   }
   return undefined
 }

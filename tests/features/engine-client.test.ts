@@ -1,20 +1,20 @@
 import type { Layout } from '@wedgeline/engine'
 import { expect, test } from 'vitest'
 import { EngineClient } from '@/lib/engine-client'
-import type { CheckReply, CheckRequest } from '@/lib/engine.worker'
+import type { EngineReply, EngineRequest } from '@/lib/engine-request'
 
 /** A worker that answers when the test says so. */
 function handWorker() {
-  const asked: CheckRequest[] = []
+  const asked: EngineRequest[] = []
   const worker = {
     onmessage: null,
-    postMessage: (request: CheckRequest) => asked.push(request),
+    postMessage: (request: EngineRequest) => asked.push(request),
     terminate: () => undefined,
   }
   const answer = () => {
     const last = asked.at(-1)
-    const reply = { id: last?.id, result: { pourId: last?.pourId } } as unknown as CheckReply
-    const send = worker.onmessage as unknown as (event: { data: CheckReply }) => void
+    const reply = { id: last?.id, result: { pourId: last?.pourId } } as unknown as EngineReply
+    const send = worker.onmessage as unknown as (event: { data: EngineReply }) => void
     send({ data: reply })
   }
   return { worker: worker as unknown as Worker, asked, answer }
