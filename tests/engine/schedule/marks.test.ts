@@ -11,7 +11,7 @@ import {
   type SteelShape,
   type SteelZone,
 } from '@wedgeline/engine'
-import { anchor, D4, inPan, layout, pan, S4, type Parts } from '../sample-layout'
+import { anchor, D4, inPan, layout, pan, POUR, S4, type Parts } from '../sample-layout'
 
 let made = 0
 const steel = (zone: SteelZone, shape: SteelShape, id = `steel-${++made}`): Steel => ({
@@ -95,8 +95,9 @@ describe('from steel to bars', () => {
 
   test('local steel belongs to the pour that the anchor is cast with', () => {
     const anchors = [anchor('E2', 1, { castWithPourId: 'P2' })]
-    expect(barsOf(layout({ anchors }), 'P1').bars).toEqual([])
-    expect(barsOf(layout({ anchors }), 'P2').bars).toHaveLength(1)
+    const of = layout({ anchors, more: { pours: [POUR, { ...POUR, id: 'P2', mark: 'P2' }] } })
+    expect(barsOf(of, 'P1').bars).toEqual([])
+    expect(barsOf(of, 'P2').bars).toHaveLength(1)
   })
 
   test.each<{ shape: SteelShape; code: string; dimensions: object; count: number }>([
