@@ -113,6 +113,7 @@ const FAMILY_SHORT: Readonly<Record<Family, string>> = {
   precompression: 'P/A',
   fit: 'fit',
   anchorage: 'anchorage',
+  strength: 'strength',
 }
 
 /** What this version does not check at a zone, as one sentence; null where nothing is left. */

@@ -19,6 +19,7 @@ export const FAMILIES = [
   'precompression',
   'fit',
   'anchorage',
+  'strength',
 ] as const
 export type Family = (typeof FAMILIES)[number]
 
@@ -41,6 +42,7 @@ export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
   precompression: 'precompression',
   fit: 'fit of the steel',
   anchorage: 'anchorage and laps',
+  strength: 'strength at stressing',
 }
 
 /** Worst first is the order of severity in `STATUSES`. */
@@ -50,7 +52,7 @@ export type Status = (typeof STATUSES)[number]
 /** C code, H hardware, P common practice. */
 export type LimitKind = 'C' | 'H' | 'P'
 
-export type ZoneKind = 'anchor' | 'group' | 'gap' | 'edge' | 'corner' | 'joint' | 'pan' | 'tendon' | 'strip'
+export type ZoneKind = 'anchor' | 'group' | 'gap' | 'edge' | 'corner' | 'joint' | 'pan' | 'tendon' | 'strip' | 'pour'
 
 /** A place that checks and bars belong to. `id` is stable: kind and the ids that it is made of. */
 export interface Zone {

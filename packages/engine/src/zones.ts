@@ -5,9 +5,10 @@ import { cornerId, cornersOfPour } from './corners'
 import { gapsOfEdge, type Gap, type TendonEnd } from './gaps'
 import { found, type LayoutIndex } from './layout-index'
 import type { Anchor, Edge } from './model'
+import { hasStrengths } from './strengths'
 import type { Zone } from './result'
 
-/** All zones of a pour: edge by edge along chainage with anchors that act as one, then corners, pans with their anchors, joints and tendons. */
+/** All zones of a pour: edge by edge along chainage with anchors that act as one, then corners, pans with their anchors, joints and tendons, and the strengths of its concrete. */
 export function zonesOfPour(index: LayoutIndex, pourId: string): Zone[] {
   return [
     ...(index.edgesOfPour.get(pourId) ?? []).flatMap((edge) => zonesOfEdge(index, edge)),
@@ -24,6 +25,7 @@ export function zonesOfPour(index: LayoutIndex, pourId: string): Zone[] {
     ...(index.tendonsOfPour.get(pourId) ?? []).map((tendon) =>
       zone({ id: `tendon:${tendon.id}`, kind: 'tendon', name: `Tendon ${tendon.mark}`, pourId }),
     ),
+    ...strengthZones(index, pourId),
   ]
 }
 
@@ -96,6 +98,13 @@ function jointZones(index: LayoutIndex, pourId: string): Zone[] {
     const name = `${found(index.edgeLines, joint.edgeLineId, 'edge line').mark} joint`
     return [zone({ id: `joint:${joint.id}`, kind: 'joint', name, pourId, edgeId: edge.id, from, to })]
   })
+}
+
+/** The concrete of the pour as a whole, once strengths are recorded for it. */
+function strengthZones(index: LayoutIndex, pourId: string): Zone[] {
+  if (!hasStrengths(index, pourId)) return []
+  const name = `${found(index.pours, pourId, 'pour').mark} strength at stressing`
+  return [zone({ id: `pour:${pourId}`, kind: 'pour', name, pourId })]
 }
 
 function zone(given: Pick<Zone, 'id' | 'kind' | 'name' | 'pourId'> & Partial<Zone>): Zone {

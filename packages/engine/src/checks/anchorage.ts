@@ -38,6 +38,7 @@ export function anchorageChecks(context: CheckContext, zone: Zone): readonly Che
     case 'corner':
     case 'tendon':
     case 'strip':
+    case 'pour':
       return []
   }
 }

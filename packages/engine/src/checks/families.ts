@@ -24,6 +24,7 @@ import { straightLengthChecks } from './straight-length'
 import { precompressionChecks } from './precompression'
 import { spallingChecks } from './spalling'
 import { forceChecks } from './tendon'
+import { strengthChecks } from './strength'
 import { tendonChecks } from './tendon-advice'
 
 /** Which families of checks belong to which kind of zone: the table of methods, in its order. */
@@ -51,6 +52,7 @@ export const FAMILIES_OF_ZONE: Readonly<Record<ZoneKind, readonly Family[]>> = {
   pan: ['pan-access', 'pan-bars', 'fit', 'anchorage'],
   tendon: ['tendon', 'precompression'],
   strip: ['precompression'],
+  pour: ['strength'],
 }
 
 /** Checks of a family at a zone; null where this version does not make them there. */
@@ -83,6 +85,7 @@ export const CHECKS_OF_FAMILY: Readonly<Record<Family, FamilyChecks>> = {
   precompression: precompressionChecks,
   fit: fitChecks,
   anchorage: anchorageChecks,
+  strength: strengthChecks,
 }
 
 type OfAnchor = (anchor: Anchor) => readonly Check[] | null

@@ -52,6 +52,7 @@ export function spallingChecks(context: CheckContext, zone: Zone): readonly Chec
     case 'pan':
     case 'tendon':
     case 'strip':
+    case 'pour':
       return []
   }
 }

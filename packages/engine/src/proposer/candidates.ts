@@ -28,6 +28,7 @@ export function candidatesFor(bench: Bench, place: Place, shared: readonly Strai
     case 'corner':
     case 'tendon':
     case 'strip':
+    case 'pour':
       return unblocked([])
   }
 }

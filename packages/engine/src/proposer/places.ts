@@ -52,6 +52,7 @@ function steelZoneOf(index: LayoutIndex, { id, kind, edgeId }: Zone): SteelZone 
     case 'corner':
     case 'tendon':
     case 'strip':
+    case 'pour':
       return null
   }
 }
