@@ -9,12 +9,12 @@ import { sectionBehind } from '../section'
 import { sectionStepNear } from '../section-step'
 import { contextWith, isFixable, type Bench, type Place } from './bench'
 import type { Candidate } from './candidate'
-import { thicknessSets, type ThicknessNeed } from './thickness-steel'
+import { thicknessSets, type ThicknessNeed, type ThicknessSet } from './thickness-steel'
 import { transverseBars, transverseSets, type StraightBar, type TransverseNeed } from './transverse-bars'
 import { needsOf, unmetOf } from './verdict'
 
 /** Sets through the thickness that are joined with bars in plan: the lightest of them. */
-const THICKNESS_KEPT = 4
+const THICKNESS_KEPT = { links: 12, hairpins: 4, spiral: 4 } as const
 
 /** A step of the section this near may stand in the way of bars of one of the faces, mm. */
 const STEP_REACH = 2000
@@ -48,18 +48,18 @@ export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): Ancho
 }
 
 /** The lightest of each kind that can be fixed; where none can, the lightest one, for its reason to be named. */
-function lightest(bench: Bench, place: Place, sets: readonly SteelShape[]): SteelShape[][] {
+function lightest(bench: Bench, place: Place, sets: readonly ThicknessSet[]): SteelShape[][] {
   const ordered = sets.map((shape, at) => ({ shape, at, mass: bench.roughly([shape]) }))
   ordered.sort((a, b) => a.mass - b.mass || a.at - b.at)
   const kept: SteelShape[][] = []
   const counts = new Map<string, number>()
   for (const { shape } of ordered) {
     const count = counts.get(shape.kind) ?? 0
-    if (count >= THICKNESS_KEPT || !isFixable(bench, place, [shape])) continue
+    if (count >= THICKNESS_KEPT[shape.kind] || !isFixable(bench, place, [shape])) continue
     counts.set(shape.kind, count + 1)
     kept.push([shape])
   }
-  return kept.length > 0 ? kept : ordered.slice(0, THICKNESS_KEPT).map(({ shape }) => [shape])
+  return kept.length > 0 ? kept : ordered.slice(0, THICKNESS_KEPT.hairpins).map(({ shape }) => [shape])
 }
 
 /** Bars in plan beside what already stands upright, which may count in plan as well. */

@@ -204,8 +204,7 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
   const old = zone.kind === 'group' ? [] : steelAt(work.before.index, place)
   // Where nothing passes, what was there stays.
   const removes = blocked.length > 0 ? [] : old.filter(isReplaceable).filter(({ pourId }) => pourId === place.pourId)
-  const isSame = JSON.stringify(removes.map(({ shape }) => shape)) === JSON.stringify(shapes)
-  if (isSame && blocked.length === 0) return []
+  if (blocked.length === 0 && isUnchanged(work, given, place)) return []
   const kept = old.filter((steel) => !removes.includes(steel)).map(({ shape }) => shape)
   const at = { zone: place.steelZone, pourId: place.pourId }
   return [
@@ -227,6 +226,15 @@ function proposedZone(work: Work, { given, all }: Settled, place: Place): Propos
       notes: lookedAt && lookedAt.id !== zone.id ? [`Tried once for all places like it, at ${lookedAt.name}.`] : [],
     },
   ]
+}
+
+/** Whether a place ends with the bars that were proposed for it before; anchors that act as one share theirs. */
+function isUnchanged(work: Work, given: Settled['given'], { key }: Place): boolean {
+  const here = work.places.filter((place) => place.key === key)
+  const now = here.flatMap(({ zone }) => given.get(zone.id)?.shapes ?? [])
+  const before = here.slice(0, 1).flatMap((place) => steelAt(work.before.index, place).filter(isReplaceable))
+  const listed = (shapes: readonly SteelShape[]) => JSON.stringify(shapes.map((shape) => JSON.stringify(shape)).sort())
+  return listed(now) === listed(before.map(({ shape }) => shape))
 }
 
 function weighed(work: Work, zones: readonly ProposedZone[]): { readonly mass: number; readonly marks: number } {

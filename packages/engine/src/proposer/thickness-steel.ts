@@ -31,13 +31,16 @@ const LEG_STEP = 25
 /** First link behind the plate (common practice: not more than 40 to 50). */
 const FIRST_LINK = 30
 const LINK_PITCHES = [50, 75, 100] as const
+const MORE_LINKS = [0, 1, 2, 3, 4] as const
 /** Beyond the plate on either side (common practice). */
 const BESIDE_PLATE = [40, 20, 0] as const
 const SPIRAL_PITCHES = [40, 50, 60] as const
 /** A spiral fits a plate that is nearly square. */
 const SQUARE_RATIO_MAX = 1.5
 
-export function thicknessSets(need: ThicknessNeed): (HairpinShape | LinksShape | SpiralShape)[] {
+export type ThicknessSet = HairpinShape | LinksShape | SpiralShape
+
+export function thicknessSets(need: ThicknessNeed): ThicknessSet[] {
   const sizes = need.sizes.filter(({ diameter }) => diameter <= DIAMETER_MAX)
   const isFree = (kind: SteelKind): boolean => need.local?.kind !== kind
   return sizes.flatMap((size) => [
@@ -63,17 +66,24 @@ function links(need: ThicknessNeed, { diameter, linkEndMin }: BarSize): LinksSha
     .filter((height) => height >= hook)
     .flatMap((height) =>
       BESIDE_PLATE.flatMap((beside) =>
-        LINK_PITCHES.flatMap((pitch): LinksShape[] => {
+        setsOfLinks(need, inside).flatMap(({ pitch, count }): LinksShape[] => {
           const width = Math.max(upTo(need.plate.width + 2 * beside, 10), hook)
-          const count = Math.max(0, Math.ceil((need.window.from - FIRST_LINK) / pitch)) + inside
           // At its closing corner the hook of a link lies beside it and takes one bar more of the gap.
           const isTight = pitch - 2 * diameter < need.clearGap
-          if (isTight || FIRST_LINK + (count - 1) * pitch > need.window.to) return []
+          if (isTight) return []
           return [{ kind: 'links', diameter, width, height, hook, count, first: FIRST_LINK, pitch }]
         }),
       ),
     )
 }
+
+/** As many links as the window asks for at each pitch, and more of them, which run on into the window in plan. */
+const setsOfLinks = ({ window }: ThicknessNeed, inside: number) =>
+  LINK_PITCHES.flatMap((pitch) => {
+    const before = Math.max(0, Math.ceil((window.from - FIRST_LINK) / pitch))
+    const last = FIRST_LINK + (before + inside - 1) * pitch
+    return last > window.to ? [] : MORE_LINKS.map((more) => ({ pitch, count: before + inside + more }))
+  })
 
 function spirals(need: ThicknessNeed, diameter: number): SpiralShape[] {
   const { width, height } = need.plate
