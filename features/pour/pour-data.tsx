@@ -8,6 +8,7 @@ import { Section } from '@/components/ui/screen'
 import { Select } from '@/components/ui/select'
 import type { Usual } from '@/components/ui/field'
 import { CommittedText } from './committed-text'
+import { ConcreteResultsSection } from './concrete-results-section'
 import { CONCRETE_CLASSES, fckOf, OWN_CONCRETE, USUAL } from './concrete'
 import { PourMats } from './pour-mats'
 import { StagesEditor } from './stages-editor'
@@ -96,6 +97,7 @@ export function PourDataForm({ pour }: { readonly pour: PourData }) {
           newStage={(values) => ({ id: newId(), ...values })}
         />
       </Section>
+      <ConcreteResultsSection pour={pour} />
       <PourMats pour={pour} onSet={(mats, label) => set({ mats: [...mats] }, label)} />
     </>
   )
