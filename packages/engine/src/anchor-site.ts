@@ -193,7 +193,8 @@ function isOpen({ outline }: Pour, at: number): boolean {
 const EQUAL_ROW_ANCHORS_MIN = 5
 const EQUAL_ROW_GAPS_MAX = 1.2
 
-function isEqualRow(index: LayoutIndex, anchors: readonly Anchor[]): boolean {
+/** Whether the anchors of an edge, by chainage, are a near-equal row. */
+export function isEqualRow(index: LayoutIndex, anchors: readonly Anchor[]): boolean {
   if (anchors.length < EQUAL_ROW_ANCHORS_MIN) return false
   const gaps = anchors.slice(1).map((anchor, i) => anchor.chainage - (anchors[i]?.chainage ?? 0))
   const forces = anchors.map(({ tendonId }) => {

@@ -7,8 +7,19 @@ import { courseOf, forceAfterFriction, frictionExponent, frictionPair, isNoForce
 
 const STATICS: Clause = { source: 'Statics', section: 'strands times force', tag: 'derived' }
 
+/** By tendon and strand: rows of a layout stay the same objects until they are changed. */
+const jackingForces = new WeakMap<Tendon, { readonly strand: StrandType; readonly force: Step }>()
+
 /** Force of the whole tendon at the end of stressing, N. */
 export function jackingForce(tendon: Tendon, strand: StrandType): Step {
+  const known = jackingForces.get(tendon)
+  if (known?.strand === strand) return known.force
+  const force = madeForce(tendon, strand)
+  jackingForces.set(tendon, { strand, force })
+  return force
+}
+
+function madeForce(tendon: Tendon, strand: StrandType): Step {
   return step(
     { symbol: 'Pjack', meaning: 'Force while jacking', formula: 'n * (r * Fpk)', unit: 'N', clause: STATICS },
     { n: tendon.strands, r: tendon.jackingRatio, Fpk: strand.breakingLoad },

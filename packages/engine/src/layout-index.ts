@@ -54,11 +54,75 @@ export interface LayoutIndex {
 }
 
 /**
- * Indexes a layout whose references have been checked.
+ * Indexes a layout whose references have been checked; the same layout keeps its index.
  *
  * @throws where an edge names a pour, edge line or corner that is not there: such a layout never gets this far.
  */
 export function layoutIndex(layout: Layout): LayoutIndex {
+  return indexAfter(null, layout)
+}
+
+/** A layout's index is kept with it, with all that has been worked out for it. */
+const kept = new WeakMap<Layout, LayoutIndex>()
+
+/**
+ * Indexes a layout that has been edited: tables that are the same as before are not indexed again.
+ *
+ * @param before index of the layout before the edit; null indexes all tables.
+ */
+export function indexAfter(before: LayoutIndex | null, layout: Layout): LayoutIndex {
+  const known = kept.get(layout)
+  if (known) return known
+  const isSame = (...tables: readonly (keyof Layout)[]) =>
+    before !== null && tables.every((table) => before.layout[table] === layout[table])
+  const places = before && isSame('pours', 'edgeLines', 'edges') ? before : placesOf(layout)
+  const ends = before && isSame('pours', 'edgeLines', 'edges', 'anchors') ? before : endsOf(layout, places)
+  const index: LayoutIndex = {
+    ...fixedOf(before && isSame(...FIXED) ? before : null, layout),
+    ...partOf(places, PLACES),
+    ...partOf(ends, ENDS),
+    layout,
+    concrete: {},
+    tendons: before && isSame('tendons') ? before.tendons : byId(layout.tendons),
+    tendonsOfPour:
+      before && isSame('tendons') ? before.tendonsOfPour : grouped(layout.tendons, (tendon) => tendon.pourId),
+    steelOfZone: before && isSame('steel') ? before.steelOfZone : grouped(layout.steel, ({ zone }) => steelKey(zone)),
+  }
+  kept.set(layout, index)
+  return index
+}
+
+const FIXED = ['levels', 'joints', 'pans', 'hardware', 'jacks', 'strandTypes', 'obstructions'] as const
+type Fixed = 'levels' | 'joints' | 'pans' | 'hardware' | 'jacks' | 'strandTypes' | 'openingsOfLevel' | 'pansOfPour'
+const FIXED_PARTS = [
+  'levels',
+  'joints',
+  'pans',
+  'hardware',
+  'jacks',
+  'strandTypes',
+  'openingsOfLevel',
+  'pansOfPour',
+] as const
+
+function fixedOf(before: LayoutIndex | null, layout: Layout): Pick<LayoutIndex, Fixed> {
+  if (before) return partOf(before, FIXED_PARTS)
+  return {
+    levels: byId(layout.levels),
+    joints: byId(layout.joints),
+    pans: byId(layout.pans),
+    hardware: byId(layout.hardware),
+    jacks: byId(layout.jacks),
+    strandTypes: byId(layout.strandTypes),
+    openingsOfLevel: grouped(layout.obstructions, ({ kind, levelId }) => (kind === 'opening' ? levelId : null)),
+    pansOfPour: grouped(layout.pans, (pan) => pan.pourId),
+  }
+}
+
+const PLACES = ['pours', 'edgeLines', 'edges', 'frames', 'edgesOfPour', 'edgesOfLine'] as const
+type Places = Pick<LayoutIndex, (typeof PLACES)[number]>
+
+function placesOf(layout: Layout): Places {
   const pours = byId(layout.pours)
   const edgeLines = byId(layout.edgeLines)
   const frames = layout.edges.map((edge): [string, EdgeFrame] => [
@@ -69,35 +133,33 @@ export function layoutIndex(layout: Layout): LayoutIndex {
       pour: found(pours, edge.pourId, 'pour'),
     }),
   ])
-  const framesById = new Map(frames)
-  const anchors = layout.anchors.map(atPanFace)
-  const anchorsOfEdge = grouped([...anchors].sort(alongEdge), (anchor) => anchor.edgeId)
   return {
-    layout,
-    concrete: {},
-    levels: byId(layout.levels),
     pours,
     edgeLines,
     edges: byId(layout.edges),
-    frames: framesById,
-    joints: byId(layout.joints),
-    pans: byId(layout.pans),
-    tendons: byId(layout.tendons),
-    anchors: byId(anchors),
-    hardware: byId(layout.hardware),
-    jacks: byId(layout.jacks),
-    strandTypes: byId(layout.strandTypes),
+    frames: new Map(frames),
     edgesOfPour: grouped(layout.edges, (edge) => edge.pourId),
     edgesOfLine: grouped(layout.edges, (edge) => edge.edgeLineId),
-    openingsOfLevel: grouped(layout.obstructions, ({ kind, levelId }) => (kind === 'opening' ? levelId : null)),
-    pansOfPour: grouped(layout.pans, (pan) => pan.pourId),
-    tendonsOfPour: grouped(layout.tendons, (tendon) => tendon.pourId),
+  }
+}
+
+const ENDS = ['anchors', 'anchorsOfEdge', 'rowOfEdge', 'anchorsOfPan', 'anchorsOfTendon'] as const
+type Ends = Pick<LayoutIndex, (typeof ENDS)[number]>
+
+function endsOf(layout: Layout, { frames }: Places): Ends {
+  const anchors = layout.anchors.map(atPanFace)
+  const anchorsOfEdge = grouped([...anchors].sort(alongEdge), (anchor) => anchor.edgeId)
+  return {
+    anchors: byId(anchors),
     anchorsOfEdge,
-    rowOfEdge: rows(layout.edges, framesById, anchorsOfEdge),
+    rowOfEdge: rowsOf(layout.edges, { frames, anchorsOfEdge }),
     anchorsOfPan: grouped(anchors, (anchor) => anchor.panId),
     anchorsOfTendon: grouped(anchors, (anchor) => anchor.tendonId),
-    steelOfZone: grouped(layout.steel, (steel) => steelKey(steel.zone)),
   }
+}
+
+function partOf<K extends keyof LayoutIndex>(index: Pick<LayoutIndex, K>, names: readonly K[]): Pick<LayoutIndex, K> {
+  return Object.fromEntries(names.map((name) => [name, index[name]])) as Pick<LayoutIndex, K>
 }
 
 /**
@@ -146,7 +208,10 @@ function atPanFace(anchor: Anchor): Anchor {
 }
 
 /** Edges on the two sides of one line, as at a joint, face each other: their anchors stand in two rows. */
-function rows(edges: readonly Edge[], frames: ById<EdgeFrame>, anchorsOfEdge: Lists<Anchor>): Lists<Anchor> {
+export function rowsOf(
+  edges: readonly Edge[],
+  { frames, anchorsOfEdge }: Pick<LayoutIndex, 'frames' | 'anchorsOfEdge'>,
+): Lists<Anchor> {
   const sideOf = (edge: Edge) => {
     const frame = found(frames, edge.id, 'edge')
     return `${edge.edgeLineId}:${frame.runsLeftToRight ? 'left to right' : 'right to left'}`

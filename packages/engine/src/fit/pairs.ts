@@ -30,8 +30,10 @@ const LEVEL_SINE = 0.1
 
 /** Every pair with a bar of the member in it that lies near, once. */
 export const pairsOf = perIndex((index: LayoutIndex, key: string): readonly Pair[] => {
-  const { bars, bodies } = memberOf(index, key)
-  return [...pairsAmong(index, [...bars, ...bodies], itemsBeside(index, key)), ...pairsInSets(index, bars)]
+  const { bars, bodies, edgeFrame } = memberOf(index, key)
+  const { x, y } = edgeFrame?.along ?? { x: 1, y: 0 }
+  const near = { others: itemsBeside(index, key), axis: Math.abs(x) >= Math.abs(y) ? 'x' : 'y' } as const
+  return [...pairsSwept(index, [...bars, ...bodies], near), ...pairsInSets(index, bars)]
 })
 
 /** What stands beside a member and is no part of it. */
@@ -47,16 +49,39 @@ export const itemsBeside = perIndex((index: LayoutIndex, key: string): readonly 
 export function pairsAmong(index: LayoutIndex, own: readonly Item[], others: readonly Item[]): Pair[] {
   const round = boxRound(own)
   if (!round) return []
+  const axis = round.max.x - round.min.x >= round.max.y - round.min.y ? 'x' : 'y'
+  if (own.length > FEW) return pairsSwept(index, own, { others, axis })
   const near = others.filter(({ box }) => boxesNear(box, round, REACH))
-  const pairs: Pair[] = []
+  const pairs = pairsSwept(index, own, { others: [], axis })
   const met = (one: Item, other: Item) => {
     const pair = pairOf(index, one, other)
     if (pair) pairs.push(pair)
   }
-  sweep(own, own.length > FEW ? near : [], met)
-  for (const one of own.length > FEW ? [] : own) {
+  for (const one of own) {
     for (const other of near) if (boxesNear(one.box, other.box, reachOf(one, other))) met(one, other)
   }
+  return pairs
+}
+
+interface Near {
+  readonly others: readonly Item[]
+  /** Along which the items are sorted. */
+  readonly axis: 'x' | 'y'
+}
+
+/**
+ * In the order in which the items begin along the axis: which of a pair is named first does not hang on what stands
+ * further away.
+ */
+function pairsSwept(index: LayoutIndex, own: readonly Item[], { others, axis }: Near): Pair[] {
+  const round = boxRound(own)
+  if (!round) return []
+  const near = others.filter(({ box }) => boxesNear(box, round, REACH))
+  const pairs: Pair[] = []
+  sweep(own, { others: near, axis }, (one, other) => {
+    const pair = pairOf(index, one, other)
+    if (pair) pairs.push(pair)
+  })
   return pairs
 }
 
@@ -72,11 +97,8 @@ function boxRound(items: readonly Item[]): Box3 | null {
       )
 }
 
-/** Calls for each two whose boxes are near: two of the first list, or one of each. Sorted along the longer side. */
-function sweep(own: readonly Item[], others: readonly Item[], met: (one: Item, other: Item) => void): void {
-  const round = boxRound(own)
-  if (!round) return
-  const axis = round.max.x - round.min.x >= round.max.y - round.min.y ? 'x' : 'y'
+/** Calls for each two whose boxes are near: two of the first list, or one of each. */
+function sweep(own: readonly Item[], { others, axis }: Near, met: (one: Item, other: Item) => void): void {
   const all = [...own.map((item) => ({ item, isOwn: true })), ...others.map((item) => ({ item, isOwn: false }))].sort(
     (a, b) => a.item.box.min[axis] - b.item.box.min[axis],
   )

@@ -76,15 +76,17 @@ export function forceProfile(index: LayoutIndex, tendonId: string): ForceProfile
   }
 }
 
-const kept: Readonly<Record<PairName, (index: LayoutIndex, tendonId: string) => TendonForces | NoForce>> = {
-  nominal: perConcrete((index, tendonId) => forcesOf(index, found(index.tendons, tendonId, 'tendon'), 'nominal')),
-  low: perConcrete((index, tendonId) => forcesOf(index, found(index.tendons, tendonId, 'tendon'), 'low')),
-  high: perConcrete((index, tendonId) => forcesOf(index, found(index.tendons, tendonId, 'tendon'), 'high')),
-}
+/** One function for each pair, so that what they have made can be carried over. */
+export const forcesKept: Readonly<Record<PairName, (index: LayoutIndex, tendonId: string) => TendonForces | NoForce>> =
+  {
+    nominal: perConcrete((index, tendonId) => forcesOf(index, found(index.tendons, tendonId, 'tendon'), 'nominal')),
+    low: perConcrete((index, tendonId) => forcesOf(index, found(index.tendons, tendonId, 'tendon'), 'low')),
+    high: perConcrete((index, tendonId) => forcesOf(index, found(index.tendons, tendonId, 'tendon'), 'high')),
+  }
 
 /** Forces of one tendon, all stages done, or why there are none. @throws where no tendon has the id. */
 export const tendonForces = (index: LayoutIndex, tendonId: string, pair: PairName): TendonForces | NoForce =>
-  kept[pair](index, tendonId)
+  forcesKept[pair](index, tendonId)
 
 /**
  * Forces that are not exceeded at a live end whatever the tendon's drape is: bends in plan and wobble alone. More friction makes draw-in be felt over less length, so that it takes more force at the anchor.
