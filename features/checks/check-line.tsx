@@ -6,6 +6,7 @@ import { Icon } from '@/components/ui/icon'
 import { LimitKindBox } from '@/components/ui/limit-kind'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
+import { OnProposed } from './on-proposed'
 import { clauseText, outcomeText, shownQuantity, sidesText } from './words'
 
 /** One check in two lines: what it compares and what came of it. A press opens what else there is to know. */
@@ -32,6 +33,7 @@ export function CheckLine({ check }: { readonly check: Check }) {
           <Text kind="small" tone="soft">
             {sides(check)}
           </Text>
+          <OnProposed check={check} />
         </View>
         <Text kind="figureStrong" tone={toneOf(check)} style={isLong ? styles.outcomeLong : styles.outcome}>
           {outcome(check)}

@@ -15,6 +15,8 @@ import { DraftStore, type DraftPorts, type DraftView, type SaveState, type Sent 
 export interface JobDraft {
   readonly jobId: string
   readonly companyId: string
+  /** A quick edge that is in no job yet: it runs on proposed readings and is not issued. */
+  readonly isUnfiled: boolean
   readonly layout: LayoutFile
   readonly roles: readonly Role[]
   readonly canEdit: boolean
@@ -97,6 +99,7 @@ const nothing = () => EMPTY
 interface About {
   readonly id: string
   readonly companyId: string
+  readonly isUnfiled: boolean
   readonly myRoles: readonly Role[]
 }
 
@@ -107,6 +110,7 @@ function jobOf(of: { store: DraftStore; view: DraftView; about: About; say: (wor
   return {
     jobId: about.id,
     companyId: about.companyId,
+    isUnfiled: about.isUnfiled,
     layout: draft.layout,
     roles: about.myRoles,
     canEdit: about.myRoles.some((role) => role === 'detailer' || role === 'engineer'),

@@ -1,4 +1,5 @@
 import { toEngine, type LayoutFile } from '@wedgeline/contract'
+import { onProposedReadings } from '@wedgeline/engine/result'
 import type { PourResult } from '@wedgeline/engine'
 import { useEffect, useState } from 'react'
 import { openEngine, type EngineClient } from '@/lib/engine-client'
@@ -20,16 +21,22 @@ interface Answer {
 
 let engine: EngineClient | null = null
 
-/** The checks of one pour as it stands on screen, worked out off the main thread while somebody types. */
+/** The page's one client of the engine. */
+export const pageEngine = (): EngineClient => (engine ??= openEngine())
+
+/**
+ * The checks of one pour as it stands on screen, worked out off the main thread while somebody types. Those of a quick
+ * edge come on the proposed readings, so that every screen and every count shows the same.
+ */
 export function usePourChecks(pourId: string): PourChecks {
-  const { layout } = useJobDraft()
+  const { layout, isUnfiled } = useJobDraft()
   const [answer, setAnswer] = useState<Answer | null>(null)
   useEffect(() => {
     let isLatest = true
-    engine ??= openEngine()
-    engine.check(toEngine(layout), pourId).then(
+    pageEngine().check(toEngine(layout), pourId).then(
       (result) => {
-        if (isLatest && result) setAnswer({ layout, pourId, result, failure: null })
+        if (!isLatest || !result) return
+        setAnswer({ layout, pourId, result: isUnfiled ? onProposedReadings(result) : result, failure: null })
       },
       (error: unknown) => {
         if (isLatest) setAnswer({ layout, pourId, result: null, failure: String(error) })
@@ -38,7 +45,7 @@ export function usePourChecks(pourId: string): PourChecks {
     return () => {
       isLatest = false
     }
-  }, [layout, pourId])
+  }, [layout, pourId, isUnfiled])
   const known = answer?.pourId === pourId ? answer : null
   return { result: known?.result ?? null, isStale: known?.layout !== layout, failure: known?.failure ?? null }
 }

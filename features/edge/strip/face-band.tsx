@@ -1,4 +1,5 @@
 import type { EdgeFrame, PlacedBar } from '@wedgeline/engine'
+import { useId } from 'react'
 import { ClipPath, Defs, G, Line, Path, Rect } from 'react-native-svg'
 import { colour } from '@/components/theme'
 import { barWidth } from './plan-band'
@@ -23,17 +24,18 @@ const PLATE_MIN_PX = 12
 
 /** The edge seen face on. Heights are stretched; plates, pockets and local steel keep their own proportions. */
 export function FaceBand(props: FaceBandProps) {
+  const clip = `${useId()}-face`
   const { scale, frame, top, highest, pxPerHeight, lengths, ends, bars } = props
   const y = (height: number) => top + (highest - height) * pxPerHeight
   const lines = bars.filter((bar) => bar.kind === 'edge-bars')
   return (
     <G>
       <Defs>
-        <ClipPath id="strip-face">
+        <ClipPath id={clip}>
           <Rect x={scale.left - 1} y={top - 2} width={scale.width + 2} height={4000} />
         </ClipPath>
       </Defs>
-      <G clipPath="url(#strip-face)">
+      <G clipPath={`url(#${clip})`}>
         {lengths.map((length) => (
           <LengthOnFace key={length.id} length={length} scale={scale} y={y} />
         ))}

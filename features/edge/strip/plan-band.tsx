@@ -1,9 +1,10 @@
 import type { EdgeFrame, PlacedBar } from '@wedgeline/engine'
+import { useId } from 'react'
 import { ClipPath, Defs, G, Line, Path, Rect } from 'react-native-svg'
 import { Hatch, hatchFill } from '@/components/drawing/hatch'
 import { colour } from '@/components/theme'
 import type { StripScale } from './scale'
-import type { StripEnd, StripWedge } from './strip-data'
+import type { StripData, StripEnd, StripWedge } from './strip-data'
 
 export interface PlanBandProps {
   readonly scale: StripScale
@@ -12,43 +13,48 @@ export interface PlanBandProps {
   readonly height: number
   readonly ends: readonly StripEnd[]
   readonly wedges: readonly StripWedge[]
+  readonly corners: StripData['corners']
   readonly bars: readonly PlacedBar[]
   readonly obstructions: readonly (readonly { readonly chainage: number; readonly depth: number }[])[]
   readonly pans: readonly (readonly { readonly chainage: number; readonly depth: number }[])[]
 }
-
-const WEDGE = 'strip-wedge'
 
 /** Slab outside the edge that is drawn, px: room for the edge line and for what stands in front of it. */
 const OUTSIDE_PX = 8
 
 /** The first metres of slab behind the edge, from above; the reader stands below, outside. One scale both ways. */
 export function PlanBand(props: PlanBandProps) {
-  const { scale, frame, top, height, ends, wedges, bars, obstructions, pans } = props
+  // A page may hold two strips, the one on screen and the one that is printed.
+  const id = useId()
+  const [clip, wedge, corner] = [`${id}-plan`, `${id}-wedge`, `${id}-corner`]
+  const { scale, frame, top, height, ends, wedges, corners, bars, obstructions, pans } = props
   const edgeY = top + height - OUTSIDE_PX
   const y = (depth: number) => edgeY - depth * scale.pxPerMm
   const point = (p: { readonly chainage: number; readonly depth: number }) =>
     `${px(scale.x(p.chainage))} ${px(y(p.depth))}`
   const closed = (points: readonly { readonly chainage: number; readonly depth: number }[]) =>
     `M${points.map(point).join('L')}Z`
-  /** The two sides of the spread: without the ends at the edge, where the next wedge begins. */
-  const sides = (outline: StripWedge['outline']) => `M${outline.slice(1, -1).map(point).join('L')}`
+  const sides = (outline: StripWedge['outline']) => `M${withoutEnds(outline).map(point).join('L')}`
   const [x0, x1] = [scale.x(frame.from), scale.x(frame.to)]
   return (
     <G>
       <Defs>
-        <ClipPath id="strip-plan">
+        <ClipPath id={clip}>
           <Rect x={scale.left} y={top} width={scale.width} height={height} />
         </ClipPath>
       </Defs>
-      <Hatch id={WEDGE} />
-      <G clipPath="url(#strip-plan)">
+      <Hatch id={wedge} />
+      <Hatch id={corner} stroke={colour.ink} />
+      <G clipPath={`url(#${clip})`}>
         <Rect x={Math.min(x0, x1)} y={top} width={Math.abs(x1 - x0)} height={edgeY - top} fill={colour.concrete} />
         {wedges.map(({ zoneId, outline }) => (
           <G key={zoneId}>
-            <Path d={closed(outline)} fill={hatchFill(WEDGE)} />
+            <Path d={closed(outline)} fill={hatchFill(wedge)} />
             <Path d={sides(outline)} fill="none" stroke={colour.ochre} strokeWidth={1} />
           </G>
+        ))}
+        {corners.map((area) => (
+          <Path key={closed(area)} d={closed(area)} fill={hatchFill(corner)} stroke={colour.ink} strokeWidth={0.75} />
         ))}
         {pans.map((pan) => (
           <Path key={closed(pan)} d={closed(pan)} fill={colour.sheet} stroke={colour.ink} strokeWidth={1.2} />
@@ -72,6 +78,12 @@ export function PlanBand(props: PlanBandProps) {
       <Line x1={x0} x2={x1} y1={edgeY} y2={edgeY} stroke={colour.ink} strokeWidth={2.5} />
     </G>
   )
+}
+
+/** The sides of the spread alone: without the lines square to the edge, where the next wedge begins. */
+function withoutEnds(outline: StripWedge['outline']): StripWedge['outline'] {
+  const isSquare = (at: number, beside: number) => outline.at(at)?.chainage === outline.at(beside)?.chainage
+  return outline.slice(isSquare(0, 1) ? 1 : 0, isSquare(-1, -2) ? -1 : undefined)
 }
 
 /** A live end is filled, a dead end open and dashed at its set-back; the tendon runs in behind it. */
