@@ -166,6 +166,14 @@ describe('Strip in front', () => {
     expect(check.limit).toBeCloseTo(counts * area(16), 6)
   })
 
+  test('the crack steel that the job chose counts over the width of the strip (EN 7.3.2; table from memory)', () => {
+    // fctm 3.0238; phi = 20 / (3.0238 / 2.9 x 220 / (8 x 40)) = 27.90; 200 - 40 x 2.90 / 7 = 183.4 MPa;
+    // 3.0238 x 220,000 / 183.4 = 3627 mm2/m; over 900 + 900 = 1.8 m and two faces: 3264 mm2.
+    const chosen = accepting(withPan({ parts: between }), 'en-crack-minimum')
+    expect(Math.abs(strip(chosen).demand - 3264)).toBeLessThan(2)
+    expect(strip(withPan({ parts: between })).demand).toBeCloseTo((1324 * 110) / 170, 6)
+  })
+
   test('bars outside half the gap to the next tendon do not count', () => {
     // Six at 361: the outermost stand at 902.5.
     expect(strip(withPan({ parts: between, bars: [{ ...BARS, pitch: 361 }] }), 'bottom').limit).toBeCloseTo(

@@ -104,6 +104,10 @@ describe('Stressed from both ends', () => {
   })
 })
 
+test('elongates without friction by P0 L / (E A): 588.8 x 17,180 / (195 x 394.8) = 131.4', () => {
+  expect(profile(oneTendon({ settings: allPairs(0, 0) })).nominal.elongation).toBeCloseTo(131.4, 1)
+})
+
 describe('Friction', () => {
   const far = (settings: Parameters<typeof oneTendon>[0]) => profile(oneTendon(settings)).nominal.points.at(-1)
 

@@ -229,6 +229,12 @@ describe('BS 8666:2020 by one secondary source', () => {
     expect(cut(row, BS_8666_2020).massEach).toBeCloseTo(0.977, 3)
   })
 
+  test('shape 15: 500 + 700 = 1200, whatever the bend (by hand)', () => {
+    const bent = { code: '15', d: 12, dimensions: { A: 500, C: 700 } }
+    expect(cut(bent, BS_8666_2020).calculated).toBe(1200)
+    expect(cut(bent, BS_8666_2005).calculated).toBe(1200)
+  })
+
   test('shape 75 is 25 mm longer than in 2005 (one secondary source)', () => {
     // pi * (300 - 10) + 400 + 25 = 1336.06
     const ring = { code: '75', d: 10, dimensions: { A: 300, B: 400 } }
