@@ -1,5 +1,6 @@
 import { spreadOf } from '@wedgeline/engine/bases'
-import { alongAzimuth, edgeWedge, found, gapsOfEdge, panOutline, tendonEndsOfEdge } from '@wedgeline/engine/geometry'
+import { alongAzimuth, found, panOutline } from '@wedgeline/engine/geometry'
+import { cornerWedges, wedgesOfEdge } from '@wedgeline/engine/wedges'
 import type { Anchor, Edge, EdgeFrame, LayoutIndex, LengthKind, Point, Pour, Tendon } from '@wedgeline/engine'
 
 /** What the plan of a pour draws, in mm on the ground. Nothing here knows of px. */
@@ -12,6 +13,8 @@ export interface PlanData {
   readonly tendons: readonly PlanTendon[]
   readonly anchors: readonly PlanAnchor[]
   readonly wedges: readonly PlanArea[]
+  /** Without precompression along either edge of a corner. */
+  readonly corners: readonly PlanArea[]
   readonly gridLines: readonly { readonly name: string; readonly point: Point; readonly direction: Point }[]
 }
 
@@ -72,6 +75,7 @@ export function planData(index: LayoutIndex, pourId: string): PlanData {
       (index.anchorsOfTendon.get(tendon.id) ?? []).map((anchor) => planAnchor(index, pour, anchor)),
     ),
     wedges,
+    corners: cornersOf(index, pourId),
     gridLines: index.layout.gridLines.map(({ name, x, y, azimuth }) => ({
       name,
       point: { x, y },
@@ -106,17 +110,24 @@ function planEdge(index: LayoutIndex, edge: Edge): PlanEdge {
   }
 }
 
+/** As in the checks of the gaps; an edge that no tendon points at has none to show. */
 function wedgesOf(index: LayoutIndex, edge: Edge): PlanArea[] {
-  const frame = found(index.frames, edge.id, 'edge')
-  if (tendonEndsOfEdge(index, edge.id).length === 0) return []
-  return gapsOfEdge(index, edge.id).flatMap((gap): PlanArea[] => {
-    const wedge = edgeWedge(frame, gap, { angle: spreadOf(index.layout.job), startsAt: 'bearing-face' })
-    if (!wedge) return []
-    return [
-      { id: gap.id, mark: '', outline: wedge.outline.map(({ chainage, depth }) => frame.pointAt(chainage, depth)) },
-    ]
-  })
+  const { pointAt } = found(index.frames, edge.id, 'edge')
+  return [...wedgesOfEdge(index, edge.id)].flatMap(([id, { gap, polygons }]) =>
+    gap.after || gap.before
+      ? polygons.map((polygon) => ({
+          id,
+          mark: '',
+          outline: polygon.map(({ chainage, depth }) => pointAt(chainage, depth)),
+        }))
+      : [],
+  )
 }
+
+const cornersOf = (index: LayoutIndex, pourId: string): PlanArea[] =>
+  [...cornerWedges(index, pourId)].flatMap(([id, { polygons }]) =>
+    polygons.map((outline, i) => ({ id: `${id}:${i}`, mark: '', outline })),
+  )
 
 interface Placed {
   readonly point: Point

@@ -32,9 +32,15 @@ export function PlanKey({ data }: { readonly data: PlanData }) {
         </Entry>
       ) : null}
       {data.wedges.length > 0 ? (
-        <Entry words="edge wedge by the closed form, without a status">
+        <Entry words="edge wedge: no precompression square to the edge">
           <Hatch id="key-wedge" spacing={5} />
           <Rect x={1} y={1} width={24} height={10} fill={hatchFill('key-wedge')} stroke={colour.ochre} />
+        </Entry>
+      ) : null}
+      {data.corners.length > 0 ? (
+        <Entry words="corner without precompression either way">
+          <Hatch id="key-corner" spacing={5} stroke={colour.ink} />
+          <Rect x={1} y={1} width={24} height={10} fill={hatchFill('key-corner')} stroke={colour.ink} />
         </Entry>
       ) : null}
       {data.anchors.length > 0 ? (

@@ -14,6 +14,7 @@ import { PlanKey } from './plan-key'
 import { boundsOf, pathThrough, planScale } from './plan-scale'
 
 const WEDGE = 'pour-wedge'
+const CORNER = 'pour-corner'
 const ZOOM = { least: 1, most: 12, step: 1.5 } as const
 const MARGIN = { wide: 78, phone: 62 } as const
 const PHONE_HEIGHT = 420
@@ -63,6 +64,7 @@ export function PourPlan({ index, pourId, onEdge, onPan }: PourPlanProps) {
                 </ClipPath>
               </Defs>
               <Hatch id={WEDGE} />
+              <Hatch id={CORNER} stroke={colour.ink} />
               <Path d={outline} fill={colour.concrete} />
               <G clipPath="url(#pour-outline)">
                 {data.regions.map((region) => (
@@ -74,6 +76,15 @@ export function PourPlan({ index, pourId, onEdge, onPan }: PourPlanProps) {
                     d={areaOf(wedge)}
                     fill={hatchFill(WEDGE)}
                     stroke={colour.ochre}
+                    strokeWidth={0.75}
+                  />
+                ))}
+                {data.corners.map((corner) => (
+                  <Path
+                    key={corner.id}
+                    d={areaOf(corner)}
+                    fill={hatchFill(CORNER)}
+                    stroke={colour.ink}
                     strokeWidth={0.75}
                   />
                 ))}

@@ -28,7 +28,7 @@ const TYPES_ONLY = { [CONTRACT]: [ENGINE], components: [ENGINE] }
 
 /** The engine as a whole runs in this file of the client; screens take its types and its small entries. */
 const RUNS_ENGINE = /^lib\/engine-answer\.ts$/
-const SMALL_ENTRIES = ['@wedgeline/engine/geometry', '@wedgeline/engine/result', '@wedgeline/engine/bases']
+const SMALL_ENTRIES = ['geometry', 'wedges', 'result', 'bases'].map((name) => `@wedgeline/engine/${name}`)
 
 const SERVER_PACKAGES =
   /^(better-sqlite3|drizzle-orm|express|helmet|compression|pino|pino-http|lucia|@lucia-auth\/.*|@node-rs\/.*|nodemailer|flydrive|exceljs|piscina|tsx|@trpc\/server)(\/|$)/

@@ -76,6 +76,7 @@ const ALLOWED: readonly [string, string][] = [
   ['features/edge/edge-screen.tsx', '../../lib/units'],
   ['features/edge/edge-screen.tsx', '@wedgeline/contract'],
   ['features/edge/edge-screen.tsx', '@wedgeline/engine/geometry'],
+  ['features/edge/edge-screen.tsx', '@wedgeline/engine/wedges'],
   ['features/edge/edge-screen.tsx', '@wedgeline/engine/result'],
   ['features/job/job-screen.tsx', '@wedgeline/engine/bases'],
   ['lib/engine-answer.ts', '@wedgeline/engine'],

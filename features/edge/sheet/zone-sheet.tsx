@@ -46,7 +46,11 @@ export function sheetTitle({
     return { title: `${end.mark}, ${end.end} end`, detail: `${place}, ${above} above soffit, ${below} below top` }
   }
   const wedge = data.wedges.find((each) => each.zoneId === zoneId)
-  if (wedge) return { title: `Gap of ${edge.mark}`, detail: `edge wedge ${wedge.depth.toFixed(0)} mm deep` }
+  if (wedge) {
+    const { depth, area } = wedge
+    const detail = `edge wedge ${depth.toFixed(0)} mm deep, area ${(area / 1e6).toFixed(3)} m²`
+    return { title: `Gap of ${edge.mark}`, detail }
+  }
   return { title: `Edge ${edge.mark}`, detail: 'bars along the whole edge' }
 }
 

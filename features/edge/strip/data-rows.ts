@@ -103,12 +103,12 @@ function steelRow({ index, data }: RowsOf): Row {
 }
 
 function wedgeRow({ data, selected, onSelect }: RowsOf): Row {
-  const cells = data.wedges.map(({ zoneId, depth, middle }): DataCell => ({
+  const cells = data.wedges.map(({ zoneId, depth, area, middle }): DataCell => ({
     id: zoneId,
     chainage: middle,
     text: depth.toFixed(0),
     isSelected: selected === zoneId,
-    spoken: `Gap: edge wedge ${depth.toFixed(0)} mm deep`,
+    spoken: `Gap: edge wedge ${depth.toFixed(0)} mm deep, ${(area / 1e6).toFixed(3)} m²`,
     weight: depth,
     onPress: () => onSelect(zoneId),
   }))

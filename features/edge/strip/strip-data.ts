@@ -1,15 +1,13 @@
-import { spreadOf } from '@wedgeline/engine/bases'
 import {
   alongAzimuth,
   anchorMark,
   dot,
-  edgeWedge,
   found,
-  gapsOfEdge,
   panOutline,
   placedBars,
   tendonEndsOfEdge,
 } from '@wedgeline/engine/geometry'
+import { cornerWedges, wedgesOfEdge } from '@wedgeline/engine/wedges'
 import type {
   AnchorEnd,
   EdgeFrame,
@@ -28,6 +26,8 @@ export interface StripData {
   readonly lengths: readonly StripLength[]
   readonly bars: readonly PlacedBar[]
   readonly wedges: readonly StripWedge[]
+  /** Areas at the ends of the edge without precompression along either edge. */
+  readonly corners: readonly Outline[]
   readonly pans: readonly Outline[]
   readonly obstructions: readonly Outline[]
   readonly gridCrossings: readonly { readonly name: string; readonly chainage: number }[]
@@ -53,10 +53,12 @@ export interface StripEnd {
   readonly local: LocalOnFace | null
 }
 
-/** Area at the edge between two spreads, without precompression square to the edge. */
+/** Area at the edge between two spreads, without precompression square to the edge: as in the checks of its gap. */
 export interface StripWedge {
   readonly zoneId: string
   readonly depth: number
+  /** mm2 */
+  readonly area: number
   readonly middle: number
   readonly outline: Outline
 }
@@ -100,6 +102,7 @@ export function stripData(index: LayoutIndex, edgeId: string): StripData {
     ends: tendonEndsOfEdge(index, edgeId).map((end) => stripEnd(index, end)),
     bars: placedBars(index, edgeId),
     wedges: wedgesOf(index, edgeId),
+    corners: cornersOf(index, { pourId: pour.id, edgeId, frame }),
     pans: (index.pansOfPour.get(pour.id) ?? []).map((pan) => panOutline(pan).map((point) => frame.local(point))),
     obstructions: index.layout.obstructions
       .filter(({ levelId }) => levelId === pour.levelId)
@@ -111,14 +114,20 @@ export function stripData(index: LayoutIndex, edgeId: string): StripData {
 }
 
 function wedgesOf(index: LayoutIndex, edgeId: string): readonly StripWedge[] {
-  const { job } = index.layout
-  const frame = found(index.frames, edgeId, 'edge')
-  const angle = spreadOf(job)
-  return gapsOfEdge(index, edgeId).flatMap((gap): StripWedge[] => {
-    const wedge = edgeWedge(frame, gap, { angle, startsAt: 'bearing-face' })
-    if (!wedge) return []
-    return [{ zoneId: gap.id, depth: wedge.depth, middle: (gap.from + gap.to) / 2, outline: wedge.outline }]
+  return [...wedgesOfEdge(index, edgeId)].flatMap(([zoneId, { gap, depth, area, polygons }]): StripWedge[] => {
+    const [outline] = polygons
+    if (!outline || (!gap.after && !gap.before)) return []
+    return [{ zoneId, depth, area, middle: (gap.from + gap.to) / 2, outline }]
   })
+}
+
+function cornersOf(
+  index: LayoutIndex,
+  { pourId, edgeId, frame }: { readonly pourId: string; readonly edgeId: string; readonly frame: EdgeFrame },
+): readonly Outline[] {
+  return [...cornerWedges(index, pourId).values()]
+    .filter(({ before, after }) => before.id === edgeId || after.id === edgeId)
+    .flatMap(({ polygons }) => polygons.map((polygon) => polygon.map((point) => frame.local(point))))
 }
 
 function stripEnd(
