@@ -18,6 +18,7 @@ import { useCompanyRoles } from '../company/company-roles'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
 import { SaveState } from '../editing/save-state'
+import { ProposalDialog } from '../proposal/proposal-dialog'
 import { insertAnchors, removeAnchors } from './anchor-commands'
 import { PhoneAnchors, SheetBar } from './phone-anchors'
 import { readPasted, type Pasted } from './paste'
@@ -49,6 +50,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
   const isAdmin = useCompanyRoles(companyId).includes('admin')
   const isWide = useWide()
   const [isPasting, setPasting] = useState(false)
+  const [isProposing, setProposing] = useState(false)
   const checks = usePourChecks(edge.pourId)
   const index = useMemo(() => layoutIndex(toEngine(layout)), [layout])
   const data = useMemo(() => stripData(index, edge.id), [index, edge.id])
@@ -90,7 +92,15 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         { label: `Pour ${pour?.mark ?? ''}`, href: `/jobs/${jobId}/pours/${edge.pourId}` },
       ]}
       summary={<Summary results={results} isStale={checks.isStale} />}
-      actions={<Actions edgeId={edge.id} canType={canType} onPaste={() => setPasting(true)} onSelect={select} />}
+      actions={
+        <Actions
+          edgeId={edge.id}
+          canType={canType}
+          onPaste={() => setPasting(true)}
+          onPropose={() => setProposing(true)}
+          onSelect={select}
+        />
+      }
     >
       {missing ? (
         <View style={styles.missing}>
@@ -135,6 +145,14 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
           {sheet}
         </BottomSheet>
       ) : null}
+      {isProposing ? (
+        <ProposalDialog
+          pourId={edge.pourId}
+          zoneIds={[...results.keys()]}
+          what={`edge ${edge.mark}`}
+          onClose={() => setProposing(false)}
+        />
+      ) : null}
       <PasteDialog
         isOpen={isPasting}
         context={{ hardware: layout.hardware }}
@@ -167,6 +185,7 @@ function Actions(props: {
   readonly edgeId: string
   readonly canType: boolean
   readonly onPaste: () => void
+  readonly onPropose: () => void
   readonly onSelect: (zoneId: string) => void
 }) {
   const { canEdit, canUndo, undo, undoLabel } = useJobDraft()
@@ -190,6 +209,7 @@ function Actions(props: {
             disabled={!props.canType}
             onPress={props.onPaste}
           />
+          <Button label="Propose bars" disabled={!props.canType} onPress={props.onPropose} />
         </>
       ) : null}
       <Button label="Edge bars" onPress={() => props.onSelect(`edge:${props.edgeId}`)} />

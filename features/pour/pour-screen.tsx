@@ -12,6 +12,7 @@ import { Empty, Failed } from '@/components/ui/states'
 import { Text } from '@/components/ui/text'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
+import { ProposalDialog } from '../proposal/proposal-dialog'
 import { CountLinks } from './count-links'
 import { EdgeLengths } from './edge-lengths'
 import { EdgeList } from './edge-list'
@@ -24,21 +25,32 @@ import { boundsOf } from './plan-scale'
 /** A pour from above with its edges, checks counted by status, and what is known of the slab. */
 export function PourScreen({ jobId, pourId }: { readonly jobId: string; readonly pourId: string }) {
   const job = useJobDraft()
+  const [isProposing, setProposing] = useState(false)
   return (
     <PourFrame
       pourId={pourId}
       page="plan"
       actions={
-        job.canUndo ? (
-          <Button
-            label={job.undoLabel ? `Undo: ${job.undoLabel}` : 'Undo'}
-            icon={<Icon name="undo" />}
-            onPress={job.undo}
-          />
-        ) : null
+        <>
+          {job.canUndo ? (
+            <Button
+              label={job.undoLabel ? `Undo: ${job.undoLabel}` : 'Undo'}
+              icon={<Icon name="undo" />}
+              onPress={job.undo}
+            />
+          ) : null}
+          {job.canEdit ? <Button label="Propose bars" onPress={() => setProposing(true)} /> : null}
+        </>
       }
     >
-      {(pour) => <PourParts jobId={jobId} pour={pour} />}
+      {(pour) => (
+        <>
+          <PourParts jobId={jobId} pour={pour} />
+          {isProposing ? (
+            <ProposalDialog pourId={pour.id} what={`pour ${pour.mark}`} onClose={() => setProposing(false)} />
+          ) : null}
+        </>
+      )}
     </PourFrame>
   )
 }

@@ -101,17 +101,31 @@ function SteelSet(props: {
     edit({
       label: `${zoneName}: ${name}`,
       key: `${row.id}.${key}`,
-      commands: [{ type: 'set', table: 'steel', id: row.id, changes: { shape } }],
+      // What a person changes is theirs from then on: no proposal replaces it.
+      commands: [{ type: 'set', table: 'steel', id: row.id, changes: { shape, source: 'by-hand' } }],
     })
   }
   const remove = () =>
     edit({ label: `${zoneName}: remove ${name}`, commands: [{ type: 'remove', table: 'steel', id: row.id }] })
+  const isKept = row.isLocked || row.source !== 'proposed'
+  const lockOrRelease = () =>
+    edit({
+      label: `${zoneName}: ${isKept ? 'release' : 'lock'} ${name}`,
+      commands: [
+        {
+          type: 'set',
+          table: 'steel',
+          id: row.id,
+          changes: isKept ? { isLocked: false, source: 'proposed' } : { isLocked: true },
+        },
+      ],
+    })
   const giveToAll = () => {
     const commands = likeZones.flatMap((zone): Command[] => {
       const old = steelOfZone(layout.steel, zone).filter(({ shape }) => shape.kind === row.shape.kind)
       return [
         ...old.map(({ id }): Command => ({ type: 'remove', table: 'steel', id })),
-        { type: 'insert', table: 'steel', row: { ...row, id: newId(), zone } },
+        { type: 'insert', table: 'steel', row: { ...row, id: newId(), zone, source: 'by-hand' } },
       ]
     })
     edit({ label: `Same ${name} at ${likeZones.length + 1} ${likeWords}`, commands })
@@ -119,9 +133,17 @@ function SteelSet(props: {
   return (
     <View>
       <View style={styles.line}>
-        <Text style={styles.words}>{`${name}: ${steelWords(toSi(row.shape))}`}</Text>
+        <Text style={styles.words}>{`${name}: ${steelWords(toSi(row.shape))}${stateWords(row)}`}</Text>
         {canEdit ? (
           <>
+            <Button
+              kind="quiet"
+              label={`Keep ${name} when bars are proposed`}
+              iconOnly
+              icon={<Icon name="lock" />}
+              aria-pressed={isKept}
+              onPress={lockOrRelease}
+            />
             <Button kind="quiet" label={isOpen ? 'Close' : 'Change'} aria-expanded={isOpen} onPress={onOpen} />
             <Button kind="quiet" label={`Remove ${name}`} iconOnly icon={<Icon name="remove" />} onPress={remove} />
           </>
@@ -162,6 +184,12 @@ function SteelSet(props: {
       ) : null}
     </View>
   )
+}
+
+/** Proposed bars are replaced by the next proposal unless they are locked; those entered by hand are kept until released. */
+const stateWords = ({ source, isLocked }: SteelData): string => {
+  if (isLocked) return ', locked'
+  return source === 'proposed' ? ', proposed' : ''
 }
 
 /** Whether a value may stand while it is typed; one that may not is said when the field is left. */

@@ -1,12 +1,13 @@
 import type { EdgeData, SteelZoneData } from '@wedgeline/contract'
 import type { LayoutIndex, ZoneResult } from '@wedgeline/engine'
 import { edgeAnchorMark, gridReference } from '@wedgeline/engine/geometry'
-import { useMemo, type ReactNode } from 'react'
+import { useMemo, useState, type ReactNode } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { Button } from '@/components/ui/button'
 import { Text } from '@/components/ui/text'
 import { space, useWide } from '@/components/theme'
 import { useJobDraft } from '../../editing/job-draft'
+import { ProposalDialog } from '../../proposal/proposal-dialog'
 import { removeAnchors } from '../anchor-commands'
 import type { StripData } from '../strip/strip-data'
 import { AnchorDrawing } from './anchor-drawing'
@@ -59,6 +60,7 @@ export function ZoneSheet(props: ZoneSheetProps) {
   const { edge, index, data, zoneId, result, onClose } = props
   const { layout, jobId, canEdit, edit } = useJobDraft()
   const isWide = useWide()
+  const [isProposing, setProposing] = useState(false)
   const anchor = layout.anchors.find(({ id }) => `anchor:${id}` === zoneId) ?? null
   const zone = useMemo(() => steelZoneOf(edge.id, zoneId), [edge.id, zoneId])
   const pour = layout.pours.find(({ id }) => id === edge.pourId)
@@ -102,7 +104,11 @@ export function ZoneSheet(props: ZoneSheetProps) {
           place={place}
           likeZones={likeZones}
         />
+        {canEdit ? <Button label={`Propose bars for ${name}`} onPress={() => setProposing(true)} /> : null}
       </Part>
+      {isProposing ? (
+        <ProposalDialog pourId={edge.pourId} zoneIds={[zoneId]} what={name} onClose={() => setProposing(false)} />
+      ) : null}
       {isWide && numbers ? <Part title="Numbers">{numbers}</Part> : null}
       {anchor && canEdit ? (
         <Button
