@@ -1,5 +1,5 @@
 import { readLayout, toEngine, type LayoutFile } from '@wedgeline/contract'
-import { checkPour } from '@wedgeline/engine'
+import { checkPour, proposeSteel } from '@wedgeline/engine'
 import { bench, describe } from 'vitest'
 import { demoLayout } from '../../db/seed/demo-layout'
 import { largeLayout } from './large-layout'
@@ -20,6 +20,18 @@ describe('check', () => {
   bench('one pour of 1,000 anchors', () => {
     checkPour(toEngine(thousand), { pourId: 'P1' })
   })
+})
+
+/** Without its steel, so that every place asks for bars. */
+const proposeAll = (file: LayoutFile): void => {
+  const layout = { ...toEngine(file), steel: [] }
+  for (const { id } of layout.pours) proposeSteel(layout, { pourId: id })
+}
+
+describe('propose', () => {
+  const once = { iterations: 2, time: 0, warmupIterations: 1, warmupTime: 0 }
+  bench('demo, 104 anchors', () => proposeAll(demo), once)
+  bench('1,000 anchors', () => proposeAll(thousand), once)
 })
 
 describe('read', () => {
