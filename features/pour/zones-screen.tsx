@@ -3,7 +3,7 @@ import type { PourResult } from '@wedgeline/engine'
 import { useLocalSearchParams } from 'expo-router'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
-import { space } from '@/components/theme'
+import { space, useWide } from '@/components/theme'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
 import { STATUS_WORD } from '@/components/ui/status-mark'
@@ -78,14 +78,17 @@ function Zones({ jobId, pourId, result }: ZonesProps) {
 
 function Waits({ jobId, result }: { readonly jobId: string; readonly result: PourResult }) {
   const { layout } = useJobDraft()
+  const isWide = useWide()
   const readings = waitingReadings(result, new Set(layout.job.readings.map(({ readingId }) => readingId)))
   if (readings.length === 0) return null
+  const count = readings.length === 1 ? 'One reading waits' : `${readings.length} readings wait`
   const list = readings.map(
     ({ readingId, checks }) => `${readingTitle(readingId)} (${checks} ${checks === 1 ? 'check' : 'checks'})`,
   )
   return (
     <Banner
-      words={`Checks wait for an engineer to accept what they rest on: ${list.join('; ')}.`}
+      // The job's page has them all with their text; a phone has no room to say them twice.
+      words={isWide ? `${count} for an engineer to accept: ${list.join('; ')}.` : `${count} for an engineer to accept.`}
       actions={<Button label="Readings of this job" href={`/jobs/${jobId}`} />}
     />
   )
