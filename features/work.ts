@@ -13,6 +13,7 @@ export { PanScreen } from './pan/pan-screen'
 export { NewPourScreen } from './pour/new-pour-screen'
 export { PourScreen } from './pour/pour-screen'
 export { PourZonesScreen } from './pour/zones-screen'
+export { QuickEdgeScreen } from './quick-edge/quick-edge-screen'
 export { ScheduleScreen } from './schedule/schedule-screen'
 /** The reader of layout files goes with them: the list of jobs, which imports files, does without the contract. */
 export { readLayoutText } from '@wedgeline/contract'

@@ -19,6 +19,7 @@ import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
 import { SaveState } from '../editing/save-state'
 import { ProposalDialog } from '../proposal/proposal-dialog'
+import { UnfiledNotice } from '../quick-edge/unfiled-notice'
 import { insertAnchors, removeAnchors } from './anchor-commands'
 import { PhoneAnchors, SheetBar } from './phone-anchors'
 import { readPasted, type Pasted } from './paste'
@@ -102,6 +103,7 @@ function OpenEdge({ jobId, edge }: { readonly jobId: string; readonly edge: Edge
         />
       }
     >
+      <UnfiledNotice />
       {missing ? (
         <View style={styles.missing}>
           <Empty

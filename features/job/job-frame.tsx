@@ -3,6 +3,7 @@ import { NavBar } from '@/components/ui/nav-bar'
 import { Screen } from '@/components/ui/screen'
 import { SaveState } from '../editing/save-state'
 import { useJobDraft } from '../editing/job-draft'
+import { UnfiledNotice } from '../quick-edge/unfiled-notice'
 
 export type JobPage = 'job' | 'basis' | 'people'
 
@@ -37,6 +38,7 @@ export function JobFrame({ page, title, actions, isNarrow = false, children }: J
         />
       }
     >
+      <UnfiledNotice />
       {children}
     </Screen>
   )

@@ -18,7 +18,11 @@ export function RenameDialog({ onClose }: { onClose: () => void }) {
   const update = useMutation(
     trpc.job.update.mutationOptions({
       onSuccess: async () => {
-        await Promise.all([reload(), queryClient.invalidateQueries(trpc.job.list.queryFilter())])
+        await Promise.all([
+          reload(),
+          queryClient.invalidateQueries(trpc.job.byId.queryFilter({ jobId })),
+          queryClient.invalidateQueries(trpc.job.list.queryFilter()),
+        ])
         onClose()
       },
     }),

@@ -1,12 +1,14 @@
 import { useQuery } from '@tanstack/react-query'
+import type { Status } from '@wedgeline/engine'
 import { useEffect, useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { colour, space, useWide } from '@/components/theme'
 import { Button } from '@/components/ui/button'
 import { Icon } from '@/components/ui/icon'
 import { Link } from '@/components/ui/link'
-import { Screen } from '@/components/ui/screen'
+import { Screen, Section } from '@/components/ui/screen'
 import { Empty, Failed, Waiting } from '@/components/ui/states'
+import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { failureOf } from '@/lib/failure'
 import { useSession, type Me } from '@/lib/session'
@@ -22,6 +24,8 @@ export interface JobInList {
   readonly companyName: string
   readonly number: string
   readonly title: string
+  /** A quick edge that is in no job yet. */
+  readonly isUnfiled: boolean
   readonly readingsProposed: number
   readonly pours: readonly PourInList[]
 }
@@ -32,6 +36,8 @@ interface PourInList {
   readonly title: string
   readonly anchors: number
   readonly counts: Counts
+  /** Of a quick edge: the check that comes first. */
+  readonly worst: { readonly zone: string; readonly check: string; readonly status: Status } | null
 }
 
 type Asked = 'new' | 'import' | null
@@ -51,6 +57,7 @@ export function JobsScreen() {
       actions={
         own.length > 0 ? (
           <>
+            <Button label="Quick edge" href="/quick-edge" />
             <Button label="Import a layout" icon={<Icon name="upload" />} onPress={() => setAsked('import')} />
             <Button kind="main" label="New job" onPress={() => setAsked('new')} />
           </>
@@ -92,13 +99,20 @@ interface JobListProps {
 }
 
 function JobList({ jobs, companies, canMake, onNew }: JobListProps) {
+  const quick = jobs.filter(({ isUnfiled }) => isUnfiled)
+  const filed = jobs.filter(({ isUnfiled }) => !isUnfiled)
   if (jobs.length > 0) {
     return (
-      <View role="list">
-        {worstFirst(jobs, ({ pours }) => pours).map((job) => (
-          <JobEntry key={job.id} job={job} hasCompany={companies.length > 1} />
-        ))}
-      </View>
+      <>
+        {filed.length > 0 ? (
+          <View role="list" aria-label="Jobs">
+            {worstFirst(filed, ({ pours }) => pours).map((job) => (
+              <JobEntry key={job.id} job={job} hasCompany={companies.length > 1} />
+            ))}
+          </View>
+        ) : null}
+        {quick.length > 0 ? <QuickEdges jobs={quick} hasCompany={companies.length > 1} /> : null}
+      </>
     )
   }
   if (companies.length === 0) {
@@ -121,6 +135,41 @@ function JobList({ jobs, companies, canMake, onNew }: JobListProps) {
       firstStep="A detailer or engineer who is on a job adds you to its people; it then stands here."
     />
   )
+}
+
+/** Edges that somebody kept without a job; those with the worst check first. */
+function QuickEdges({ jobs, hasCompany }: { readonly jobs: readonly JobInList[]; readonly hasCompany: boolean }) {
+  const isWide = useWide()
+  return (
+    <Section title="Quick edges, not yet filed">
+      <View role="list" aria-label="Quick edges, not yet filed">
+        {worstFirst(jobs, ({ pours }) => pours).map(({ id, number, title, companyName, pours }) => (
+          <View key={id} role="listitem" style={[styles.pour, !isWide && styles.pourNarrow]}>
+            <Link href={`/jobs/${id}`} style={styles.mark}>{`${number}  ${title}`}</Link>
+            <Text tone="soft" style={styles.anchors}>
+              {[anchorsText(pours.reduce((sum, { anchors }) => sum + anchors, 0)), hasCompany ? companyName : '']
+                .filter(Boolean)
+                .join(', ')}
+            </Text>
+            <QuickWorst pours={pours} />
+          </View>
+        ))}
+      </View>
+      <Text kind="small" tone="soft">
+        Statuses are on readings that nobody has accepted.
+      </Text>
+    </Section>
+  )
+}
+
+const anchorsText = (anchors: number): string => `${anchors} ${anchors === 1 ? 'anchor' : 'anchors'}`
+
+function QuickWorst({ pours }: Pick<JobInList, 'pours'>) {
+  const [pour] = worstFirst(pours, (each) => [each])
+  if (!pour) return <Text tone="soft">no pour left</Text>
+  const { worst, counts } = pour
+  if (!worst) return <StatusLine counts={counts} />
+  return <StatusMark status={worst.status} words={`${worst.zone}: ${worst.check}`} />
 }
 
 function JobEntry({ job, hasCompany }: { job: JobInList; hasCompany: boolean }) {
@@ -147,7 +196,7 @@ function JobEntry({ job, hasCompany }: { job: JobInList; hasCompany: boolean }) 
             {pour.title ? `Pour ${pour.mark}, ${pour.title}` : `Pour ${pour.mark}`}
           </Link>
           <Text tone="soft" style={styles.anchors}>
-            {`${pour.anchors} ${pour.anchors === 1 ? 'anchor' : 'anchors'}, draft`}
+            {`${anchorsText(pour.anchors)}, draft`}
           </Text>
           <StatusLine counts={pour.counts} />
         </View>

@@ -7,6 +7,7 @@ import type { Counts } from '../checks/counts'
 import { StatusMarks } from '../checks/status-counts'
 import { useJobDraft, type JobDraft } from '../editing/job-draft'
 import { SaveState } from '../editing/save-state'
+import { UnfiledNotice } from '../quick-edge/unfiled-notice'
 
 export type PourPage = 'plan' | 'zones' | 'schedule'
 
@@ -54,6 +55,7 @@ export function PourFrame({ pourId, page, counts, actions, children }: PourFrame
         />
       }
     >
+      <UnfiledNotice />
       {children(pour)}
     </Screen>
   )

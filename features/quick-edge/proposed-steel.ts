@@ -6,7 +6,7 @@ const COUNTS: ReadonlySet<string> = new Set(['count', 'countTop', 'countBottom',
 
 /** A shape of the engine as the layout file holds it. @throws where the engine names a shape that no file can hold. */
 export function shapeData(shape: SteelShape): SteelShapeData {
-  const named = Object.entries(shape).map(([key, value]) =>
+  const named = Object.entries<unknown>({ ...shape }).map(([key, value]): [string, unknown] =>
     typeof value === 'number' && !COUNTS.has(key) ? [`${key}Mm`, value] : [key, value],
   )
   return steelShapeSchema.parse(Object.fromEntries(named))

@@ -11,8 +11,8 @@ import { NUMBER_RULES, ofHardware, type NumberRule, type QuickForm, type QuickPr
 export interface QuickFieldsProps {
   readonly form: QuickForm
   readonly problems: QuickProblems
-  readonly hardware: LayoutFile['hardware']
-  readonly strandTypes: LayoutFile['strandTypes']
+  readonly hardware: readonly LayoutFile['hardware'][number][]
+  readonly strandTypes: readonly LayoutFile['strandTypes'][number][]
   readonly onChange: (changes: Partial<QuickForm>) => void
 }
 

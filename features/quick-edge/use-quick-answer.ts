@@ -12,6 +12,8 @@ export interface QuickAnswer {
   /** On the proposed readings. */
   readonly result: PourResult
   readonly schedule: Schedule
+  /** When it was worked out. */
+  readonly atMs: number
 }
 
 export interface QuickWork {
@@ -87,5 +89,5 @@ async function answerOf(layout: LayoutFile): Promise<QuickAnswer | null> {
   const plain = toEngine(layout)
   const engine = pageEngine()
   const [result, schedule] = await Promise.all([engine.check(plain, POUR_ID), engine.schedule(plain, POUR_ID)])
-  return result && schedule ? { layout, result: onProposedReadings(result), schedule } : null
+  return result && schedule ? { layout, result: onProposedReadings(result), schedule, atMs: Date.now() } : null
 }

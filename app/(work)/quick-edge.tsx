@@ -1,0 +1,7 @@
+import { lazy } from 'react'
+
+const QuickEdgeScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.QuickEdgeScreen })))
+
+export default function QuickEdgeRoute() {
+  return <QuickEdgeScreen />
+}
