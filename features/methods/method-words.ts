@@ -7,7 +7,7 @@ import type { Method, MethodFamily } from './method'
 export type Sureness = Tag | 'entered'
 
 /** The surest first. */
-const SURENESS: readonly Sureness[] = [
+export const SURENESS: readonly Sureness[] = [
   'read',
   'digest',
   'secondary',

@@ -68,7 +68,10 @@ function accountOf({ person, companies }: Me, onSignOut: () => void): Account {
   return {
     person: person.name,
     company: isSeveral ? `${companies.length} companies` : company,
-    items: companies.flatMap(({ id, name }, index) => pagesOf({ id, name: isSeveral ? name : '', index })),
+    items: [
+      ...companies.flatMap(({ id, name }, index) => pagesOf({ id, name: isSeveral ? name : '', index })),
+      { key: 'methods', label: 'How it is checked', href: '/methods', startsGroup: true },
+    ],
     onSignOut,
   }
 }

@@ -46,6 +46,13 @@ function jobCases({ jobId }: Demo): readonly ScreenCase[] {
     { name: 'jobs-menu', ...jobs, open: openMenu },
     { name: 'jobs-new', ...jobs, open: press('New job') },
     { name: 'jobs-import', ...jobs, open: press('Import a layout') },
+    {
+      name: 'methods',
+      route: '(work)/methods.tsx',
+      path: '/methods',
+      heading: /^How it is checked$/,
+      role: 'engineer',
+    },
     { name: 'job', ...page, role: 'detailer' },
     { name: 'job-reading', ...page, role: 'engineer', open: press(/^Accept/) },
     { name: 'basis', route: `${JOB}/basis.tsx`, path: `${job}/basis`, heading: /^Basis/, role: 'engineer' },
