@@ -7,8 +7,10 @@ import {
   layoutProblems,
   type Applied,
   type Batch,
+  type Command,
   type Conflict,
   type LayoutFile,
+  type PourData,
   type Problem,
 } from '@wedgeline/contract'
 import { write, type Connection, type Tx } from '../db/client'
@@ -61,6 +63,7 @@ function storeBatch(ctx: JobCall, tx: Tx, batch: Batch): Stored {
     return storedBefore(tx, { known, isSame, atMs: ctx.now() })
   }
   const stamp = stampOf(ctx)
+  assertOwnPart(ctx, batch)
   const { before, applied } = applyToday(tx, key, batch)
   assertSpareShare(ctx, before, applied.layout)
   assertNoNewProblem(before, applied.layout)
@@ -118,6 +121,22 @@ const staleBatch = (conflicts: readonly Conflict[], versions: Versions) =>
     conflicts,
     versions,
   })
+
+/** What a drafter has in hand without being a detailer: how the marks of a pour begin, and how its bars come. */
+const OF_THE_SCHEDULE: readonly string[] = ['markPrefix', 'firstMark', 'deliveries'] satisfies (keyof PourData)[]
+
+function assertOwnPart({ company }: JobCall, { commands }: Batch): void {
+  if (company.roles.some((role) => role === 'detailer' || role === 'engineer')) return
+  const isOfTheSchedule = (command: Command) =>
+    command.type === 'set' &&
+    command.table === 'pours' &&
+    Object.keys(command.changes).every((field) => OF_THE_SCHEDULE.includes(field))
+  if (!commands.every(isOfTheSchedule)) {
+    throw forbidden(
+      'A drafter changes the prefix of marks, the first mark and the deliveries of a pour; the rest of the layout is for a detailer or an engineer.',
+    )
+  }
+}
 
 /** That steel of a mat is spare is for an engineer to say. */
 function assertSpareShare({ company }: JobCall, before: LayoutFile, after: LayoutFile): void {

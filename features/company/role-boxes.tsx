@@ -6,7 +6,7 @@ import { Text } from '@/components/ui/text'
 const ROLE_HINTS: Readonly<Record<Role, string>> = {
   detailer: 'enters pours, anchors and steel',
   engineer: 'does that too; accepts readings, sets factors',
-  drafter: 'exports schedules',
+  drafter: 'sets marks and deliveries, exports schedules',
   inspector: 'reads what should be there on the deck',
   admin: 'people, roles and hardware',
 }

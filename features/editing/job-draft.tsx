@@ -19,7 +19,10 @@ export interface JobDraft {
   readonly isUnfiled: boolean
   readonly layout: LayoutFile
   readonly roles: readonly Role[]
+  /** The layout is theirs to change: a detailer or an engineer. */
   readonly canEdit: boolean
+  /** How marks begin and how bars are delivered is theirs to set: a drafter too. */
+  readonly canSetDeliveries: boolean
   readonly save: SaveState
   readonly problem: string | null
   readonly savedAtMs: number | null
@@ -103,6 +106,8 @@ interface About {
   readonly myRoles: readonly Role[]
 }
 
+const mayEdit = (role: Role): boolean => role === 'detailer' || role === 'engineer'
+
 function jobOf(of: { store: DraftStore; view: DraftView; about: About; say: (words: string) => void }): JobDraft {
   const { store, view, about, say } = of
   const { draft, save, problem, savedAtMs, dropped } = view
@@ -113,7 +118,8 @@ function jobOf(of: { store: DraftStore; view: DraftView; about: About; say: (wor
     isUnfiled: about.isUnfiled,
     layout: draft.layout,
     roles: about.myRoles,
-    canEdit: about.myRoles.some((role) => role === 'detailer' || role === 'engineer'),
+    canEdit: about.myRoles.some(mayEdit),
+    canSetDeliveries: about.myRoles.some((role) => role === 'drafter' || mayEdit(role)),
     save,
     problem,
     savedAtMs,

@@ -47,9 +47,9 @@ function Opened({ children }: { children: ReactNode }) {
 
 /** Ctrl+Z and Ctrl+Shift+Z (or Ctrl+Y) anywhere but in a box to type in, which has an undo of its own. */
 function UndoKeys() {
-  const { undo, redo, canEdit } = useJobDraft()
+  const { undo, redo, canSetDeliveries } = useJobDraft()
   useEffect(() => {
-    if (!canEdit || typeof window === 'undefined') return
+    if (!canSetDeliveries || typeof window === 'undefined') return
     const onKeyDown = (event: KeyboardEvent) => {
       if (!(event.ctrlKey || event.metaKey) || event.altKey || isTypedIn(event.target)) return
       const key = event.key.toLowerCase()
@@ -60,7 +60,7 @@ function UndoKeys() {
     }
     window.addEventListener('keydown', onKeyDown)
     return () => window.removeEventListener('keydown', onKeyDown)
-  }, [undo, redo, canEdit])
+  }, [undo, redo, canSetDeliveries])
   return null
 }
 

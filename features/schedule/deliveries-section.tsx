@@ -17,8 +17,8 @@ type Delivery = PourData['deliveries'][number]
 
 /** How marks begin, and which edges and pans come together: what a drafter sets for a pour's schedule. */
 export function DeliveriesSection({ pourId }: { readonly pourId: string }) {
-  const { layout } = useJobDraft()
-  const { refusal, canEdit, apply } = useRowEdit()
+  const { layout, canSetDeliveries } = useJobDraft()
+  const { refusal, apply } = useRowEdit()
   const pour = layout.pours.find(({ id }) => id === pourId)
   if (!pour) return null
   const set = (label: string, changes: Partial<PourData>) =>
@@ -33,10 +33,10 @@ export function DeliveriesSection({ pourId }: { readonly pourId: string }) {
   return (
     <Section
       title="Marks and deliveries"
-      actions={canEdit ? <Button label="Add a delivery" icon={<Icon name="plus" />} onPress={add} /> : null}
+      actions={canSetDeliveries ? <Button label="Add a delivery" icon={<Icon name="plus" />} onPress={add} /> : null}
     >
       {refusal ? <Banner tone="over" words={refusal} isUrgent /> : null}
-      <MarkFields pour={pour} disabled={!canEdit} onSet={set} />
+      <MarkFields pour={pour} disabled={!canSetDeliveries} onSet={set} />
       {pour.deliveries.length === 0 ? (
         <Text tone="soft">No deliveries yet: all bars of the pour come together.</Text>
       ) : null}
@@ -45,7 +45,7 @@ export function DeliveriesSection({ pourId }: { readonly pourId: string }) {
           key={delivery.id}
           delivery={delivery}
           members={membersOf(layout, pour)}
-          disabled={!canEdit}
+          disabled={!canSetDeliveries}
           onSet={(label, changes) => setDelivery(delivery.id, label, changes)}
           onRemove={() =>
             set('Remove a delivery', { deliveries: pour.deliveries.filter(({ id }) => id !== delivery.id) })

@@ -12,7 +12,7 @@ export const layoutRouter = router({
       versions: loadVersions(ctx.db, keyOf(ctx)),
       engineVersion: ENGINE_VERSION,
     })),
-  applyBatch: jobProcedure(['detailer', 'engineer'])
+  applyBatch: jobProcedure(['drafter', 'detailer', 'engineer'])
     .input(batchSchema)
     .mutation(({ ctx, input }) => applyBatch(ctx, input)),
 })

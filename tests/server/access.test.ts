@@ -83,7 +83,7 @@ const EXPECTED: Record<string, Record<CallerName, Verdict>> = {
   'job.addMember': peopleOfJob('detailer', 'engineer', 'admin'),
   'job.removeMember': peopleOfJob('detailer', 'engineer', 'admin'),
   'layout.byJob': onJob(...ALL),
-  'layout.applyBatch': onJob('detailer', 'engineer'),
+  'layout.applyBatch': onJob('drafter', 'detailer', 'engineer'),
   'reading.accept': onJob('engineer'),
   'reading.withdraw': onJob('engineer'),
   'schedule.byPour': onJob(...ALL),

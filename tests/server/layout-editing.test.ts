@@ -149,6 +149,30 @@ describe('a batch', () => {
     expect((await load()).layout.pours[0]).toMatchObject({ title: 'North', mats })
   })
 
+  test('by a drafter takes the prefix of marks, the first mark and deliveries of a pour, and nothing else', async () => {
+    await detailer.job.addMember({ jobId, personId: company.personId('drafter') })
+    const drafter = company.as('drafter')
+    const seen = await load()
+    const { id } = first(seen.layout.pours)
+    const setPour = (changes: Record<string, unknown>): Command => ({ type: 'set', table: 'pours', id, changes })
+    const deliveries = [{ id: 'd1', name: 'First load', neededOn: '2026-03-09', edgeIds: ['e1'], panIds: [] }]
+    const own = { markPrefix: 'N', firstMark: 20, deliveries }
+    const refused = [
+      [setPour({ ...own, title: 'North' })],
+      [setPour(own), setAnchor(first(seen.layout.anchors).id, { heightMm: 120 })],
+      [{ type: 'remove', table: 'steel', id: first(seen.layout.steel).id }],
+      [{ type: 'insert', table: 'steel', row: { ...first(seen.layout.steel), id: 'more' } }],
+      [{ type: 'set', table: 'levels', id: first(seen.layout.levels).id, changes: { mark: 'L9' } }],
+    ] satisfies Command[][]
+    for (const commands of refused) {
+      const refusal = await failure(drafter.layout.applyBatch(batchOf(seen, commands)))
+      expect(refusal).toMatchObject({ code: 'FORBIDDEN', message: expect.stringContaining('deliveries of a pour') })
+    }
+    expect(await load()).toEqual(seen)
+    await drafter.layout.applyBatch(batchOf(seen, [setPour(own)]))
+    expect(first((await load()).layout.pours)).toEqual({ ...first(seen.layout.pours), ...own })
+  })
+
   test('whose spare share names nobody who says so is refused with the field', async () => {
     const seen = await load()
     const pour = first(seen.layout.pours)

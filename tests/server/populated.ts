@@ -139,7 +139,6 @@ async function addRecords({ db, company, files }: TestServer, jobId: string): Pr
 /** An input for each procedure that a caller with the right to it gets an answer to. */
 function validInputs({ companyId, jobId, quickId, layout, versions }: Loaded): Record<string, unknown> {
   const pourId = layout.pours[0]?.id
-  const anchor = layout.anchors[0]
   const sample = sampleLayout()
   return {
     'session.me': undefined,
@@ -174,8 +173,9 @@ function validInputs({ companyId, jobId, quickId, layout, versions }: Loaded): R
     'layout.applyBatch': {
       id: uuidv7(),
       jobId,
-      bases: { [`edge:${anchor?.edgeId}`]: versions[`edge:${anchor?.edgeId}`] },
-      commands: [{ type: 'set', table: 'anchors', id: anchor?.id, changes: { heightMm: 111 } }],
+      bases: { [`pour:${pourId}`]: versions[`pour:${pourId}`] },
+      // Everybody who may change something may change this.
+      commands: [{ type: 'set', table: 'pours', id: pourId, changes: { markPrefix: 'N' } }],
     },
     'reading.accept': { jobId, readingId: OTHER_READING, reason: 'As well.' },
     'reading.withdraw': { jobId, readingId: READING },
