@@ -3,9 +3,9 @@
 import { basisOf } from './bases'
 import { CHECKS_OF_FAMILY, FAMILIES_OF_ZONE } from './checks/families'
 import { comparison, type CheckContext } from './checks/outcome'
-import { layoutIndex } from './layout-index'
+import { layoutIndex, type LayoutIndex } from './layout-index'
 import type { Layout } from './model'
-import type { Check, PourResult, Zone, ZoneResult } from './result'
+import type { Check, Family, PourResult, Zone, ZoneResult } from './result'
 import { bySeverity, countStatuses, worstOf } from './severity'
 import { zonesOfPour } from './zones'
 
@@ -24,18 +24,30 @@ export interface PourAsk {
  */
 export function checkPour(layout: Layout, { pourId, edgeId, withSteps = false }: PourAsk): PourResult {
   const index = layoutIndex(layout)
-  const { job } = layout
-  const context = { index, basis: basisOf(job), nearFrom: job.settings.nearFrom }
-  const zones = zonesOfPour(index, pourId)
-    .filter((zone) => edgeId === undefined || zone.edgeId === edgeId)
-    .map((zone) => checkZone(context, zone, withSteps))
-  return { pourId, basis: job.basis, zones, counts: countStatuses(zones.flatMap(({ checks }) => checks)) }
+  const context = contextOf(index)
+  const zones = zonesAsked(index, { pourId, edgeId }).map((zone) => checkZone(() => context, zone, withSteps))
+  return {
+    pourId,
+    basis: layout.job.basis,
+    zones,
+    counts: countStatuses(zones.flatMap(({ checks }) => checks)),
+  }
 }
 
-function checkZone(context: CheckContext, zone: Zone, withSteps: boolean): ZoneResult {
+export function contextOf(index: LayoutIndex): CheckContext {
+  const { job } = index.layout
+  return { index, basis: basisOf(job), nearFrom: job.settings.nearFrom }
+}
+
+/** The zones that an ask is about, in their order. */
+export const zonesAsked = (index: LayoutIndex, of: { pourId: string; edgeId: string | undefined }): Zone[] =>
+  zonesOfPour(index, of.pourId).filter((zone) => of.edgeId === undefined || zone.edgeId === of.edgeId)
+
+/** @param contextFor what each family is worked out from. */
+export function checkZone(contextFor: (family: Family) => CheckContext, zone: Zone, withSteps: boolean): ZoneResult {
   const made = FAMILIES_OF_ZONE[zone.kind].map((family) => ({
     family,
-    checks: CHECKS_OF_FAMILY[family](context, zone),
+    checks: CHECKS_OF_FAMILY[family](contextFor(family), zone),
   }))
   const checks = made.flatMap((one) => one.checks ?? []).sort(bySeverity)
   return {

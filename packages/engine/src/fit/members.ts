@@ -184,7 +184,8 @@ const extents = perIndex((index: LayoutIndex): readonly Extent[] => {
   ]
 })
 
-function longestReach({ layout }: LayoutIndex): number {
+/** How far from where it stands any bar or body of the layout reaches, and a metre more. */
+export function longestReach({ layout }: Pick<LayoutIndex, 'layout'>): number {
   const local = layout.hardware.flatMap(({ localSteel, straightBehindMin, splayLength }) => [
     straightBehindMin,
     splayLength ?? 0,
