@@ -7,7 +7,7 @@ import type { Stage, SteelShape } from '../model'
 import type { Compared, Zone } from '../result'
 import { sectionBehind } from '../section'
 import { sectionStepNear } from '../section-step'
-import { contextWith, isFixable, type Bench, type Place } from './bench'
+import { contextWith, isFixable, perBench, type Bench, type Place } from './bench'
 import type { Candidate } from './candidate'
 import { thicknessSets, type ThicknessNeed, type ThicknessSet } from './thickness-steel'
 import { transverseBars, transverseSets, type StraightBar, type TransverseNeed } from './transverse-bars'
@@ -29,18 +29,29 @@ export interface AnchorSteel {
 export function anchorSteel(bench: Bench, place: Place, shared: readonly StraightBar[]): AnchorSteel {
   const site = siteOf(bench, place.zone)
   if (!site) return { candidates: [], bars: [] }
-  const needs = unmetOf(needsOf(bench.context, place.zone))
-  const thickness = needs.find(({ plane }) => plane === 'thickness')
-  const upright = thickness ? lightest(bench, place, thicknessSets(thicknessNeed(bench, site, thickness))) : [[]]
-  if (thickness && !upright.some((shapes) => isFixable(bench, place, shapes))) {
-    return { candidates: upright.map((shapes) => ({ shapes })), bars: [] }
-  }
-  const made = upright.map((shapes) => ({ shapes, ...planPart(bench, place, { site, shapes, shared }) }))
+  const { sets, isBlocked } = uprightSets(bench, place)
+  if (isBlocked) return { candidates: sets.map((shapes) => ({ shapes })), bars: [] }
+  const made = sets.map((shapes) => ({ shapes, ...planPart(bench, place, { site, shapes, shared }) }))
   return {
     candidates: made.flatMap(({ shapes, sets }) => sets.map((set) => ({ shapes: [...shapes, ...set] }))),
     bars: made.flatMap(({ bars }) => bars),
   }
 }
+
+interface Upright {
+  readonly sets: readonly SteelShape[][]
+  /** None of them can be fixed. */
+  readonly isBlocked: boolean
+}
+
+/** Steel through the thickness, as far as it is asked for, by itself. */
+const uprightSets = perBench((bench, place): Upright => {
+  const site = siteOf(bench, place.zone)
+  const need = unmetOf(needsOf(bench.context, place.zone)).find(({ plane }) => plane === 'thickness')
+  return site && need
+    ? lightest(bench, place, thicknessSets(thicknessNeed(bench, site, need)))
+    : { sets: [[]], isBlocked: false }
+})
 
 /** The surroundings of an anchor; null for any other zone. */
 export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): AnchorSite | null {
@@ -48,7 +59,7 @@ export function siteOf({ context: { index } }: Bench, { kind, id }: Zone): Ancho
 }
 
 /** The lightest of each kind that can be fixed; where none can, the lightest one, for its reason to be named. */
-function lightest(bench: Bench, place: Place, sets: readonly ThicknessSet[]): SteelShape[][] {
+function lightest(bench: Bench, place: Place, sets: readonly ThicknessSet[]): Upright {
   const ordered = sets.map((shape, at) => ({ shape, at, mass: bench.roughly([shape]) }))
   ordered.sort((a, b) => a.mass - b.mass || a.at - b.at)
   const kept: SteelShape[][] = []
@@ -59,7 +70,9 @@ function lightest(bench: Bench, place: Place, sets: readonly ThicknessSet[]): St
     counts.set(shape.kind, count + 1)
     kept.push([shape])
   }
-  return kept.length > 0 ? kept : ordered.slice(0, THICKNESS_KEPT.hairpins).map(({ shape }) => [shape])
+  const isBlocked = kept.length === 0
+  const named = ordered.slice(0, THICKNESS_KEPT.hairpins).map(({ shape }) => [shape])
+  return { sets: isBlocked ? named : kept, isBlocked }
 }
 
 /** Bars in plan beside what already stands upright, which may count in plan as well. */

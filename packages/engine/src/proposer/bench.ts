@@ -119,9 +119,24 @@ export const asSteel = ({ zone, steelZone, pourId }: Place, shapes: readonly Ste
 export const contextWith = (bench: Bench, place: Place, shapes: readonly SteelShape[]): CheckContext =>
   contextPlus(bench.context, new Map([[place.key, asSteel(place, shapes)]]))
 
+/** What is wrong with a zone's own bars before anything is tried; made once for each. */
+export const faultsAt = perBench((bench, place) => faultsBefore(groundWith(bench, place, []), place.zone))
+
+/** Works something out once for each bench and zone that asks. */
+export function perBench<T>(make: (bench: Bench, place: Place) => T): (bench: Bench, place: Place) => T {
+  const ofBench = new WeakMap<Bench, Map<string, { readonly value: T }>>()
+  return (bench, place) => {
+    const made = ofBench.get(bench) ?? new Map<string, { readonly value: T }>()
+    ofBench.set(bench, made)
+    const known = made.get(place.zone.id) ?? { value: make(bench, place) }
+    made.set(place.zone.id, known)
+    return known.value
+  }
+}
+
 /** Whether steel alone stands in nothing's way and has its cover, whatever its zone still needs beside it. */
 export const isFixable = (bench: Bench, place: Place, shapes: readonly SteelShape[]): boolean =>
-  heldBy(groundWith(bench, place, shapes), place.zone, faultsBefore(groundWith(bench, place, []), place.zone)) === null
+  heldBy(groundWith(bench, place, shapes), place.zone, faultsAt(bench, place)) === null
 
 /** What the checks of a zone are asked with, a candidate in its place. */
 export function groundWith(bench: Bench, place: Place, shapes: readonly SteelShape[]): Ground {
@@ -141,7 +156,7 @@ const BLOCKED_KEPT = 6
 
 /** Tries candidates in their zone, lightest first, by the real checks of the zone. */
 export function tryAll(bench: Bench, place: Place, { candidates, blocked: impossible }: Candidates): Tried {
-  const before = faultsBefore(groundWith(bench, place, []), place.zone)
+  const before = faultsAt(bench, place)
   const ordered = candidates
     .map(({ shapes }, at) => ({ shapes, at, mass: bench.roughly(shapes) }))
     .sort((a, b) => a.mass - b.mass || a.shapes.length - b.shapes.length || a.at - b.at)

@@ -2,8 +2,8 @@
 
 import type { Zone } from '../result'
 import { siteOf } from './anchor-steel'
-import { groundWith, type Bench, type Place } from './bench'
-import { faultsBefore, needsOf, unmetOf } from './verdict'
+import { faultsAt, type Bench, type Place } from './bench'
+import { needsOf, unmetOf } from './verdict'
 
 export interface Situation {
   readonly example: Place
@@ -36,7 +36,7 @@ function keyOf(bench: Bench, place: Place): string | null {
     rounded(demand),
     rounded(limit),
   ])
-  const faults = [...faultsBefore(groundWith(bench, place, []), place.zone)].sort()
+  const faults = [...faultsAt(bench, place)].sort()
   const steel = (bench.context.index.steelOfZone.get(place.zone.id) ?? []).map(({ shape }) => shape)
   return JSON.stringify([place.zone.kind, asked, faults, steel, surroundings(bench, place.zone)])
 }
