@@ -60,11 +60,14 @@ function SurenessTag({ sureness }: { readonly sureness: Sureness }) {
   )
 }
 
+/** A title that stands for several cases names its inputs as $width: here their place alone. */
+const titleOf = (name: string): string => name.replace(/\$[\w.]+/g, '…')
+
 function ProofLine({ value, test, name }: Proof) {
   return (
     <View style={styles.proof}>
       <Text kind="small">{value}</Text>
-      <Text kind="small" tone="soft">{`${test.replace(/^tests\//, '')}: ${name}`}</Text>
+      <Text kind="small" tone="soft">{`${test.replace(/^tests\//, '')}: ${titleOf(name)}`}</Text>
     </View>
   )
 }

@@ -26,10 +26,10 @@ export const METHODS: readonly Method[] = [
     ],
   },
   {
-    id: 'uhskqu',
+    id: 'c8d6xo',
     symbol: 'plan',
     meaning: 'Bends in plan; none between straight ends',
-    formula: 'bend1 + … + bendn',
+    formula: 'θ1 + … + θn',
     unit: 'rad',
     families: ['bearing', 'bursting-thickness', 'bursting-plan', 'tendon'],
     clauses: [
@@ -331,7 +331,7 @@ export const METHODS: readonly Method[] = [
       {
         value: 'By hand: 0.15 × (0.3 + 0.005 × 17.18) = 0.057885: 588.8 e^-0.057885',
         test: 'tests/engine/tendon.test.ts',
-        name: 'dead: the jacking force, or after friction with the lowest pair',
+        name: 'dead: the jacking force, or after friction with the lowest pair (Eq. 5.45, from memory)',
       },
     ],
   },
@@ -727,7 +727,7 @@ export const METHODS: readonly Method[] = [
       {
         value: 'By hand: 588.8 kN / (4 × 98.7) = 1491.4 MPa; 818.5 + 220 = 1038.5 mm',
         test: 'tests/engine/dead-end.test.ts',
-        name: 'steel counts from the bulbs over the lower transmission length and one prism',
+        name: 'steel counts from the bulbs over the lower transmission length (from memory) and one prism',
       },
     ],
   },
@@ -871,7 +871,7 @@ export const METHODS: readonly Method[] = [
       {
         value: 'By hand: 588.8 kN / (4 × 98.7) = 1491.4 MPa; 818.5 + 220 = 1038.5 mm',
         test: 'tests/engine/dead-end.test.ts',
-        name: 'steel counts from the bulbs over the lower transmission length and one prism',
+        name: 'steel counts from the bulbs over the lower transmission length (from memory) and one prism',
       },
     ],
   },
@@ -3479,7 +3479,7 @@ export const METHODS: readonly Method[] = [
       {
         value: 'By hand (digest): 10 mm, 400 and 150: 1190',
         test: 'tests/engine/schedule/cut-length.test.ts',
-        name: 'shape $code, $d mm, shortest hooks: $L (digest)',
+        name: 'shape $code, $d mm, shortest hooks: $L (digest; 47 in 2020 from memory, unsure)',
       },
     ],
   },
@@ -3531,7 +3531,7 @@ export const METHODS: readonly Method[] = [
       {
         value: 'By hand (digest): 12 mm, 400 and 150: 1292',
         test: 'tests/engine/schedule/cut-length.test.ts',
-        name: 'shape $code, $d mm, shortest hooks: $L (digest)',
+        name: 'shape $code, $d mm, shortest hooks: $L (digest; 47 in 2020 from memory, unsure)',
       },
     ],
   },
@@ -3589,7 +3589,7 @@ export const METHODS: readonly Method[] = [
       {
         value: 'By hand (digest): 12 mm, 400 and 150: 1418',
         test: 'tests/engine/schedule/cut-length.test.ts',
-        name: 'shape $code, $d mm, shortest hooks: $L (digest)',
+        name: 'shape $code, $d mm, shortest hooks: $L (digest; 47 in 2020 from memory, unsure)',
       },
     ],
   },

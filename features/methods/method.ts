@@ -37,7 +37,7 @@ const SUMS: Readonly<Record<string, { readonly of: RegExp; readonly formula: str
   AsAcross: { of: /^(?:0|As\d+|AsMat)(?: \+ (?:As\d+|AsMat))*$/, formula: 'As1 + … + Asn + AsMat' },
   AsMat: { of: /^m\d+(?: \+ m\d+)*$/, formula: 'm1 + … + mn' },
   Acut: { of: /^Acut\d+(?: \+ Acut\d+)*$/, formula: 'Acut1 + … + Acutn' },
-  plan: { of: /^(?:0|bend\d+)(?: \+ bend\d+)*$/, formula: 'bend1 + … + bendn' },
+  plan: { of: /^(?:0|bend\d+)(?: \+ bend\d+)*$/, formula: 'θ1 + … + θn' },
   fmin: { of: /^min\(f\d+(?:, f\d+)*\)$/, formula: 'min(f1, …, fn)' },
   fmean: { of: /^\(f\d+(?: \+ f\d+)*\) \/ \d+$/, formula: '(f1 + … + fn) / n' },
   Pjack: { of: /^P\d+(?: \+ P\d+)*$/, formula: 'P1 + … + Pn' },

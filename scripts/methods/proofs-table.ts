@@ -251,7 +251,7 @@ export const PROOFS: readonly ProofEntry[] = [
     name: 'without friction P0 - w E A / L: 588.8 - 461.916 / 17.18 = 561.9 kN is over',
   },
   {
-    of: ['plan = bend1 + … + bendn', 'theta = plan + drape'],
+    of: ['plan = θ1 + … + θn', 'theta = plan + drape'],
     value: 'By hand: two bends of 45°: e^(-0.2 π / 2)',
     test: TENDON,
     name: 'counts a bend in plan by its angle: 45 degrees and back are a half of pi',
@@ -260,7 +260,7 @@ export const PROOFS: readonly ProofEntry[] = [
     of: ['Pfar = Pjack * exp(0 - u)'],
     value: 'By hand: 0.15 × (0.3 + 0.005 × 17.18) = 0.057885: 588.8 e^-0.057885',
     test: TENDON,
-    name: 'dead: the jacking force, or after friction with the lowest pair',
+    name: 'dead: the jacking force, or after friction with the lowest pair (Eq. 5.45, from memory)',
   },
   {
     of: ['Pjack = n * (r * Fpk)'],
@@ -349,7 +349,7 @@ export const PROOFS: readonly ProofEntry[] = [
     of: ['sigmaP = share * Pjack / (n * Ap)', 'xTo = lower + b'],
     value: 'By hand: 588.8 kN / (4 × 98.7) = 1491.4 MPa; 818.5 + 220 = 1038.5 mm',
     test: DEAD_END,
-    name: 'steel counts from the bulbs over the lower transmission length and one prism',
+    name: 'steel counts from the bulbs over the lower transmission length (from memory) and one prism',
   },
   {
     of: ['cs = z - zs'],
@@ -688,19 +688,19 @@ export const PROOFS: readonly ProofEntry[] = [
     of: ['L = 2 * A + B + max(21 * d, 240)'],
     value: 'By hand (digest): 10 mm, 400 and 150: 1190',
     test: CUTS,
-    name: 'shape $code, $d mm, shortest hooks: $L (digest)',
+    name: 'shape $code, $d mm, shortest hooks: $L (digest; 47 in 2020 from memory, unsure)',
   },
   {
     of: ['L = 2 * A + 2 * B + max(16 * d, 160)'],
     value: 'By hand (digest): 12 mm, 400 and 150: 1292',
     test: CUTS,
-    name: 'shape $code, $d mm, shortest hooks: $L (digest)',
+    name: 'shape $code, $d mm, shortest hooks: $L (digest; 47 in 2020 from memory, unsure)',
   },
   {
     of: ['L = 2 * A + 3 * B + max(14 * d, 150)'],
     value: 'By hand (digest): 12 mm, 400 and 150: 1418',
     test: CUTS,
-    name: 'shape $code, $d mm, shortest hooks: $L (digest)',
+    name: 'shape $code, $d mm, shortest hooks: $L (digest; 47 in 2020 from memory, unsure)',
   },
   {
     of: ['L = L0'],
@@ -738,7 +738,7 @@ export const MEANINGS: Readonly<Record<string, string>> = {
   'Asi = share * n * Abar * 1000 / w': 'One set of wedge bars, for each metre of the edge',
   'AsCounted = As1 + … + Asn': 'Steel counted inside the window behind the bearing face',
   'sigmaP = share * Pjack / (n * Ap)': 'Stress of the strand at the end of a stage',
-  'plan = bend1 + … + bendn': 'Bends in plan; none between straight ends',
+  'plan = θ1 + … + θn': 'Bends in plan; none between straight ends',
   'Pjack = P1 + … + Pn': 'Forces of anchors that act as one, together',
   'fctEff = fctm': 'Tensile strength when cracks are expected: the 28-day mean, or the job’s own',
   's = abs(x2 - x1)': 'Distance between two anchors along the edge or in height, or to the end of the edge',

@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest'
 import { APPROVAL, checkAt, checksAt, compared, K4, row, S4_APPROVED } from './anchor-checks'
 import { anchor, B7, D4, layout, S4, twoPours } from './sample-layout'
 
-describe('A plate without an approval: EN 1992-1-1 6.7 Eq. 6.63 (digest)', () => {
+describe('A plate without an approval: EN 1992-1-1 6.7 Eq. 6.63 (digest), 6.7(3) and 3.1.6 (from memory)', () => {
   const value = (symbol: string, stage: string) =>
     compared(checkAt(row('K4'), 'bearing', stage)).steps.find((line) => line.symbol === symbol)?.value
 

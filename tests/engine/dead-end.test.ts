@@ -26,7 +26,7 @@ describe('Bonded dead end: all force at the bulbs, 0.25 P (1 - splay / s) (engin
     expect(at(deadRow(), 'bursting-thickness').demand).toBeCloseTo((0.25 * F * (220 - 80)) / 220 / 300, 6)
   })
 
-  test('steel counts from the bulbs over the lower transmission length and one prism', () => {
+  test('steel counts from the bulbs over the lower transmission length (from memory) and one prism', () => {
     // 22 MPa: fctm = 0.3 * 22^(2/3) = 2.3554; fctd = 0.7 * 2.3554 / 1.5 = 1.0992; fbpt = 3.2 * 1.0992 = 3.5174;
     // 588 800 / (4 * 98.7) = 1491.4 MPa; lpt = 0.19 * 12.7 * 1491.4 / 3.5174 = 1023.1; 0.8 of it 818.5; + 220 = 1038.5
     const fctd = (0.7 * 0.3 * 22 ** (2 / 3)) / 1.5

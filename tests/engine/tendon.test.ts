@@ -229,7 +229,7 @@ describe('Force for the checks at an anchor', () => {
     expect(at(oneTendon({ settings: afterFriction }), 'E4-1').value).toBeCloseTo(588_800, 6)
   })
 
-  test('dead: the jacking force, or after friction with the lowest pair', () => {
+  test('dead: the jacking force, or after friction with the lowest pair (Eq. 5.45, from memory)', () => {
     expect(at(oneTendon(), 'E2-1').value).toBeCloseTo(588_800, 6)
     // Lowest pair: 0.15 x (0.3 + 0.005e-3 x 17,180) = 0.057885.
     const { value, steps } = at(oneTendon({ settings: afterFriction }), 'E2-1')

@@ -31,7 +31,7 @@ describe('edge wedges of the podium (drawn up with it, all tendons stressed)', (
     }
   })
 })
-describe('their outlines in plan, corner by corner', () => {
+describe('their outlines in plan, corner by corner (drawn up with it)', () => {
   const withSpread = (spread: '45' | 'EN') => {
     const layout = toEngine(demoLayout())
     const wedgeSpread = spread === '45' ? Math.PI / 4 : Math.atan(2 / 3)

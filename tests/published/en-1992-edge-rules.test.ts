@@ -121,7 +121,7 @@ describe('EN 1992-2 J.104.2 (from memory): the face has steel for 0.03 of the fa
   })
 })
 
-describe('Tie behind an anchor inside the slab: no clause gives a number', () => {
+describe('Tie behind an anchor inside the slab: no clause gives a number (shares from memory and digests)', () => {
   test('a quarter of 588.8 kN at 0.6 of 500 MPa: 147.2 kN, 491 mm2', () => {
     const rule = basis.tieBack.rule({ P: 588_800, own: null })
     expect(rule.steps[0]?.value).toBeCloseTo(147_200, 6)

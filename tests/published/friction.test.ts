@@ -87,7 +87,7 @@ describe('4 x 150 mm2, 24 m, theta 0.3, mu 0.19, k 0.01 /m inside mu, draw-in 6 
   })
 })
 
-test('wobble beside mu is mu times wobble inside it: the two families give one force', () => {
+test('wobble beside mu is mu times wobble inside it: the two families give one force (derived)', () => {
   const [inside, outside] = [
     oneTendon({ settings: { frictionFamily: 'inside', ...allPairs(0.2, 0.01e-3) } }),
     oneTendon({ settings: { frictionFamily: 'outside', ...allPairs(0.2, 0.2 * 0.01e-3) } }),

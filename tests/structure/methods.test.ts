@@ -33,6 +33,47 @@ function formulasInSource(): readonly { readonly file: string; readonly formula:
   )
 }
 
+/** The title of the group that a test stands in. */
+function groupOf(file: string, name: string): string {
+  const text = readFileSync(at(file), 'utf8')
+  const before = text.slice(0, text.indexOf(name))
+  return [...before.matchAll(/^describe(?:\.each)?\((['"])(.*?)\1/gm)].at(-1)?.[2] ?? ''
+}
+
+/** Files of published and worked examples, with the titles that stand at their left edge. */
+function publishedTitles(): readonly { readonly file: string; readonly title: string }[] {
+  const files = readdirSync(at('tests/published')).filter((name) => name.endsWith('.test.ts'))
+  return files.flatMap((file) =>
+    [...readFileSync(at(`tests/published/${file}`), 'utf8').matchAll(TITLE)].map(([, , title = '']) => ({
+      file,
+      title,
+    })),
+  )
+}
+const TITLE = /^(?:describe|test)(?:\.each)?\((['"])(.*?)\1/gm
+
+/** A source by name, or how the value came about. */
+const SOURCED =
+  /EN 1992|AS 3600|BS \d|EX\d|Eq\. |digest|memory|computed|derived|secondary|practice|\(read|drawn up|[Bb]y hand|\bW\d\d/
+/** Groups that hold for whatever the source of a number is, or whose single tests name theirs. */
+const WITHOUT_NUMBERS = ['One code’s force never meets another’s steel stress', 'Readings', 'limits of shapes']
+
+test('each group of published examples names its source or says how its values came about', () => {
+  const titles = publishedTitles().filter(({ file }) => !file.startsWith('worked-'))
+  expect(titles.length).toBeGreaterThan(20)
+  const unsaid = titles.filter(({ title }) => !SOURCED.test(title) && !WITHOUT_NUMBERS.includes(title))
+  expect(unsaid).toEqual([])
+})
+
+test('files of worked examples say so at their head, with the sources of their formulas', () => {
+  const files = readdirSync(at('tests/published')).filter((name) => /^worked-.*\.test\.ts$/.test(name))
+  const unsaid = files.filter((file) => {
+    const text = readFileSync(at(`tests/published/${file}`), 'utf8')
+    return !/[Ww]orked by hand/.test(text) || !/memory|digest|secondary|derived/.test(text)
+  })
+  expect(unsaid).toEqual([])
+})
+
 describe('every formula is on the list', () => {
   test('each that the source holds is reached by the layouts from which the list is made', () => {
     const reached = new Set(written.formulas.flatMap(({ texts }) => texts))
@@ -66,6 +107,16 @@ describe('every formula is shown to be right', () => {
     const quoted = ["'", '"', '`'].map((quote) => `(${quote}${name}${quote},`)
     const text = readFileSync(at(file), 'utf8')
     expect(quoted.some((title) => text.includes(title))).toBe(true)
+  })
+
+  test('a formula from memory is tested under a name that says so', () => {
+    const unsaid = METHODS.filter(({ clauses }) => clauses.every(({ tag }) => tag.startsWith('memory'))).flatMap(
+      (method) =>
+        method.proofs
+          .filter(({ test: file, name }) => !/memory/.test(`${groupOf(file, name)} ${name}`))
+          .map(({ name }) => `${nameOf(method)}: ${name}`),
+    )
+    expect(unsaid).toEqual([])
   })
 
   test('check values and words are kept for formulas that there are', () => {
