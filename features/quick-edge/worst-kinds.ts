@@ -1,6 +1,6 @@
 import { STATUSES } from '@wedgeline/engine/result'
 import type { Check, Status, ZoneResult } from '@wedgeline/engine'
-import { isOnProposed } from '../checks/on-proposed'
+import { isOnProposed } from '../checks/proposed'
 import { outcomeText } from '../checks/words'
 
 /** Checks of one name and status, by the worst of them. */

@@ -53,6 +53,13 @@ function jobCases({ jobId }: Demo): readonly ScreenCase[] {
       heading: /^How it is checked$/,
       role: 'engineer',
     },
+    {
+      name: 'quick-edge',
+      route: '(work)/quick-edge.tsx',
+      path: '/quick-edge',
+      heading: /^Quick edge$/,
+      role: 'detailer',
+    },
     { name: 'job', ...page, role: 'detailer' },
     { name: 'job-reading', ...page, role: 'engineer', open: press(/^Accept/) },
     { name: 'basis', route: `${JOB}/basis.tsx`, path: `${job}/basis`, heading: /^Basis/, role: 'engineer' },
