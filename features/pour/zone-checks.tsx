@@ -8,6 +8,7 @@ import { LimitKindBox } from '@/components/ui/limit-kind'
 import { Link } from '@/components/ui/link'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
+import { OnProposed } from '../checks/on-proposed'
 import { clauseText, notYetText, outcomeText, shownQuantity, sidesText } from '../checks/words'
 import { calculationPathOf, pathOfZone } from '../checks/zone-words'
 import type { ZoneRow } from './zone-rows'
@@ -78,6 +79,7 @@ function CheckRow({ check }: { readonly check: Check }) {
       {check.kind === 'advice' ? <Icon name="info" /> : <StatusMark status={check.status} markOnly />}
       <Text style={styles.shrink}>{name}</Text>
       <LimitKindBox kind={check.limitKind} />
+      <OnProposed check={check} />
     </View>
   )
   const outcome = (
