@@ -35,7 +35,7 @@ async function serve(settings: Settings): Promise<void> {
   mkdirSync(dirname(settings.databasePath), { recursive: true, mode: 0o700 })
   const db = openDatabase(settings.databasePath)
   const engine = enginePool()
-  const { check } = engine
+  const { check, schedule, writeWorkbook } = engine
   const server = createServer()
   const stop = async () => {
     server.closeAllConnections()
@@ -51,6 +51,8 @@ async function serve(settings: Settings): Promise<void> {
       mail: mailerOf(settings, log),
       log,
       check,
+      schedule,
+      writeWorkbook,
       now: Date.now,
       appUrl,
       dist: DIST,

@@ -1,3 +1,4 @@
+import { and, count, eq } from 'drizzle-orm'
 import { v7 as uuidv7 } from 'uuid'
 import type { NewMark } from '@wedgeline/engine'
 import type { Connection } from '../../db/client'
@@ -16,3 +17,11 @@ export function insertBarMarks(
       .run()
   }
 }
+
+/** How many marks a job has given; they are added and never taken away. */
+export const countBarMarks = (db: Connection, { companyId, jobId }: JobKey): number =>
+  db
+    .select({ marks: count() })
+    .from(barMark)
+    .where(and(eq(barMark.companyId, companyId), eq(barMark.jobId, jobId)))
+    .get()?.marks ?? 0

@@ -3,16 +3,14 @@ import type { Logger } from 'pino'
 import type { Db } from '../../db/client'
 import type { FileStore } from '../files/file-store'
 import type { Mailer } from '../mail/mailer'
-import type { CheckTask } from '../workers/engine-pool'
+import type { EngineTasks } from '../workers/engine-pool'
 
-/** What the server is made of; tests pass their own. */
-export interface ServerDeps {
+/** What the server is made of; tests pass their own. The engine's tasks run in threads outside tests. */
+export interface ServerDeps extends EngineTasks {
   readonly db: Db
   readonly files: FileStore
   readonly mail: Mailer
   readonly log: Logger
-  /** Runs the engine; in threads of its own outside tests. */
-  readonly check: CheckTask
   /** Instant in epoch milliseconds. */
   readonly now: () => number
   /** Address under which people reach the product, without a slash at the end; links begin with it. */

@@ -6,7 +6,7 @@ import { insertCompany } from '@/server/stores/company'
 import { insertPerson, setMember } from '@/server/stores/person'
 import { createCallerFactory } from '@/server/trpc/builders'
 import type { Context } from '@/server/trpc/context'
-import { checkHere } from './check-here'
+import { engineHere } from './check-here'
 
 /** A company with one person per role, on a database of its own: in memory unless a path is given. */
 
@@ -61,7 +61,7 @@ const contextOf = (db: Db, person: Context['person']): Context => ({
     open: () => Promise.reject(new Error('not read here')),
   },
   mail: { send: () => Promise.resolve() },
-  check: checkHere,
+  ...engineHere,
   log: pino({ level: 'silent' }),
   now: tick,
   appUrl: 'http://localhost:4180',

@@ -3,7 +3,7 @@ import { person } from '@/db/schema'
 import type { Context } from '@/server/trpc/context'
 import { createHash } from 'node:crypto'
 import { serverLog } from '@/server/log'
-import { checkHere } from './check-here'
+import { engineHere } from './check-here'
 import type { TestServer } from './server'
 
 const { id, name, email } = person
@@ -21,7 +21,7 @@ export const contextFor = ({ db }: Pick<TestServer, 'db'>, personId: string | nu
   },
   mail: { send: () => Promise.resolve() },
   log: serverLog({ level: 'silent' }),
-  check: checkHere,
+  ...engineHere,
   now: () => Date.now(),
   appUrl: 'http://localhost:4180',
   address: '192.0.2.1',

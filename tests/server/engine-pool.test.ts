@@ -2,7 +2,7 @@ import { afterAll, describe, expect, test } from 'vitest'
 import { readLayout, toEngine } from '@wedgeline/contract'
 import { enginePool } from '@/server/workers/engine-pool'
 import { demoLayout } from '@/db/seed/demo-layout'
-import { checkHere } from './check-here'
+import { checkHere, engineHere } from './check-here'
 
 const pool = enginePool()
 afterAll(() => pool.close())
@@ -33,4 +33,22 @@ describe('the engine in a thread', () => {
     await expect(pool.check({ layout: { ...layout, edgeLines: [] }, pourIds })).rejects.toThrow()
     expect(await pool.check({ layout, pourIds: [] })).toEqual([])
   }, 30_000)
+
+  test('schedules and writes the workbook that it writes on the thread of the caller', async () => {
+    const { layout, pourIds } = demo()
+    const pourId = pourIds.at(-1) ?? ''
+    expect(await pool.schedule({ layout, pourId })).toEqual(await engineHere.schedule({ layout, pourId }))
+    const about = {
+      reference: '26-001-P3',
+      preparedBy: 'A. Drafter',
+      preparedOn: '2026-01-05',
+      preparedAtMs: Date.UTC(2026, 0, 5, 8),
+      engineVersion: 'test',
+    }
+    const there = await pool.writeWorkbook({ layout, pourId, about })
+    const here = await engineHere.writeWorkbook({ layout, pourId, about })
+    if (!there.isWritten || !here.isWritten) throw new Error('the demo has an error in its schedule')
+    expect(Buffer.from(there.bytes).equals(Buffer.from(here.bytes))).toBe(true)
+    expect(there.newMarks).toEqual(here.newMarks)
+  }, 60_000)
 })

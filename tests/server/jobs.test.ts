@@ -331,6 +331,18 @@ describe('a schedule', () => {
     for (const [key, mark] of given) expect(later.get(key)).toBe(mark)
   })
 
+  test('exported by two at the same time gives each bar one mark', async () => {
+    const jobId = await importSample()
+    const pourId = (await detailer.layout.byJob({ jobId })).layout.pours[0]?.id ?? ''
+    await Promise.all([detailer.schedule.export({ jobId, pourId }), engineer.schedule.export({ jobId, pourId })])
+    const { barMarks } = (await detailer.layout.byJob({ jobId })).layout
+    expect(barMarks.length).toBeGreaterThan(0)
+    expect(new Set(barMarks.map(({ key }) => key)).size).toBe(barMarks.length)
+    const audit = await detailer.audit.list({ jobId })
+    expect(audit.filter(({ what }) => what === 'schedule.giveMarks')).toHaveLength(1)
+    expect(audit.filter(({ what }) => what === 'schedule.export')).toHaveLength(2)
+  })
+
   test('of a pour of another job is not found; an inspector reads it and does not export it', async () => {
     const jobId = await importSample()
     const other = await importSample()

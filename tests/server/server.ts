@@ -14,7 +14,7 @@ import type { Message } from '@/server/mail/mailer'
 import { SESSION_COOKIE, sessionReader } from '@/server/session'
 import { insertPerson, setMember } from '@/server/stores/person'
 import type { Role } from '@wedgeline/contract'
-import { checkHere } from './check-here'
+import { engineHere } from './check-here'
 import { openTestCompany, type TestCompany } from './company'
 
 /** The whole server on a company of its own in memory, with its log, mail and files to look at. */
@@ -52,7 +52,7 @@ export function openTestServer({ appUrl, dist, now = () => Date.now() }: Options
     files,
     mail: { send: (message) => Promise.resolve(void mails.push(message)) },
     log: serverLog({ level: 'debug', stream: { write: (line) => void lines.push(line) } }),
-    check: checkHere,
+    ...engineHere,
     now,
     appUrl: appUrl ?? 'http://localhost:4180',
     dist: dist ?? mkdtempSync(join(tmpdir(), 'wedgeline-dist-')),
