@@ -72,7 +72,6 @@ export default defineConfig([
     files: ['**/*.tsx'],
     rules: { 'max-lines-per-function': ['error', { max: 120, skipBlankLines: true, skipComments: true }] },
   },
-  { files: ['packages/engine/src/elastic/**'], rules: { '@typescript-eslint/no-non-null-assertion': 'off' } },
   // Tables of data are as long as what they hold.
   { files: ['**/*-table.ts', '**/*-tables.ts', 'db/seed/demo-*.ts'], rules: { 'max-lines': 'off' } },
   {
