@@ -72,7 +72,8 @@ describe('check', { timeout: 60_000 }, () => {
         status: 'over',
       }),
     )
-    expect(e105?.notYetChecked).toContain('spalling')
+    // Every family of an anchor is made.
+    expect(e105?.notYetChecked).toEqual([])
   })
 
   test('prints what the engine gives to everybody else', () => {

@@ -110,7 +110,7 @@ export const fitOf = (of: Layout, zoneId: string): Check[] => {
 }
 
 /** The one check of a zone whose name fits: status, what is there and what is asked for. */
-export function fit(parts: Parts, zoneId: string, name: RegExp) {
+export function theFit(parts: Parts, zoneId: string, name: RegExp) {
   const checks = fitOf(layout(parts), zoneId)
   const found = checks.filter((check): check is Compared => check.kind === 'compared' && name.test(check.name))
   const [only] = found

@@ -4,7 +4,7 @@ import {
   at,
   edgeBarsOf,
   faultsOf,
-  fit,
+  theFit,
   fitOf,
   hairpinsOf,
   linksOf,
@@ -43,7 +43,7 @@ describe('cover', () => {
     { height: 76, there: 1, status: 'over' },
     { height: 75, there: 0, status: 'stop' },
   ])('spiral of 150 at $height: $there to the soffit is $status', ({ height, there, status }) => {
-    expect(fit(behind(spiralOf(), { height }), ANCHOR, /^Spiral of E2-01 to soffit/)).toEqual({
+    expect(theFit(behind(spiralOf(), { height }), ANCHOR, /^Spiral of E2-01 to soffit/)).toEqual({
       status,
       there,
       asked: 30,
@@ -67,7 +67,7 @@ describe('cover', () => {
     { first: 6, status: 'stop' },
   ])('edge bar at $first from its edge is $status', ({ first, status }) => {
     const there = first - 6
-    expect(fit(alongEdge(edgeBarsOf({ first })), EDGE, /to (edge E2|top)$/)).toEqual({ status, there, asked: 30 })
+    expect(theFit(alongEdge(edgeBarsOf({ first })), EDGE, /to (edge E2|top)$/)).toEqual({ status, there, asked: 30 })
   })
 
   test.each([
@@ -76,7 +76,7 @@ describe('cover', () => {
     { from: 0, status: 'stop' },
     { from: -1, status: 'stop' },
   ])('a bar ends flat: from $from of edge E1 is $status', ({ from, status }) => {
-    const found = fit(alongEdge(edgeBarsOf({ from })), EDGE, /to (edge E1|top)$/)
+    const found = theFit(alongEdge(edgeBarsOf({ from })), EDGE, /to (edge E1|top)$/)
     expect(found).toEqual({ status, there: from, asked: 30 })
   })
 
@@ -107,7 +107,7 @@ describe('cover', () => {
     { height: -356, there: 49, status: 'over' },
   ])('in a beam a spiral lies inside its links: $there is $status (common practice)', ({ height, there, status }) => {
     const parts = beam({ anchors: [at(5000, { height })], steel: [steel('s', ofAnchor(), spiralOf())] })
-    expect(fit(parts, ANCHOR, /to soffit/)).toEqual({ status, there, asked: 50 })
+    expect(theFit(parts, ANCHOR, /to soffit/)).toEqual({ status, there, asked: 50 })
   })
 
   // Between the links: 40. -480 + 70 + 40 = -370
@@ -117,7 +117,7 @@ describe('cover', () => {
   ])('closed links stand between those of the beam: $there is $status (common practice)', (expected) => {
     const { height, there, status } = expected
     const parts = beam({ anchors: [at(5000, { height })], steel: [steel('s', ofAnchor(), linksOf())] })
-    expect(fit(parts, ANCHOR, /to soffit/)).toEqual({ status, there, asked: 40 })
+    expect(theFit(parts, ANCHOR, /to soffit/)).toEqual({ status, there, asked: 40 })
   })
 
   // A bottom bar of 10 in the beam, 600 wide: 600 - 545 - 5 = 50 to its inner side.
@@ -135,7 +135,7 @@ describe('cover', () => {
       pitch: 100,
     }
     const parts = beam({ anchors: [at(5000)], steel: [steel('s', ofAnchor(), shape)] })
-    expect(fit(parts, ANCHOR, /to (side of EB9|soffit)/)).toEqual({ status, there, asked: 50 })
+    expect(theFit(parts, ANCHOR, /to (side of EB9|soffit)/)).toEqual({ status, there, asked: 50 })
   })
 
   // 5000 + 75 + 30 = 5105
@@ -145,7 +145,7 @@ describe('cover', () => {
   ])('opening $there beside a spiral is $status', ({ side, there, status }) => {
     const opening = obstruction('opening', [side, 50, side + 300, 600], { mark: 'O2' })
     const parts = { ...behind(spiralOf({ outside: 150 }), { height: 110 }), more: { obstructions: [opening] } }
-    expect(fit(parts, ANCHOR, /to opening O2|to top/)).toEqual({ status, there, asked: 30 })
+    expect(theFit(parts, ANCHOR, /to opening O2|to top/)).toEqual({ status, there, asked: 30 })
   })
 })
 
@@ -157,7 +157,7 @@ describe('depth', () => {
     { outside: 219, asked: 279, status: 'over' },
     { outside: 220, asked: 280, status: 'stop' },
   ])('spiral of $outside and two covers: $asked in 220 is $status', ({ outside, asked, status }) => {
-    expect(fit(behind(spiralOf({ outside })), ANCHOR, /^Depth/)).toEqual({ status, there: 220, asked })
+    expect(theFit(behind(spiralOf({ outside })), ANCHOR, /^Depth/)).toEqual({ status, there: 220, asked })
   })
 })
 
@@ -175,12 +175,12 @@ describe('gaps (EN 1992-1-1 8.2, from memory): largest of the bar, aggregate + 5
     { spacing: 150, there: 0, status: 'over' },
     { spacing: 149, there: -1, status: 'over' },
   ])('spirals of 150 at $spacing: $there is $status', ({ spacing, there, status }) => {
-    expect(fit(two(spacing), ANCHOR, /^Clear gap, spiral/)).toEqual({ status, there, asked: 25 })
-    expect(fit(two(spacing), 'anchor:E2-2', /^Clear gap, spiral/)).toEqual({ status, there, asked: 25 })
+    expect(theFit(two(spacing), ANCHOR, /^Clear gap, spiral/)).toEqual({ status, there, asked: 25 })
+    expect(theFit(two(spacing), 'anchor:E2-2', /^Clear gap, spiral/)).toEqual({ status, there, asked: 25 })
   })
 
   test('at 148 they stand in one place by 2', () => {
-    expect(fit(two(148), ANCHOR, /^In one place, spiral/)).toEqual({ status: 'stop', there: -2, asked: 0 })
+    expect(theFit(two(148), ANCHOR, /^In one place, spiral/)).toEqual({ status: 'stop', there: -2, asked: 0 })
   })
 
   test.each([
@@ -192,7 +192,7 @@ describe('gaps (EN 1992-1-1 8.2, from memory): largest of the bar, aggregate + 5
     { shape: hairpinsOf({ count: 2, pitch: 135 }), there: 125, status: 'within' },
     { shape: hairpinsOf({ count: 2, pitch: 34, lies: 'flat', bend: 200 }), there: 24, status: 'over' },
   ])('within a set of $shape.kind at $shape.pitch: $there is $status', ({ shape, there, status }) => {
-    expect(fit(behind(shape), ANCHOR, /^Clear gap/)).toEqual({ status, there, asked: 25 })
+    expect(theFit(behind(shape), ANCHOR, /^Clear gap/)).toEqual({ status, there, asked: 25 })
   })
 
   test.each([
@@ -207,7 +207,7 @@ describe('gaps (EN 1992-1-1 8.2, from memory): largest of the bar, aggregate + 5
   ])('edge bars of $diameter at $pitch, aggregate $aggregate: $status', (of) => {
     const { diameter, aggregate, pitch, asked, status } = of
     const parts = { ...alongEdge(edgeBarsOf({ diameter, pitch, countTop: 2 })), pour: { aggregate } }
-    expect(fit(parts, EDGE, /^Clear gap/)).toEqual({ status, there: pitch - diameter, asked })
+    expect(theFit(parts, EDGE, /^Clear gap/)).toEqual({ status, there: pitch - diameter, asked })
   })
 
   // thickness - 2 x 30 - 2 x 20
@@ -217,7 +217,7 @@ describe('gaps (EN 1992-1-1 8.2, from memory): largest of the bar, aggregate + 5
   ])('two layers of 20 in $thickness: $there is $status', ({ thickness, there, status }) => {
     const zone = { kind: 'gap', edgeId: 'E2', afterAnchorId: null, beforeAnchorId: null } as const
     const bars = steel('s', zone, wedgeBarsOf({ diameter: 20, layers: 'both' }))
-    expect(fit({ ...thick(thickness), steel: [bars] }, 'gap:E2:start:end', /^Clear gap/)).toEqual({
+    expect(theFit({ ...thick(thickness), steel: [bars] }, 'gap:E2:start:end', /^Clear gap/)).toEqual({
       status,
       there,
       asked: 25,
@@ -228,7 +228,7 @@ describe('gaps (EN 1992-1-1 8.2, from memory): largest of the bar, aggregate + 5
     const run = (from: number) => alongEdge(edgeBarsOf({ from: 4000, to: 6000 }), edgeBarsOf({ from, to: from + 2000 }))
     // 6000 - 5000 = 1000, half of 2000
     expect(faultsOf(run(5000), EDGE)).toEqual([])
-    expect(fit(run(4999), EDGE, /^In one place/)).toEqual({ status: 'stop', there: -12, asked: 0 })
+    expect(theFit(run(4999), EDGE, /^In one place/)).toEqual({ status: 'stop', there: -12, asked: 0 })
   })
 })
 
@@ -242,7 +242,7 @@ describe('bodies in one place', () => {
     const hardware = [{ ...PLAIN, pocket: { width: 300, height: 160, depth: 110 } }]
     const parts = { ...alongEdge(edgeBarsOf({ first })), hardware, anchors: [at(5000)] }
     const name = status === 'stop' ? /^In one place, edge bar of E2 and pocket/ : /^Clear of one another/
-    expect(fit(parts, EDGE, name)).toEqual({ status, there, asked: 0 })
+    expect(theFit(parts, EDGE, name)).toEqual({ status, there, asked: 0 })
   })
 
   // Hole 130 to duct 70 over 900: half width 55 at 300 behind. Bend at half the pitch, bar of 10 at 295 + 5.
@@ -252,7 +252,7 @@ describe('bodies in one place', () => {
   ])('hairpins at $pitch beside a duct that flares are $status', ({ pitch, status }) => {
     const hardware = [{ ...PLAIN, hole: { width: 130, height: 20, isRound: false } }]
     const parts = { ...behind(hairpinsOf({ count: 2, pitch, first: 295 })), hardware }
-    const { there, ...rest } = fit(parts, ANCHOR, /hairpin of E2-01 and duct/)
+    const { there, ...rest } = theFit(parts, ANCHOR, /hairpin of E2-01 and duct/)
     expect(rest).toEqual({ status, asked: 0 })
     // Square to the side, which turns by 30 in 900: (pitch / 2 - 55) x cos - 5
     const clear = (pitch / 2 - 55) * Math.cos(Math.atan(30 / 900)) - 5
@@ -265,7 +265,7 @@ describe('bodies in one place', () => {
     { first: 0, status: 'within' },
     { first: -1, status: 'stop' },
   ])('first turn of a spiral $first behind the bearing face is $status', ({ first, status }) => {
-    expect(fit(behind(spiralOf({ first })), ANCHOR, /first turn/)).toEqual({ status, there: first, asked: 0 })
+    expect(theFit(behind(spiralOf({ first })), ANCHOR, /first turn/)).toEqual({ status, there: first, asked: 0 })
   })
 
   // A link's near side at the plate: first - 5; without a pocket the plate itself stands there.
@@ -274,7 +274,7 @@ describe('bodies in one place', () => {
     { first: 3, status: 'stop' },
   ])('links that begin $first behind the plate are $status', ({ first, status }) => {
     const parts = { ...behind(linksOf({ width: 200, height: 70, first })), hardware: [{ ...PLAIN, pocket: null }] }
-    expect(fit(parts, ANCHOR, /links of E2-01 and plate/).status).toBe(status)
+    expect(theFit(parts, ANCHOR, /links of E2-01 and plate/).status).toBe(status)
   })
 
   // Hairpin of 10 bent at 20 inside, its inner faces at depth 175 and height 190; bar of 12 at height 184. The bar
@@ -290,7 +290,7 @@ describe('bodies in one place', () => {
       ...behind(hairpin),
       steel: [steel('s', ofAnchor(), hairpin), steel('e', ofEdge(), edgeBarsOf({ first: 175 + x }))],
     }
-    const found = fit(parts, ANCHOR, /hairpin of E2-01 and edge bar of E2/)
+    const found = theFit(parts, ANCHOR, /hairpin of E2-01 and edge bar of E2/)
     expect(found.status).toBe(status)
     // A bend is taken in straight pieces, which lie up to 25 x (1 - cos 4.5 deg) = 0.08 inside it.
     if (status === 'stop') expect(Math.abs(found.there - (14 - Math.hypot(14, 6)))).toBeLessThan(0.08)
@@ -305,14 +305,14 @@ describe('bodies in one place', () => {
     const cage = { mark: 'B2', cageCover: 40, cageBars: '4H25, H10 links' }
     const column = obstruction('column', [4750, 400, 5250, 900], cage)
     const parts = { ...alongEdge(edgeBarsOf({ first })), more: { obstructions: [column] } }
-    expect(fit(parts, EDGE, /bar of column B2/)).toEqual({ status, there, asked: 0 })
+    expect(theFit(parts, EDGE, /bar of column B2/)).toEqual({ status, there, asked: 0 })
   })
 
   test('local steel that comes with the hardware is a body too', () => {
     const hardware = [{ ...PLAIN, localSteel: { ...linksOf(), isTested: true } }]
     const parts = { hardware, anchors: [at(5000), at(5300, {}, 2)] }
     // 300 wide at 300: they touch.
-    expect(fit(parts, ANCHOR, /^Clear gap, links/)).toEqual({ status: 'over', there: 0, asked: 25 })
+    expect(theFit(parts, ANCHOR, /^Clear gap, links/)).toEqual({ status: 'over', there: 0, asked: 25 })
   })
 })
 
@@ -328,7 +328,7 @@ describe('bending (BS 8666:2005 Table 2, read in a digest)', () => {
   ])('closed link of $diameter, $height high, in 180 is $status', ({ diameter, height, hook, asked, status }) => {
     const links = linksOf({ diameter, height, hook })
     const parts = { ...thick(180), ...behind(links, { height: 90 }) }
-    const found = fit(parts, ANCHOR, /^Bending/)
+    const found = theFit(parts, ANCHOR, /^Bending/)
     expect(found).toMatchObject({ status, asked })
     if (status === 'stop') expect(found.there).toBe(height)
   })
@@ -338,13 +338,13 @@ describe('bending (BS 8666:2005 Table 2, read in a digest)', () => {
     { bend: 100, status: 'within' },
     { bend: 99, status: 'stop' },
   ])('hairpin of 10 with a bend of $bend is $status', ({ bend, status }) => {
-    expect(fit(behind(hairpinsOf({ bend })), ANCHOR, /^Bending/)).toEqual({ status, there: bend, asked: 100 })
+    expect(theFit(behind(hairpinsOf({ bend })), ANCHOR, /^Bending/)).toEqual({ status, there: bend, asked: 100 })
   })
 
   test('a size that the standard does not list is not covered', () => {
-    const { status } = fit(behind(hairpinsOf({ diameter: 11 })), ANCHOR, /^Depth/)
+    const { status } = theFit(behind(hairpinsOf({ diameter: 11 })), ANCHOR, /^Depth/)
     expect(status).toBe('within')
-    expect(() => fit(behind(hairpinsOf({ diameter: 11 })), ANCHOR, /^Bending/)).toThrow(/Bending of hairpin/)
+    expect(() => theFit(behind(hairpinsOf({ diameter: 11 })), ANCHOR, /^Bending/)).toThrow(/Bending of hairpin/)
   })
 })
 
@@ -374,7 +374,7 @@ describe('pans and joints', () => {
       ...round(placed({ kind: 'trimmers' })),
       more: { obstructions: [obstruction('wall', [0, wall, 10000, wall + 200])] },
     }
-    expect(fit(parts, PAN, /trimmer of PN1 and wall W9/)).toEqual({ status, there, asked: 0 })
+    expect(theFit(parts, PAN, /trimmer of PN1 and wall W9/)).toEqual({ status, there, asked: 0 })
   })
 
   // The jack points south: bars from 5000 - length / 2 towards the south edge.
@@ -385,7 +385,7 @@ describe('pans and joints', () => {
     { length: 10_002, there: -1, status: 'stop' },
   ])('lap of $length with 5000 of slab beyond: $there is $status', ({ length: long, there, status }) => {
     const shape = placed({ kind: 'lap-bars', length: long, pitch: 500 })
-    expect(fit(round(shape, { azimuth: Math.PI }), PAN, /to (edge E2|top)$/)).toEqual({ status, there, asked: 30 })
+    expect(theFit(round(shape, { azimuth: Math.PI }), PAN, /to (edge E2|top)$/)).toEqual({ status, there, asked: 30 })
   })
 
   // Recess 350 across: half the pitch - 175 - 6
@@ -394,7 +394,7 @@ describe('pans and joints', () => {
     { pitch: 360, there: 0, status: 'within' },
     { pitch: 358, there: -2, status: 'stop' },
   ])('bars $pitch apart beside a recess of 350 are $status', ({ pitch, there, status }) => {
-    expect(fit(round(placed({ kind: 'tie-back-bars', pitch })), PAN, /recess of PN1/)).toEqual({
+    expect(theFit(round(placed({ kind: 'tie-back-bars', pitch })), PAN, /recess of PN1/)).toEqual({
       status,
       there,
       asked: 0,
@@ -428,7 +428,7 @@ describe('pans and joints', () => {
       more: { pours: [POUR, { ...POUR, id: 'P2', mark: 'P2', outline }], joints: [joint] },
       steel: [steel('s', { kind: 'joint', jointId: 'J' }, shape)],
     }
-    expect(fit(all, 'joint:J', /^Lap bar of joint J1 to/)).toEqual({ status, there, asked: 30 })
+    expect(theFit(all, 'joint:J', /^Lap bar of joint J1 to/)).toEqual({ status, there, asked: 30 })
   })
 })
 

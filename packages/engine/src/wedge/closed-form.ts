@@ -54,9 +54,12 @@ interface Side {
   readonly slope: number
 }
 
-/** Null where no tendon points at the edge, or where a tendon leans so far that its spread never opens into the gap. */
+/**
+ * Null where no tendon points at the edge, where a tendon leans so far that its spread never opens into the gap, and
+ * where a tendon stands beyond the end of its edge, so that the gap has no length.
+ */
 export function edgeWedge(frame: EdgeFrame, gap: Gap, spread: WedgeSpread): EdgeWedge | null {
-  if (!gap.after && !gap.before) return null
+  if ((!gap.after && !gap.before) || gap.to < gap.from - ROUNDING) return null
   const sides = (isFromBond: boolean) => ({
     after: gap.after && sideOf(gap.after, { spread, isFromBond, towards: 1 }),
     before: gap.before && sideOf(gap.before, { spread, isFromBond, towards: -1 }),
