@@ -44,10 +44,18 @@ export function toSi<T>(data: T): Si<T> {
   return convert(data) as Si<T>
 }
 
+/** Rows stay the same objects until they are changed: each is converted once, and a table whose rows all are, once. */
+const converted = new WeakMap<object, unknown>()
+
 function convert(data: unknown): unknown {
-  if (Array.isArray(data)) return data.map(convert)
   if (data === null || typeof data !== 'object') return data
-  return Object.fromEntries(Object.entries(data).map(([key, value]) => renamed(key, value)))
+  const known = converted.get(data)
+  if (known !== undefined) return known
+  const made = Array.isArray(data)
+    ? data.map(convert)
+    : Object.fromEntries(Object.entries(data).map(([key, value]) => renamed(key, value)))
+  converted.set(data, made)
+  return made
 }
 
 function renamed(key: string, value: unknown): [string, unknown] {

@@ -7,7 +7,7 @@ import type { LayoutIndex } from '../layout-index'
 import { carryOver, madeAlready, remember } from '../memo'
 import { forcesKept } from '../tendon/profile'
 import { stripOfEdge } from '../tendon/strip'
-import { usedSpreads, wedgesOfEdge, type GapWedge } from '../wedge/wedges-of-edge'
+import { usedSpreads, wedgesOfEdge, wedgesOfGaps, type GapWedge } from '../wedge/wedges-of-edge'
 import type { TouchedEdge } from './touched'
 
 export interface Carrying {
@@ -58,7 +58,8 @@ function carrySites({ was, index, kept }: Indexes, { edge, anchorIds }: TouchedE
 function carryWedges({ was, index, kept }: Indexes, { edge, gaps, gapIds }: TouchedEdge): void {
   const before = madeAlready(wedgesOfEdge, was, edge.id)
   if (!before) return
-  const near = wedgesOfEdge(kept, edge.id)
+  const touched = gaps.filter(({ id }) => gapIds.has(id))
+  const near = wedgesOfGaps(kept, edge.id, touched)
   const wedges = gaps.flatMap(({ id }): [string, GapWedge][] => {
     const wedge = gapIds.has(id) ? near.get(id) : before.get(id)
     return wedge && wedge.throughs.length === 0 ? [[id, wedge]] : []

@@ -55,8 +55,8 @@ function keptOf(
         if (away <= margin) kept.add(anchor)
       }
       if (!isOwn) continue
-      for (const anchor of besides(anchors, range.from, -1, PLACES_BEYOND)) kept.add(anchor)
-      for (const anchor of besides(anchors, range.to, 1, PLACES_BEYOND)) kept.add(anchor)
+      for (const anchor of besides(anchors, { at: range.from, way: -1, places: PLACES_BEYOND })) kept.add(anchor)
+      for (const anchor of besides(anchors, { at: range.to, way: 1, places: PLACES_BEYOND })) kept.add(anchor)
     }
   }
   const near = lines.filter((line) => isLineNear(line, frame, reaches.inPlan))

@@ -212,14 +212,17 @@ function touched(editing: Editing, edge: Edge, places: readonly Place[]): Touche
 function anchorsIn(anchors: readonly Anchor[], { at, anchors: reach, isInRow: isRow, isChanged }: Window): string[] {
   const near = anchors.filter(({ chainage }) => Math.abs(chainage - at) <= reach + ROUNDING)
   if (!isRow || !isChanged) return near.map(({ id }) => id)
-  const beside = [...besides(anchors, at, -1), ...besides(anchors, at, 1)]
+  const beside = [...besides(anchors, { at, way: -1 }), ...besides(anchors, { at, way: 1 })]
   return [...near, ...beside].map(({ id }) => id)
 }
 
 const NEXT = 2
 
 /** Anchors at the next places beside a chainage, those at the chainage itself among them. */
-export function besides(anchors: readonly Anchor[], at: number, way: 1 | -1, places: number = NEXT): Anchor[] {
+export function besides(
+  anchors: readonly Anchor[],
+  { at, way, places = NEXT }: { readonly at: number; readonly way: 1 | -1; readonly places?: number },
+): Anchor[] {
   const onward = anchors.filter(({ chainage }) => (chainage - at) * way >= -ROUNDING)
   const growing = way === 1 ? onward : onward.reverse()
   const found: Anchor[] = []

@@ -49,18 +49,21 @@ export interface GapWedge extends SpreadDepth {
 
 /** The wedges of an edge by the id of their gap's zone. */
 export const wedgesOfEdge: (index: LayoutIndex, edgeId: string) => ReadonlyMap<string, GapWedge> = perConcrete(
-  (index, edgeId) => {
-    const shown = shownSpreads(index).map((spread) => ({ spread, pair: spreadPair(index, edgeId, spread) }))
-    return new Map(
-      gapsOfEdge(index, edgeId).flatMap((gap): [string, GapWedge][] => {
-        const made = shown.map(({ spread, pair }) => wedgeBy(index, { gap, spread, pair }))
-        const [used] = made
-        if (!used) return []
-        return [[gap.id, { ...used.depth, ...used.place, gap, depthBySpread: made.map(({ depth }) => depth) }]]
-      }),
-    )
-  },
+  (index, edgeId) => wedgesOfGaps(index, edgeId, gapsOfEdge(index, edgeId)),
 )
+
+/** The wedges of some gaps of an edge, likewise. */
+export function wedgesOfGaps(index: LayoutIndex, edgeId: string, gaps: readonly Gap[]): Map<string, GapWedge> {
+  const shown = shownSpreads(index).map((spread) => ({ spread, pair: spreadPair(index, edgeId, spread) }))
+  return new Map(
+    gaps.flatMap((gap): [string, GapWedge][] => {
+      const made = shown.map(({ spread, pair }) => wedgeBy(index, { gap, spread, pair }))
+      const [used] = made
+      if (!used) return []
+      return [[gap.id, { ...used.depth, ...used.place, gap, depthBySpread: made.map(({ depth }) => depth) }]]
+    }),
+  )
+}
 
 /** The spreads behind an edge by the angle in use. */
 export const usedSpreads: (index: LayoutIndex, edgeId: string) => SpreadPair = perConcrete((index, edgeId) => {
