@@ -15,9 +15,9 @@ export function BarsTable({ schedule }: { readonly schedule: Schedule }) {
         { key: 'size', head: 'Type and size', cell: ({ typeAndSize }) => typeAndSize, width: 100 },
         { key: 'total', head: 'Bars', align: 'end', cell: ({ total }) => total, width: 60 },
         { key: 'length', head: 'Length, mm', align: 'end', cell: ({ lengthMm }) => lengthMm ?? '–', width: 90 },
+        { key: 'mass', head: 'kg', align: 'end', cell: ({ massKg }) => massText(massKg), width: 70 },
         { key: 'code', head: 'Shape', align: 'end', cell: ({ code }) => code, width: 60 },
         { key: 'dimensions', head: 'Dimensions, mm', cell: ({ dimensions }) => dimensions, width: 200 },
-        { key: 'mass', head: 'kg', align: 'end', cell: ({ massKg }) => massText(massKg), width: 70 },
       ]}
       foot={{ mark: 'All', mass: massText(schedule.mass) }}
     />

@@ -177,9 +177,9 @@ function Bars({ answer: { schedule } }: OfAnswer) {
     { head: 'Size', share: 2, cell: ({ typeAndSize }) => typeAndSize },
     { head: 'Bars', share: 2, isFigure: true, cell: ({ total }) => total },
     { head: 'Length', share: 3, isFigure: true, cell: ({ lengthMm }) => lengthMm ?? '–' },
+    { head: 'kg', share: 2, isFigure: true, cell: ({ massKg }) => massText(massKg) },
     { head: 'Shape', share: 2, isFigure: true, cell: ({ code }) => code },
     { head: 'Dimensions', share: 6, cell: ({ dimensions }) => dimensions },
-    { head: 'kg', share: 2, isFigure: true, cell: ({ massKg }) => massText(massKg) },
   ]
   return (
     <SheetColumns
@@ -199,7 +199,9 @@ function Worst({ answer: { result } }: OfAnswer) {
       {kinds.length === 0 ? <Text kind="small">Every check is within its limit.</Text> : null}
       {kinds.slice(0, MOST.worst).map(({ status, name, place, words, isOnProposed }) => (
         <View key={`${status}-${name}`} style={styles.line}>
-          <StatusMark status={status} kind="small" size={12} />
+          <View style={styles.status}>
+            <StatusMark status={status} kind="small" size={12} />
+          </View>
           <Text kind="small" style={styles.grow} numberOfLines={2}>
             {`${name}, ${place}: ${words}${isOnProposed ? ` (${READING_NOT_ACCEPTED})` : ''}`}
           </Text>
@@ -235,11 +237,12 @@ const styles = StyleSheet.create({
   sheet: { gap: space.s, backgroundColor: colour.sheet },
   head: { gap: space.xs, borderBottomWidth: 1, borderColor: colour.ink, paddingBottom: space.xs },
   titles: { flexDirection: 'row', justifyContent: 'space-between', alignItems: 'baseline', gap: space.xl },
-  facts: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.xl, rowGap: space.xs },
+  facts: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.xs },
   columns: { flexDirection: 'row', gap: space.xl, alignItems: 'flex-start' },
   half: { flex: 1, minWidth: 0 },
   part: { gap: 1 },
   line: { flexDirection: 'row', gap: space.s, alignItems: 'flex-start' },
+  status: { width: 110 },
   grow: { flex: 1, minWidth: 0 },
   foot: { borderTopWidth: 1, borderColor: colour.ink, paddingTop: space.xs },
 })

@@ -57,5 +57,5 @@ export function SheetColumns<Row>({ title, rows, columns, most }: SheetColumnsPr
 const styles = StyleSheet.create({
   row: { flexDirection: 'row', gap: space.xs, borderBottomWidth: 1, borderColor: colour.rule, alignItems: 'center' },
   cell: { minWidth: 0 },
-  figure: { textAlign: 'right' },
+  figure: { textAlign: 'right', paddingRight: space.m },
 })
