@@ -1076,6 +1076,74 @@ export const METHODS: readonly Method[] = [
     ],
   },
   {
+    id: 'a9y83g',
+    symbol: 'xFrom',
+    meaning: 'Behind the bearing face steel counts from here',
+    formula: '0.2 * b',
+    unit: 'mm',
+    families: ['bursting-plan'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '6.5.3, silent on length',
+        tag: 'computed',
+        bases: ['en-1992'],
+      },
+      {
+        source: 'AS 3600:2018',
+        section: '12.5.6',
+        tag: 'digest',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'EX15 (digest): prism 300: from 60 to 300',
+        test: 'tests/published/as-3600.test.ts',
+        name: 'EX15-L1: each of two anchors of 1000 kN 150 from the faces, plate 165: 112.5 kN, 750 mm2, from 60 to 300',
+      },
+      {
+        value: 'By hand (reading, computed): prism 220: from 44 to 220, three of four links count',
+        test: 'tests/engine/bursting.test.ts',
+        name: 'plate 80 at mid-height of 220, 588.8 kN: the hardware links carry it',
+      },
+    ],
+  },
+  {
+    id: 'lxo6r7',
+    symbol: 'xTo',
+    meaning: 'And as far as here',
+    formula: 'b',
+    unit: 'mm',
+    families: ['bursting-plan'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '6.5.3, silent on length',
+        tag: 'computed',
+        bases: ['en-1992'],
+      },
+      {
+        source: 'AS 3600:2018',
+        section: '12.5.6',
+        tag: 'digest',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'EX15 (digest): prism 300: from 60 to 300',
+        test: 'tests/published/as-3600.test.ts',
+        name: 'EX15-L1: each of two anchors of 1000 kN 150 from the faces, plate 165: 112.5 kN, 750 mm2, from 60 to 300',
+      },
+      {
+        value: 'By hand (reading, computed): prism 220: from 44 to 220, three of four links count',
+        test: 'tests/engine/bursting.test.ts',
+        name: 'plate 80 at mid-height of 220, 588.8 kN: the hardware links carry it',
+      },
+    ],
+  },
+  {
     id: 'cc2tg2',
     symbol: 'TEd',
     meaning: 'Force along the face, factored',
@@ -1856,6 +1924,29 @@ export const METHODS: readonly Method[] = [
     ],
   },
   {
+    id: 'lowkzz',
+    symbol: 'beta',
+    meaning: 'Angle of spread behind an anchor',
+    formula: 'atan(2 / 3)',
+    unit: 'rad',
+    families: ['edge-wedge'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.10.3(5)',
+        tag: 'memory',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'EX17 (from memory): plate 75 in 200: 93.75 mm; 220 at 1000: 585 mm',
+        test: 'tests/published/en-1992-anchors.test.ts',
+        name: 'spread at arctan(2/3): 93.75 mm in the thickness, 585 mm in plan',
+      },
+    ],
+  },
+  {
     id: '18da03q',
     symbol: 'D',
     meaning: 'Thickness that counts: 250 at each face at most',
@@ -1926,6 +2017,29 @@ export const METHODS: readonly Method[] = [
         value: 'By hand (secondary): 200 at most, 1.5 of a slab thinner than 133.3',
         test: 'tests/published/as-3600.test.ts',
         name: 'spacing: 200 at most, in a slab thinner than 133.3 no more than 1.5 of it',
+      },
+    ],
+  },
+  {
+    id: '1ro1tow',
+    symbol: 'beta',
+    meaning: 'Angle of spread behind an anchor',
+    formula: 'atan(1)',
+    unit: 'rad',
+    families: ['edge-wedge'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '12.5, 1 in 1 for the steel of the zone',
+        tag: 'digest',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'By hand (digest): 1 in 1: tan of the angle is 1',
+        test: 'tests/published/as-3600.test.ts',
+        name: 'force spreads at 1 in 1 (12.5, digest)',
       },
     ],
   },
@@ -3046,6 +3160,329 @@ export const METHODS: readonly Method[] = [
         value: 'By hand: half of the lap counts half of the area',
         test: 'tests/engine/joint.test.ts',
         name: 'bars that are too short count for less, and not at all where they end within the strip',
+      },
+    ],
+  },
+  {
+    id: '1553434',
+    symbol: 'fctm',
+    meaning: 'Mean tensile strength of concrete up to C50/60',
+    formula: '0.3 * exp(2 / 3 * log(fck))',
+    unit: 'MPa',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: 'Table 3.1',
+        tag: 'memory',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'E01 (digest, tables from memory): 12 mm in 32 MPa, cd 30: fbd 3.175, 410.8, 318.4, lap 477.6',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '24fxtp',
+    symbol: 'fbd',
+    meaning: 'Bond strength: eta1 1.0 in good and 0.7 in poor bond, eta2 1.0 up to 32 mm',
+    formula: '2.25 * eta1 * eta2 * alphaCt * 0.7 * fctm / gammaC',
+    unit: 'MPa',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.4.2 to 8.4.4',
+        tag: 'digest',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'E01 (digest, tables from memory): 12 mm in 32 MPa, cd 30: fbd 3.175, 410.8, 318.4, lap 477.6',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: 'zn51l4',
+    symbol: 'lmin',
+    meaning: 'Least anchorage',
+    formula: 'max(0.3 * lb, 10 * d, 100)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.4.2 to 8.4.4',
+        tag: 'digest',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'By hand (digest): 10 MPa in 12 mm: 120; in 8 mm: 100',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: 'the least length holds where little stress is asked for: max(0.3 lb,rqd, 10 d, 100)',
+      },
+    ],
+  },
+  {
+    id: '1vu3m4a',
+    symbol: 'alpha2',
+    meaning: 'Credit for cover to a straight bar',
+    formula: 'min(1, max(0.7, 1 - 0.15 * (cd - d) / d))',
+    unit: '-',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: 'Table 8.2',
+        tag: 'memory',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'E01 (digest, tables from memory): 12 mm in 32 MPa, cd 30: fbd 3.175, 410.8, 318.4, lap 477.6',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '1jrvey6',
+    symbol: 'lbd',
+    meaning: 'Anchorage',
+    formula: 'max(alpha1 * alpha2 * lb, lmin)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.4.2 to 8.4.4',
+        tag: 'digest',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'E01 (digest, tables from memory): 12 mm in 32 MPa, cd 30: fbd 3.175, 410.8, 318.4, lap 477.6',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '1c47s82',
+    symbol: 'alpha6',
+    meaning: 'Factor for the share of bars lapped at one section, per cent',
+    formula: 'min(1.5, max(1, sqrt(rho1 / 25)))',
+    unit: '-',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.7.3',
+        tag: 'memory',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'E01 (digest, tables from memory): 12 mm in 32 MPa, cd 30: fbd 3.175, 410.8, 318.4, lap 477.6',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: 'jubfo5',
+    symbol: 'l0',
+    meaning: 'Lap',
+    formula: 'max(alpha1 * alpha2 * alpha6 * lb, 0.3 * alpha6 * lb, 15 * d, 200)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.7.3',
+        tag: 'memory',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'E01 (digest, tables from memory): 12 mm in 32 MPa, cd 30: fbd 3.175, 410.8, 318.4, lap 477.6',
+        test: 'tests/published/en-1992-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '9wfi8i',
+    symbol: 'lHook',
+    meaning: 'Straight end of the hook of a closed link past its bend',
+    formula: 'max(10 * d, 70)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'EN 1992-1-1:2004',
+        section: '8.5, Fig. 8.5',
+        tag: 'memory',
+        bases: ['en-1992'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'By hand (from memory): links of 10: 100',
+        test: 'tests/engine/anchorage-check.test.ts',
+        name: 'hooks of links of 10: 10 d = 100 straight past the bend (8.5, Fig. 8.5, from memory)',
+      },
+    ],
+  },
+  {
+    id: '3f1da2',
+    symbol: 'k3',
+    meaning: 'Credit for cover',
+    formula: 'min(1, max(0.7, 1 - 0.15 * (cd - d) / d))',
+    unit: '-',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '13.1.2.2 to 13.1.2.6',
+        tag: 'secondary',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'A01, A02 (secondary): 12 mm in 32 MPa, cd 30: 348, lap 428.1; 16 mm: 529.6, lap 662',
+        test: 'tests/published/as-3600-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '7z90xp',
+    symbol: 'Lsytb',
+    meaning:
+      'Length that develops the yield strength: k1 1.3 with more than 300 of concrete below, strength up to 65 MPa',
+    formula: 'max(0.5 * k1 * k3 * fsy * d / ((132 - d) / 100 * sqrt(fc)), 0.058 * fsy * k1 * d)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '13.1.2.2 to 13.1.2.6',
+        tag: 'secondary',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'A01, A02 (secondary): 12 mm in 32 MPa, cd 30: 348, lap 428.1; 16 mm: 529.6, lap 662',
+        test: 'tests/published/as-3600-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '1qg8han',
+    symbol: 'Lst',
+    meaning: 'Length that develops a stress',
+    formula: 'sigma / fsy * Lsytb',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '13.1.2.2 to 13.1.2.6',
+        tag: 'secondary',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'A01, A02 (secondary): 12 mm in 32 MPa, cd 30: 348, lap 428.1; 16 mm: 529.6, lap 662',
+        test: 'tests/published/as-3600-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '1cze52v',
+    symbol: 'lmin',
+    meaning: 'Least length that counts',
+    formula: '12 * d',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '13.1.2.2 to 13.1.2.6',
+        tag: 'secondary',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'By hand (secondary): at 150 MPa 0.3 of the length, 12 diameters at least',
+        test: 'tests/published/as-3600-anchorage.test.ts',
+        name: 'at 150 MPa a bar needs 0.3 of its length, 12 diameters at least',
+      },
+    ],
+  },
+  {
+    id: '1k6ixdg',
+    symbol: 'Lsytlap',
+    meaning: 'Lap: k7 1.0 where half of the bars are lapped and half their strength is enough, otherwise 1.25',
+    formula: 'max(k7 * 0.5 * k1 * k3 * fsy * d / ((132 - d) / 100 * sqrt(fc)), 0.058 * fsy * k1 * d)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '13.2.2',
+        tag: 'secondary',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'A01, A02 (secondary): 12 mm in 32 MPa, cd 30: 348, lap 428.1; 16 mm: 529.6, lap 662',
+        test: 'tests/published/as-3600-anchorage.test.ts',
+        name: '$id: $diameter mm in $strength MPa, cd $cd',
+      },
+    ],
+  },
+  {
+    id: '1roi87z',
+    symbol: 'lHook',
+    meaning: 'Straight end of the hook of a closed link past its bend',
+    formula: 'max(4 * d, 70)',
+    unit: 'mm',
+    families: ['anchorage'],
+    clauses: [
+      {
+        source: 'AS 3600:2018',
+        section: '13.1.2.7',
+        tag: 'secondary',
+        bases: ['as-3600'],
+      },
+    ],
+    proofs: [
+      {
+        value: 'By hand (secondary): 4 diameters, 70 at least',
+        test: 'tests/published/as-3600-anchorage.test.ts',
+        name: 'straight past the bend 4 diameters, 70 at least',
       },
     ],
   },

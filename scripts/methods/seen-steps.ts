@@ -14,12 +14,14 @@ import {
 } from '@wedgeline/engine'
 import { tendonForces } from '../../packages/engine/src/tendon/profile'
 import type { SeenStep } from './collect'
+import { innerSeen } from './inner-steps'
 
 /** Every step that the engine makes of these layouts, and every length of the bar schedule's shapes. */
 export function* seenSteps(layouts: readonly Layout[]): Generator<SeenStep> {
   for (const layout of layouts) {
     yield* stepsOfChecks(layout)
     yield* stepsBeside(layout)
+    yield* innerSeen(layout)
   }
   for (const standard of BAR_STANDARDS) yield* stepsOfShapes(standard)
 }

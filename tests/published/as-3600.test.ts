@@ -185,6 +185,10 @@ describe('AS 3600 9.5.3 (secondary): crack steel of a restrained edge wedge, bot
   })
 })
 
+test('force spreads at 1 in 1 (12.5, digest)', () => {
+  expect(Math.tan(basis.spread.value)).toBeCloseTo(1, 12)
+})
+
 describe('AS 3600 13.3 (from memory): transmission length', () => {
   test('60 diameters: 15.2 mm strand 912 mm, whatever stress and strength, without bounds', () => {
     const found = basis.transmission({ diameter: 15.2, stress: 1300, strength: 25 })

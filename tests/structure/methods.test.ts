@@ -1,9 +1,13 @@
 import { readdirSync, readFileSync } from 'node:fs'
+import { basisOf, BASIS_SOURCES } from '@wedgeline/engine'
 import { beforeAll, describe, expect, test } from 'vitest'
 import { METHODS } from '../../features/methods/method-table'
 import { isCurrent, listMethods, type Written } from '../../scripts/methods/list-methods'
+import { innerSteps } from '../../scripts/methods/inner-steps'
 import { MEANINGS, PROOFS } from '../../scripts/methods/proofs-table'
 import { at } from '../../scripts/project.mjs'
+import { layout } from '../engine/sample-layout'
+import { evaluated } from '../engine/step-text'
 
 /** The list of methods (docs/methods.md and the page in the app) holds every formula of the engine, each with its proof. */
 
@@ -95,6 +99,15 @@ describe('every formula is on the list', () => {
 
   test('no two share the short name by which the calculation finds them', () => {
     expect(new Set(METHODS.map(({ id }) => id)).size).toBe(METHODS.length)
+  })
+})
+
+describe('what a basis works out without printing its lines', () => {
+  test.each(BASIS_SOURCES.map(({ id }) => id))('%s: each text gives what the engine gives', (id) => {
+    const basis = basisOf({ ...layout().job, basis: id, factors: [], readings: [] })
+    const steps = innerSteps(basis)
+    expect(steps.length).toBeGreaterThan(8)
+    for (const step of steps) expect(evaluated(step), step.symbol).toBeCloseTo(step.value, 9)
   })
 })
 
