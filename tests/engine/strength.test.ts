@@ -1,4 +1,11 @@
-import { checkPour, strengthAtStages, type Compared, type ConcreteResult, type Layout } from '@wedgeline/engine'
+import {
+  checkPour,
+  recheck,
+  strengthAtStages,
+  type Compared,
+  type ConcreteResult,
+  type Layout,
+} from '@wedgeline/engine'
 import { describe, expect, test } from 'vitest'
 import { evaluated } from './step-text'
 import { layout, POUR } from './sample-layout'
@@ -122,6 +129,12 @@ describe('strength at stressing: the lowest specimen, cured on site, counts (com
       return checks.reduce((sum, { status }) => sum + (rank[status] ?? Number.NaN), 0)
     })
     expect(statuses).toEqual([...statuses].sort((a, b) => a - b))
+  })
+
+  test('a set that is added while somebody types is checked at once', () => {
+    const [before, after] = [withSets(set(96, [17])), withSets(set(96, [17]), set(144, [23]))]
+    const result = checkPour(before, { pourId: 'P1' })
+    expect(recheck({ layout: before, result }, after, { pourId: 'P1' })).toEqual(checkPour(after, { pourId: 'P1' }))
   })
 
   test('every step has a text that evaluates to its value', () => {
