@@ -1,20 +1,11 @@
 import type { Status } from '@wedgeline/engine'
+import { STATUS_WORDS } from '@wedgeline/engine/result'
 import { StyleSheet, View } from 'react-native'
 import { colour, space } from '@/components/theme'
 import { Icon } from './icon'
 import type { TextKind, Tone } from './text'
 import { Text } from './text'
 import { VisuallyHidden } from './visually-hidden'
-
-/** The word for each status, as it stands in a sentence. */
-export const STATUS_WORD: Readonly<Record<Status, string>> = {
-  stop: 'stop',
-  'not-covered': 'not covered',
-  over: 'over',
-  'needs-judgement': 'needs judgement',
-  near: 'near',
-  within: 'within',
-}
 
 /** What matters most keeps its colour in the words as well; the shape tells all six apart without any. */
 const TONE: Readonly<Record<Status, Tone>> = {
@@ -41,7 +32,7 @@ export interface StatusMarkProps {
 /** A status: a mark of its own shape and a word. */
 export function StatusMark({ status, words, markOnly, kind = 'body', size = 16, oneLine }: StatusMarkProps) {
   const tone = TONE[status]
-  const word = STATUS_WORD[status]
+  const word = STATUS_WORDS[status]
   const isStrong = status === 'over' || status === 'stop'
   return (
     <View style={styles.row}>

@@ -1,9 +1,10 @@
 import type { Check, Step } from '@wedgeline/engine'
+import { STATUS_WORDS } from '@wedgeline/engine/result'
 import { StyleSheet, View } from 'react-native'
 import { colour, space, useWide } from '@/components/theme'
 import { Icon } from '@/components/ui/icon'
 import { LimitKindBox } from '@/components/ui/limit-kind'
-import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
+import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { clauseText, outcomeText, ratioText, shownQuantity, unitText } from '../checks/words'
 import { Formula } from './formula'
@@ -114,7 +115,7 @@ function comparedText(check: Extract<Check, { kind: 'compared' }>): string {
   const isWaiting = check.status === 'needs-judgement' && check.readingIds.length > 0
   return isWaiting
     ? `${sides}. Needs judgement: the reading it rests on is not accepted`
-    : `${sides}, ${STATUS_WORD[check.status]}`
+    : `${sides}, ${STATUS_WORDS[check.status]}`
 }
 
 const styles = StyleSheet.create({

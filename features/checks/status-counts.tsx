@@ -1,5 +1,6 @@
+import { STATUS_WORDS } from '@wedgeline/engine/result'
 import { StyleSheet, View } from 'react-native'
-import { StatusMark, STATUS_WORD } from '@/components/ui/status-mark'
+import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import { space } from '@/components/theme'
 import { statusesIn, type Counts } from './counts'
@@ -16,7 +17,7 @@ export function StatusMarks({ counts, isShort = false }: StatusMarksProps) {
     <StatusMark
       key={status}
       status={status}
-      words={isShort ? String(counts[status]) : `${counts[status]} ${STATUS_WORD[status]}`}
+      words={isShort ? String(counts[status]) : `${counts[status]} ${STATUS_WORDS[status]}`}
     />
   ))
 }

@@ -1,18 +1,5 @@
 import type { SteelShape } from '@wedgeline/engine'
 
-export const STEEL_NAMES: Readonly<Record<SteelShape['kind'], string>> = {
-  spiral: 'spiral',
-  links: 'closed links',
-  hairpins: 'hairpins',
-  'edge-bars': 'edge bars',
-  'transverse-bars': 'transverse bars',
-  'wedge-bars': 'wedge bars',
-  trimmers: 'trimmers',
-  diagonals: 'diagonals',
-  'tie-back-bars': 'tie-back bars',
-  'lap-bars': 'lap bars',
-}
-
 const perPosition = (layers: 'top' | 'bottom' | 'both'): number => (layers === 'both' ? 2 : 1)
 
 /** A set of bars in a few words: 4 links 10, 8 of 12 × 1400. Sizes in mm, without a type letter: the grade is the job's. */

@@ -1,9 +1,9 @@
-import { STATUSES } from '@wedgeline/engine/result'
+import { STATUSES, STATUS_WORDS } from '@wedgeline/engine/result'
 import type { Status } from '@wedgeline/engine'
 import { Pressable, StyleSheet, View } from 'react-native'
 import { colour, space, useTargetHeight } from '@/components/theme'
 import { follow } from '@/components/ui/follow'
-import { STATUS_WORD, StatusMark } from '@/components/ui/status-mark'
+import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
 import type { Counts } from '../checks/counts'
 
@@ -30,7 +30,7 @@ export function CountLinks({ jobId, pourId, counts, chosen }: CountLinksProps) {
       )}
       {shown.map((status) => (
         <Chip key={status} href={`${base}?status=${status}`} isChosen={status === chosen} minHeight={minHeight}>
-          <StatusMark status={status} words={`${counts[status]} ${STATUS_WORD[status]}`} />
+          <StatusMark status={status} words={`${counts[status]} ${STATUS_WORDS[status]}`} />
         </Chip>
       ))}
     </View>

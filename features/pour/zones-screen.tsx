@@ -1,4 +1,4 @@
-import { FAMILY_WORDS } from '@wedgeline/engine/result'
+import { FAMILY_WORDS, STATUS_WORDS } from '@wedgeline/engine/result'
 import type { PourResult } from '@wedgeline/engine'
 import { useLocalSearchParams } from 'expo-router'
 import { useState } from 'react'
@@ -6,7 +6,6 @@ import { StyleSheet, View } from 'react-native'
 import { space, useWide } from '@/components/theme'
 import { Banner } from '@/components/ui/banner'
 import { Button } from '@/components/ui/button'
-import { STATUS_WORD } from '@/components/ui/status-mark'
 import { Empty, Failed, Waiting } from '@/components/ui/states'
 import { Text } from '@/components/ui/text'
 import { readingTitle } from '../checks/zone-words'
@@ -60,7 +59,7 @@ function Zones({ jobId, pourId, result }: ZonesProps) {
         />
       )}
       {hasChecks && rows.length === 0 && asked ? (
-        <Text>{`No check of this pour is ${STATUS_WORD[asked]}.`}</Text>
+        <Text>{`No check of this pour is ${STATUS_WORDS[asked]}.`}</Text>
       ) : null}
       <View style={styles.zones}>
         {shown.map((row) => (

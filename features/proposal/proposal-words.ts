@@ -1,5 +1,6 @@
 import type { ProposedZone, Steel, SteelShape, WorstCheck } from '@wedgeline/engine'
-import { STEEL_NAMES, steelWords } from '../edge/steel-words'
+import { STEEL_NAMES } from '@wedgeline/engine/result'
+import { steelWords } from '../edge/steel-words'
 
 export const kg = (mass: number): string => `${mass.toFixed(1)} kg`
 

@@ -1,9 +1,9 @@
 import type { Schedule, ScheduleRow } from '@wedgeline/engine'
+import { STEEL_NAMES } from '@wedgeline/engine/result'
 import { useMemo } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { space } from '@/components/theme'
 import { Table, type Column } from '@/components/ui/table'
-import { STEEL_NAMES } from '../edge/steel-words'
 import { massOf, massText, metresText } from './schedule-words'
 import { ShapeFigure } from './shape-figure'
 

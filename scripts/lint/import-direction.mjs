@@ -23,7 +23,7 @@ const ALLOWED = {
   [ENGINE]: [ENGINE],
 }
 
-/** Pairs that are allowed for types alone; the contract may also take the engine's small entries. */
+/** Pairs that are allowed for types alone; the engine's small entries may be taken from as well. */
 const TYPES_ONLY = { [CONTRACT]: [ENGINE], components: [ENGINE] }
 
 /** The engine as a whole runs in this file of the client; screens take its types and its small entries. */
@@ -69,7 +69,7 @@ function areaProblem({ from, area, to, specifier, isType }) {
     return `Import @wedgeline/${toArea.slice('packages/'.length)}, not its files.`
   }
   if (isType) return undefined
-  const isSmall = area === CONTRACT && SMALL_ENTRIES.includes(specifier)
+  const isSmall = SMALL_ENTRIES.includes(specifier)
   if (TYPES_ONLY[area]?.includes(toArea) && !isSmall)
     return `${area}/ takes types alone from ${toArea}/: write import type.`
   const isScreen = CLIENT.includes(area) && !RUNS_ENGINE.test(from)

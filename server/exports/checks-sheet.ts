@@ -1,6 +1,14 @@
-import { BASIS_SOURCES, FAMILY_WORDS, STATUSES, type Check, type Status, type ZoneResult } from '@wedgeline/engine'
+import {
+  BASIS_SOURCES,
+  FAMILY_WORDS,
+  STATUSES,
+  STATUS_WORDS,
+  type Check,
+  type Status,
+  type ZoneResult,
+} from '@wedgeline/engine'
 import type { BookWriter, CellValue, Column } from './book-writer'
-import { notYetChecked, STATUS_WORDS, statusLine } from './wording'
+import { notYetChecked, statusLine } from './wording'
 import type { WorkbookPart } from './workbook'
 
 /** What an engineer must see before the bars are ordered. */

@@ -1,5 +1,6 @@
+import { STEEL_NAMES } from '@wedgeline/engine'
 import { onSheet, type BookWriter, type CellValue, type Column, type SheetWriter } from './book-writer'
-import { KIND_WORDS, statusLine } from './wording'
+import { statusLine } from './wording'
 import type { WorkbookPart } from './workbook'
 
 const COLUMNS: readonly Column[] = [
@@ -60,7 +61,12 @@ const KIND_COLUMNS: readonly Column[] = [
 /** By kind of bar, and the longest bar; answers the last row. */
 function writeKinds(sheet: SheetWriter, input: WorkbookPart, from: number): number {
   const { kinds, longest } = input.schedule
-  const rows = kinds.map(({ kind, bars, metres, mass }): readonly CellValue[] => [KIND_WORDS[kind], bars, metres, mass])
+  const rows = kinds.map(({ kind, bars, metres, mass }): readonly CellValue[] => [
+    STEEL_NAMES[kind],
+    bars,
+    metres,
+    mass,
+  ])
   if (rows.length > 0) sheet.table({ name: input.rangeName('BarKinds'), row: from, columns: KIND_COLUMNS, rows })
   if (!longest) return from + rows.length
   const [totals, lengths] = ['BarTotals', 'BarLengths'].map(input.rangeName)

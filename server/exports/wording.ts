@@ -1,32 +1,10 @@
-import type { Family, PourResult, Status, SteelKind } from '@wedgeline/engine'
+import type { Family, PourResult } from '@wedgeline/engine'
 import type { ScheduleWorkbookInput } from './workbook'
 
 export const CAUTIONS = [
   'Results assist a qualified engineer and do not replace one.',
   'Local codes and licensed practice govern.',
 ] as const
-
-export const STATUS_WORDS: Readonly<Record<Status, string>> = {
-  stop: 'stop',
-  'not-covered': 'not covered',
-  over: 'over',
-  'needs-judgement': 'needs judgement',
-  near: 'near',
-  within: 'within',
-}
-
-export const KIND_WORDS: Readonly<Record<SteelKind, string>> = {
-  spiral: 'spirals',
-  links: 'links',
-  hairpins: 'hairpins',
-  'edge-bars': 'edge bars',
-  'transverse-bars': 'transverse bars',
-  'wedge-bars': 'wedge bars',
-  trimmers: 'trimmers',
-  diagonals: 'diagonal bars',
-  'tie-back-bars': 'tie-back bars',
-  'lap-bars': 'lap bars',
-}
 
 export const statusLine = ({ approval }: ScheduleWorkbookInput): string =>
   approval ? `APPROVED by ${approval.by} on ${approval.on}` : 'DRAFT: NOT FOR CONSTRUCTION'

@@ -1,6 +1,14 @@
-import { BASIS_SOURCES, FAMILY_WORDS, STATUSES, type Compared, type Refused, type ZoneResult } from '@wedgeline/engine'
+import {
+  BASIS_SOURCES,
+  FAMILY_WORDS,
+  STATUSES,
+  STATUS_WORDS,
+  type Compared,
+  type Refused,
+  type ZoneResult,
+} from '@wedgeline/engine'
 import type { BookWriter, CellValue, Column } from './book-writer'
-import { STATUS_WORDS, statusLine } from './wording'
+import { statusLine } from './wording'
 import type { WorkbookPart } from './workbook'
 
 const COLUMNS: readonly Column[] = [

@@ -1,3 +1,4 @@
+import { STEEL_NAMES } from '@wedgeline/engine/result'
 import {
   steelShapeSchema,
   toSi,
@@ -16,7 +17,7 @@ import { Select } from '@/components/ui/select'
 import { Text } from '@/components/ui/text'
 import { colour, space } from '@/components/theme'
 import { useJobDraft } from '../../editing/job-draft'
-import { STEEL_NAMES, steelWords } from '../steel-words'
+import { steelWords } from '../steel-words'
 import { fieldValue, steelFields, steelOfZone, usualSteel, type Place, type SteelKind } from './steel-fields'
 
 export interface SteelListProps {

@@ -1,6 +1,7 @@
 export type * from './model'
 export type { Clause, Step, Tag } from './step'
-export { FAMILIES, FAMILY_WORDS, STATUSES } from './result'
+export { FAMILIES, FAMILY_WORDS, STATUSES, STATUS_WORDS } from './result'
+export { STEEL_NAMES } from './steel-names'
 export type {
   Advice,
   Check,

@@ -49,6 +49,16 @@ export const FAMILY_WORDS: Readonly<Record<Family, string>> = {
 export const STATUSES = ['stop', 'not-covered', 'over', 'needs-judgement', 'near', 'within'] as const
 export type Status = (typeof STATUSES)[number]
 
+/** The word for each status, as it stands in a sentence. */
+export const STATUS_WORDS: Readonly<Record<Status, string>> = {
+  stop: 'stop',
+  'not-covered': 'not covered',
+  over: 'over',
+  'needs-judgement': 'needs judgement',
+  near: 'near',
+  within: 'within',
+}
+
 /** C code, H hardware, P common practice. */
 export type LimitKind = 'C' | 'H' | 'P'
 

@@ -1,4 +1,5 @@
 import type { SteelShape } from '../model'
+import { STEEL_NAMES } from '../steel-names'
 
 /** Steel in a few words: 8 transverse bars H10, 800 long. */
 export function inWords(shapes: readonly SteelShape[], letter: string): string {
@@ -22,17 +23,8 @@ function oneInWords(shape: SteelShape, letter: string): string {
     case 'diagonals':
     case 'tie-back-bars':
     case 'lap-bars':
-      return `${barsOf(shape.count, shape.layers)} ${NOUNS[shape.kind]} ${size}, ${shape.length} long`
+      return `${barsOf(shape.count, shape.layers)} ${STEEL_NAMES[shape.kind]} ${size}, ${shape.length} long`
   }
 }
-
-const NOUNS = {
-  'transverse-bars': 'transverse bars',
-  'wedge-bars': 'wedge bars',
-  trimmers: 'trimmers',
-  diagonals: 'diagonals',
-  'tie-back-bars': 'tie-back bars',
-  'lap-bars': 'lap bars',
-} as const
 
 const barsOf = (count: number, layers: 'top' | 'bottom' | 'both'): number => (layers === 'both' ? 2 * count : count)
