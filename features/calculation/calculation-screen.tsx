@@ -18,7 +18,9 @@ import { usePourChecks } from '../editing/pour-checks'
 import { jobParents } from '../pour/pour-frame'
 import { CheckSheet } from './check-sheet'
 import { printPage } from './print-page'
-import { repeatedSteps, zonePlace, type ZonePlace } from './zone-places'
+import { shownSteps } from './shown-steps'
+import { zonePlace, type ZonePlace } from './zone-places'
+import { LIMIT_LETTERS, ZonePrint } from './zone-print'
 
 /** One zone's checks with every line, as they go on one side of A4. */
 export function CalculationScreen({ jobId, zoneId }: { readonly jobId: string; readonly zoneId: string }) {
@@ -100,47 +102,87 @@ interface ZoneSheetProps {
 
 function ZoneSheet({ zone, pour, basis }: ZoneSheetProps) {
   const missing = notYetText(zone.notYetChecked)
-  const repeated = repeatedSteps(zone.checks)
+  const steps = useMemo(() => shownSteps(zone.checks), [zone.checks])
+  const facts = useFacts({ pour, basis })
+  const readings = useReadings(zone)
   return (
-    <View style={styles.sheet} dataSet={{ print: 'sheet' }}>
-      <SheetHead zone={zone} pour={pour} basis={basis} />
-      {zone.checks.length === 0 ? <Text style={styles.none}>No check is made at this zone yet.</Text> : null}
-      {zone.checks.map((check, at) => (
-        <CheckSheet
-          key={`${check.family}-${check.name}-${check.stage ?? ''}-${at}`}
-          check={check}
-          isRepeated={repeated}
-        />
-      ))}
-      <View style={styles.foot}>
-        {missing ? <Text kind="strong">{missing}</Text> : null}
-        <Text kind="small">
-          Lengths in mm, forces in N, stresses in MPa, angles in rad, as they are put into the formulas. C limit of the
-          code, H limit of the hardware, P common practice.
-        </Text>
-        <Text kind="small">
-          Results assist a qualified engineer and do not replace one. Local codes and licensed practice govern.
-        </Text>
+    <>
+      <View style={styles.sheet}>
+        <SheetHead zone={zone} facts={facts} readings={readings} />
+        {zone.checks.length === 0 ? <Text style={styles.none}>No check is made at this zone yet.</Text> : null}
+        {zone.checks.map((check, at) => (
+          <CheckSheet
+            key={`${check.family}-${check.name}-${check.stage ?? ''}-${at}`}
+            check={check}
+            steps={steps[at] ?? []}
+          />
+        ))}
+        <View style={styles.foot}>
+          {missing ? <Text kind="strong">{missing}</Text> : null}
+          {FOOT.map((line) => (
+            <Text key={line} kind="small">
+              {line}
+            </Text>
+          ))}
+        </View>
       </View>
-    </View>
+      <ZonePrint
+        zone={zone}
+        facts={facts}
+        readings={readings.map(({ words }) => words)}
+        foot={missing ? [missing, ...FOOT] : FOOT}
+      />
+    </>
   )
 }
 
-function SheetHead({ zone, pour, basis }: ZoneSheetProps) {
-  const { jobId, layout } = useJobDraft()
+const FOOT = [
+  `Lengths in mm, forces in N, stresses in MPa, angles in rad, as they are put into the formulas. ${LIMIT_LETTERS}.`,
+  'Results assist a qualified engineer and do not replace one. Local codes and licensed practice govern.',
+]
+
+type Facts = readonly (readonly [string, string])[]
+
+function useFacts({ pour, basis }: Pick<ZoneSheetProps, 'pour' | 'basis'>): Facts {
+  const { layout } = useJobDraft()
   const { job } = layout
   const level = layout.levels.find(({ id }) => id === pour.levelId)
   const day = new Intl.DateTimeFormat('en-GB', { timeZone: job.timeZone, dateStyle: 'long' }).format(new Date())
-  const readings = [...new Set(zone.checks.flatMap((check) => (check.kind === 'compared' ? check.readingIds : [])))]
   const title = BASIS_SOURCES.find(({ id }) => id === basis)?.title ?? basis
-  const facts = [
+  return [
     ['Job', `${job.number} ${job.title}`],
     ['Pour', [pour.mark, pour.title, level ? `level ${level.mark}` : ''].filter(Boolean).join(', ')],
     ['Slab', `${pour.thicknessMm} mm, ${pour.concrete}`],
     ['Basis', title],
     ['Date', day],
     ['State', 'draft, not approved'],
-  ] as const
+  ]
+}
+
+interface ReadingLine {
+  readonly words: string
+  readonly isAccepted: boolean
+}
+
+/** The readings that a zone's results rest on. */
+function useReadings({ checks }: ZoneResult): readonly ReadingLine[] {
+  const { job } = useJobDraft().layout
+  const ids = new Set(checks.flatMap((check) => (check.kind === 'compared' ? check.readingIds : [])))
+  return [...ids].map((id) => {
+    const accepted = job.readings.find(({ readingId }) => readingId === id)
+    const state = accepted ? `Accepted by ${accepted.acceptedBy}.` : 'Not accepted yet.'
+    return { words: `Reading: ${readingTitle(id)}. ${state}`, isAccepted: accepted !== undefined }
+  })
+}
+
+interface SheetHeadProps {
+  readonly zone: ZoneResult
+  readonly facts: Facts
+  readonly readings: readonly ReadingLine[]
+}
+
+function SheetHead({ zone, facts, readings }: SheetHeadProps) {
+  const { jobId } = useJobDraft()
   return (
     <View style={styles.head}>
       <View style={styles.facts}>
@@ -154,21 +196,18 @@ function SheetHead({ zone, pour, basis }: ZoneSheetProps) {
         ))}
       </View>
       {zone.status ? <StatusMark status={zone.status} kind="strong" /> : null}
-      {readings.map((readingId) => {
-        const accepted = job.readings.find((reading) => reading.readingId === readingId)
-        return (
-          <View key={readingId} style={styles.reading}>
-            <Text kind="small" style={styles.grow}>
-              {`Reading: ${readingTitle(readingId)}. ${accepted ? `Accepted by ${accepted.acceptedBy}.` : 'Not accepted yet.'}`}
-            </Text>
-            {accepted ? null : (
-              <Link kind="small" href={`/jobs/${jobId}`}>
-                Readings of this job
-              </Link>
-            )}
-          </View>
-        )
-      })}
+      {readings.map(({ words, isAccepted }) => (
+        <View key={words} style={styles.reading}>
+          <Text kind="small" style={styles.grow}>
+            {words}
+          </Text>
+          {isAccepted ? null : (
+            <Link kind="small" href={`/jobs/${jobId}`}>
+              Readings of this job
+            </Link>
+          )}
+        </View>
+      ))}
     </View>
   )
 }

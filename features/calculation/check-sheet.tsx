@@ -1,25 +1,34 @@
-import type { Check, Step } from '@wedgeline/engine'
+import type { Check } from '@wedgeline/engine'
 import { STATUS_WORDS } from '@wedgeline/engine/result'
+import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { colour, space, useWide } from '@/components/theme'
+import { Button } from '@/components/ui/button'
 import { Icon } from '@/components/ui/icon'
 import { LimitKindBox } from '@/components/ui/limit-kind'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
-import { clauseText, outcomeText, ratioText, shownQuantity, unitText } from '../checks/words'
-import { Formula } from './formula'
-import { figureText, formulaParts, putIn, symbolPart } from './formula-text'
+import { outcomeText, ratioText, shownQuantity } from '../checks/words'
+import { CheckClause, StepMeaning } from '../methods/method-links'
+import { isPlain, meaningOf, nameOf } from './check-words'
+import type { ShownStep } from './shown-steps'
+import { StepSum } from './step-text'
 
-const PLANE_WORDS = { thickness: 'in the thickness', plan: 'in plan' } as const
+export interface CheckSheetProps {
+  readonly check: Check
+  readonly steps: readonly ShownStep[]
+}
 
-/** One check as it is calculated: every line, then demand against limit. */
-export function CheckSheet({ check, isRepeated }: { readonly check: Check; readonly isRepeated: ReadonlySet<Step> }) {
+/** One check as it is calculated: every line, then demand against limit. One that is within folds to its outcome. */
+export function CheckSheet({ check, steps }: CheckSheetProps) {
   const isWide = useWide()
-  const steps = check.kind === 'compared' ? check.steps : []
-  // A distance says what came of it in its first line, so that a zone with many keeps to one side of A4.
+  const isFolding = isPlain(check) && steps.length + check.notes.length > 0
+  const [isOpen, setOpen] = useState(false)
+  const isShown = isOpen || !isFolding
+  // A distance says what came of it in its first line.
   const isShort = isWide && check.kind === 'compared' && check.compares !== 'ratio'
   return (
-    <View style={styles.check} dataSet={{ print: 'together' }}>
+    <View style={styles.check}>
       <View style={styles.head}>
         <View style={styles.mark}>
           {check.kind === 'advice' ? <Icon name="info" /> : <StatusMark status={check.status} markOnly />}
@@ -29,65 +38,49 @@ export function CheckSheet({ check, isRepeated }: { readonly check: Check; reado
         </Text>
         <LimitKindBox kind={check.limitKind} />
         {isShort ? <Text kind="strong">{comparedText(check)}</Text> : null}
-        <Text kind="small" tone="soft" style={styles.clause}>
-          {clauseText(check.clause)}
-        </Text>
+        <CheckClause clause={check.clause} family={check.family} />
+        {isFolding ? (
+          <Button
+            kind="quiet"
+            label={`${isOpen ? 'Fold' : 'Steps and notes of'} ${nameOf(check)}`}
+            iconOnly
+            icon={<Icon name={isOpen ? 'up' : 'down'} size={12} />}
+            aria-expanded={isOpen}
+            onPress={() => setOpen(!isOpen)}
+          />
+        ) : null}
       </View>
-      {steps.map((step, at) => (
-        <StepLine
-          key={`${step.symbol}-${at}`}
-          step={step}
-          isWide={isWide}
-          says={isRepeated.has(step) ? 'as above' : meaningOf(step, check)}
-        />
-      ))}
+      {isShown ? steps.map((line, at) => <StepLine key={at} line={line} check={check} isWide={isWide} />) : null}
       {isShort ? null : <Outcome check={check} />}
-      {check.notes.length > 0 ? (
-        <Text kind="small" tone="soft" style={styles.note}>
-          {check.notes.join(' ')}
-        </Text>
-      ) : null}
+      {isShown
+        ? check.notes.map((note, at) => (
+            <Text key={at} kind="small" tone="soft" style={styles.note}>
+              {note}
+            </Text>
+          ))
+        : null}
     </View>
   )
 }
 
-function nameOf({ name, plane, stage }: Check): string {
-  const place = plane === null || name.includes(PLANE_WORDS[plane]) ? '' : ` ${PLANE_WORDS[plane]}`
-  return `${name}${place}${stage === null ? '' : `, stage ${stage}`}`
-}
-
 interface StepLineProps {
-  readonly step: Step
+  readonly line: ShownStep
+  readonly check: Check
   readonly isWide: boolean
-  /** What stands beside the line: its meaning and clause, or that it stands above. */
-  readonly says: string
 }
 
-/** The clause is left out where it is the one that the head of the check names. */
-function meaningOf({ meaning, clause }: Step, check: Check): string {
-  const own = clauseText(clause)
-  return own === clauseText(check.clause) ? meaning : `${meaning}; ${own}`
-}
-
-function StepLine({ step, isWide, says }: StepLineProps) {
-  const numbers = putIn(step.formula, step.values)
-  const result = figureText(step.value)
+function StepLine({ line: { step, isAbove }, check, isWide }: StepLineProps) {
   return (
     <View style={[styles.step, isWide && styles.stepWide]}>
       <View style={styles.sum}>
-        <Formula parts={[symbolPart(step.symbol), { text: ' = ' }, ...formulaParts(step.formula)]} />
-        {numbers === result || isBare(step) ? null : <Text kind="figure">{` = ${numbers}`}</Text>}
-        <Text kind="figureStrong">{` = ${result}${step.unit === '-' ? '' : ` ${unitText(step.unit)}`}`}</Text>
+        <StepSum step={step} />
       </View>
       <Text kind="small" tone="soft" style={isWide ? styles.meaningWide : styles.meaning}>
-        {says}
+        {isAbove ? 'as above' : <StepMeaning step={step} words={meaningOf(step, check)} />}
       </Text>
     </View>
   )
 }
-
-/** The formula is a number or one name alone: putting it in would say the result twice. */
-const isBare = ({ formula }: Step): boolean => /^[\w.]+$/.test(formula)
 
 function Outcome({ check }: { readonly check: Check }) {
   if (check.kind === 'refused') return <Text style={styles.outcome}>{`Not covered. ${check.message}`}</Text>
@@ -123,7 +116,6 @@ const styles = StyleSheet.create({
   head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', columnGap: space.s },
   mark: { width: 18 },
   name: { flexShrink: 1 },
-  clause: { flexShrink: 1, minWidth: 0 },
   step: { paddingLeft: 26, paddingVertical: 1 },
   stepWide: { flexDirection: 'row', alignItems: 'baseline', columnGap: space.l },
   sum: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'baseline', flexGrow: 1, flexShrink: 1, flexBasis: '56%' },

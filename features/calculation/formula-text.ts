@@ -62,13 +62,25 @@ export function putIn(formula: string, values: Readonly<Record<string, number>>)
   return signs(text)
 }
 
-/** A number to six figures, enough to be repeated; whole numbers whole. */
+/**
+ * A number to five figures, so that a calculator comes to the same four; whole numbers whole. Thousands stand apart
+ * from five figures on.
+ */
 export function figureText(value: number): string {
-  if (Number.isInteger(value)) return minus(String(value))
-  const rounded = Number(value.toPrecision(6))
-  return minus(Math.abs(value) >= 1e6 ? String(Math.round(value)) : String(rounded))
+  if (Number.isInteger(value) || Math.abs(value) >= 1e5) return signed(grouped(String(Math.round(value))))
+  return signed(grouped(String(Number(value.toPrecision(5)))))
 }
 
-const minus = (text: string): string => text.replace('-', '−')
+/** No line breaks within a number. */
+const THIN_SPACE = '\u202f'
+
+function grouped(text: string): string {
+  const [whole = '', decimals] = text.split('.')
+  if (whole.replace('-', '').length < 5) return text
+  const apart = whole.replace(/(?<=\d)(?=(\d{3})+$)/g, THIN_SPACE)
+  return decimals === undefined ? apart : `${apart}.${decimals}`
+}
+
+const signed = (text: string): string => text.replace('-', '−')
 
 const signs = (text: string): string => text.replace(/\s*\*\s*/g, ' × ').replace(/ - /g, ' − ')

@@ -1,7 +1,7 @@
 import { layoutIndex, zonesOfPour } from '@wedgeline/engine/geometry'
 import type { LayoutFile } from '@wedgeline/contract'
 import { toEngine } from '@wedgeline/contract'
-import type { Check, Step, Zone } from '@wedgeline/engine'
+import type { Zone } from '@wedgeline/engine'
 
 export interface ZonePlace {
   readonly zone: Zone
@@ -22,19 +22,4 @@ export function zonePlace(layout: LayoutFile, zoneId: string): ZonePlace | null 
     return { zone, previous: row[at - 1] ?? null, next: row[at + 1] ?? null }
   }
   return null
-}
-
-/** Steps that stand word for word further up the sheet: their meaning need not be read twice. */
-export function repeatedSteps(checks: readonly Check[]): ReadonlySet<Step> {
-  const seen = new Set<string>()
-  const repeated = new Set<Step>()
-  for (const check of checks) {
-    if (check.kind !== 'compared') continue
-    for (const step of check.steps) {
-      const line = `${step.symbol}|${step.meaning}|${step.formula}|${step.value}`
-      if (seen.has(line)) repeated.add(step)
-      seen.add(line)
-    }
-  }
-  return repeated
 }

@@ -2,7 +2,9 @@ import { expect, test } from 'vitest'
 import { figureText, formulaParts, putIn, symbolPart } from '@/features/calculation/formula-text'
 
 test('numbers stand where the names stood', () => {
-  expect(putIn('0.25 * F * (b - a) / b', { F: 706560, a: 220, b: 1500 })).toBe('0.25 × 706560 × (1500 − 220) / 1500')
+  expect(putIn('0.25 * F * (b - a) / b', { F: 706560, a: 220, b: 1500 })).toBe(
+    '0.25 × 706\u202f560 × (1500 − 220) / 1500',
+  )
 })
 
 test('a name is replaced whole, not where it is part of another', () => {
@@ -21,11 +23,19 @@ test('a name without a value is refused, not printed', () => {
   expect(() => putIn('a + b', { a: 1 })).toThrow('names b, which has no value')
 })
 
-test('numbers keep six figures, and whole ones all of them', () => {
-  expect(figureText(78.53981633974483)).toBe('78.5398')
-  expect(figureText(588800)).toBe('588800')
-  expect(figureText(1234567.8)).toBe('1234568')
+test('numbers keep five figures, and whole ones all of them', () => {
+  expect(figureText(78.53981633974483)).toBe('78.54')
+  expect(figureText(502.443)).toBe('502.44')
+  expect(figureText(0.0123456)).toBe('0.012346')
+  expect(figureText(1234567.8)).toBe('1\u202f234\u202f568')
   expect(figureText(-0.5)).toBe('−0.5')
+})
+
+test('thousands stand apart from five figures on', () => {
+  expect(figureText(9999)).toBe('9999')
+  expect(figureText(10000)).toBe('10\u202f000')
+  expect(figureText(-588800)).toBe('−588\u202f800')
+  expect(figureText(12345.67)).toBe('12\u202f346')
 })
 
 test('symbols are set with what stands below the line', () => {
