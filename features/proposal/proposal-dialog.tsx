@@ -92,7 +92,7 @@ interface ComparedProps {
 }
 
 function Compared({ proposal, isStale, left, onLeave, onMarks }: ComparedProps) {
-  const { zones, mass, marks, curve, notes, isExact } = proposal
+  const { zones, mass, marks, curve, point, notes, isExact } = proposal
   const offered = zones.filter(({ blocked }) => blocked.length === 0)
   const blocked = zones.filter((zone) => zone.blocked.length > 0)
   return (
@@ -109,7 +109,7 @@ function Compared({ proposal, isStale, left, onLeave, onMarks }: ComparedProps) 
       {notes.map((note) => (
         <Text key={note}>{note}</Text>
       ))}
-      <MarksCurve curve={curve} marks={marks} onPick={onMarks} />
+      <MarksCurve curve={curve} marks={point} onPick={onMarks} />
       {isExact ? null : (
         <Text tone="soft">The search for the fewest marks was cut short: a lighter choice may exist.</Text>
       )}

@@ -111,7 +111,7 @@ describe('Proposed bars', () => {
     ]
     state.propose = (_, ask) => {
       asked.push(ask.marksAtMost)
-      return Promise.resolve({ ...proposal, curve, marks: ask.marksAtMost ?? 5 })
+      return Promise.resolve({ ...proposal, curve, point: ask.marksAtMost ?? 5 })
     }
     show()
     await userEvent.selectOptions(await screen.findByLabelText(/Different new marks/), '2')

@@ -7,16 +7,20 @@ import { distanceToSegment } from '../geometry'
 import { found, type LayoutIndex } from '../layout-index'
 import type { Anchor, Edge, Point } from '../model'
 import type { Zone } from '../result'
+import { wedgesOfEdge } from '../wedge/wedges-of-edge'
 
-/** Bars of places farther than this from a zone hardly ever meet its own, mm. */
+/** Bars of places farther than this from where a zone's own may lie hardly ever meet them, mm. */
 const NEAR = 1500
+
+/** How far bars of a zone run into the slab, mm: behind an anchor over the window in plan, across a joint with their laps. */
+const DEEP = { anchor: 2000, group: 2000, pan: 4000, joint: 2000 } as const
 
 /** @returns the whole layout for an edge, whose bars run from end to end. */
 export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
   const line = lineOf(index, zone)
   if (!line) return index
-  const isNear = (point: Point) => distanceToSegment(point, ...line) <= NEAR
-  const edges = index.layout.edges.filter((edge) => edge.id === zone.edgeId || isBeside(index, edge, line))
+  const isNear = nearnessTo(index, zone, line)
+  const edges = index.layout.edges.filter((edge) => edge.id === zone.edgeId || isBeside(index, edge, { line, isNear }))
   const edgeIds = new Set(edges.map(({ id }) => id))
   const pans = index.layout.pans.filter(isNear)
   const panIds = new Set(pans.map(({ id }) => id))
@@ -54,6 +58,25 @@ export function nearbyIndex(index: LayoutIndex, zone: Zone): LayoutIndex {
   }
 }
 
+/** Whether a place lies near where bars of the zone may be: behind its length of edge, or round its pan. */
+function nearnessTo(index: LayoutIndex, zone: Zone, line: readonly [Point, Point]): (point: Point) => boolean {
+  const { edgeId, from, to } = zone
+  if (zone.panId !== null || edgeId === null || from === null || to === null) {
+    return (point) => distanceToSegment(point, ...line) <= DEEP.pan
+  }
+  const frame = found(index.frames, edgeId, 'edge')
+  const deep = deepOf(index, zone)
+  return (point) => {
+    const { chainage, depth } = frame.local(point)
+    return chainage >= from - NEAR && chainage <= to + NEAR && depth >= -NEAR && depth <= deep + NEAR
+  }
+}
+
+function deepOf(index: LayoutIndex, { id, kind, edgeId }: Zone): number {
+  if (kind === 'gap') return wedgesOfEdge(index, edgeId ?? '').get(id)?.depth ?? DEEP.anchor
+  return kind === 'joint' ? DEEP.joint : DEEP.anchor
+}
+
 /** From one end of a zone to the other; a pan is a point. Null for a whole edge. */
 function lineOf(index: LayoutIndex, { kind, edgeId, panId, from, to }: Zone): [Point, Point] | null {
   if (panId !== null) {
@@ -69,8 +92,12 @@ function placeOf(index: LayoutIndex, { chainage, setBack }: Anchor, edgeId: stri
   return found(index.frames, edgeId, 'edge').pointAt(chainage, setBack)
 }
 
-/** Bars along such an edge may come near. */
-function isBeside(index: LayoutIndex, { id }: Edge, [a, b]: readonly [Point, Point]): boolean {
+/** Bars along such an edge, or at one of its anchors, may come near. */
+function isBeside(
+  index: LayoutIndex,
+  { id }: Edge,
+  { line: [a, b], isNear }: { readonly line: readonly [Point, Point]; readonly isNear: (point: Point) => boolean },
+): boolean {
   const frame = found(index.frames, id, 'edge')
   const [start, end] = [frame.pointAt(frame.from, 0), frame.pointAt(frame.to, 0)]
   const away = [
@@ -79,5 +106,6 @@ function isBeside(index: LayoutIndex, { id }: Edge, [a, b]: readonly [Point, Poi
     distanceToSegment(start, a, b),
     distanceToSegment(end, a, b),
   ]
-  return Math.min(...away) <= NEAR
+  const hasNear = (index.anchorsOfEdge.get(id) ?? []).some((anchor) => isNear(placeOf(index, anchor, id)))
+  return Math.min(...away) <= NEAR || hasNear
 }

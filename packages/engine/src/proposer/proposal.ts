@@ -61,7 +61,10 @@ export interface Proposal {
   /** Mass of what is added, kg, and the different marks in it that the pour's other bars do not have. */
   readonly mass: number
   readonly marks: number
+  /** Before places look again for bars that pass beside those of their neighbours. */
   readonly curve: readonly CurvePoint[]
+  /** Marks of the point of the curve that was taken. */
+  readonly point: number
   /** False where the search was cut short, so that a lighter choice may exist. */
   readonly isExact: boolean
   readonly notes: readonly string[]

@@ -18,7 +18,8 @@ import { cheapest, choices } from './choose'
 import { placesOf } from './places'
 import type { Blocked, Proposal, ProposeAsk, ProposedZone } from './proposal'
 import { situationsOf, type Situation } from './situations'
-import { faultsBefore, stoppedBy, worstCheck } from './verdict'
+import { faultsBefore, outBy, stoppedBy, worstCheck } from './verdict'
+import { inWords } from './words'
 
 /** What one different mark less is worth: bending, bundling, tagging and finding another bar (common practice), kg. */
 const MASS_PER_MARK = 5
@@ -44,6 +45,7 @@ export function proposeSteel(layout: Layout, ask: ProposeAsk): Proposal {
     mass: added.mass,
     marks: added.marks,
     curve: chosen.curve,
+    point: chosen.point,
     isExact: chosen.isExact,
     notes: assumed.notes,
   }
@@ -94,6 +96,7 @@ interface Given {
 interface Chosen {
   readonly given: ReadonlyMap<string, Given>
   readonly curve: Proposal['curve']
+  readonly point: number
   readonly isExact: boolean
 }
 
@@ -122,7 +125,7 @@ function chooseAll(work: Work, ask: ProposeAsk): Chosen {
       given.set(zone.id, { shapes: [], blocked: tried.blocked, lookedAt: situation.example.zone })
     }
   }
-  return { given, curve: curve.map(({ marks, mass }) => ({ marks, mass })), isExact }
+  return { given, curve: curve.map(({ marks, mass }) => ({ marks, mass })), point: choice?.marks ?? 0, isExact }
 }
 
 function triedOf(bench: Bench, places: readonly Place[]): { situation: Situation; tried: Tried }[] {
@@ -159,12 +162,22 @@ function settle(work: Work, chosen: ReadonlyMap<string, Given>): Settled {
   const given = new Map(chosen)
   let all = everythingIn(work, given)
   for (let round = 0; round < ROUNDS; round++) {
-    const failing = work.places.filter((place) => isSet(given, place) && stopsIn(work, all, place))
-    if (failing.length === 0) break
+    const failing = work.places.filter((place) => isSet(given, place) && stopOf(work, all, place) !== null)
+    if (failing.length === 0) return { given, all }
     for (const place of failing) given.set(place.zone.id, foundAlone(work, given, place))
     all = everythingIn(work, given)
   }
-  return { given, all }
+  for (const place of work.places.filter((one) => isSet(given, one))) withoutStopped(work, { given, all }, place)
+  return { given, all: everythingIn(work, given) }
+}
+
+/** What does not pass beside its neighbours to the end is not proposed. */
+function withoutStopped(work: Work, of: { given: Map<string, Given>; all: Bench }, place: Place): void {
+  const shapes = of.given.get(place.zone.id)?.shapes ?? []
+  const stopped = shapes.length > 0 ? stopOf(work, of.all, place) : null
+  if (!stopped) return
+  const blocked = { candidate: inWords(shapes, work.bare.letter), check: stopped.name, by: outBy(stopped) }
+  of.given.set(place.zone.id, { shapes: [], blocked: [blocked] })
 }
 
 interface Settled {
@@ -183,8 +196,8 @@ const isSet = (given: ReadonlyMap<string, Given>, { zone }: Place): boolean => g
 
 const whole = (context: CheckContext) => ({ context, near: null })
 
-const stopsIn = (work: Work, all: Bench, { zone }: Place): boolean =>
-  stoppedBy(whole(all.context), zone, faultsBefore(whole(work.bare.context), zone)) !== null
+const stopOf = (work: Work, all: Bench, { zone }: Place) =>
+  stoppedBy(whole(all.context), zone, faultsBefore(whole(work.bare.context), zone))
 
 function foundAlone(work: Work, given: ReadonlyMap<string, Given>, place: Place): Given {
   const others = new Map([...given].filter(([id]) => id !== place.zone.id))
@@ -233,7 +246,8 @@ function isUnchanged(work: Work, given: Settled['given'], { key }: Place): boole
   const here = work.places.filter((place) => place.key === key)
   const now = here.flatMap(({ zone }) => given.get(zone.id)?.shapes ?? [])
   const before = here.slice(0, 1).flatMap((place) => steelAt(work.before.index, place).filter(isReplaceable))
-  const listed = (shapes: readonly SteelShape[]) => JSON.stringify(shapes.map((shape) => JSON.stringify(shape)).sort())
+  const textOf = (shape: SteelShape) => JSON.stringify(Object.entries(shape).sort(([a], [b]) => (a < b ? -1 : 1)))
+  const listed = (shapes: readonly SteelShape[]) => shapes.map(textOf).sort().join()
   return listed(now) === listed(before.map(({ shape }) => shape))
 }
 
