@@ -1,5 +1,4 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query'
-import { router } from 'expo-router'
 import { useState } from 'react'
 import { StyleSheet, View } from 'react-native'
 import { space } from '@/components/theme'
@@ -125,7 +124,8 @@ function IntoJob({ onClose, onOther }: WayProps) {
     trpc.job.fileQuickEdge.mutationOptions({
       onSuccess: async ({ jobId: madeIn, pourId }) => {
         await queryClient.invalidateQueries(trpc.job.list.queryFilter())
-        router.replace(`/jobs/${madeIn}/pours/${pourId}`)
+        // A page load: the open job above this page is the one that is gone.
+        window.location.assign(`/jobs/${madeIn}/pours/${pourId}`)
       },
     }),
   )

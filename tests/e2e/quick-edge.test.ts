@@ -66,7 +66,7 @@ test.each(SIZE_NAMES)('%s: paste, bars, one A4 in under two minutes; then kept a
   await arrive(page, '/', product.signInOf('detailer'))
   await heading(page, 'Jobs')
   const hand = person(page)
-  await hand.does('open the page', () => page.getByRole('link', { name: 'Quick edge' }).click())
+  await hand.does('open the page', () => page.getByRole('link', { name: 'Quick edge', exact: true }).click())
   await heading(page, 'Quick edge')
   await hand.does('paste', () => pasteBox(page).fill(COPIED))
   await page.getByText('12 anchors read, from 600 to 13800 mm.').waitFor()
