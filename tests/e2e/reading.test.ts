@@ -32,6 +32,12 @@ async function accept(page: Page, title: string): Promise<void> {
   await dialog.waitFor({ state: 'detached' })
 }
 
+/** How many sides of A4 the page takes in print. */
+async function sidesOf(page: Page): Promise<number> {
+  const pdf = await page.pdf({ preferCSSPageSize: true })
+  return pdf.toString('latin1').match(/\/Type \/Page\b/g)?.length ?? 0
+}
+
 test('an engineer accepts the readings, and bursting in plan is no longer a matter of judgement', async () => {
   const { page } = await openVisit(browser, { origin: product.origin, size: 'wide' })
   const { anchors, edges } = await stored.layout()
@@ -42,6 +48,7 @@ test('an engineer accepts the readings, and bursting in plan is no longer a matt
   await heading(page, 'Calculation, E2-P1-03')
   const judged = page.getByText(/Demand 515 mm², limit 785 mm²: 0\.66\. Needs judgement/)
   await judged.waitFor()
+  expect(await sidesOf(page)).toBe(1)
 
   await page.goto(`/jobs/${stored.jobId}`)
   await heading(page, /Quillmarsh/)
