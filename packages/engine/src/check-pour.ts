@@ -25,7 +25,7 @@ export interface PourAsk {
 export function checkPour(layout: Layout, { pourId, edgeId, withSteps = false }: PourAsk): PourResult {
   const index = layoutIndex(layout)
   const context = contextOf(index)
-  const zones = zonesAsked(index, { pourId, edgeId }).map((zone) => checkZone(() => context, zone, withSteps))
+  const zones = zonesAsked(index, { pourId, edgeId }).map((zone) => checkZone(() => context, { zone, withSteps }))
   return {
     pourId,
     basis: layout.job.basis,
@@ -43,20 +43,42 @@ export function contextOf(index: LayoutIndex): CheckContext {
 export const zonesAsked = (index: LayoutIndex, of: { pourId: string; edgeId: string | undefined }): Zone[] =>
   zonesOfPour(index, of.pourId).filter((zone) => of.edgeId === undefined || zone.edgeId === of.edgeId)
 
+/** Checks that stand as they were made before, of the families that are not made again. */
+export interface Standing {
+  readonly result: ZoneResult
+  readonly isMadeAgain: (family: Family) => boolean
+}
+
+interface ZoneAsk {
+  readonly zone: Zone
+  readonly withSteps: boolean
+  readonly standing?: Standing | undefined
+}
+
 /** @param contextFor what each family is worked out from. */
-export function checkZone(contextFor: (family: Family) => CheckContext, zone: Zone, withSteps: boolean): ZoneResult {
-  const made = FAMILIES_OF_ZONE[zone.kind].map((family) => ({
-    family,
-    checks: CHECKS_OF_FAMILY[family](contextFor(family), zone),
-  }))
-  const checks = made.flatMap((one) => one.checks ?? []).sort(bySeverity)
+export function checkZone(
+  contextFor: (family: Family) => CheckContext,
+  { zone, withSteps, standing }: ZoneAsk,
+): ZoneResult {
+  const made = FAMILIES_OF_ZONE[zone.kind].map((family) => {
+    if (standing && !standing.isMadeAgain(family)) return stood(standing.result, family)
+    const checks = CHECKS_OF_FAMILY[family](contextFor(family), zone)
+    return { family, checks: checks ?? [], isNotYet: isNotYet(checks) }
+  })
+  const checks = made.flatMap((one) => one.checks).sort(bySeverity)
   return {
     zone,
     checks: withSteps ? checks : checks.map(withoutSteps),
     status: worstOf(checks),
-    notYetChecked: made.filter((one) => isNotYet(one.checks)).map(({ family }) => family),
+    notYetChecked: made.filter((one) => one.isNotYet).map(({ family }) => family),
   }
 }
+
+const stood = ({ checks, notYetChecked }: ZoneResult, family: Family) => ({
+  family,
+  checks: checks.filter((check) => check.family === family),
+  isNotYet: notYetChecked.includes(family),
+})
 
 function withoutSteps(check: Check): Check {
   if (check.kind !== 'compared' || check.steps.length === 0) return check

@@ -4,15 +4,16 @@ import { groupsOfEdge } from './anchor-groups'
 import { checkPour, checkZone, contextOf, zonesAsked, type PourAsk } from './check-pour'
 import { longestReach, membersBeside } from './fit/members'
 import { found, indexAfter, layoutIndex, type LayoutIndex } from './layout-index'
+import { carryOver } from './memo'
 import type { Layout, Steel } from './model'
 import { carryForward, isRowOther } from './recheck/carried'
-import { edgeFitIndex } from './recheck/edge-fit'
+import { edgeFitIndex, pairsAlong } from './recheck/edge-fit'
 import { editOf, isSame, type Changed } from './recheck/edit'
 import { keptIndex, type Line } from './recheck/kept'
 import { reachesOf } from './recheck/reach'
 import { otherTendons } from './recheck/tendons'
 import { changedEnds, touchedEdges, type ChangedEnds, type Editing, type TouchedEdge } from './recheck/touched'
-import type { PourResult, Zone, ZoneResult } from './result'
+import type { Family, PourResult, Zone, ZoneResult } from './result'
 import { countStatuses } from './severity'
 
 export interface Checked {
@@ -70,30 +71,36 @@ function remade({ editing, ends, before, ask }: Remaking): PourResult | null {
   const { was, index, reaches } = editing
   const touched = touchedEdges(editing, ends).map((one) => (isRowOther(editing, one.edge.id) ? whole(index, one) : one))
   const joints = touchedJoints(editing, touched)
-  const kept = keptIndex(index, { touched, reaches, lines: linesOf(index, { pourId, joints }) })
+  const lines = linesOf(index, { pourId, joints })
+  const kept = keptIndex(index, { touched, reaches, lines: [], isForFit: false })
+  const fit = keptIndex(index, { touched, reaches, lines, isForFit: true })
   carryForward({ was, index, kept, touched, tendonIds: ends.tendonIds })
   const tendonIds = new Set([...ends.tendonIds, ...otherTendons(editing, { touched, pourId })])
   const isTouched = touchedBy({ touched, joints, tendonIds })
   const known = new Map(before.result.zones.map((result) => [result.zone.id, result]))
-  const check = checker({ was, index, kept }, withSteps)
+  const fittedEdges = new Set(touched.flatMap((one) => (one.fitted.size > 0 ? [`edge:${one.edge.id}`] : [])))
+  carryOver(pairsAlong, { from: was, to: index, isAsBefore: (key) => !fittedEdges.has(key) })
+  const check = checker({ was, index, kept: fit }, { withSteps, touched, areLapsFelt: areLapsFelt(editing) })
   const zones: ZoneResult[] = []
   for (const zone of zonesAsked(index, { pourId, edgeId })) {
     const result = known.get(zone.id)
-    if (isTouched(index, zone)) zones.push(check(zone))
-    else if (result && isSame(result.zone, zone)) zones.push(result)
+    const isAsItWas = result !== undefined && isSame(result.zone, zone)
+    if (isTouched(index, zone)) zones.push(check(zone, isAsItWas ? result : undefined))
+    else if (isAsItWas) zones.push(result)
     else return null
   }
   const counts = countStatuses(zones.flatMap(({ checks }) => checks))
   return { pourId, basis: before.result.basis, zones, counts }
 }
 
-function whole(index: LayoutIndex, { edge, gaps }: TouchedEdge): TouchedEdge {
+function whole(index: LayoutIndex, one: TouchedEdge): TouchedEdge {
+  const { edge, gaps } = one
   const { from, to } = found(index.frames, edge.id, 'edge')
   const anchors = index.anchorsOfEdge.get(edge.id) ?? []
   const ends = anchors.map(({ chainage }) => chainage)
   return {
-    edge,
-    gaps,
+    ...one,
+    spreadAlone: new Set(),
     anchorIds: new Set(anchors.map(({ id }) => id)),
     gapIds: new Set(gaps.map(({ id }) => id)),
     ranges: [{ from: Math.min(from, ...ends), to: Math.max(to, ...ends) }],
@@ -138,6 +145,9 @@ function touchedBy({ touched, joints, tendonIds }: Touches): (index: LayoutIndex
   const anchorIds = new Set(touched.flatMap((one) => [...one.anchorIds]))
   const gapIds = new Set(touched.flatMap((one) => [...one.gapIds]))
   const edgeIds = new Set(touched.map(({ edge }) => edge.id))
+  const changedIds = new Set(
+    touched.flatMap(({ edge, fitted, anchorIds: own }) => (fitted.size + own.size > 0 ? [edge.id] : [])),
+  )
   return (index, zone) => {
     switch (zone.kind) {
       case 'anchor':
@@ -149,6 +159,7 @@ function touchedBy({ touched, joints, tendonIds }: Touches): (index: LayoutIndex
           ({ id, members }) => id === zone.id && members.some(({ anchor }) => anchorIds.has(anchor.id)),
         )
       case 'edge':
+        return changedIds.has(zone.edgeId ?? '')
       case 'strip':
         return edgeIds.has(zone.edgeId ?? '')
       case 'tendon':
@@ -170,11 +181,39 @@ interface Indexes {
   readonly kept: LayoutIndex
 }
 
-/** Fit is worked out from what is kept round the touched places, everything else from the whole with what is carried over. */
-function checker(indexes: Indexes, withSteps: boolean): (zone: Zone) => ZoneResult {
+/** Laps of bars along an edge keep clear of plates and local steel: only where these stand, and how wide they are, counts. */
+const areLapsFelt = ({ edit }: Editing): boolean =>
+  edit.steel.length > 0 ||
+  edit.anchors.some(({ before, after }) => {
+    const [one, other] = [before, after].map((row) => row && [row.edgeId, row.chainage, row.hardwareId].join(' '))
+    return one !== other
+  })
+
+/**
+ * Fit is worked out from what is kept round the touched places, everything else from the whole with what is carried over.
+ * Away from a change a zone keeps its fit, and a gap that only the spread of tendons comes to all but its wedge.
+ */
+function checker(
+  indexes: Indexes,
+  of: { readonly withSteps: boolean; readonly touched: readonly TouchedEdge[]; readonly areLapsFelt: boolean },
+): (zone: Zone, before: ZoneResult | undefined) => ZoneResult {
+  const { withSteps, touched, areLapsFelt: withLaps } = of
   const [context, near] = [contextOf(indexes.index), contextOf(indexes.kept)]
-  return (zone) => {
-    const along = zone.kind === 'edge' ? { ...near, index: edgeFitIndex(indexes, zone.id) } : near
-    return checkZone((family) => (family === 'fit' ? along : context), zone, withSteps)
+  const fitted = new Set(touched.flatMap((one) => [...one.fitted]))
+  const fittedEdges = new Set(touched.flatMap((one) => (one.fitted.size > 0 ? [one.edge.id] : [])))
+  const spreadAlone = new Set(touched.flatMap((one) => [...one.spreadAlone]))
+  const isFitted = ({ id, kind, edgeId, panId }: Zone): boolean => {
+    if (kind === 'edge') return fittedEdges.has(edgeId ?? '')
+    return panId !== null || (kind !== 'anchor' && kind !== 'gap') || fitted.has(id)
+  }
+  return (zone, before) => {
+    const along = zone.kind === 'edge' && isFitted(zone) ? { ...near, index: edgeFitIndex(indexes, zone.id) } : near
+    const isMadeAgain = (family: Family): boolean => {
+      if (family === 'fit') return isFitted(zone)
+      if (zone.kind === 'edge' && family === 'anchorage') return withLaps
+      return !spreadAlone.has(zone.id) || family === 'edge-wedge' || family === 'anchorage'
+    }
+    const standing = before && { result: before, isMadeAgain }
+    return checkZone((family) => (family === 'fit' ? along : context), { zone, withSteps, standing })
   }
 }

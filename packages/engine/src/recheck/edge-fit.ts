@@ -17,7 +17,9 @@ interface Indexes {
 }
 
 /** Pairs of the whole edge with a bar of its own zone in them, in their order. */
-const pairsAlong = perIndex((index, key): readonly Pair[] => pairsOf(index, key).filter((pair) => isAlong(pair, key)))
+export const pairsAlong = perIndex((index, key): readonly Pair[] =>
+  pairsOf(index, key).filter((pair) => isAlong(pair, key)),
+)
 
 const zoneOf = (item: Item): string | null => (item.kind === 'bar' ? item.bar.zoneId : item.zoneId)
 const isAlong = ({ bar, other }: Pair, key: string): boolean => zoneOf(bar) === key || zoneOf(other) === key
@@ -29,15 +31,18 @@ const isAlong = ({ bar, other }: Pair, key: string): boolean => zoneOf(bar) === 
  */
 export function edgeFitIndex({ was, index, kept }: Indexes, key: string): LayoutIndex {
   const edgeId = key.slice('edge:'.length)
-  const { axisOf } = orderOf(index, edgeId)
+  const axis = axisOf(index, edgeId)
   const isMadeAnew = madeAnew(index, kept)
   const before = (madeAlready(pairsAlong, was, key) ?? pairsAlong(was, key)).filter((pair) => {
     const zones = [zoneOf(pair.bar), zoneOf(pair.other)].filter((zone) => zone !== key)
     return zones.length > 0 && !zones.every(isMadeAnew)
   })
-  for (const one of [was, kept]) rankBars(one, key)
+  for (const bars of [madeAlready(memberOf, was, key)?.bars, memberOf(kept, key).bars]) rankBars(bars ?? [], key)
   const near = pairsOf(kept, key).filter((pair) => isAlong(pair, key))
-  const pairs = [...before, ...near].sort((one, other) => byPlace(axisOf)(placed(one, axisOf), placed(other, axisOf)))
+  const pairs = [...before, ...near]
+    .map((pair) => ({ pair, place: placed(pair, axis) }))
+    .sort((one, other) => byPlace(one.place, other.place))
+    .map(({ pair }) => pair)
   const along = { ...kept }
   remember(memberOf, { index: along, key }, memberOf(kept, key))
   remember(pairsOf, { index: along, key }, pairs)
@@ -64,18 +69,17 @@ function madeAnew(index: LayoutIndex, kept: LayoutIndex): (zoneId: string | null
 
 type Axis = 'x' | 'y'
 
-function orderOf(index: LayoutIndex, edgeId: string): { readonly axisOf: Axis } {
+function axisOf(index: LayoutIndex, edgeId: string): Axis {
   const { x, y } = found(index.frames, edgeId, 'edge').along
-  return { axisOf: Math.abs(x) >= Math.abs(y) ? 'x' : 'y' }
+  return Math.abs(x) >= Math.abs(y) ? 'x' : 'y'
 }
 
 /** Bars of the edge's own zone by their order in it: they often begin at one place. */
 const ranks = new WeakMap<FitBar, number>()
 const OTHERS = Number.MAX_SAFE_INTEGER
 
-function rankBars(index: LayoutIndex, key: string): void {
-  const own = madeAlready(memberOf, index, key)?.bars ?? []
-  own.filter(({ bar }) => bar.zoneId === key).forEach((bar, rank) => ranks.set(bar, rank))
+function rankBars(bars: readonly FitBar[], key: string): void {
+  for (const [rank, bar] of bars.filter((one) => one.bar.zoneId === key).entries()) ranks.set(bar, rank)
 }
 
 interface PairPlace {
@@ -96,10 +100,8 @@ function placed({ bar, other }: Pair, axis: Axis): PairPlace {
 }
 
 /** As a sweep along the axis meets them; pairs within a set come after all others, in their own order. */
-const byPlace =
-  (_axis: Axis) =>
-  (one: PairPlace, other: PairPlace): number => {
-    if (one.isInSet || other.isInSet) return Number(one.isInSet) - Number(other.isInSet)
-    const at = one.by.findIndex((value, i) => value !== other.by[i])
-    return at === -1 ? 0 : (one.by[at] ?? 0) - (other.by[at] ?? 0)
-  }
+function byPlace(one: PairPlace, other: PairPlace): number {
+  if (one.isInSet || other.isInSet) return Number(one.isInSet) - Number(other.isInSet)
+  const at = one.by.findIndex((value, i) => value !== other.by[i])
+  return at === -1 ? 0 : (one.by[at] ?? 0) - (other.by[at] ?? 0)
+}

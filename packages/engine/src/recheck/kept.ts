@@ -11,13 +11,15 @@ export interface Around {
   readonly reaches: Reaches
   /** Lines and points in plan round which everything is kept as well: pans, joints. */
   readonly lines: readonly Line[]
+  /** For bars and bodies alone: only what stands within reach of them. */
+  readonly isForFit: boolean
 }
 
 export type Line = readonly [Point, Point]
 
 /** The same index with the anchors alone that stand near enough to what is touched; pans are all kept. */
 export function keptIndex(index: LayoutIndex, around: Around): LayoutIndex {
-  const lines = [...around.lines, ...around.touched.flatMap((one) => linesOf(index, one))]
+  const lines = [...around.lines, ...around.touched.flatMap((one) => linesOf(index, one, around))]
   const anchorsOfEdge = new Map(
     index.layout.edges.map(({ id }): [string, readonly Anchor[]] => [id, keptOf(index, id, { around, lines })]),
   )
@@ -25,9 +27,12 @@ export function keptIndex(index: LayoutIndex, around: Around): LayoutIndex {
   return { ...index, concrete: {}, anchorsOfEdge, rowOfEdge: rowsOf(edges, { frames: index.frames, anchorsOfEdge }) }
 }
 
-function linesOf({ frames }: LayoutIndex, { edge, ranges }: TouchedEdge): Line[] {
-  const { pointAt } = found(frames, edge.id, 'edge')
-  return ranges.map(({ from, to }) => [pointAt(from, 0), pointAt(to, 0)])
+const rangesOf = ({ ranges, fittedRanges }: TouchedEdge, { isForFit }: Around): readonly Range[] =>
+  isForFit ? fittedRanges : ranges
+
+function linesOf({ frames }: LayoutIndex, one: TouchedEdge, around: Around): Line[] {
+  const { pointAt } = found(frames, one.edge.id, 'edge')
+  return rangesOf(one, around).map(({ from, to }) => [pointAt(from, 0), pointAt(to, 0)])
 }
 
 /** Beyond the touched places the row goes on by as many places. */
@@ -44,17 +49,17 @@ function keptOf(
   const edge = found(index.edges, edgeId, 'edge')
   const kept = new Set<Anchor>()
   for (const one of touched) {
-    const margin = marginOf(one, reaches)
+    const margin = around.isForFit ? reaches.along : marginOf(one, reaches)
     const local = found(index.frames, one.edge.id, 'edge')
     const isOwn = isInOneRow(index, one.edge, edge)
-    if (!isOwn && one.edge.pourId !== edge.pourId) continue
-    for (const range of one.ranges) {
+    if (!isOwn && (around.isForFit || one.edge.pourId !== edge.pourId)) continue
+    for (const range of rangesOf(one, around)) {
       for (const anchor of anchors) {
         const { chainage, depth } = local.local(frame.pointAt(anchor.chainage, anchor.setBack))
         const away = isOwn ? awayFrom(range, anchor.chainage) : awayFrom(range, chainage) - 2 * Math.abs(depth)
         if (away <= margin) kept.add(anchor)
       }
-      if (!isOwn) continue
+      if (!isOwn || around.isForFit) continue
       for (const anchor of besides(anchors, { at: range.from, way: -1, places: PLACES_BEYOND })) kept.add(anchor)
       for (const anchor of besides(anchors, { at: range.to, way: 1, places: PLACES_BEYOND })) kept.add(anchor)
     }

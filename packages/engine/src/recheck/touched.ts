@@ -17,6 +17,11 @@ export interface TouchedEdge {
   readonly gaps: readonly Gap[]
   /** Lengths of the edge that hold them all, growing, mm. */
   readonly ranges: readonly Range[]
+  /** Of these, what stands so near to a change that its bars may touch something else than before; likewise. */
+  readonly fitted: ReadonlySet<string>
+  readonly fittedRanges: readonly Range[]
+  /** Only the spread of tendons comes here: nothing of the gap's own or beside it changed. */
+  readonly spreadAlone: ReadonlySet<string>
 }
 
 export interface Range {
@@ -177,10 +182,10 @@ const isOfPour = (index: LayoutIndex, edge: Edge, { edgeId, point }: Place): boo
 
 // Anchors and gaps ----------------------------------------------------------------------------------------------------
 
-function touched(editing: Editing, edge: Edge, places: readonly Place[]): TouchedEdge | null {
+function touched(editing: Editing, edge: Edge, changes: readonly Place[]): TouchedEdge | null {
   const { was, index, reaches } = editing
-  const windows = windowsOf(editing, edge, places)
-  const thorough = throughGaps(editing, edge, places)
+  const windows = windowsOf(editing, edge, changes)
+  const thorough = throughGaps(editing, edge, changes)
   if (windows.length === 0 && thorough.length === 0) return null
   const anchors = index.anchorsOfEdge.get(edge.id) ?? []
   const anchorIds = new Set(windows.flatMap((window) => anchorsIn(anchors, window)))
@@ -196,15 +201,24 @@ function touched(editing: Editing, edge: Edge, places: readonly Place[]): Touche
     })
   const reached = gaps.filter(isTouched)
   if (anchorIds.size === 0 && reached.length === 0) return null
+  const isBeside = ({ after, before }: Gap) =>
+    [after, before].some((end) => end !== null && anchorIds.has(end.anchor.id))
+  const near = windows.filter(({ isChanged, anchors: reach }) => isChanged && reach >= 0)
+  const isFitted = ({ from, to }: Range) =>
+    near.some((window) => Math.max(from - window.at, window.at - to, 0) <= window.anchors + ROUNDING)
+  const places = anchors.map(({ id, chainage }) => ({ id: `anchor:${id}`, from: chainage, to: chainage }))
+  const fitted = [...gaps, ...places].filter(isFitted)
+  const own = places.filter(({ id }) => anchorIds.has(id.slice('anchor:'.length)))
+  const fittedIds = new Set(fitted.map(({ id }) => id))
   return {
     edge,
     anchorIds,
     gapIds: new Set(reached.map(({ id }) => id)),
     gaps,
-    ranges: merged([
-      ...reached.map(({ from, to }) => ({ from, to })),
-      ...anchors.flatMap(({ id, chainage }) => (anchorIds.has(id) ? [{ from: chainage, to: chainage }] : [])),
-    ]),
+    ranges: merged([...reached, ...own].map(({ from, to }) => ({ from, to }))),
+    fitted: fittedIds,
+    fittedRanges: merged(fitted.map(({ from, to }) => ({ from, to }))),
+    spreadAlone: new Set(reached.filter((gap) => !fittedIds.has(gap.id) && !isBeside(gap)).map(({ id }) => id)),
   }
 }
 
