@@ -46,12 +46,28 @@ async function precompress(name) {
   await writeFile(at(`${name}.gz`), await gz(content, { level: constants.Z_BEST_COMPRESSION }))
 }
 
+const SHARED_SCRIPT = /<script src="([^"]*\/__common-[^"]*\.js)" defer><\/script>/
+
+/**
+ * The bundler puts what parts behind the jobs share into one script and loads it with every page. The first screens
+ * need none of it: the page names it instead, and lib/behind-jobs.web.ts loads it before the first such part.
+ * @param {string} page
+ */
+function takeSharedScriptOff(page) {
+  const html = readFileSync(at(page), 'utf8')
+  const [tag, address] = SHARED_SCRIPT.exec(html) ?? []
+  if (!tag) throw new Error(`${page} loads no shared script: look at what the bundler makes of features/*.ts now.`)
+  const named = `<meta name="wedgeline-shared-script" content="${address}" />`
+  writeFileSync(at(page), html.replace(tag, '').replace('</head>', `  ${named}\n  </head>`))
+}
+
 /** @returns {Promise<number>} exit code of the export */
 async function exportWeb() {
   rmSync(at(FRESH), { recursive: true, force: true })
   const args = ['export', '--platform', 'web', '--max-workers', '2', '--output-dir', FRESH]
   const code = await runNode(['node_modules/expo/bin/cli', ...args], EXPO_ENV)
   if (code !== 0) return code
+  takeSharedScriptOff(`${FRESH}/index.html`)
   await Promise.all(
     filesUnder(FRESH)
       .filter((name) => COMPRESSIBLE.test(name))

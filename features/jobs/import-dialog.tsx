@@ -9,6 +9,7 @@ import { Button } from '@/components/ui/button'
 import { Dialog } from '@/components/ui/dialog'
 import { FilePicker } from '@/components/ui/file-picker'
 import { Text } from '@/components/ui/text'
+import { behindJobs } from '@/lib/behind-jobs'
 import { failureOf } from '@/lib/failure'
 import { useTRPC } from '@/lib/trpc'
 import { CompanyChoice } from './company-choice'
@@ -108,7 +109,7 @@ function useImport({ companyId, onClose }: { companyId: string; onClose: () => v
 /** The reader of layout files comes with the work chunk: the list of jobs does without it. */
 async function readFile(file: File): Promise<Refusal | LayoutFile> {
   if (file.size > FILE_MAX) return { words: 'This file is larger than 8 MB. Nothing was stored.', problems: [] }
-  const { readLayoutText } = await import('@/features/work')
+  const { readLayoutText } = await behindJobs(() => import('@/features/work'))
   const read = readLayoutText(await file.text())
   return read.ok ? read.layout : { words: notTaken(file), problems: read.problems.filter(isRefused) }
 }

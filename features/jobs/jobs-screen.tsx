@@ -10,6 +10,7 @@ import { Screen, Section } from '@/components/ui/screen'
 import { Empty, Failed, Waiting } from '@/components/ui/states'
 import { StatusMark } from '@/components/ui/status-mark'
 import { Text } from '@/components/ui/text'
+import { behindJobs } from '@/lib/behind-jobs'
 import { failureOf } from '@/lib/failure'
 import { useSession, type Me } from '@/lib/session'
 import { useTRPC } from '@/lib/trpc'
@@ -86,7 +87,7 @@ function useWorkFetched(hasPainted: boolean): void {
   useEffect(() => {
     if (!hasPainted) return
     // Without the network the page that is opened asks again, and says so.
-    const timer = setTimeout(() => void import('@/features/work').catch(() => undefined), 300)
+    const timer = setTimeout(() => void behindJobs(() => import('@/features/work')).catch(() => undefined), 300)
     return () => clearTimeout(timer)
   }, [hasPainted])
 }

@@ -85,6 +85,17 @@ describe('behind a job', () => {
     expect(problems()).toHaveLength(over)
   })
 
+  test.each([
+    { gz: 99_999, over: 0 },
+    { gz: 100_000, over: 1 },
+  ])('a chunk of 100,000 gz and $gz gz that it shares: $over over', ({ gz, over }) => {
+    built({ entry: light, work: { gz: 100_000, br: 1000 } })
+    script('__common', { gz, br: 1000, text: 'ZodError' })
+    const named = `<meta name="wedgeline-shared-script" content="/${SCRIPTS}/__common-${HASH}.js" />`
+    write('index.html', `${named}<script src="/${SCRIPTS}/entry-${HASH}.js" defer></script>`)
+    expect(problems()).toHaveLength(over)
+  })
+
   test('a deep link adds both', () => {
     // Page 1,000 + layout 100 + entry 320,000 + work 160,000 = 481,100 br, over 480,000.
     built({ entry: { gz: 1000, br: 320_000 }, work: { gz: 1000, br: 160_000 } })

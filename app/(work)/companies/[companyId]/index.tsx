@@ -1,7 +1,10 @@
 import { useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
+import { behindJobs } from '@/lib/behind-jobs'
 
-const CompanyScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.CompanyScreen })))
+const CompanyScreen = lazy(() =>
+  behindJobs(() => import('@/features/office')).then((office) => ({ default: office.CompanyScreen })),
+)
 
 export default function CompanyRoute() {
   const { companyId } = useLocalSearchParams<{ companyId: string }>()

@@ -1,7 +1,8 @@
 import { Slot, useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
+import { behindJobs } from '@/lib/behind-jobs'
 
-const OpenJob = lazy(() => import('@/features/work').then((work) => ({ default: work.OpenJob })))
+const OpenJob = lazy(() => behindJobs(() => import('@/features/work')).then((work) => ({ default: work.OpenJob })))
 
 export default function JobLayout() {
   const { jobId } = useLocalSearchParams<{ jobId: string }>()

@@ -1,7 +1,10 @@
 import { useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
+import { behindJobs } from '@/lib/behind-jobs'
 
-const JobPeopleScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.JobPeopleScreen })))
+const JobPeopleScreen = lazy(() =>
+  behindJobs(() => import('@/features/work')).then((work) => ({ default: work.JobPeopleScreen })),
+)
 
 export default function JobPeopleRoute() {
   const { jobId } = useLocalSearchParams<{ jobId: string }>()

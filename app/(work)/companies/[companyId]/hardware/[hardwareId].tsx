@@ -1,7 +1,10 @@
 import { useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
+import { behindJobs } from '@/lib/behind-jobs'
 
-const HardwareScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.HardwareScreen })))
+const HardwareScreen = lazy(() =>
+  behindJobs(() => import('@/features/office')).then((office) => ({ default: office.HardwareScreen })),
+)
 
 export default function HardwareRoute() {
   const { companyId, hardwareId } = useLocalSearchParams<{ companyId: string; hardwareId: string }>()

@@ -1,7 +1,8 @@
 import { useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
+import { behindJobs } from '@/lib/behind-jobs'
 
-const PanScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.PanScreen })))
+const PanScreen = lazy(() => behindJobs(() => import('@/features/work')).then((work) => ({ default: work.PanScreen })))
 
 export default function PanRoute() {
   const { jobId, panId } = useLocalSearchParams<{ jobId: string; panId: string }>()

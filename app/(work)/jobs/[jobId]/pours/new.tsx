@@ -1,7 +1,10 @@
 import { useLocalSearchParams } from 'expo-router'
 import { lazy } from 'react'
+import { behindJobs } from '@/lib/behind-jobs'
 
-const NewPourScreen = lazy(() => import('@/features/work').then((work) => ({ default: work.NewPourScreen })))
+const NewPourScreen = lazy(() =>
+  behindJobs(() => import('@/features/work')).then((work) => ({ default: work.NewPourScreen })),
+)
 
 export default function NewPourRoute() {
   const { jobId } = useLocalSearchParams<{ jobId: string }>()
