@@ -26,8 +26,8 @@ import { worstKinds } from './worst-kinds'
 
 /** Widths of the sheet in its own px, by the rows of its longest list; theme.css scales each to the width of A4. */
 const SIZES = [
-  { density: 'large', width: 1060, rowsMost: 26 },
-  { density: 'small', width: 1460, rowsMost: 50 },
+  { density: 'large', width: 1060, rowsMost: 20 },
+  { density: 'small', width: 1460, rowsMost: 44 },
   { density: 'tiny', width: 1830, rowsMost: Infinity },
 ] as const
 
@@ -39,7 +39,7 @@ const PLAN_PX = 190
 const FACE_PX = 90
 
 /** As much of each list as one side of A4 holds; the rest is named as a number. */
-const MOST = { anchors: 80, marks: 24, worst: 12, readings: 8 } as const
+const MOST = { anchors: 60, marks: 24, worst: 12, readings: 8 } as const
 
 interface SheetProps {
   readonly answer: QuickAnswer
