@@ -108,7 +108,7 @@ test.each(SIZE_NAMES)('%s: paste, bars, one A4 in under two minutes; then kept a
   const edgePath = new URL(page.url()).pathname
   await page.goto('/')
   await page.getByRole('heading', { name: 'Quick edges, not yet filed' }).waitFor()
-  await page.getByText('12 anchors').waitFor()
+  await page.getByRole('list', { name: 'Quick edges, not yet filed' }).getByText('12 anchors').waitFor()
   await page.goto(edgePath)
   await button(page, 'Keep in a job').click()
   const dialog = page.getByRole('dialog', { name: 'Keep in a job' })
