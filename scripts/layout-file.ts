@@ -1,4 +1,5 @@
 import { readFileSync, statSync } from 'node:fs'
+import { parseArgs } from 'node:util'
 import { readLayoutText, type LayoutFile, type Problem } from '@wedgeline/contract'
 
 /** Bad input from the command line; the message says what would be right. */
@@ -36,6 +37,18 @@ function textOf(path: string): string {
     const why = error instanceof Error ? error.message : String(error)
     throw new InputError(`file: cannot be read (${why}); must be the path of a layout file`)
   }
+}
+
+/** The one argument of a command that takes a layout file and nothing else. @throws InputError with `usage` otherwise. */
+export function fileArgument(usage: string): string {
+  try {
+    const { positionals } = parseArgs({ allowPositionals: true, options: {} })
+    const [path, ...more] = positionals
+    if (path !== undefined && more.length === 0) return path
+  } catch (error) {
+    throw new InputError(`${error instanceof Error ? error.message : String(error)}\n${usage}`)
+  }
+  throw new InputError(`file: must be given once\n${usage}`)
 }
 
 /** Runs a command: bad input goes to stderr with exit 2; anything else that is thrown is a fault of the program. */

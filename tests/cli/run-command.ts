@@ -18,7 +18,7 @@ export function temporaryFile(content: string): string {
 }
 
 /** Runs a command as somebody in a terminal does: `npm run -s <name> -- <args>`. */
-export function runNpm(name: 'check' | 'schedule', args: readonly string[]) {
+export function runNpm(name: 'check' | 'propose' | 'schedule', args: readonly string[]) {
   const { status, stdout, stderr } = spawnSync('npm', ['run', '-s', name, '--', ...args], {
     cwd: ROOT,
     encoding: 'utf8',

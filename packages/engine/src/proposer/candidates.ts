@@ -24,7 +24,7 @@ export function candidatesFor(bench: Bench, place: Place, shared: readonly Strai
     case 'gap':
       return unblocked(gapSteel(bench, place, shared).candidates)
     case 'joint':
-      return unblocked(jointSteel(bench, place))
+      return jointSteel(bench, place)
     case 'corner':
     case 'tendon':
     case 'strip':

@@ -5,13 +5,22 @@ import { found } from '../layout-index'
 import type { PlacedBarsShape } from '../model'
 import { jointStrips } from '../wedge/joint-strip'
 import { contextWith, type Bench, type Place } from './bench'
-import { area, downTo, upTo, type Candidate } from './candidate'
-import { needsOf } from './verdict'
+import { area, downTo, upTo, type Candidate, type Candidates } from './candidate'
+import { needsOf, unmetOf } from './verdict'
 
 const LENGTH_STEP = 25
 const PITCH_STEP = 5
 
-export function jointSteel(bench: Bench, place: Place): Candidate[] {
+/** Both pours see the joint; its bars are proposed once, with the pour that is cast first. */
+export function jointSteel(bench: Bench, place: Place): Candidates {
+  if (place.pourId === place.zone.pourId) return { candidates: setsOf(bench, place), blocked: [] }
+  const { mark } = found(bench.context.index.pours, place.pourId, 'pour')
+  const by = `proposed with pour ${mark}, which is cast first`
+  const unmet = unmetOf(needsOf(bench.context, place.zone))
+  return { candidates: [], blocked: unmet.map(({ name }) => ({ candidate: 'bars across the joint', check: name, by })) }
+}
+
+function setsOf(bench: Bench, place: Place): Candidate[] {
   const { index, basis } = bench.context
   const jointId = place.zone.id.slice('joint:'.length)
   const pour = found(index.pours, place.pourId, 'pour')

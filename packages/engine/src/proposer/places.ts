@@ -16,7 +16,7 @@ export function placesOf(index: LayoutIndex, pourId: string, zoneIds?: readonly 
     .flatMap((zone) => placeOf(index, zone))
 }
 
-/** Bars of an anchor are cast with it; bars of a joint with the pour that is cast first, which alone proposes them. */
+/** Bars of an anchor are cast with it; bars of a joint with the pour that is cast first. */
 function placeOf(index: LayoutIndex, zone: Zone): Place[] {
   const steelZone = steelZoneOf(index, zone)
   if (steelZone === null) return []
@@ -25,8 +25,9 @@ function placeOf(index: LayoutIndex, zone: Zone): Place[] {
     const { castWithPourId } = found(index.anchors, steelZone.anchorId, 'anchor')
     return [{ zone, steelZone, key, pourId: castWithPourId }]
   }
-  if (steelZone.kind === 'joint' && found(index.joints, steelZone.jointId, 'joint').firstPourId !== zone.pourId)
-    return []
+  if (steelZone.kind === 'joint') {
+    return [{ zone, steelZone, key, pourId: found(index.joints, steelZone.jointId, 'joint').firstPourId }]
+  }
   return [{ zone, steelZone, key, pourId: zone.pourId }]
 }
 
