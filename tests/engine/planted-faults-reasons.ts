@@ -99,10 +99,11 @@ const OPEN: readonly Place[] = [
   },
   {
     fault: null,
-    reason: 'recess and wedge bars of the gap in front of a pan, or pocket at a corner and the last wedge bar, meet',
+    reason:
+      'bars spread evenly over the gap would meet the recess of a pan in it, or the pocket at a corner: none is proposed',
     zones:
       /^(gap:E4-P1:|gap:E6:|gap:E3:L1P2-E07E:end|gap:J1-P2:L1P2-E07J:end|gap:E7-E:L2P3-E03E:end|pan:PN0[1-8]$|anchor:(L1P2-N0[28]N|L2P3-N))/,
-    families: ['fit'],
+    families: ['fit', 'edge-wedge'],
   },
   {
     fault: null,
