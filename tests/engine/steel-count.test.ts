@@ -16,6 +16,8 @@ const PLACE: CountPlace = {
   setBack: 110,
   plateWidth: 220,
   depth: 220,
+  coverTop: 30,
+  coverSoffit: 30,
   azimuth: 0,
   mats: [],
 }

@@ -126,9 +126,18 @@ describe('AS 3600 13.1 and 13.2 (secondary): development and laps', () => {
     expect(length(64)).toBeGreaterThan(length(65))
   })
 
-  test('good bond where no bar can have more than 300 of concrete below it', () => {
-    expect(basis.isGoodBond(300)).toBe(true)
-    expect(basis.isGoodBond(301)).toBe(false)
+  test('good bond up to 300 of concrete below the bar, whatever the depth', () => {
+    expect([299, 300, 301].map((fromSoffit) => basis.isGoodBond({ depth: 700, fromSoffit }))).toEqual([
+      true,
+      true,
+      false,
+    ])
+    expect(basis.isGoodBond({ depth: 320, fromSoffit: 280 })).toBe(true)
+  })
+
+  test('where the height is not known it is taken at the top', () => {
+    expect(basis.isGoodBond({ depth: 300, fromSoffit: null })).toBe(true)
+    expect(basis.isGoodBond({ depth: 301, fromSoffit: null })).toBe(false)
   })
 })
 

@@ -77,3 +77,24 @@ describe('EN 1992-1-1 8.4 and 8.7, anchorage and laps (digest; Table 8.2 from me
     )
   })
 })
+
+describe('EN 1992-1-1 8.4.2(2), Fig. 8.2 (from memory): where level bars lie in good bond', () => {
+  const isGood = (depth: number) => (fromSoffit: number | null) => basis.isGoodBond({ depth, fromSoffit })
+
+  test('sections up to 250 deep: every bar', () => {
+    expect([30, 220, 250, null].map(isGood(250))).toEqual([true, true, true, true])
+    // One deeper: a bar whose height is not known may lie in the top millimetre.
+    expect(isGood(251)(null)).toBe(false)
+  })
+
+  test('up to 600 deep: the lower 250', () => {
+    for (const depth of [251, 400, 600]) expect([249, 250, 251].map(isGood(depth))).toEqual([true, true, false])
+  })
+
+  test('deeper: all but the top 300', () => {
+    // 601 - 300 = 301; 1000 - 300 = 700
+    expect([300, 301, 302].map(isGood(601))).toEqual([true, true, false])
+    expect([699, 700, 701].map(isGood(1000))).toEqual([true, true, false])
+    expect(isGood(1000)(null)).toBe(false)
+  })
+})

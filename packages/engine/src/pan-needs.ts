@@ -8,12 +8,14 @@ import { matCuts, type MatCut } from './pan-cuts'
 import { panPlace, type PanAnchor, type PanPlace } from './pan-place'
 import { panStrip, type PanStrip } from './pan-strip'
 import { step, type Clause, type Step } from './step'
+import { bondPlace } from './steel/bond'
 import {
   barArea,
   besideRecess,
   countStripBars,
   countTieBack,
   countTrimmers,
+  type AnchorageOf,
   type CountedBars,
   type Face,
 } from './steel/pan-steel'
@@ -62,14 +64,15 @@ export function panNeeds(index: LayoutIndex, basis: Basis, panId: string): PanNe
   ]
 }
 
-/** Length past a line that a bar round a pan needs at a stress and strength. */
+/** Length past a line that a bar round a pan needs at a stress and strength, by the face that it lies at. */
 function anchorageAt(place: PanPlace, basis: Basis, of: { readonly stress: number; readonly strength: number }) {
-  return (diameter: number): Anchorage =>
+  const covered = { ...place, depth: place.top - place.soffit }
+  return (diameter: number, face: Face): Anchorage =>
     basis.anchorage({
       ...of,
       diameter,
       cd: Math.min(place.coverTop, place.coverSoffit),
-      isGoodBond: basis.isGoodBond(place.top - place.soffit),
+      isGoodBond: basis.isGoodBond(bondPlace(covered, { layers: face, diameter })),
       isBent: false,
     })
 }
@@ -110,7 +113,8 @@ function tieBackNeed({ place, at, basis, stage }: TieInput): PanNeed {
       ...(others.length > 0 ? [`Beside it, for information: ${others.join('; ')}.`] : []),
     ],
     count: (shapes) => countTieBack(place, shapes, anchorageOf),
-    shapeOf: (diameter) => tieBackShape(place, { diameter, area: rule.area, length: anchorageOf(diameter).length }),
+    shapeOf: (diameter) =>
+      tieBackShape(place, { diameter, area: rule.area, length: anchorageOf(diameter, 'top').length }),
   }
 }
 
@@ -181,7 +185,7 @@ function cutNeed(place: PanPlace, basis: Basis, { runs, face, cuts }: CutSet): P
     shapeOf: (size) => ({
       kind: 'trimmers',
       diameter: size,
-      length: upTo(recess + 2 * anchorageOf(size).length),
+      length: upTo(recess + 2 * anchorageOf(size, face).length),
       count: 2 * Math.ceil(total.value / barArea(size) / 2 - 1e-9),
       layers: face,
       runs,
@@ -315,12 +319,12 @@ function stripShape(
     readonly area: number
     readonly strip: PanStrip
     readonly face: Face
-    readonly anchorageOf: (diameter: number) => Anchorage
+    readonly anchorageOf: AnchorageOf
   },
 ): PlacedBarsShape | null {
   const { diameter, area, strip, face } = of
   const toEdge = strip.length - place.pour.coverEdge
-  const length = upTo(2 * Math.max(toEdge, strip.wedge + of.anchorageOf(diameter).length))
+  const length = upTo(2 * Math.max(toEdge, strip.wedge + of.anchorageOf(diameter, face).length))
   const width = 2 * Math.min(strip.left, strip.right)
   const least = Math.max(2, Math.ceil(area / barArea(diameter)))
   for (let count = least; count <= BARS_MAX && width / count >= PITCH_MIN; count += 1) {

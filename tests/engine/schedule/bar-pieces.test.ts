@@ -210,6 +210,23 @@ describe('pieces of edge bars', () => {
     expect(notes).toEqual(['Cut where the edge steps, at chainage 8000.'])
   })
 
+  test('in an edge 520 deep the top bars take the longer lap of poor bond, those below do not (from memory)', () => {
+    // Poor bond: 613.1 / 0.7 = 875.8, taken up to 880. 19100 + 880 - 12000 = 7980, up to 8000.
+    const deep = edge(SOUTH, 'a', [length(0, 19_200, { soffit: -300 })])
+    const { pieces, lapNeeded, notes } = piecesOf({ edges: [deep, ...EDGES.slice(1)] })
+    expect(lapNeeded).toBe(880)
+    expect(pieces).toEqual([
+      { layer: 'top', bar: 0, from: 50, to: 12_050 },
+      { layer: 'top', bar: 0, from: 11_150, to: 19_150 },
+      { layer: 'bottom', bar: 0, from: 50, to: 7775 },
+      { layer: 'bottom', bar: 0, from: 7150, to: 19_150 },
+    ])
+    expect(notes).toEqual([
+      'Top bars split at the stock length of 12000: 12000 + 8000, lapped 880, every second bar the other way round.',
+      'Bottom bars split at the stock length of 12000: 12000 + 7725, lapped 615, every second bar the other way round.',
+    ])
+  })
+
   test('the schedule orders the pieces: two marks, two bars each, no error', () => {
     const of = layout({ hardware: [{ ...S4, localSteel: null }], steel: [set(SHAPE)] })
     const { rows, problems } = scheduleOf(of, 'P1')

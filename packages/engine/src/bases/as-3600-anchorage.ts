@@ -1,5 +1,5 @@
 import { step, type Clause } from '../step'
-import type { Anchorage, AnchorageInput, Transmission, TransmissionInput } from './basis'
+import type { Anchorage, AnchorageInput, BondPlace, Transmission, TransmissionInput } from './basis'
 
 /** AS 3600:2018, 13.1 and 13.2 as read in a secondary source. */
 const DEVELOPMENT: Clause = { source: 'AS 3600:2018', section: '13.1.2.2 to 13.1.2.6', tag: 'secondary' }
@@ -27,8 +27,8 @@ const STRAND_DIAMETERS = 60
 
 const between = (least: number, value: number, most: number): number => Math.min(Math.max(value, least), most)
 
-/** Whether every bar of a section `depth` mm deep has 300 or less cast below it (13.1.2.2, k1). */
-export const isGoodBond = (depth: number): boolean => depth <= BELOW_MAX
+/** Whether a level bar has 300 or less of concrete cast below it (13.1.2.2, k1), taken to its centre. */
+export const isGoodBond = ({ depth, fromSoffit }: BondPlace): boolean => (fromSoffit ?? depth) <= BELOW_MAX
 
 /** Factor for the concrete cast below the bar. */
 const placeFactor = (input: AnchorageInput): number => (input.isGoodBond ? 1 : 1.3)

@@ -193,6 +193,13 @@ export interface AnchorageInput {
   readonly isBent: boolean
 }
 
+/** Where a level bar lies in its section, mm. */
+export interface BondPlace {
+  readonly depth: number
+  /** Height of the bar's centre above the soffit; null where it is not known, which takes the worst. */
+  readonly fromSoffit: number | null
+}
+
 /** Lengths in mm, `bond` in MPa. */
 export interface Anchorage {
   readonly bond: number
@@ -234,8 +241,8 @@ export interface Basis {
   /** The reading by which bars take the place of a tendon that stops short of its edge. */
   readonly shortfallReading: string
   readonly anchorage: (input: AnchorageInput) => Anchorage
-  /** Whether every bar of a section this deep lies in good bond, whatever its height in it. */
-  readonly isGoodBond: (depth: number) => boolean
+  /** Whether a level bar at this place lies in good bond. */
+  readonly isGoodBond: (place: BondPlace) => boolean
   /** Lap length, mm; `share` is the part of the bars lapped at one section, above 0 to 1. */
   readonly lap: (input: AnchorageInput, share: number) => number
   /** Stress that a bar anchored or lapped in full develops, MPa. */

@@ -1,5 +1,5 @@
 import type { Clause } from '../step'
-import type { Anchorage, AnchorageInput } from './basis'
+import type { Anchorage, AnchorageInput, BondPlace } from './basis'
 
 /** EN 1992-1-1:2004, 8.4 and 8.7: how far a bar must run on before it carries its stress. */
 const ANCHORAGE: Clause = { source: 'EN 1992-1-1:2004', section: '8.4.2 to 8.4.4', tag: 'digest' }
@@ -23,11 +23,19 @@ interface BondFactors {
 /** The bond rule may not count on more than a C60/75 concrete (8.4.2(2)). */
 const STRENGTH_FOR_BOND_MAX = 60
 
-/** In sections up to this depth all bars lie in good bond (8.4.2(2), Fig. 8.2; from memory), mm. */
-const GOOD_BOND_DEPTH_MAX = 250
+/** Good bond (8.4.2(2), Fig. 8.2; from memory): up to DEEP the lower part of a section, beyond it all but the top, mm. */
+const GOOD_BOND_LOWER = 250
+const DEEP = 600
+const POOR_BOND_TOP = 300
 
-/** Whether every bar of a section `depth` mm deep lies in good bond (8.4.2(2), Fig. 8.2; from memory). */
-export const isGoodBond = (depth: number): boolean => depth <= GOOD_BOND_DEPTH_MAX
+/**
+ * Whether a level bar lies in good bond (8.4.2(2), Fig. 8.2; from memory): in the lower 250 of a section up to 600 deep,
+ * in a deeper one anywhere but in its top 300.
+ */
+export function isGoodBond({ depth, fromSoffit }: BondPlace): boolean {
+  const goodTo = depth > DEEP ? depth - POOR_BOND_TOP : GOOD_BOND_LOWER
+  return (fromSoffit ?? depth) <= goodTo
+}
 
 /** Mean tensile strength, MPa (Table 3.1). */
 export const meanTensile = (fck: number): number =>

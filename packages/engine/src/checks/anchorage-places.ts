@@ -5,7 +5,8 @@ import { found } from '../layout-index'
 import type { PlacedBarsShape, Pour, SteelShape } from '../model'
 import { panPlace, slabBeyond } from '../pan-place'
 import type { Compared, Zone } from '../result'
-import { sectionBehind } from '../section'
+import { sectionBehind, type Section } from '../section'
+import { bondPlaceOf } from '../steel/bond'
 import { jointStrips } from '../wedge/joint-strip'
 import { wedgesOfEdge } from '../wedge/wedges-of-edge'
 import { lapCheck, lapStep, pastCheck, pastLine, worstOfEach, type Past, type PastLine } from './anchorage-length'
@@ -31,12 +32,12 @@ export function wedgeBarChecks(context: CheckContext, zone: Zone): readonly Comp
         formula: 'cover + l - depth',
         values: values,
       }
-      const input = straight(context, { pour, depth: section.top - section.soffit, strength: pour.fck })
+      const input = straight(context, shape, { section, strength: pour.fck })
       return [
         pastCheck(context, zone, {
           name: 'Wedge bars past the wedge',
           past: pastLine(past, coverEdge + shape.length - wedge.depth),
-          input: { ...input, diameter: shape.diameter },
+          input,
           countedBy: 'against cracks in the wedge',
         }),
       ]
@@ -47,15 +48,18 @@ export function wedgeBarChecks(context: CheckContext, zone: Zone): readonly Comp
 const shapesOf = ({ index }: CheckContext, zone: Zone): readonly SteelShape[] =>
   (index.steelOfZone.get(zone.id) ?? []).map(({ shape }) => shape)
 
+type Across = Pick<Section, 'top' | 'soffit' | 'coverTop' | 'coverSoffit'>
+
 const straight = (
   { basis }: CheckContext,
-  of: { readonly pour: Pour; readonly depth: number; readonly strength: number },
+  shape: SteelShape,
+  of: { readonly section: Across; readonly strength: number },
 ): AnchorageInput => ({
-  diameter: 0,
+  diameter: shape.diameter,
   strength: of.strength,
   stress: basis.barStress,
   cd: null,
-  isGoodBond: basis.isGoodBond(of.depth),
+  isGoodBond: basis.isGoodBond(bondPlaceOf({ ...of.section, depth: of.section.top - of.section.soffit }, shape)),
   isBent: false,
 })
 
@@ -63,16 +67,14 @@ const straight = (
 export function panAnchorageChecks(context: CheckContext, zone: Zone): readonly Compared[] {
   const place = panPlace(context.index, zone.panId ?? '')
   const { pour, pan } = place
-  const depth = place.top - place.soffit
   return worstOfEach(
     shapesOf(context, zone).flatMap((shape): readonly Compared[] => {
       if (!('runs' in shape)) return []
-      const { diameter } = shape
       const isTie = shape.kind === 'tie-back-bars'
-      const input = straight(context, { pour, depth, strength: isTie ? lastStrength(pour) : pour.fck })
+      const input = straight(context, shape, { section: place, strength: isTie ? lastStrength(pour) : pour.fck })
       const outward = isTie ? Math.max(0, slabBeyond(place) - pour.coverEdge) : Infinity
       const recess = shape.runs === 'along' ? pan.along : pan.across
-      return [pastCheck(context, zone, { ...panPast(shape, recess, outward), input: { ...input, diameter } })]
+      return [pastCheck(context, zone, { ...panPast(shape, recess, outward), input })]
     }),
   )
 }
@@ -137,8 +139,11 @@ export function jointLapChecks(context: CheckContext, zone: Zone): readonly Comp
   return worstOfEach(
     shapesOf(context, zone).flatMap((shape): readonly Compared[] => {
       if (!('runs' in shape)) return []
-      const { length, diameter } = shape
-      const input = { ...straight(context, { pour, depth: pour.thickness, strength: pour.fck }), diameter }
+      const { length } = shape
+      const input = straight(context, shape, {
+        section: { ...pour, top: pour.thickness, soffit: 0 },
+        strength: pour.fck,
+      })
       const past: PastLine = {
         meaning: 'Bars past the strip at the joint, on the deeper side',
         formula: 'l / 2 - strip',

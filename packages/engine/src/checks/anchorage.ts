@@ -1,12 +1,13 @@
 /** Anchorage and laps: how far each bar runs on past the line that it crosses, against the basis. */
 
 import { siteOfAnchor, type AnchorSite } from '../anchor-site'
-import type { AnchorageInput } from '../bases/basis'
+import type { AnchorageInput, BondPlace } from '../bases/basis'
 import { found } from '../layout-index'
 import type { Anchor, HairpinShape, LinksShape, Pour, SteelShape } from '../model'
 import type { Advice, Check, Compared, Zone } from '../result'
 import { sizeOf } from '../schedule/bar-standards'
 import { barStandardById, BS_8666_2020 } from '../schedule/bs-8666'
+import { bondPlaceOf } from '../steel/bond'
 import { countPlaceOf } from '../steel/count-place'
 import { crossingsOf } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
@@ -49,14 +50,13 @@ function anchorChecks(context: CheckContext, zone: Zone): readonly Compared[] {
   const { index } = context
   const site = siteOfAnchor(index, anchorOf(context, zone))
   const { shapes } = steelOfAnchor(index, site)
-  const input = inputAt(context, site)
   return worstOfEach(
     shapes.flatMap((shape): readonly Compared[] => {
       switch (shape.kind) {
         case 'transverse-bars':
-          return crossingChecks(context, zone, { shape, site, input })
+          return crossingChecks(context, zone, { shape, site })
         case 'hairpins':
-          return [legCheck(context, zone, { shape, input })]
+          return [legCheck(context, zone, { shape, site })]
         case 'links':
           return [hookCheck(context, zone, shape)]
         case 'spiral':
@@ -76,30 +76,34 @@ const anchorOf = ({ index }: CheckContext, { id }: Zone): Anchor =>
   found(index.anchors, id.slice('anchor:'.length), 'anchor')
 
 /** For the last stage, when the whole force acts, with the stress that the basis gives to bursting steel. */
-function inputAt({ basis }: CheckContext, { pour, force, hardware, top, soffit }: AnchorSite): AnchorageInput {
+function inputAt({ basis }: CheckContext, site: AnchorSite, shape: SteelShape): AnchorageInput {
+  const { pour, force, hardware } = site
   const a = hardware.plate.width
   return {
-    diameter: 0,
+    diameter: shape.diameter,
     strength: lastStrength(pour),
     stress: basis.tie({ P: force.value, a, b: 2 * a }).stress,
     cd: null,
-    isGoodBond: basis.isGoodBond(top - soffit),
+    isGoodBond: basis.isGoodBond(bondPlaceAt(site, shape)),
     isBent: false,
   }
+}
+
+/** The upper leg of an upright hairpin lies half its bend above the anchor. */
+function bondPlaceAt(site: AnchorSite, shape: SteelShape): BondPlace {
+  const place = bondPlaceOf(countPlaceOf(site), shape)
+  if (shape.kind !== 'hairpins') return place
+  return { ...place, fromSoffit: site.toSoffit + (shape.lies === 'upright' ? shape.bend / 2 : 0) }
 }
 
 const lastStrength = (pour: Pour): number => pour.stages.at(-1)?.strength ?? pour.fck
 
 interface AtAnchor<Shape extends SteelShape> {
   readonly shape: Shape
-  readonly input: AnchorageInput
+  readonly site: AnchorSite
 }
 
-function crossingChecks(
-  context: CheckContext,
-  zone: Zone,
-  { shape, site, input }: AtAnchor<SteelShape> & { readonly site: AnchorSite },
-): readonly Compared[] {
+function crossingChecks(context: CheckContext, zone: Zone, { shape, site }: AtAnchor<SteelShape>): readonly Compared[] {
   const set = crossingsOf(shape, 'plan', countPlaceOf(site))
   if ('reason' in set || set.pastLine === null) return []
   const noun = set.noun[1].charAt(0).toUpperCase() + set.noun[1].slice(1)
@@ -112,7 +116,7 @@ function crossingChecks(
     pastCheck(context, zone, {
       name: `${noun} past the anchor's line`,
       past: pastLine(past, set.pastLine),
-      input: { ...input, diameter: set.diameter },
+      input: inputAt(context, site, shape),
       countedBy: 'against bursting in plan',
     }),
   ]
@@ -127,7 +131,7 @@ function edgeBarAdvice(context: CheckContext, zone: Zone): readonly Advice[] {
     if (shape.kind !== 'edge-bars') return []
     const set = crossingsOf(shape, 'plan', place)
     if ('reason' in set || set.pastLine === null) return []
-    const { length, clause } = basis.anchorage({ ...inputAt(context, site), diameter: shape.diameter })
+    const { length, clause } = basis.anchorage(inputAt(context, site, shape))
     if (set.pastLine >= length) return []
     return [
       {
@@ -151,7 +155,7 @@ function edgeBarAdvice(context: CheckContext, zone: Zone): readonly Advice[] {
 }
 
 /** From the end of the bend: the legs must develop what the bend carries across the plane. */
-function legCheck(context: CheckContext, zone: Zone, { shape, input }: AtAnchor<HairpinShape>): Compared {
+function legCheck(context: CheckContext, zone: Zone, { shape, site }: AtAnchor<HairpinShape>): Compared {
   const { leg, diameter } = shape
   const r = bendRadius(context, diameter)
   const past: PastLine = {
@@ -162,7 +166,7 @@ function legCheck(context: CheckContext, zone: Zone, { shape, input }: AtAnchor<
   return pastCheck(context, zone, {
     name: 'Legs of the hairpins past the bend',
     past: pastLine(past, leg - r - diameter),
-    input: { ...input, diameter, isBent: true },
+    input: { ...inputAt(context, site, shape), isBent: true },
     countedBy: null,
   })
 }

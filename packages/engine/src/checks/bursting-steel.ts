@@ -132,13 +132,13 @@ function answerOf(of: {
     place: behind.place,
     shapes: behind.shapes,
     asides: behind.asides,
-    anchorageOf: (diameter) =>
+    anchorageOf: ({ diameter, bond }) =>
       basis.anchorage({
         diameter,
         strength: stage.strength,
         stress: rule.stress,
         cd: null,
-        isGoodBond: basis.isGoodBond(behind.place.depth),
+        isGoodBond: basis.isGoodBond(bond),
         isBent: false,
       }),
   })

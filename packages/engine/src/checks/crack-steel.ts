@@ -1,9 +1,10 @@
 /** Crack steel where there is no precompression: what the job's choice asks for, and what bars across it give. */
 
-import type { Basis, CrackChoice, CrackRule } from '../bases/basis'
+import type { AnchorageInput, Basis, CrackChoice, CrackRule } from '../bases/basis'
 import type { EdgeFrame } from '../frame'
 import { alongAzimuth, dot } from '../geometry'
 import type { JobSettings, MatLayer, Pour } from '../model'
+import { bondPlace, type Layers } from '../steel/bond'
 import { step, type Clause, type Step } from '../step'
 import type { CheckContext } from './outcome'
 
@@ -193,27 +194,33 @@ function acrossOf({ azimuth, diameter, spacing, spareShare }: MatLayer, frame: E
   return (spareShare * cosine ** 2 * Math.PI * diameter ** 2 * 1000) / (4 * spacing)
 }
 
+interface BarAcross {
+  readonly diameter: number
+  readonly layers: Layers
+}
+
 /** Anchorage past a crack of a straight bar at full stress, in the pour's 28-day concrete, mm. */
-export function anchorageOf(basis: Basis, { pour, thickness }: CrackPlace, diameter: number): number {
-  return basis.anchorage(straightBar(basis, { pour, thickness, diameter })).length
+export function anchorageOf(basis: Basis, place: CrackPlace, bar: BarAcross): number {
+  return basis.anchorage(straightBar(basis, place, bar)).length
 }
 
 /** Lap of such a bar where all bars are lapped at one section, mm. */
-export function lapOf(basis: Basis, { pour, thickness }: CrackPlace, diameter: number): number {
-  return basis.lap(straightBar(basis, { pour, thickness, diameter }), 1)
+export function lapOf(basis: Basis, place: CrackPlace, bar: BarAcross): number {
+  return basis.lap(straightBar(basis, place, bar), 1)
 }
 
-const straightBar = (
-  basis: Basis,
-  { pour, thickness, diameter }: { readonly pour: Pour; readonly thickness: number; readonly diameter: number },
-) => ({
-  diameter,
-  strength: pour.fck,
-  stress: basis.barStress,
-  cd: null,
-  isGoodBond: basis.isGoodBond(thickness),
-  isBent: false,
-})
+/** The cover of a place is that of its worse face; for the height of a bar at the top the pour's own may be less. */
+function straightBar(basis: Basis, { pour, thickness, cover }: CrackPlace, bar: BarAcross): AnchorageInput {
+  const covered = { depth: thickness, coverTop: Math.min(cover, pour.coverTop), coverSoffit: cover }
+  return {
+    diameter: bar.diameter,
+    strength: pour.fck,
+    stress: basis.barStress,
+    cd: null,
+    isGoodBond: basis.isGoodBond(bondPlace(covered, bar)),
+    isBent: false,
+  }
+}
 
 const whole = (value: number): string => String(Math.round(value))
 const lower = (title: string): string => title.charAt(0).toLowerCase() + title.slice(1)

@@ -3,7 +3,7 @@
 import type { AnchorageInput } from '../bases/basis'
 import type { EdgeBarsShape } from '../model'
 import type { Compared, Zone } from '../result'
-import { edgeBarInput, edgeBarPieces } from '../steel/bar-pieces'
+import { edgeBarInput, edgeBarPieces, type BarPiece, type BarPieces } from '../steel/bar-pieces'
 import { lapCheck, lapStep, pastLine, worstOfEach } from './anchorage-length'
 import type { CheckContext } from './outcome'
 
@@ -23,12 +23,9 @@ function setLaps(context: CheckContext, zone: Zone, shapes: readonly EdgeBarsSha
     if (!next || overlap <= 0 || next.to <= shape.to) return []
     const at = (shape.to + next.from) / 2
     const thicker = next.diameter > shape.diameter ? next : shape
-    const input = edgeBarInput(context.index, context.basis, {
-      shape: thicker,
-      edgeId: zone.edgeId ?? '',
-      at,
-      beside: 2,
-    })
+    const layer = shape.countTop > 0 && next.countTop > 0 ? 'top' : 'bottom'
+    const edgeId = zone.edgeId ?? ''
+    const input = edgeBarInput(context.index, context.basis, { shape: thicker, edgeId, at, layer, beside: 2 })
     const past = pastLine(
       {
         meaning: 'Overlap of the two sets of edge bars',
@@ -52,11 +49,25 @@ function isInLine(one: EdgeBarsShape, other: EdgeBarsShape): boolean {
 function pieceLaps(context: CheckContext, zone: Zone, shape: EdgeBarsShape): readonly Compared[] {
   const { index, basis } = context
   const edgeId = zone.edgeId ?? ''
-  const { laps, share, notes } = edgeBarPieces(index, basis, { shape, edgeId })
+  const made = edgeBarPieces(index, basis, { shape, edgeId })
+  return (['top', 'bottom'] as const).flatMap((layer) => lapsOfLayer(context, zone, { shape, layer, made }))
+}
+
+interface Split {
+  readonly shape: EdgeBarsShape
+  readonly layer: BarPiece['layer']
+  readonly made: BarPieces
+}
+
+/** The shortest lap of a layer: bars at the top of a deep section need longer ones than those below. */
+function lapsOfLayer(context: CheckContext, zone: Zone, { shape, layer, made }: Split): readonly Compared[] {
+  const { share, notes } = made
+  const laps = made.laps.filter((lap) => lap.layer === layer)
   const [first] = laps
   if (!first) return []
   const shortest = laps.reduce((so, lap) => (lap.to - lap.from < so.to - so.from ? lap : so), first)
-  const input = edgeBarInput(index, basis, { shape, edgeId, at: (shortest.from + shortest.to) / 2, beside: 2 })
+  const at = (shortest.from + shortest.to) / 2
+  const input = edgeBarInput(context.index, context.basis, { shape, edgeId: zone.edgeId ?? '', at, layer, beside: 2 })
   const past = pastLine(
     {
       meaning: 'Shortest lap of the pieces',
@@ -76,4 +87,4 @@ function pieceLaps(context: CheckContext, zone: Zone, shape: EdgeBarsShape): rea
 }
 
 const bondNote = ({ isGoodBond }: AnchorageInput): readonly string[] =>
-  isGoodBond ? [] : ['Poor bond is taken: in a section this deep not every bar lies in good bond.']
+  isGoodBond ? [] : ['Poor bond is taken: these bars lie high in a deep section.']

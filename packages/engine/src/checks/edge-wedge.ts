@@ -108,7 +108,7 @@ function barsAcross(
     diameter: shape.diameter,
     bars: shape.count * (shape.layers === 'both' ? 2 : 1),
     past: coverEdge + shape.length - wedge.depth,
-    pastNeeded: anchorageOf(basis, place, shape.diameter),
+    pastNeeded: anchorageOf(basis, place, shape),
   }
 }
 

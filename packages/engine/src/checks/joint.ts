@@ -64,7 +64,7 @@ function barsCheck(context: CheckContext, zone: Zone, { strip, length }: Place):
   const sets = shapes.flatMap((shape) => barsOver(context, { shape, strip, length, place }))
   const frame = found(index.frames, strip.first.id, 'edge')
   const steel = steelAcross(sets, length.to - length.from, spareMats(place.pour, frame))
-  const lap = lapStep(lapOf(basis, place, place.diameter ?? demand.diameter))
+  const lap = lapStep(lapOf(basis, place, { diameter: place.diameter ?? demand.diameter, layers: 'both' }))
   const width = widthStep(governing)
   const needed = neededStep(governing, lap)
   const stated =
@@ -168,7 +168,7 @@ function barsOver(
       diameter: shape.diameter,
       bars,
       past: shape.length / 2 - Math.max(first, second),
-      pastNeeded: lapOf(basis, place, shape.diameter),
+      pastNeeded: lapOf(basis, place, shape),
     },
   ]
 }
@@ -282,7 +282,7 @@ function tieOf(
     diameter: shape.diameter,
     bars: countBetween(index, { strip, shape, ...range }),
     past: shape.length / 2 - anchor.setBack,
-    pastNeeded: anchorageOf(basis, place, shape.diameter),
+    pastNeeded: anchorageOf(basis, place, shape),
   }))
   const width = range.to - range.from
   const steel = steelAcross(

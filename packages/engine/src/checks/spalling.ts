@@ -11,6 +11,7 @@ import type { Check, Compared, Refused, Zone } from '../result'
 import { faceForce, ROW, tensionMidway } from '../row-series'
 import { stageForce } from '../force'
 import type { Step } from '../step'
+import { sectionBehind } from '../section'
 import { countSteel, type Counted } from '../steel/count'
 import type { CountPlace } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
@@ -259,13 +260,13 @@ function answerAt({ basis }: CheckContext, input: FaceInput, stage: Stage): Answ
     window: { from: Math.max(-reach, Math.min(0, place.cover - place.setBack)), to: reach },
     place,
     shapes,
-    anchorageOf: (diameter) =>
+    anchorageOf: ({ diameter, bond }) =>
       basis.anchorage({
         diameter,
         strength: stage.strength,
         stress: rule.stress,
         cd: null,
-        isGoodBond: basis.isGoodBond(place.depth),
+        isGoodBond: basis.isGoodBond(bond),
         isBent: false,
       }),
   })
@@ -274,6 +275,7 @@ function answerAt({ basis }: CheckContext, input: FaceInput, stage: Stage): Answ
 
 function placeAt(site: AnchorSite, chainage: number, depth: number): CountPlace {
   const { anchor, frame, hardware, pour } = site
+  const { coverTop, coverSoffit } = sectionBehind(pour, { frame, chainage, depth: anchor.setBack })
   return {
     chainage,
     edgeFrom: frame.from,
@@ -283,6 +285,8 @@ function placeAt(site: AnchorSite, chainage: number, depth: number): CountPlace 
     setBack: anchor.setBack,
     plateWidth: hardware.plate.width,
     depth,
+    coverTop,
+    coverSoffit,
     azimuth: frame.outwardAzimuth,
     mats: pour.mats,
   }

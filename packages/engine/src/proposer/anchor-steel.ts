@@ -7,6 +7,8 @@ import type { Stage, SteelShape } from '../model'
 import type { Compared, Zone } from '../result'
 import { sectionBehind } from '../section'
 import { sectionStepNear } from '../section-step'
+import { bondPlace } from '../steel/bond'
+import { countPlaceOf } from '../steel/count-place'
 import { contextWith, isFixable, perBench, type Bench, type Place } from './bench'
 import type { Candidate } from './candidate'
 import { thicknessSets, type ThicknessNeed, type ThicknessSet } from './thickness-steel'
@@ -163,6 +165,8 @@ function developedAt(bench: Bench, site: AnchorSite, need: Compared): Transverse
   const a = need.plane === 'plan' ? site.hardware.plate.width : site.hardware.plate.height
   const { stress } = basis.tie({ P: site.force.value, a: Math.min(a, b / 2), b })
   const strength = stageOf(site, need)?.strength ?? site.pour.fck
-  const isGoodBond = basis.isGoodBond(site.top - site.soffit)
-  return (diameter) => basis.anchorage({ diameter, strength, stress, cd: null, isGoodBond, isBent: false })
+  const place = countPlaceOf(site)
+  const isGoodBond = (diameter: number) => basis.isGoodBond(bondPlace(place, { layers: 'both', diameter }))
+  return (diameter) =>
+    basis.anchorage({ diameter, strength, stress, cd: null, isGoodBond: isGoodBond(diameter), isBent: false })
 }

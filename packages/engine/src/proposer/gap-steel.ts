@@ -45,7 +45,10 @@ function barsFor({ context, sizes }: Bench, { zone }: Place): StraightBar[] {
   const at = { pour, thickness: top - soffit, cover: Math.max(coverTop, coverSoffit) }
   return sizes.map(({ diameter }) => ({
     diameter,
-    length: upTo(depth + anchorageOf(basis, { ...at, diameter }, diameter) - coverEdge, LENGTH_STEP),
+    length: upTo(
+      depth + anchorageOf(basis, { ...at, diameter }, { diameter, layers: 'both' }) - coverEdge,
+      LENGTH_STEP,
+    ),
   }))
 }
 

@@ -33,7 +33,8 @@ function setsOf(bench: Bench, place: Place): Candidate[] {
   if (deepest === 0) return []
   const room = to - from - 2 * pour.coverEdge
   return bench.sizes.flatMap(({ diameter }) => {
-    const lap = lapOf(basis, { pour, thickness: pour.thickness, cover: pour.coverTop, diameter }, diameter)
+    const at = { pour, thickness: pour.thickness, cover: pour.coverTop, diameter }
+    const lap = lapOf(basis, at, { diameter, layers: 'both' })
     const bars = { diameter, length: upTo(2 * (deepest + lap), LENGTH_STEP), layers: 'both', runs: 'along' } as const
     const across = (pitch: number): PlacedBarsShape => {
       const count = Math.max(1, 1 + Math.floor(room / pitch))

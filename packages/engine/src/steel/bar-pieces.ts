@@ -5,6 +5,7 @@ import { found, type LayoutIndex } from '../layout-index'
 import type { EdgeBarsShape, Pour } from '../model'
 import { edgeBars } from '../placed/along-edge'
 import { sectionBehind, type Section } from '../section'
+import { bondPlace, type Layers } from './bond'
 import { cutRun, lapsOf, type Cut, type Run, type Span } from './cut-run'
 import { handSteelOf } from './steel-of-anchor'
 
@@ -50,18 +51,17 @@ export function edgeBarPieces(index: LayoutIndex, basis: Basis, { shape, edgeId 
   const pour = found(index.pours, found(index.edges, edgeId, 'edge').pourId, 'pour')
   const [from, to] = [Math.min(shape.from, shape.to), Math.max(shape.from, shape.to)]
   const keepClear = anchorBodies(index, edgeId)
-  const partBetween = (start: number, end: number): Part => {
-    const lapOf = (share: number) => edgeBarLap(index, basis, { shape, edgeId, at: (start + end) / 2, share })
-    return partOf({ from: start, to: end, keepClear }, { counts: shape, lapOf, index })
-  }
   const parts = new Map<string, Part>()
-  const runs = edgeBars({ ...shape, from, to }, { pour, frame }).map(({ layer, path }): LaidPart => {
+  const runs = edgeBars({ ...shape, from, to }, { pour, frame }).map(({ layer: face, path }): LaidPart => {
+    const layer = face === 'top' ? 'top' : 'bottom'
     const [start, end] = [path[0]?.chainage ?? from, path.at(-1)?.chainage ?? to]
-    const key = `${start} to ${end}`
-    const part = parts.get(key) ?? partBetween(start, end)
+    const input = edgeBarInput(index, basis, { shape, edgeId, at: (start + end) / 2, layer, beside: 2 })
+    const lapOf = (share: number) => basis.lap(input, share)
+    const key = `${start} to ${end}, ${input.isGoodBond}`
+    const part = parts.get(key) ?? partOf({ from: start, to: end, keepClear }, { counts: shape, lapOf, index })
     parts.set(key, part)
     const bar = shape.pitch > 0 ? Math.round(((path[0]?.depth ?? shape.first) - shape.first) / shape.pitch) : 0
-    return { layer: layer === 'top' ? 'top' : 'bottom', bar, part }
+    return { layer, bar, part }
   })
   const steps = frame.steps.filter((at) => at > from && at < to)
   const stepNote =
@@ -79,12 +79,19 @@ interface LongBars extends Counts {
 /** The pieces of other straight bars that are longer than the stock length; nothing is known of what they must clear. */
 export function straightBarPieces(index: LayoutIndex, basis: Basis, bars: LongBars): BarPieces {
   const { diameter, length, pour } = bars
-  const lapOf = (share: number) =>
-    basis.lap({ ...developed(basis, pour), diameter, cd: null, isGoodBond: basis.isGoodBond(pour.thickness) }, share)
-  const part = partOf({ from: 0, to: length, keepClear: [] }, { counts: bars, lapOf, index })
-  const runs = (['top', 'bottom'] as const).flatMap((layer) =>
-    Array.from({ length: layer === 'top' ? bars.countTop : bars.countBottom }, (_, bar) => ({ layer, bar, part })),
-  )
+  const goodBondIn = (layers: Layers) =>
+    basis.isGoodBond(bondPlace({ ...pour, depth: pour.thickness }, { layers, diameter }))
+  const partIn = (layers: Layers) => {
+    const input = { ...developed(basis, pour), diameter, cd: null, isGoodBond: goodBondIn(layers) }
+    const lapOf = (share: number) => basis.lap(input, share)
+    return partOf({ from: 0, to: length, keepClear: [] }, { counts: bars, lapOf, index })
+  }
+  const top = partIn('top')
+  const parts = { top, bottom: goodBondIn('top') === goodBondIn('bottom') ? top : partIn('bottom') }
+  const runs = (['top', 'bottom'] as const).flatMap((layer) => {
+    const count = layer === 'top' ? bars.countTop : bars.countBottom
+    return Array.from({ length: count }, (_, bar) => ({ layer, bar, part: parts[layer] }))
+  })
   return assembled(bars, runs, index)
 }
 
@@ -96,33 +103,23 @@ export function developed(basis: Basis, pour: Pour): Pick<AnchorageInput, 'stren
 interface EdgeLap extends EdgeBars {
   /** Chainage at which the section is looked at. */
   readonly at: number
-  readonly share: number
+  readonly layer: BarPiece['layer']
+  /** Bars that lie side by side at each place: 2 where they are lapped, 1 elsewhere. */
+  readonly beside: 1 | 2
 }
 
-/** Lap length of edge bars, mm, with the cover and clear gaps that they have there. */
-export function edgeBarLap(index: LayoutIndex, basis: Basis, { shape, edgeId, at, share }: EdgeLap): number {
-  return basis.lap(edgeBarInput(index, basis, { shape, edgeId, at, beside: 2 }), share)
-}
-
-/**
- * What anchorage and laps of edge bars are worked out from.
- *
- * @param of.beside bars that lie side by side at each place: 2 where they are lapped, 1 elsewhere.
- */
-export function edgeBarInput(
-  index: LayoutIndex,
-  basis: Basis,
-  of: Omit<EdgeLap, 'share'> & { readonly beside: 1 | 2 },
-): AnchorageInput {
-  const { shape, edgeId, at, beside } = of
+/** What anchorage and laps of the edge bars of a layer are worked out from. */
+export function edgeBarInput(index: LayoutIndex, basis: Basis, of: EdgeLap): AnchorageInput {
+  const { shape, edgeId, at, layer, beside } = of
   const edge = found(index.edges, edgeId, 'edge')
   const pour = found(index.pours, edge.pourId, 'pour')
   const section = sectionBehind(pour, { frame: found(index.frames, edgeId, 'edge'), chainage: at, depth: shape.first })
+  const covered = { ...section, depth: section.top - section.soffit }
   return {
     ...developed(basis, pour),
     diameter: shape.diameter,
     cd: coverAndGap(shape, section, beside),
-    isGoodBond: basis.isGoodBond(section.top - section.soffit),
+    isGoodBond: basis.isGoodBond(bondPlace(covered, { layers: layer, diameter: shape.diameter })),
   }
 }
 
@@ -202,6 +199,11 @@ function assembled({ countTop, countBottom }: Counts, runs: readonly LaidPart[],
     const pieces = (isTurned ? cut?.mirrored : cut?.pieces) ?? [{ from, to }]
     return { layer, bar, pieces, laps: lapsOf(pieces) }
   })
+  const whose = (part: Part): Whose => {
+    const [layer, other] = new Set(runs.filter((run) => run.part === part).map((run) => run.layer))
+    const isAlone = layer !== undefined && other === undefined && countTop > 0 && countBottom > 0
+    return { layer: isAlone ? layer : null, isOne: countTop + countBottom === 1 }
+  }
   const lapped = [...new Set(runs.map(({ part }) => part))].filter(({ cut }) => (cut?.pieces.length ?? 0) > 1)
   return {
     pieces: laid.flatMap(({ layer, bar, pieces }) => pieces.map((piece) => ({ ...piece, layer, bar }))),
@@ -209,17 +211,27 @@ function assembled({ countTop, countBottom }: Counts, runs: readonly LaidPart[],
     lapNeeded: lapped.length > 0 ? Math.max(...lapped.map(({ lap }) => lap)) : null,
     share: Math.max(0, ...lapped.map(({ share }) => share)),
     clearance: Math.min(Infinity, ...lapped.map(({ cut }) => cut?.clearance ?? Infinity)),
-    notes: [...new Set(lapped.flatMap((part) => notesOf(part, { isOne: countTop + countBottom === 1, index })))],
+    notes: [...new Set(lapped.flatMap((part) => notesOf(part, { whose: whose(part), index })))],
   }
 }
 
-function notesOf({ cut, lap }: Part, { isOne, index }: { isOne: boolean; index: LayoutIndex }): readonly string[] {
+interface Whose {
+  /** The only layer that is cut so; null for both, or where there is one only. */
+  readonly layer: BarPiece['layer'] | null
+  /** Of a single bar. */
+  readonly isOne: boolean
+}
+
+const SPLIT = { top: 'Top bars split', bottom: 'Bottom bars split' } as const
+
+function notesOf({ cut, lap }: Part, { whose, index }: { whose: Whose; index: LayoutIndex }): readonly string[] {
   if (!cut) return []
+  const { layer, isOne } = whose
   const lengths = cut.pieces.map(({ from, to }) => String(Math.round(to - from))).join(' + ')
   const order = cut.isStaggered ? 'every second bar the other way round' : 'not staggered: all laps at one section'
   const over = Math.round(-cut.clearance)
   return [
-    `Split at the stock length of ${index.layout.job.settings.stockLength}: ${lengths}, lapped ${lap}${isOne ? '' : `, ${order}`}.`,
+    `${layer === null ? 'Split' : SPLIT[layer]} at the stock length of ${index.layout.job.settings.stockLength}: ${lengths}, lapped ${lap}${isOne ? '' : `, ${order}`}.`,
     ...(cut.clearance < 0 ? [`No place clear of every anchor: a lap lies over an anchor's steel by ${over}.`] : []),
   ]
 }

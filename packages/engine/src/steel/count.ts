@@ -13,8 +13,8 @@ export interface CountInput {
   readonly shapes: readonly SteelShape[]
   /** From the plane to the anchor that each shape stands behind, in the same order; without it 0. */
   readonly asides?: readonly number[]
-  /** Anchorage that a straight bar of this diameter needs past the line. */
-  readonly anchorageOf: (diameter: number) => Anchorage
+  /** Anchorage that the straight bars of a set need past the line. */
+  readonly anchorageOf: (set: Crossings) => Anchorage
 }
 
 export interface Counted {
@@ -106,7 +106,7 @@ function startsAtFace(positions: readonly number[]): boolean {
 /** A straight bar counts in proportion to its length past the line, and not at all below the least length. */
 function developedShare(set: Crossings, input: CountInput): { share: number; note: string | null } {
   if (set.pastLine === null) return { share: 1, note: null }
-  const { length, least } = input.anchorageOf(set.diameter)
+  const { length, least } = input.anchorageOf(set)
   if (set.pastLine >= length) return { share: 1, note: null }
   const past = `${round(set.pastLine)} past the anchor's line`
   if (set.pastLine < least) {

@@ -1,3 +1,4 @@
+import type { BondPlace } from '../bases/basis'
 import type {
   EdgeBarsShape,
   HairpinShape,
@@ -8,6 +9,7 @@ import type {
   TransverseBarsShape,
 } from '../model'
 import { turnsOf } from '../placed/behind-face'
+import { bondPlaceOf } from './bond'
 
 export type Plane = 'thickness' | 'plan'
 
@@ -24,8 +26,10 @@ export interface CountPlace {
   /** From the slab edge to the bearing face. */
   readonly setBack: number
   readonly plateWidth: number
-  /** Section depth at the anchor. */
+  /** Section depth at the anchor, and the covers of its faces. */
   readonly depth: number
+  readonly coverTop: number
+  readonly coverSoffit: number
   /** Outward azimuth of the edge, rad. */
   readonly azimuth: number
   readonly mats: readonly MatLayer[]
@@ -44,6 +48,8 @@ export interface Crossings {
   readonly legs: number
   /** Length of straight bar past the anchor's line on the shorter side; null where the bar is bent round and anchored. */
   readonly pastLine: number | null
+  /** Where they lie for their bond; of bent ones no height is known. */
+  readonly bond: BondPlace
   readonly notes: readonly string[]
 }
 
@@ -58,9 +64,9 @@ export function crossingsOf(shape: SteelShape, plane: Plane, place: CountPlace):
   if (missed !== null) return { reason: missed }
   switch (shape.kind) {
     case 'spiral':
-      return spiralCrossings(shape)
+      return spiralCrossings(shape, place)
     case 'links':
-      return linkCrossings(shape)
+      return linkCrossings(shape, place)
     case 'hairpins':
       return hairpinCrossings(shape, plane, place)
     case 'edge-bars':
@@ -100,7 +106,7 @@ const series = (count: number, at: (k: number) => number): readonly number[] =>
   Array.from({ length: Math.max(0, Math.floor(count)) }, (_, k) => at(k))
 
 /** A turn crosses each plane twice, taken at its middle; flat end turns close the spiral and do not count. */
-function spiralCrossings(shape: SpiralShape): Crossings {
+function spiralCrossings(shape: SpiralShape, place: CountPlace): Crossings {
   const { flatTurns } = shape
   const flat = flatTurns === 1 ? '1 flat end turn does not count.' : `${flatTurns} flat end turns do not count.`
   return {
@@ -109,18 +115,20 @@ function spiralCrossings(shape: SpiralShape): Crossings {
     positions: turnsOf(shape).flatMap(({ behind, isFlat }) => (isFlat ? [] : [behind])),
     legs: 2,
     pastLine: null,
+    bond: bondPlaceOf(place, shape),
     notes: flatTurns > 0 ? [flat] : [],
   }
 }
 
 /** A closed link crosses with two legs in each plane. */
-function linkCrossings(shape: LinksShape): Crossings {
+function linkCrossings(shape: LinksShape, place: CountPlace): Crossings {
   return {
     noun: ['link', 'links'],
     diameter: shape.diameter,
     positions: series(shape.count, (k) => shape.first + k * shape.pitch),
     legs: 2,
     pastLine: null,
+    bond: bondPlaceOf(place, shape),
     notes: [],
   }
 }
@@ -147,6 +155,7 @@ function hairpinCrossings(shape: HairpinShape, plane: Plane, place: CountPlace):
     positions: series(inReach, () => shape.first + shape.diameter / 2),
     legs: 1,
     pastLine: null,
+    bond: bondPlaceOf(place, shape),
     notes:
       lost > 0
         ? [`${lost} of ${shape.count} hairpins not counted: more than ${Math.round(reach)} beside the anchor.`]
@@ -155,7 +164,8 @@ function hairpinCrossings(shape: HairpinShape, plane: Plane, place: CountPlace):
 }
 
 /** Edge bars lie from the slab edge; the window counts from the bearing face. */
-function edgeBarCrossings(shape: EdgeBarsShape, { chainage, setBack, breaks }: CountPlace): Crossings | NoCrossing {
+function edgeBarCrossings(shape: EdgeBarsShape, place: CountPlace): Crossings | NoCrossing {
+  const { chainage, setBack, breaks } = place
   const from = Math.max(shape.from, ...breaks.filter((at) => at <= chainage))
   const to = Math.min(shape.to, ...breaks.filter((at) => at > chainage))
   if (chainage <= from || chainage >= to) return { reason: null }
@@ -166,6 +176,7 @@ function edgeBarCrossings(shape: EdgeBarsShape, { chainage, setBack, breaks }: C
     positions: [...series(shape.countTop, at), ...series(shape.countBottom, at)],
     legs: 1,
     pastLine: Math.min(chainage - from, to - chainage),
+    bond: bondPlaceOf(place, shape),
     notes: [],
   }
 }
@@ -181,6 +192,7 @@ function transverseCrossings(shape: TransverseBarsShape, place: CountPlace): Cro
     ),
     legs: 1,
     pastLine: Math.max(0, Math.min(shape.length / 2 - (place.aside ?? 0), toEnd)),
+    bond: bondPlaceOf(place, shape),
     notes: [],
   }
 }

@@ -15,6 +15,9 @@ const COUNTING: Clause = {
 
 export type Face = 'top' | 'bottom'
 
+/** Anchorage that a bar of this diameter needs at this face. */
+export type AnchorageOf = (diameter: number, face: Face) => Anchorage
+
 export interface CountedBars {
   /** mm2 */
   readonly area: number
@@ -48,13 +51,13 @@ export const besideRecess = ({ pan, coverTop }: PanPlace, diameter: number): num
 export function countTieBack(
   place: PanPlace,
   shapes: readonly PlacedBarsShape[],
-  anchorageOf: (diameter: number) => Anchorage,
+  anchorageOf: AnchorageOf,
 ): CountedBars {
   const outward = slabBeyond(place) - place.pour.coverEdge
   const rows = ofKind(shapes, 'tie-back-bars', 'along').flatMap((shape) =>
     facesOf(shape).map((face) => {
       const past = Math.min(shape.length / 2, outward)
-      return rowOf(place, { shape, face, past, anchorage: anchorageOf(shape.diameter), reach: null })
+      return rowOf(place, { shape, face, past, anchorage: anchorageOf(shape.diameter, face), reach: null })
     }),
   )
   return total(rows, [...strayNotes(shapes, 'tie-back-bars'), ...oneFaceNotes(rows)])
@@ -64,7 +67,7 @@ export function countTieBack(
 export function countStripBars(
   place: PanPlace,
   shapes: readonly PlacedBarsShape[],
-  of: { readonly strip: PanStrip; readonly face: Face; readonly anchorageOf: (diameter: number) => Anchorage },
+  of: { readonly strip: PanStrip; readonly face: Face; readonly anchorageOf: AnchorageOf },
 ): CountedBars {
   const { strip, face, anchorageOf } = of
   const toEdge = strip.length - place.pour.coverEdge
@@ -73,7 +76,13 @@ export function countStripBars(
     .map((shape): Row => {
       const half = shape.length / 2
       const reach = { left: strip.left, right: strip.right }
-      const row = rowOf(place, { shape, face, past: half - strip.wedge, anchorage: anchorageOf(shape.diameter), reach })
+      const row = rowOf(place, {
+        shape,
+        face,
+        past: half - strip.wedge,
+        anchorage: anchorageOf(shape.diameter, face),
+        reach,
+      })
       if (half >= toEdge) return row
       const short = `Bars of ${shape.diameter} do not count across the strip: they end ${Math.ceil(toEdge - half)} before the edge.`
       return { ...row, bars: 0, notes: [short] }
@@ -88,7 +97,7 @@ export function countTrimmers(
   of: {
     readonly runs: PlacedBarsShape['runs']
     readonly face: Face
-    readonly anchorageOf: (diameter: number) => Anchorage
+    readonly anchorageOf: AnchorageOf
   },
 ): CountedBars {
   const { runs, face, anchorageOf } = of
@@ -97,7 +106,7 @@ export function countTrimmers(
     .filter((shape) => facesOf(shape).includes(face))
     .map((shape): Row => {
       const past = (shape.length - recess) / 2
-      const { share, notes } = developed(shape, past, anchorageOf(shape.diameter))
+      const { share, notes } = developed(shape, past, anchorageOf(shape.diameter, face))
       const odd = `Of ${shape.count} trimmers of ${shape.diameter} one is not counted: half stand on each side.`
       const bars = 2 * Math.floor(shape.count / 2)
       return { shape, face, bars, share, notes: bars === shape.count ? notes : [...notes, odd] }
