@@ -33,7 +33,7 @@ describe('schedule', { timeout: 60_000 }, () => {
     expect(stdout).toBe(`${out}\n`)
     const book = new ExcelJS.Workbook()
     await book.xlsx.readFile(out)
-    const kinds = ['Schedule', 'Summary', 'Checks', 'Notes']
+    const kinds = ['Schedule', 'Summary', 'Shapes', 'Zones', 'Checks', 'Notes', 'Revisions']
     expect(book.worksheets.map(({ name }) => name)).toEqual(
       ['P1', 'P2', 'P3'].flatMap((mark) => kinds.map((kind) => `${kind} ${mark}`)),
     )
@@ -53,7 +53,9 @@ describe('schedule', { timeout: 60_000 }, () => {
   })
 
   const broken = temporaryFile(JSON.stringify(demoWith('steel.0.shape.diameterMm', 11)))
-  const tooLong = temporaryFile(JSON.stringify(demoWith('steel.0.shape.toMm', 17_000)))
+  // Between two bends of 12 mm the standard asks for 120.
+  const tight = { kind: 'hairpins', diameterMm: 12, legMm: 600, bendMm: 40, count: 2, pitchMm: 100 }
+  const unbendable = temporaryFile(JSON.stringify(demoWith('steel.25.shape', tight)))
   const strange = temporaryFile(JSON.stringify(demoWith('job.timeZone', 'Nowhere')))
   test.each([
     { what: 'no workbook named', args: [demoFile], message: '--out: is missing' },
@@ -65,8 +67,8 @@ describe('schedule', { timeout: 60_000 }, () => {
       message: 'steel[0].shape.diameterMm: must be a bar size',
     },
     {
-      what: 'a bar that no yard stocks',
-      args: [tooLong, '--out', 'x.xlsx'],
+      what: 'a bar that no yard bends',
+      args: [unbendable, '--out', 'x.xlsx'],
       message: 'steel of pour P1: The schedule has errors',
     },
     { what: 'no time zone', args: [strange, '--out', 'x.xlsx'], message: 'job.timeZone: "Nowhere" is no time zone' },
