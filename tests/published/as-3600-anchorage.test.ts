@@ -135,6 +135,13 @@ describe('AS 3600 13.1 and 13.2 (secondary): development and laps', () => {
     expect(basis.isGoodBond({ depth: 320, fromSoffit: 280 })).toBe(true)
   })
 
+  test('clear gap: the bar, 1.5 x aggregate, 25 (from memory, not sure)', () => {
+    const gap = (diameter: number, aggregate: number) => basis.clearGap({ diameter, aggregate }).value
+    // 1.5 x 20 = 30; 1.5 x 16 = 24, 25 governs; 1.5 x 17 = 25.5
+    expect([gap(12, 20), gap(30, 20), gap(31, 20), gap(12, 16), gap(12, 17)]).toEqual([30, 30, 31, 25, 25.5])
+    expect(basis.clearGap({ diameter: 12, aggregate: 20 }).clause.tag).toBe('memory-unsure')
+  })
+
   test('where the height is not known it is taken at the top', () => {
     expect(basis.isGoodBond({ depth: 300, fromSoffit: null })).toBe(true)
     expect(basis.isGoodBond({ depth: 301, fromSoffit: null })).toBe(false)

@@ -98,3 +98,16 @@ describe('EN 1992-1-1 8.4.2(2), Fig. 8.2 (from memory): where level bars lie in 
     expect(isGood(1000)(null)).toBe(false)
   })
 })
+
+describe('EN 1992-1-1 8.2 and 8.7.3 (from memory): room between bars and laps', () => {
+  test('clear gap: the bar, aggregate + 5, 20', () => {
+    const gap = (diameter: number, aggregate: number) => basis.clearGap({ diameter, aggregate }).value
+    expect([gap(12, 20), gap(25, 20), gap(26, 20), gap(12, 15), gap(12, 14), gap(12, 16)]).toEqual([
+      25, 25, 26, 20, 20, 21,
+    ])
+  })
+
+  test('laps count in one section within 0.65 of a lap length on both sides of it', () => {
+    expect(basis.lapStagger).toBe(2 * 0.65)
+  })
+})

@@ -23,6 +23,7 @@ const run = (change: Partial<Run> = {}): Run => ({
   stockLength: 12_000,
   keepClear: [],
   isStaggered: true,
+  stagger: 1.3,
   ...change,
 })
 const lengths = (pieces: readonly Span[] = []) => pieces.map(({ from, to }) => to - from)
@@ -47,6 +48,12 @@ describe('cutting one long bar', () => {
     expect(lengths(cut?.mirrored)).toEqual([7600, 12_000])
     expect(laps(cut?.mirrored ?? [])).toEqual([{ from: 7000, to: 7600 }])
     expect(cut?.isStaggered).toBe(true)
+  })
+
+  test('laps stand in different sections from the stagger on, and not 1 mm below', () => {
+    // As above: middles 11700 and 7300 are 4400 apart, 7.3333 x 600. With two pieces no lap can lie farther out.
+    expect(cutRun(run({ stagger: 4400 / 600 }))?.pieces).toHaveLength(2)
+    expect(cutRun(run({ stagger: 4401 / 600 }))?.pieces).toHaveLength(3)
   })
 
   test('two pieces reach 2 x 12000 - 600 = 23400 and no further', () => {

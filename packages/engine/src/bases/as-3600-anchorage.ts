@@ -1,5 +1,5 @@
 import { step, type Clause } from '../step'
-import type { Anchorage, AnchorageInput, BondPlace, Transmission, TransmissionInput } from './basis'
+import type { Anchorage, AnchorageInput, BondPlace, GapInput, Transmission, TransmissionInput } from './basis'
 
 /** AS 3600:2018, 13.1 and 13.2 as read in a secondary source. */
 const DEVELOPMENT: Clause = { source: 'AS 3600:2018', section: '13.1.2.2 to 13.1.2.6', tag: 'secondary' }
@@ -12,6 +12,22 @@ export const linkHook = (diameter: number): { readonly length: number; readonly 
   length: Math.max(4 * diameter, 70),
   clause: LINK_HOOK,
 })
+
+/** The code asks that concrete can be placed and compacted and names no figure; the figures are usual ones. */
+const CLEAR_GAP: Clause = {
+  source: 'Clear gap between bars',
+  section: 'largest of the bar, 1.5 times the aggregate, 25 and the job setting (usual with AS 3600:2018 17.1.3)',
+  tag: 'memory-unsure',
+}
+
+/** Clear gap between bars side by side: the bar, 1.5 times the aggregate, 25 mm (from memory, not sure). */
+export const clearGap = ({ diameter, aggregate }: GapInput): { readonly value: number; readonly clause: Clause } => ({
+  value: Math.max(diameter, 1.5 * aggregate, 25),
+  clause: CLEAR_GAP,
+})
+
+/** Laps with 0.3 of a lap length between their ends stand in different sections (13.2.2; from memory, not sure). */
+export const LAP_STAGGER = 1.3
 
 /** 13.3, from memory. */
 const TRANSMISSION: Clause = { source: 'AS 3600:2018', section: '13.3.2', tag: 'memory' }

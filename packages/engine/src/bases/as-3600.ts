@@ -1,6 +1,6 @@
 import type { StrandType } from '../model'
 import { step, type Clause, type Step } from '../step'
-import { anchorage, isGoodBond, lap, linkHook, transmission } from './as-3600-anchorage'
+import { anchorage, clearGap, isGoodBond, LAP_STAGGER, lap, linkHook, transmission } from './as-3600-anchorage'
 import { AS_CRACK_CHOICES } from './as-3600-crack'
 import {
   AS_DEAD_END,
@@ -144,6 +144,8 @@ function make(input: BasisInput): Basis {
     barStress: input.fyk,
     linkHook,
     lap: (one, share) => lap(one, share, input.fyk),
+    lapStagger: LAP_STAGGER,
+    clearGap,
     spread: { value: Math.PI / 4, clause: SPREAD },
     inclinationMax: { value: (20 * Math.PI) / 180, clause: INCLINATION },
     clauses: { jacking: JACKING, tie: ZONE, window: STEEL, bearing: BEARING, lap: clause('13.2.2', 'secondary') },

@@ -193,6 +193,14 @@ export interface AnchorageInput {
   readonly isBent: boolean
 }
 
+/** Bars side by side, mm. */
+export interface GapInput {
+  /** Of the thicker bar. */
+  readonly diameter: number
+  /** Largest size of the aggregate. */
+  readonly aggregate: number
+}
+
 /** Where a level bar lies in its section, mm. */
 export interface BondPlace {
   readonly depth: number
@@ -245,6 +253,10 @@ export interface Basis {
   readonly isGoodBond: (place: BondPlace) => boolean
   /** Lap length, mm; `share` is the part of the bars lapped at one section, above 0 to 1. */
   readonly lap: (input: AnchorageInput, share: number) => number
+  /** Between two laps that count as in different sections: from middle to middle, in lap lengths. */
+  readonly lapStagger: number
+  /** Least clear gap between two bars side by side, mm, whatever the job asks for beyond it. */
+  readonly clearGap: (input: GapInput) => { readonly value: number; readonly clause: Clause }
   /** Stress that a bar anchored or lapped in full develops, MPa. */
   readonly barStress: number
   /** Straight length that the hook of a closed link needs past its bend, mm. */

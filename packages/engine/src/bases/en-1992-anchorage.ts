@@ -1,5 +1,5 @@
 import type { Clause } from '../step'
-import type { Anchorage, AnchorageInput, BondPlace } from './basis'
+import type { Anchorage, AnchorageInput, BondPlace, GapInput } from './basis'
 
 /** EN 1992-1-1:2004, 8.4 and 8.7: how far a bar must run on before it carries its stress. */
 const ANCHORAGE: Clause = { source: 'EN 1992-1-1:2004', section: '8.4.2 to 8.4.4', tag: 'digest' }
@@ -14,6 +14,25 @@ export const linkHook = (diameter: number): { readonly length: number; readonly 
   length: Math.max(10 * diameter, 70),
   clause: LINK_HOOK,
 })
+
+/** The job's own setting is added by who asks. */
+const CLEAR_GAP: Clause = {
+  source: 'Clear gap between bars',
+  section: 'largest of the bar, aggregate + 5, 20 and the job setting (EN 1992-1-1 8.2)',
+  tag: 'memory',
+}
+
+/** Clear gap between bars side by side: the bar, the aggregate and 5, 20 mm (8.2; from memory). */
+export const clearGap = ({ diameter, aggregate }: GapInput): { readonly value: number; readonly clause: Clause } => ({
+  value: Math.max(diameter, aggregate + 5, 20),
+  clause: CLEAR_GAP,
+})
+
+/**
+ * Laps whose middles lie within 0.65 of a lap length of a section count as lapped there (8.7.3, from memory), so two
+ * laps stand in different sections from twice that on.
+ */
+export const LAP_STAGGER = 1.3
 
 interface BondFactors {
   readonly gammaC: number

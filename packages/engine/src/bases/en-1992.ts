@@ -11,7 +11,7 @@ import type {
   TieInput,
   TieRule,
 } from './basis'
-import { LAP, linkHook, anchorage, isGoodBond, lap } from './en-1992-anchorage'
+import { LAP, LAP_STAGGER, linkHook, anchorage, clearGap, isGoodBond, lap } from './en-1992-anchorage'
 import { crackChoices } from './en-1992-crack'
 import { faceSteel } from './en-1992-face'
 import {
@@ -204,6 +204,8 @@ function make(input: BasisInput): Basis {
     anchorage: (one) => anchorage(one, values),
     isGoodBond,
     lap: (one, share) => lap(one, share, values),
+    lapStagger: LAP_STAGGER,
+    clearGap,
     barStress: input.fyk / values.gammaS,
     linkHook,
     spread: { value: Math.atan(2 / 3), clause: SPREAD },

@@ -1,5 +1,6 @@
 /** Whether the steel of a zone can be fixed: its cover, its gaps, and what stands in its way. */
 
+import { basisOfIndex } from '../bases/of-index'
 import { ROUNDING } from '../geometry'
 import { coversOf, type Cover } from '../fit/cover'
 import { barsOfZone, memberKeyOf, memberOf, type Member } from '../fit/members'
@@ -12,11 +13,6 @@ import { bendChecks, depthCheck, firstTurnCheck, type SetOfBars } from './fit-sh
 import { comparison, type CheckContext } from './outcome'
 
 const COVER: Clause = { source: 'Nominal cover of the pour or region', section: 'as entered', tag: 'practice' }
-const GAP: Clause = {
-  source: 'Clear gap between bars',
-  section: 'largest of the bar, aggregate + 5, 20 and the job setting (EN 1992-1-1 8.2)',
-  tag: 'memory',
-}
 const ROOM: Clause = { source: 'Geometry', section: 'two bodies in one place', tag: 'derived' }
 
 /** Bars that stand in one another by no more than this touch: tolerance of bending and of ribs, mm (common practice). */
@@ -59,7 +55,7 @@ interface Found {
 function checksFrom(index: LayoutIndex, zone: Zone, { fit, sets, mend }: Found): Check[] {
   return [
     ...(fit?.cover ? [coverCheck(zone, fit.cover, mend)] : []),
-    ...(fit?.gap ? [gapCheck(zone, fit.gap)] : []),
+    ...(fit?.gap ? [gapCheck(index, zone, fit.gap)] : []),
     ...(fit?.clash ? [clashCheck(zone, fit.clash)] : []),
     ...sets.flatMap((set) => [
       ...firstTurnCheck(zone, set),
@@ -198,13 +194,14 @@ function roomAt(index: LayoutIndex, anchorId: string, by: number): boolean {
     .every((cover) => cover.face !== face || cover.measured - Math.abs(by) >= cover.need - ROUNDING)
 }
 
-function gapCheck(zone: Zone, { worst, spare, short }: Worst<Pair>): Compared {
+function gapCheck(index: LayoutIndex, zone: Zone, { worst, spare, short }: Worst<Pair>): Compared {
   const { bar, other, clear, need } = worst
   const limit = need ?? 0
+  const { aggregate } = found(index.pours, bar.pourId, 'pour')
   const what = nameOf(worst)
   return compared(zone, {
     name: `Clear gap, ${what}`,
-    clause: GAP,
+    clause: basisOfIndex(index).clearGap({ diameter: bar.bar.diameter, aggregate }).clause,
     limitKind: 'C',
     notes: [
       sentence(`clear gap, ${what}`, clear, limit),

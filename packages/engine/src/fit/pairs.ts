@@ -1,5 +1,6 @@
 /** Which bodies may touch, and how near bars may come to one another. */
 
+import { basisOfIndex } from '../bases/of-index'
 import { ROUNDING } from '../geometry'
 import { found, type LayoutIndex } from '../layout-index'
 import { perIndex } from '../memo'
@@ -17,10 +18,6 @@ export interface Pair {
   /** Clear gap that is asked for between the two, mm; null where they may touch, as tied bars do. */
   readonly need: number | null
 }
-
-/** Least clear gap whatever bar and aggregate, and what is added to the aggregate, mm (EN 1992-1-1 8.2, from memory). */
-const GAP_LEAST = 20
-const OVER_AGGREGATE = 5
 
 /** Bars up to this much out of parallel run side by side. */
 const PARALLEL_SINE = Math.sin(Math.PI / 18)
@@ -215,11 +212,12 @@ function isSideBySide(one: Piece, other: Piece, { clear, isOneZone }: { clear: n
   return clear > TOUCHING || !isLap
 }
 
-/** The largest of the bar, the aggregate and 5, 20, and the job's own, mm. */
-export function gapOf({ layout, pours }: LayoutIndex, one: FitBar, other: FitBar): number {
-  const { aggregate } = found(pours, one.pourId, 'pour')
-  const { clearGapMin } = layout.job.settings
-  return Math.max(one.bar.diameter, other.bar.diameter, aggregate + OVER_AGGREGATE, GAP_LEAST, clearGapMin)
+/** That of the basis, and the job's own where it is more, mm. */
+export function gapOf(index: LayoutIndex, one: FitBar, other: FitBar): number {
+  const { aggregate } = found(index.pours, one.pourId, 'pour')
+  const diameter = Math.max(one.bar.diameter, other.bar.diameter)
+  const { value } = basisOfIndex(index).clearGap({ diameter, aggregate })
+  return Math.max(value, index.layout.job.settings.clearGapMin)
 }
 
 // Bars of one set ---------------------------------------------------------------------------------------------------

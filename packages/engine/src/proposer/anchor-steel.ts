@@ -156,8 +156,9 @@ function thicknessNeed(bench: Bench, site: AnchorSite, need: Compared): Thicknes
   }
 }
 
-/** Aggregate must pass: its size and 5 mm, not less than the job's own gap (EN 1992-1-1 8.2, from memory). */
-const clearGapOf = (bench: Bench, { pour }: AnchorSite): number => Math.max(bench.clearGap, pour.aggregate + 5)
+/** Aggregate must pass: the basis's gap for the thinnest bar, not less than the job's own. */
+const clearGapOf = ({ context: { basis }, clearGap }: Bench, { pour }: AnchorSite): number =>
+  Math.max(clearGap, basis.clearGap({ diameter: 0, aggregate: pour.aggregate }).value)
 
 function developedAt(bench: Bench, site: AnchorSite, need: Compared): TransverseNeed['developed'] {
   const { basis } = bench.context

@@ -58,7 +58,7 @@ export function edgeBarPieces(index: LayoutIndex, basis: Basis, { shape, edgeId 
     const input = edgeBarInput(index, basis, { shape, edgeId, at: (start + end) / 2, layer, beside: 2 })
     const lapOf = (share: number) => basis.lap(input, share)
     const key = `${start} to ${end}, ${input.isGoodBond}`
-    const part = parts.get(key) ?? partOf({ from: start, to: end, keepClear }, { counts: shape, lapOf, index })
+    const part = parts.get(key) ?? partOf({ from: start, to: end, keepClear }, { counts: shape, lapOf, index, basis })
     parts.set(key, part)
     const bar = shape.pitch > 0 ? Math.round(((path[0]?.depth ?? shape.first) - shape.first) / shape.pitch) : 0
     return { layer, bar, part }
@@ -84,7 +84,7 @@ export function straightBarPieces(index: LayoutIndex, basis: Basis, bars: LongBa
   const partIn = (layers: Layers) => {
     const input = { ...developed(basis, pour), diameter, cd: null, isGoodBond: goodBondIn(layers) }
     const lapOf = (share: number) => basis.lap(input, share)
-    return partOf({ from: 0, to: length, keepClear: [] }, { counts: bars, lapOf, index })
+    return partOf({ from: 0, to: length, keepClear: [] }, { counts: bars, lapOf, index, basis })
   }
   const top = partIn('top')
   const parts = { top, bottom: goodBondIn('top') === goodBondIn('bottom') ? top : partIn('bottom') }
@@ -165,10 +165,11 @@ interface PartInput {
   readonly counts: Counts
   readonly lapOf: (share: number) => number
   readonly index: LayoutIndex
+  readonly basis: Basis
 }
 
 /** Cut with the laps of staggered bars; where they cannot be staggered, again with all of them lapped at one section. */
-function partOf(span: Pick<Run, 'from' | 'to' | 'keepClear'>, { counts, lapOf, index }: PartInput): Part {
+function partOf(span: Pick<Run, 'from' | 'to' | 'keepClear'>, { counts, lapOf, index, basis }: PartInput): Part {
   const { stockLength } = index.layout.job.settings
   const several = counts.countTop + counts.countBottom > 1
   const cutWith = (share: number): Part => {
@@ -178,7 +179,7 @@ function partOf(span: Pick<Run, 'from' | 'to' | 'keepClear'>, { counts, lapOf, i
       to: span.to,
       lap,
       share,
-      cut: cutRun({ ...span, lap, stockLength, isStaggered: several }),
+      cut: cutRun({ ...span, lap, stockLength, isStaggered: several, stagger: basis.lapStagger }),
     }
   }
   const first = cutWith(staggeredShare(counts))

@@ -14,6 +14,8 @@ export interface Run extends Span {
   readonly keepClear: readonly Span[]
   /** Whether a second bar beside this one must have its laps elsewhere. */
   readonly isStaggered: boolean
+  /** From middle to middle of two laps that stand in different sections, in lap lengths: the basis's. */
+  readonly stagger: number
 }
 
 export interface Cut {
@@ -32,12 +34,6 @@ const COARSE = 100
 const MIDDLE_STEP = 250
 /** A sum of decimals may end a hair above a whole step. */
 const HAIR = 1e-6
-
-/**
- * Laps whose middles lie within 0.65 of a lap length of a section count as lapped there (EN 1992-1-1, 8.7.3, from
- * memory), so two laps stand in different sections from twice that on.
- */
-const STAGGER = 1.3
 
 /**
  * Where to cut a bar: clear of the places named first, then staggered, then in few different lengths.
@@ -118,7 +114,7 @@ function ranked(run: Run, pieces: readonly Span[]): Ranked {
   const mirror = ({ from, to }: Span): Span => ({ from: run.from + run.to - to, to: run.from + run.to - from })
   const laps = lapsOf(pieces)
   const other = laps.map(mirror)
-  const isStaggered = laps.every((lap) => other.every((its) => apart(lap, its) >= STAGGER * run.lap - HAIR))
+  const isStaggered = laps.every((lap) => other.every((its) => apart(lap, its) >= run.stagger * run.lap - HAIR))
   const counted = run.isStaggered ? [...laps, ...other] : laps
   const clearance = counted.reduce(
     (least, lap) => run.keepClear.reduce((so, body) => Math.min(so, between(lap, body)), least),
