@@ -67,6 +67,13 @@ const zoneOf = (result: PourResult, id: string) => {
 const comparedIn = (result: PourResult): Compared[] =>
   result.zones.flatMap(({ checks }) => checks.filter((check) => check.kind === 'compared'))
 
+/** Worst first; a check that waits for something to be entered comes after those that need judgement. */
+function rankOf(check: Check): number {
+  if (check.kind === 'advice') return STATUSES.length
+  const waits = check.kind === 'refused' && check.code === 'MISSING_INPUT'
+  return waits ? STATUSES.indexOf('needs-judgement') + 0.5 : STATUSES.indexOf(check.status)
+}
+
 describe('Every step of every check', () => {
   const lines = comparedIn(run(everyKind())).flatMap(({ steps }) => steps)
 
@@ -215,10 +222,29 @@ test('a tendon jacked too high is mended by the ratio that would just do', () =>
 describe('Order and counts', () => {
   test('checks of a zone stand worst first and the zone has the worst status', () => {
     for (const { checks, status } of run(everyKind()).zones) {
-      const ranks = checks.map((check) => (check.kind === 'advice' ? STATUSES.length : STATUSES.indexOf(check.status)))
+      const ranks = checks.map(rankOf)
       expect(ranks).toEqual([...ranks].sort((a, b) => a - b))
       expect(status).toBe(worstOf(checks))
     }
+  })
+
+  test('what only waits to be entered comes after what is wrong, and before what is near', () => {
+    const waits: Check = {
+      ...like({}),
+      kind: 'refused',
+      status: 'not-covered',
+      code: 'MISSING_INPUT',
+      field: 'tendon.drape',
+      message: 'The drape is not entered.',
+    }
+    const outside: Check = { ...waits, code: 'OUTSIDE_METHOD' }
+    const judged = like({ status: 'needs-judgement', statusOnceAccepted: 'within' })
+    const near = like({ status: 'near', statusOnceAccepted: 'near' })
+    const checks = [near, waits, judged, like({}), outside]
+    expect([...checks].sort(bySeverity)).toEqual([outside, like({}), judged, waits, near])
+    expect(worstOf(checks)).toBe('not-covered')
+    expect(worstOf([near, waits, like({})])).toBe('over')
+    expect(worstOf([near, waits])).toBe('not-covered')
   })
 
   test('counts are the checks by status, advice left out', () => {

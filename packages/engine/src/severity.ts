@@ -2,18 +2,21 @@
 
 import { STATUSES, type Check, type Compared, type Status } from './result'
 
-/** The worst status of some checks; null where there is nothing but advice. */
+/** The worst status of some checks, in the order of `bySeverity`; null where there is nothing but advice. */
 export function worstOf(checks: readonly Check[]): Status | null {
-  const held = new Set(checks.map(statusOf))
-  return STATUSES.find((status) => held.has(status)) ?? null
+  let worst: Check | null = null
+  for (const check of checks) if (worst === null || rankOfCheck(check) < rankOfCheck(worst)) worst = check
+  return worst && statusOf(worst)
 }
 
 /**
  * Order of two checks: by status, those that need judgement by what they become once accepted; then ratios by ratio,
- * with no steel at all first, then distances by what is short or least to spare. Advice comes last.
+ * with no steel at all first, then distances by what is short or least to spare. Advice comes last. A check that only
+ * waits for something to be entered comes after what is wrong with what is there: a new anchor's missing drape does not
+ * hide its missing steel.
  */
 export function bySeverity(one: Check, other: Check): number {
-  const byStatus = rankOf(statusOf(one)) - rankOf(statusOf(other))
+  const byStatus = rankOfCheck(one) - rankOfCheck(other)
   if (byStatus !== 0 || one.kind !== 'compared' || other.kind !== 'compared') return byStatus
   return (
     rankOf(one.statusOnceAccepted) - rankOf(other.statusOnceAccepted) ||
@@ -37,6 +40,11 @@ export function countStatuses(checks: readonly Check[]): Readonly<Record<Status,
 }
 
 const statusOf = (check: Check): Status | null => (check.kind === 'advice' ? null : check.status)
+
+const AFTER_JUDGEMENT = STATUSES.indexOf('needs-judgement') + 0.5
+
+const rankOfCheck = (check: Check): number =>
+  check.kind === 'refused' && check.code === 'MISSING_INPUT' ? AFTER_JUDGEMENT : rankOf(statusOf(check))
 
 const rankOf = (status: Status | null): number => (status === null ? STATUSES.length : STATUSES.indexOf(status))
 
