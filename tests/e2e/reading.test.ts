@@ -19,7 +19,10 @@ afterAll(async () => {
   await product?.stop()
 })
 
-const proposed = BASIS_SOURCES.flatMap(({ readings }) => readings).filter((reading) => reading.proposed)
+/** Those of the demo's basis that stand alone; crack steel is a question with several answers. */
+const proposed = BASIS_SOURCES.filter(({ id }) => id === 'en-1992')
+  .flatMap(({ readings }) => readings)
+  .filter((reading) => reading.proposed && reading.choice === undefined)
 
 async function accept(page: Page, title: string): Promise<void> {
   await page.getByRole('button', { name: 'Accept …' }).first().click()
