@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest'
 import { checkPour, type Compared, type Steel, type SteelShape, type SteelZone } from '@wedgeline/engine'
-import { anchor, inPan, layout, pan, S4, type Parts } from './sample-layout'
+import { anchor, edge, EDGES, inPan, layout, length, pan, S4, SOUTH, type Parts } from './sample-layout'
 import { evaluated } from './step-text'
 
 /**
@@ -139,6 +139,22 @@ describe('laps of edge bars', () => {
     expect(lap(613)).toMatchObject({ status: 'over' })
     expect(lap(613).limit).toBeCloseTo(613.1, 1)
     expect(lap(613).clause.tag).toBe('memory')
+  })
+
+  // 520 deep: top bars above the lower 250, poor bond: 613.1 / 0.7 = 875.8 (Fig. 8.2, from memory)
+  test('in a deep edge bars at the top need the lap of poor bond, bars at the bottom alone do not', () => {
+    const deep = edge(SOUTH, 'a', [length(0, 19_200, { soffit: -300 })])
+    const lap = (overlap: number, countTop: number) => {
+      const sets = [edgeBars(50, 9000), edgeBars(9000 - overlap, 17_000)].map((shape) => ({ ...shape, countTop }))
+      const steel = sets.map((shape) => set(EDGE, shape as SteelShape))
+      return only('edge:E2', steel, { edges: [deep, ...EDGES.slice(1)] })
+    }
+    expect(lap(876, 1)).toMatchObject({ status: 'within', demand: 876 })
+    expect(lap(875, 1).status).toBe('over')
+    expect(lap(875, 1).notes).toContain('Poor bond is taken: these bars lie high in a deep section.')
+    expect(lap(614, 0)).toMatchObject({ status: 'within', demand: 614 })
+    expect(lap(613, 0).status).toBe('over')
+    expect(lap(614, 0).notes.join()).not.toContain('Poor bond')
   })
 
   test('sets that do not overlap, or lie at another depth, are not lapped', () => {
