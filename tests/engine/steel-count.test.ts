@@ -1,6 +1,6 @@
 import type { LinksShape, SpiralShape, SteelShape, TransverseBarsShape } from '@wedgeline/engine'
 import { describe, expect, test } from 'vitest'
-import { countSteel, type CountInput } from '../../packages/engine/src/steel/count'
+import { countSteel, setsAcross, type CountInput } from '../../packages/engine/src/steel/count'
 import type { CountPlace } from '../../packages/engine/src/steel/crossings'
 import { evaluated } from './step-text'
 
@@ -61,8 +61,8 @@ const ANCHORAGE = {
 } as const
 
 function count(shapes: readonly SteelShape[], change: Partial<CountInput> = {}) {
-  const window = { from: 44, to: 220 }
-  return countSteel({ plane: 'thickness', window, place: PLACE, shapes, anchorageOf: () => ANCHORAGE, ...change })
+  const asked = { plane: 'thickness', window: { from: 44, to: 220 }, place: PLACE, ...change } as const
+  return countSteel({ anchorageOf: () => ANCHORAGE, ...asked, sets: setsAcross({ ...asked, shapes }) })
 }
 const inPlan = (shapes: readonly SteelShape[], place: Partial<CountPlace> = {}) =>
   count(shapes, { plane: 'plan', window: { from: 350, to: 1750 }, place: { ...PLACE, ...place } })

@@ -3,9 +3,9 @@
 import type { AnchorSite } from '../anchor-site'
 import type { Basis, TieRule, Window } from '../bases/basis'
 import { stageForce } from '../force'
-import type { Stage, SteelShape } from '../model'
+import type { Stage } from '../model'
 import type { Compared } from '../result'
-import { countSteel, type Counted } from '../steel/count'
+import { countSteel, setsAcross, type Counted, type SetAcross } from '../steel/count'
 import { countPlaceOf } from '../steel/count-place'
 import type { CountPlace, Plane } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
@@ -88,10 +88,9 @@ const restsOn = (basis: Basis, readings: readonly string[]): readonly string[] =
 const titleOf = ({ readings }: Basis, readingId: string): string =>
   readings.find(({ id }) => id === readingId)?.title ?? readingId
 
-/** Steel behind the members, each set with its distance from the plane; bars that run along the edge once. */
+/** Steel behind the members, each set at its distance from the plane; bars that run along the edge once. */
 interface Behind {
-  readonly shapes: readonly SteelShape[]
-  readonly asides: readonly number[]
+  readonly sets: readonly SetAcross[]
   readonly place: CountPlace
   readonly notes: readonly string[]
 }
@@ -106,10 +105,15 @@ function behindOf({ context, members, plane, centre }: Asked): Behind {
     return [{ shapes: own, aside, notes: steel.notes }]
   })
   const setBack = rest.reduce((most, { anchor }) => Math.max(most, anchor.setBack), lead.anchor.setBack)
+  const place = { ...countPlaceOf(lead), chainage: centre.chainage, setBack }
   return {
-    shapes: sets.flatMap(({ shapes }) => shapes),
-    asides: sets.flatMap(({ shapes, aside }) => shapes.map(() => aside)),
-    place: { ...countPlaceOf(lead), chainage: centre.chainage, setBack },
+    sets: setsAcross({
+      plane,
+      place,
+      shapes: sets.flatMap(({ shapes }) => shapes),
+      asides: sets.flatMap(({ shapes, aside }) => shapes.map(() => aside)),
+    }),
+    place,
     notes: [...new Set(sets.flatMap(({ notes }) => notes))],
   }
 }
@@ -130,8 +134,7 @@ function answerOf(of: {
     plane: asked.plane,
     window,
     place: behind.place,
-    shapes: behind.shapes,
-    asides: behind.asides,
+    sets: behind.sets,
     anchorageOf: ({ diameter, bond }) =>
       basis.anchorage({
         diameter,

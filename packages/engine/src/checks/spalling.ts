@@ -12,7 +12,7 @@ import { faceForce, ROW, tensionMidway } from '../row-series'
 import { stageForce } from '../force'
 import type { Step } from '../step'
 import { sectionBehind } from '../section'
-import { countSteel, type Counted } from '../steel/count'
+import { countSteel, setsAcross, type Counted, type SetAcross } from '../steel/count'
 import type { CountPlace } from '../steel/crossings'
 import { steelOfAnchor } from '../steel/steel-of-anchor'
 import { byRatio, refusal, type CheckContext, type Head } from './outcome'
@@ -224,7 +224,8 @@ interface Answer {
 
 /** The stage whose steel falls shortest; of equal ones the last. */
 function faceCheck(context: CheckContext, head: Head, input: FaceInput): Compared {
-  const answers = input.pour.stages.map((stage) => answerAt(context, input, stage))
+  const sets = setsAcross({ plane: 'plan', place: input.place, shapes: input.shapes })
+  const answers = input.pour.stages.map((stage) => answerAt(context, { ...input, sets }, stage))
   const ratio = ({ rule, counted }: Answer) => (rule.area === 0 ? 0 : rule.area / counted.area)
   const worst = answers.reduce((one, other) => (ratio(other) >= ratio(one) ? other : one))
   const { basis } = context
@@ -250,8 +251,12 @@ function faceCheck(context: CheckContext, head: Head, input: FaceInput): Compare
   )
 }
 
-function answerAt({ basis }: CheckContext, input: FaceInput, stage: Stage): Answer {
-  const { place, reach, shapes } = input
+function answerAt(
+  { basis }: CheckContext,
+  input: FaceInput & { readonly sets: readonly SetAcross[] },
+  stage: Stage,
+): Answer {
+  const { place, reach, sets } = input
   const force = stageForce(input.force.at(-1)?.value ?? 0, stage)
   const { T, P, steps } = input.forceAt(force)
   const rule = basis.faceSteel({ T, P })
@@ -259,7 +264,7 @@ function answerAt({ basis }: CheckContext, input: FaceInput, stage: Stage): Answ
     plane: 'plan',
     window: { from: Math.max(-reach, Math.min(0, place.cover - place.setBack)), to: reach },
     place,
-    shapes,
+    sets,
     anchorageOf: ({ diameter, bond }) =>
       basis.anchorage({
         diameter,

@@ -1,7 +1,7 @@
 import type { Anchorage, Window } from '../bases/basis'
 import type { MatLayer, SteelShape } from '../model'
 import { step, type Clause, type Step } from '../step'
-import { crossingsOf, type CountPlace, type Crossings, type Plane } from './crossings'
+import { crossingsOf, type CountPlace, type Crossings, type NoCrossing, type Plane } from './crossings'
 
 /** Counting legs is statics; the window comes from the basis. */
 const COUNTING: Clause = { source: 'Statics', section: 'legs that cross the plane inside its window', tag: 'derived' }
@@ -10,11 +10,26 @@ export interface CountInput {
   readonly plane: Plane
   readonly window: Window
   readonly place: CountPlace
-  readonly shapes: readonly SteelShape[]
-  /** From the plane to the anchor that each shape stands behind, in the same order; without it 0. */
-  readonly asides?: readonly number[]
+  /** Of `setsAcross` for the same plane and place: the same for every window. */
+  readonly sets: readonly SetAcross[]
   /** Anchorage that the straight bars of a set need past the line. */
   readonly anchorageOf: (set: Crossings) => Anchorage
+}
+
+export type SetAcross = Crossings | NoCrossing
+
+/** @param asides from the plane to the anchor that each shape stands behind, in the same order; without it 0. */
+export function setsAcross(of: {
+  readonly plane: Plane
+  readonly place: CountPlace
+  readonly shapes: readonly SteelShape[]
+  readonly asides?: readonly number[]
+}): readonly SetAcross[] {
+  const { plane, place, shapes, asides } = of
+  return shapes.map((shape, at) => {
+    const aside = asides?.[at] ?? 0
+    return crossingsOf(shape, plane, aside === (place.aside ?? 0) ? place : { ...place, aside })
+  })
 }
 
 export interface Counted {
@@ -45,7 +60,7 @@ const NOTHING = { line: null, beforeWindow: 0, isCarriedToFace: false } as const
  * as far as its length past the anchor's line develops it.
  */
 export function countSteel(input: CountInput): Counted {
-  const sets = input.shapes.map((shape, at) => countSet(shape, input, at))
+  const sets = input.sets.map((set, at) => countSet(set, input, at))
   const mats = input.plane === 'plan' ? input.place.mats.filter(({ spareShare }) => spareShare > 0) : []
   const all = [...sets, ...mats.map((mat, at) => countMat(mat, input, sets.length + at))]
   const lines = all.flatMap(({ line }) => (line ? [line] : []))
@@ -73,34 +88,41 @@ const round = (mm: number): number => Math.round(mm)
 const barArea = (diameter: number): number => (Math.PI * diameter ** 2) / 4
 const planeName = (plane: Plane): string => (plane === 'plan' ? 'in plan' : 'in the thickness')
 
-function countSet(shape: SteelShape, input: CountInput, at: number): SetCount {
-  const set = crossingsOf(shape, input.plane, { ...input.place, aside: input.asides?.[at] ?? 0 })
+function countSet(set: SetAcross, input: CountInput, at: number): SetCount {
   if ('reason' in set) return { ...NOTHING, notes: set.reason === null ? [] : [set.reason] }
   const { window } = input
-  const inside = set.positions.filter((x) => x >= window.from && x <= window.to)
-  const before = set.positions.filter((x) => x >= 0 && x < window.from)
+  let [inside, before] = [0, 0]
+  for (const x of set.positions) {
+    if (x >= window.from && x <= window.to) inside += 1
+    else if (x >= 0 && x < window.from) before += 1
+  }
   const { share, note } = developedShare(set, input)
-  const notes = [...set.notes, ...outsideNote(set, inside.length, input), ...(note === null ? [] : [note])]
+  const notes = [...set.notes, ...outsideNote(set, inside, input), ...(note === null ? [] : [note])]
   const each = set.legs * barArea(set.diameter)
-  const beforeWindow = before.length * each * share
-  if (inside.length === 0 || share === 0) return { ...NOTHING, beforeWindow, notes }
+  const beforeWindow = before * each * share
+  if (inside === 0 || share === 0) return { ...NOTHING, beforeWindow, notes }
   const line = step(
     {
       symbol: `As${at + 1}`,
-      meaning: `${inside.length} of ${set.positions.length} ${set.noun[1]} of ${set.diameter}, ${set.legs} legs each`,
+      meaning: `${inside} of ${set.positions.length} ${set.noun[1]} of ${set.diameter}, ${set.legs} legs each`,
       formula: 'n * legs * A * share',
       unit: 'mm2',
       clause: COUNTING,
     },
-    { n: inside.length, legs: set.legs, A: barArea(set.diameter), share },
+    { n: inside, legs: set.legs, A: barArea(set.diameter), share },
     (v) => v.n * v.legs * v.A * v.share,
   )
   return { line, beforeWindow, isCarriedToFace: startsAtFace(set.positions), notes }
 }
 
 function startsAtFace(positions: readonly number[]): boolean {
-  const [first, second] = [...new Set(positions.filter((x) => x >= 0))].sort((one, other) => one - other)
-  return first !== undefined && second !== undefined && first <= second - first
+  let [first, second] = [Infinity, Infinity]
+  for (const x of positions) {
+    if (x < 0 || x === first || x === second) continue
+    if (x < first) [first, second] = [x, first]
+    else if (x < second) second = x
+  }
+  return second < Infinity && first <= second - first
 }
 
 /** A straight bar counts in proportion to its length past the line, and not at all below the least length. */

@@ -54,7 +54,7 @@ export interface Crossings {
 }
 
 /** The set does not cross the plane: why, in a sentence; null where it stands elsewhere and nobody would ask. */
-interface NoCrossing {
+export interface NoCrossing {
   readonly reason: string | null
 }
 
