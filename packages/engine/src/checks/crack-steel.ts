@@ -1,6 +1,6 @@
 /** Crack steel where there is no precompression: what the job's choice asks for, and what bars across it give. */
 
-import type { AnchorageInput, Basis, CrackChoice, CrackRule } from '../bases/basis'
+import type { AnchorageInput, Basis, CrackChoice, CrackInput, CrackRule } from '../bases/basis'
 import type { EdgeFrame } from '../frame'
 import { alongAzimuth, dot } from '../geometry'
 import type { JobSettings, MatLayer, Pour } from '../model'
@@ -39,8 +39,19 @@ export interface CrackDemand {
 
 /** By the choice that the job accepted, the strongest of several; otherwise by the proposed one, with all side by side. */
 export function crackDemand({ index, basis }: CheckContext, place: CrackPlace): CrackDemand {
-  const { settings } = index.layout.job
-  const input = inputOf(settings, place)
+  const input = inputOf(index.layout.job.settings, place)
+  const made = demandsOf.get(basis) ?? new Map<string, CrackDemand>()
+  demandsOf.set(basis, made)
+  const key = Object.values(input).join()
+  const demand = made.get(key) ?? demandFor(basis, input)
+  made.set(key, demand)
+  return demand
+}
+
+/** Most gaps of a job ask for the same: made once for each basis and input. */
+const demandsOf = new WeakMap<Basis, Map<string, CrackDemand>>()
+
+function demandFor(basis: Basis, input: CrackInput): CrackDemand {
   const chosen = basis.crackChoices.findLast(({ readingId }) => basis.isAccepted(readingId))
   const choice = chosen ?? proposedChoice(basis)
   const rule = choice.steel(input)
@@ -61,7 +72,7 @@ export function crackDemand({ index, basis }: CheckContext, place: CrackPlace): 
   }
 }
 
-function inputOf(settings: JobSettings, { pour, thickness, cover, diameter }: CrackPlace) {
+function inputOf(settings: JobSettings, { pour, thickness, cover, diameter }: CrackPlace): CrackInput {
   return {
     thickness,
     cover,
