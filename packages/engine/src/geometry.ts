@@ -60,9 +60,17 @@ export function sidesOf(outline: readonly Point[]): readonly (readonly [Point, P
 
 const sidesMade = new WeakMap<readonly Point[], readonly (readonly [Point, Point])[]>()
 
-/** Area in mm2 by the shoelace rule: positive where the corners run counter-clockwise. */
+/**
+ * Area in mm2 by the shoelace rule: positive where the corners run counter-clockwise. Its sides are not kept: many
+ * outlines are asked for their area and nothing else.
+ */
 export function signedArea(outline: readonly Point[]): number {
-  return sidesOf(outline).reduce((sum, [a, b]) => sum + cross(a, b), 0) / 2
+  let sum = 0
+  for (let i = 0; i < outline.length; i++) {
+    const [a, b] = [outline[i], outline[(i + 1) % outline.length]]
+    if (a && b) sum += cross(a, b)
+  }
+  return sum / 2
 }
 
 /** The point of the segment from `a` to `b` nearest to `point`. */

@@ -134,14 +134,12 @@ function splay(
   const { diameter } = found(index.strandTypes, tendon.strandTypeId, 'strand type')
   const length = hardware.splayLength ?? hardware.straightBehindMin
   const last = Math.max(1, tendon.strands - 1)
+  const named = { what: 'duct' as const, ...nameOf(index, anchor, 'strand') }
   return Array.from({ length: tendon.strands }, (_, i) => {
     const share = tendon.strands > 1 ? i / last - 0.5 : 0
     const across = (width: number) => share * (width - diameter)
     const [a, b] = [place(across(hardware.plate.width), 0, 0), place(across(hardware.duct.width), length, 0)]
-    return roundBody(
-      { a, b, from: diameter / 2, to: diameter / 2 },
-      { what: 'duct', ...nameOf(index, anchor, 'strand') },
-    )
+    return roundBody({ a, b, from: diameter / 2, to: diameter / 2 }, named)
   })
 }
 

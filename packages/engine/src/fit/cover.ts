@@ -90,6 +90,8 @@ function sectionOf({ edgeFrame }: Member, pour: Pour, point: Point): Section {
 const insideLinks = ({ bar }: FitBar, { linkDiameter }: Section): number =>
   bar.kind === 'links' || bar.kind === 'hairpins' ? 0 : linkDiameter
 
+const UP: Vec = { x: 0, y: 0, z: 1 }
+
 // Top and soffit ----------------------------------------------------------------------------------------------------
 
 function toTopAndSoffit({ member, pour, bar, straights, needs }: Asked): Cover[] {
@@ -97,12 +99,13 @@ function toTopAndSoffit({ member, pour, bar, straights, needs }: Asked): Cover[]
   let [toTop, toSoffit] = [Infinity, Infinity]
   const isInOne = !isCut({ member, pour, bar })
   for (const straight of straights) {
-    const parts = isInOne ? [{ ...straight, section: needs }] : inOneSection({ member, pour, bar }, straight)
-    for (const { a, b, section } of parts) {
-      const thick = halfAcross(straight, { x: 0, y: 0, z: 1 }, bar.bar)
+    const thick = halfAcross(straight, UP, bar.bar)
+    const within = ({ a, b }: Straight, section: Section) => {
       toTop = Math.min(toTop, section.top - Math.max(a.z, b.z) - thick)
       toSoffit = Math.min(toSoffit, Math.min(a.z, b.z) - thick - section.soffit)
     }
+    if (isInOne) within(straight, needs)
+    else for (const part of inOneSection({ member, pour, bar }, straight)) within(part, part.section)
   }
   return [
     { bar, face: 'top', measured: toTop, need: needs.coverTop + links },

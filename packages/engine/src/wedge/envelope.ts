@@ -38,12 +38,16 @@ export function cutDown<Source>(line: readonly Piece<Source>[], bound: Bound<Sou
   const [left, right] = bound.a.chainage <= bound.b.chainage ? [bound.a, bound.b] : [bound.b, bound.a]
   if (right.chainage - left.chainage <= ROUNDING) return line
   const nearest = Math.min(left.depth, right.depth)
-  const isClear = line.every(
-    ({ from, to, depthFrom, depthTo }) =>
-      to <= left.chainage || from >= right.chainage || Math.max(depthFrom, depthTo) <= nearest,
-  )
-  if (isClear) return line
-  return line.flatMap((piece) => cutPiece(piece, { left, right, source: bound.source }))
+  const isMet = (piece: Piece<Source>) =>
+    piece.to > left.chainage && piece.from < right.chainage && Math.max(piece.depthFrom, piece.depthTo) > nearest
+  if (!line.some(isMet)) return line
+  const rising = { left, right, source: bound.source }
+  const cut: Piece<Source>[] = []
+  for (const piece of line) {
+    if (isMet(piece)) cut.push(...cutPiece(piece, rising))
+    else cut.push(piece)
+  }
+  return cut
 }
 
 interface Rising<Source> {
