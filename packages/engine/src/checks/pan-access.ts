@@ -94,7 +94,11 @@ function withoutJack(
   const [shortest] = [...(fitting.length > 0 ? fitting : all)].sort((a, b) => jackLength(a).value - jackLength(b).value)
   if (!shortest) {
     const message = `${place.pan.mark} has no jack and the job holds none. Add the jack that stresses here.`
-    return refusal(headOf(zoneId, 'Room along the jack', GEOMETRY), { code: 'MISSING_INPUT', field: 'pan.jackId', message })
+    return refusal(headOf(zoneId, 'Room along the jack', GEOMETRY), {
+      code: 'MISSING_INPUT',
+      field: 'pan.jackId',
+      message,
+    })
   }
   const [room] = jackNeeds(index, { place, at, jack: shortest })
   const { demand, limit, steps } = room ?? { demand: 0, limit: jackLength(shortest).value, steps: [] }
