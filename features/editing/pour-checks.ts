@@ -33,15 +33,17 @@ export function usePourChecks(pourId: string): PourChecks {
   const [answer, setAnswer] = useState<Answer | null>(null)
   useEffect(() => {
     let isLatest = true
-    pageEngine().check(toEngine(layout), pourId).then(
-      (result) => {
-        if (!isLatest || !result) return
-        setAnswer({ layout, pourId, result: isUnfiled ? onProposedReadings(result) : result, failure: null })
-      },
-      (error: unknown) => {
-        if (isLatest) setAnswer({ layout, pourId, result: null, failure: String(error) })
-      },
-    )
+    pageEngine()
+      .check(toEngine(layout), pourId)
+      .then(
+        (result) => {
+          if (!isLatest || !result) return
+          setAnswer({ layout, pourId, result: isUnfiled ? onProposedReadings(result) : result, failure: null })
+        },
+        (error: unknown) => {
+          if (isLatest) setAnswer({ layout, pourId, result: null, failure: String(error) })
+        },
+      )
     return () => {
       isLatest = false
     }
