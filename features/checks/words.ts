@@ -25,7 +25,7 @@ export function shownQuantity(value: number, unit: string): string {
   return quantityText(value, unit)
 }
 
-export const unitText = (unit: string): string => unit.replace('mm2', 'mm²').replace('deg', '°')
+export const unitText = (unit: string): string => unit.replaceAll('mm2', 'mm²').replace('deg', '°')
 
 const trimmed = (figures: string): string => (figures.includes('.') ? figures.replace(/\.?0+$/, '') : figures)
 

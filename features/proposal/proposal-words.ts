@@ -1,5 +1,6 @@
 import type { ProposedZone, Steel, SteelShape, WorstCheck } from '@wedgeline/engine'
 import { STEEL_NAMES } from '@wedgeline/engine/result'
+import { unitText } from '../checks/words'
 import { steelWords } from '../edge/steel-words'
 
 export const kg = (mass: number): string => `${mass.toFixed(1)} kg`
@@ -13,7 +14,8 @@ export function oldWords({ shape, source, isLocked }: Steel): string {
   return `${setWords(shape)}${kept}`
 }
 
-export const worstLine = (worst: WorstCheck | null): string => (worst ? `${worst.name}, ${worst.by}` : 'no check')
+export const worstLine = (worst: WorstCheck | null): string =>
+  worst ? `${worst.name}, ${unitText(worst.by)}` : 'no check'
 
 /** What is said of a zone with all its steel: what stays, goes and comes, and the masses. */
 export function changeWords({ old, removes, adds, massOld, massNew }: ProposedZone) {
