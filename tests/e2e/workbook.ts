@@ -12,15 +12,16 @@ export async function readWorkbook(path: string): Promise<Workbook> {
   return new Map(
     book.worksheets.map((sheet) => {
       const cells = new Map<string, Value>()
-      sheet.eachRow((row, at) => row.eachCell((cell, column) => cells.set(`${at}:${column}`, valueOf(cell.value))))
+      sheet.eachRow((row, at) => row.eachCell((cell, column) => cells.set(`${at}:${column}`, valueOf(cell))))
       return [sheet.name, cells] as const
     }),
   )
 }
 
-function valueOf(value: ExcelJS.CellValue): Value {
+/** The cell's model, since the reader leaves a result of 0 out of the value that it gives. */
+function valueOf({ value, model }: ExcelJS.Cell): Value {
   if (typeof value === 'string' || typeof value === 'number' || value === null) return value
-  if (typeof value === 'object' && 'result' in value && typeof value.result === 'number') return value.result
+  if (typeof model.result === 'number') return model.result
   throw new Error(`A cell holds ${JSON.stringify(value)}, which is neither a text nor a number.`)
 }
 
