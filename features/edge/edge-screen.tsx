@@ -18,6 +18,7 @@ import { useCompanyRoles } from '../company/company-roles'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks } from '../editing/pour-checks'
 import { SaveState } from '../editing/save-state'
+import { UndoButton } from '../editing/undo-button'
 import { ProposalDialog } from '../proposal/proposal-dialog'
 import { UnfiledNotice } from '../quick-edge/unfiled-notice'
 import { insertAnchors, removeAnchors } from './anchor-commands'
@@ -190,20 +191,14 @@ function Actions(props: {
   readonly onPropose: () => void
   readonly onSelect: (zoneId: string) => void
 }) {
-  const { canEdit, canUndo, undo, undoLabel } = useJobDraft()
+  const { canEdit } = useJobDraft()
   const isWide = useWide()
   return (
     <>
       <SaveState />
       {canEdit ? (
         <>
-          <Button
-            label={isWide && undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
-            icon={<Icon name="undo" />}
-            iconOnly={!isWide}
-            disabled={!canUndo}
-            onPress={undo}
-          />
+          <UndoButton />
           <Button
             label="Paste anchors"
             icon={<Icon name="paste" />}

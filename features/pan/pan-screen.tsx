@@ -3,8 +3,6 @@ import type { Check, LayoutIndex, ZoneResult } from '@wedgeline/engine'
 import { gridReference, layoutIndex, slabBeyond } from '@wedgeline/engine/geometry'
 import { useMemo, type ReactNode } from 'react'
 import { ScrollView, StyleSheet, View } from 'react-native'
-import { Button } from '@/components/ui/button'
-import { Icon } from '@/components/ui/icon'
 import { Screen } from '@/components/ui/screen'
 import { Failed, Waiting } from '@/components/ui/states'
 import { Text } from '@/components/ui/text'
@@ -17,6 +15,7 @@ import { ZoneChecks } from '../edge/sheet/zone-checks'
 import { useJobDraft } from '../editing/job-draft'
 import { usePourChecks, type PourChecks } from '../editing/pour-checks'
 import { SaveState } from '../editing/save-state'
+import { UndoButton } from '../editing/undo-button'
 import { PanFields } from './pan-fields'
 import { PanPlan } from './pan-plan'
 import { PanSection } from './pan-section'
@@ -112,20 +111,11 @@ function Summary({ results, isStale }: { readonly results: readonly ZoneResult[]
 }
 
 function Actions() {
-  const { canEdit, canUndo, undo, undoLabel } = useJobDraft()
-  const isWide = useWide()
+  const { canEdit } = useJobDraft()
   return (
     <>
       <SaveState />
-      {canEdit ? (
-        <Button
-          label={isWide && undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
-          icon={<Icon name="undo" />}
-          iconOnly={!isWide}
-          disabled={!canUndo}
-          onPress={undo}
-        />
-      ) : null}
+      {canEdit ? <UndoButton /> : null}
     </>
   )
 }

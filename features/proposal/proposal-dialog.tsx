@@ -100,7 +100,7 @@ function Compared({ proposal, isStale, left, onLeave, onMarks }: ComparedProps) 
       <View role="status">
         <Text kind="strong">
           {zones.length === 0
-            ? 'Nothing to change: every need of steel here is met.'
+            ? 'Nothing to put in: no check here that bars answer is over its limit. What is not covered or needs judgement is for an engineer.'
             : `${offered.length} ${offered.length === 1 ? 'place' : 'places'} with new bars, ${kg(mass)} and ${marks} new ${marks === 1 ? 'mark' : 'marks'}.`}
         </Text>
         {isStale ? <Text tone="soft">working out …</Text> : null}

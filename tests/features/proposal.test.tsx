@@ -130,7 +130,7 @@ describe('Proposed bars', () => {
     failing.unmount()
     state.propose = () => Promise.resolve({ ...proposal, zones: [], curve: [] })
     show()
-    expect(await screen.findByText(/Nothing to change/)).toBeTruthy()
+    expect(await screen.findByText(/Nothing to put in: no check here that bars answer is over its limit/)).toBeTruthy()
   })
 
   test('can be used without sight and without a mouse', async () => {

@@ -86,7 +86,7 @@ export function AnchorDrawing({ index, anchorId, bars }: AnchorDrawingProps) {
             {own.map((bar, i) => (
               <BarOnFace key={i} bar={bar} x={face} y={y} scale={scale} />
             ))}
-            {own.map((bar, i) => (
+            {own.filter(isInSection(sectionMm)).map((bar, i) => (
               <BarInSection key={i} bar={bar} x={depth} y={y} scale={scale} chainage={anchor.chainage} />
             ))}
           </G>
@@ -164,6 +164,12 @@ interface Drawn {
   readonly y: (mm: number) => number
   readonly scale: number
 }
+
+/** Bars that lie wholly behind the cut are not in the picture. */
+const isInSection =
+  (sectionMm: number) =>
+  ({ path }: PlacedBar) =>
+    path.some((point) => point.depth <= sectionMm)
 
 const widthOf = (bar: PlacedBar, scale: number) => Math.max(1.4, bar.diameter * scale)
 
